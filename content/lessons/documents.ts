@@ -1,3 +1,4 @@
+/// <reference types="mdx" />
 import type { MDXContent } from 'mdx/types';
 
 type Document = () => Promise<{ default: MDXContent }>;
