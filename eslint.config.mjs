@@ -12,7 +12,7 @@ const layers = {
   'lib/geometry': ['lib/numeric'],
   'lib/kinematics': ['lib/geometry', 'lib/numeric'],
   'lib/clock.ts': [],
-  'lib/scene': ['lib/kinematics', 'lib/geometry'],
+  'lib/scene': ['lib/kinematics', 'lib/geometry', 'lib/quantities'],
   'lib/quantities': ['lib/numeric'],
   'lib/marking': ['lib/quantities', 'lib/numeric'],
   'lib/retention': [],
