@@ -87,10 +87,12 @@ const config = [
   {
     ignores: [
       '.next/**',
+      '.next-test/**',
       '.hornbeam/**',
       '.hornbeam-test/**',
       'coverage/**',
       'next-env.d.ts',
+      '**/*.d.mts',
       'node_modules/**',
     ],
   },

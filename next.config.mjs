@@ -3,6 +3,7 @@ import createMDX from '@next/mdx';
 
 /** @type {import('next').NextConfig} */
 const config = {
+  distDir: process.env.HORNBEAM_DIST_DIR ?? '.next',
   pageExtensions: ['ts', 'tsx', 'mdx'],
   poweredByHeader: false,
   reactStrictMode: true,

@@ -1,0 +1,4 @@
+export function startObjectStore(
+  folder: string,
+  options?: { wantedPort?: number },
+): Promise<{ url: string; stop: () => Promise<unknown> }>;

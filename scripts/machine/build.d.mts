@@ -1,0 +1,5 @@
+export function sourcesFingerprint(): string;
+export function buildIfChanged(options?: {
+  env?: Record<string, string>;
+  distDir?: string;
+}): boolean;
