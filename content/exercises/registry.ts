@@ -1,0 +1,106 @@
+import 'server-only';
+import type { ExerciseDefinition } from '@/lib/marking/definition';
+
+/** What an exercise shows that a learner can do; the unit of progress. */
+export interface Skill {
+  readonly id: string;
+  readonly name: string;
+  readonly lesson: string;
+}
+
+/** What a lesson holds, in the order in which it asks. */
+export interface LessonEntry {
+  readonly id: string;
+  readonly unit: string;
+  readonly exercises: readonly string[];
+  readonly skills: readonly string[];
+  /** The exercise of kind prediction that opens the lesson's bench. */
+  readonly prediction: string;
+}
+
+const definitions: readonly ExerciseDefinition[] = [];
+
+/** Every exercise by its id. Definitions, answers and slips stay on the server. */
+export const exercises: ReadonlyMap<string, ExerciseDefinition> = new Map(
+  definitions.map((definition) => [definition.id, definition]),
+);
+
+const skillNames: Readonly<Record<string, readonly (readonly [string, string])[]>> = {
+  'train-of-toothed-wheels': [
+    ['train.ratio', 'Speed ratio'],
+    ['train.direction', 'Direction of turn'],
+    ['train.idler', 'Wheels between'],
+    ['train.compound', 'Pairs on one arbor'],
+    ['train.centres', 'Centre distances'],
+  ],
+  'trammel-and-oval': [
+    ['trammel.semi-axes', 'Halves from the pins'],
+    ['trammel.pins-from-size', 'Pins from the size'],
+    ['trammel.slot-length', 'Grooves and bar'],
+    ['oval.size', 'Size of an oval'],
+    ['oval.perimeter', 'Round the edge'],
+  ],
+  pantograph: [
+    ['pantograph.scale', 'Scale of the copy'],
+    ['pantograph.holes', 'Where the holes go'],
+    ['pantograph.reduction', 'Smaller, larger, turned'],
+    ['pantograph.reach', 'Reach and faults'],
+  ],
+};
+
+/** Every skill by its id. */
+export const skills: ReadonlyMap<string, Skill> = new Map(
+  Object.entries(skillNames).flatMap(([lesson, named]) =>
+    named.map(([id, name]) => [id, { id, name, lesson }]),
+  ),
+);
+
+/** The lessons that ask something, with their exercises and skills. */
+export const lessons: readonly LessonEntry[] = [
+  {
+    id: 'train-of-toothed-wheels',
+    unit: 'toothed-wheels',
+    prediction: 'middle-wheel',
+    exercises: [
+      'lantern-wheel',
+      'row-of-wheels',
+      'turns-through-pairs',
+      'wheel-that-reaches',
+      'which-train-for-the-lantern',
+      'join-the-arbors',
+    ],
+    skills: skillsOf('train-of-toothed-wheels'),
+  },
+  {
+    id: 'trammel-and-oval',
+    unit: 'drawing-and-copying',
+    prediction: 'move-the-pen-out',
+    exercises: [
+      'oval-from-pins',
+      'pins-for-an-oval',
+      'grooves-and-bar',
+      'edging-strip',
+      'where-the-pen-stands',
+      'set-the-pins',
+    ],
+    skills: skillsOf('trammel-and-oval'),
+  },
+  {
+    id: 'pantograph',
+    unit: 'drawing-and-copying',
+    prediction: 'bar-of-three',
+    exercises: [
+      'how-large-the-copy',
+      'holes-for-a-scale',
+      'reach-and-tremor',
+      'which-copies-true',
+      'copy-at-three-to-two',
+      'sign-for-the-board',
+    ],
+    skills: skillsOf('pantograph'),
+  },
+];
+
+function skillsOf(lesson: string): string[] {
+  return (skillNames[lesson] ?? []).map(([id]) => id);
+}
