@@ -1,0 +1,29 @@
+import { createPeople } from '@/migrations/20261201T0901-create-people';
+import { createSessions } from '@/migrations/20261201T0902-create-sessions';
+import { createOneTimeLinks } from '@/migrations/20261201T0903-create-one-time-links';
+import { createClasses } from '@/migrations/20261201T0904-create-classes';
+import { createRounds } from '@/migrations/20261201T0905-create-rounds';
+import { createAttempts } from '@/migrations/20261201T0906-create-attempts';
+import { createRequestKeys } from '@/migrations/20261201T0907-create-request-keys';
+import { createSkillFacts } from '@/migrations/20261201T0908-create-skill-facts';
+import { createAssignments } from '@/migrations/20261201T0909-create-assignments';
+import { createReviews } from '@/migrations/20261201T0910-create-reviews';
+import { createAuditEntries } from '@/migrations/20261201T0911-create-audit-entries';
+import { createThrottle } from '@/migrations/20261201T0912-create-throttle';
+import type { Migration } from './migration';
+
+/** Every change, in order; a name, once released, never changes. */
+export const migrations: readonly { readonly name: string; readonly migration: Migration }[] = [
+  { name: '20261201T0901-create-people', migration: createPeople },
+  { name: '20261201T0902-create-sessions', migration: createSessions },
+  { name: '20261201T0903-create-one-time-links', migration: createOneTimeLinks },
+  { name: '20261201T0904-create-classes', migration: createClasses },
+  { name: '20261201T0905-create-rounds', migration: createRounds },
+  { name: '20261201T0906-create-attempts', migration: createAttempts },
+  { name: '20261201T0907-create-request-keys', migration: createRequestKeys },
+  { name: '20261201T0908-create-skill-facts', migration: createSkillFacts },
+  { name: '20261201T0909-create-assignments', migration: createAssignments },
+  { name: '20261201T0910-create-reviews', migration: createReviews },
+  { name: '20261201T0911-create-audit-entries', migration: createAuditEntries },
+  { name: '20261201T0912-create-throttle', migration: createThrottle },
+];
