@@ -1,7 +1,11 @@
+import type { UnitSystem } from '@/lib/quantities/unit-system';
+
 /** The names under which answers of the server are kept in the page. */
 export const queryKeys = {
-  round: (exerciseId: string) => ['round', exerciseId] as const,
-  progress: () => ['progress'] as const,
+  /** A round belongs to one person, and each unit system has its own. */
+  round: (personId: string | null, exerciseId: string, units: UnitSystem) =>
+    ['round', personId, exerciseId, units] as const,
+  progress: (personId: string | null) => ['progress', personId] as const,
   classProgress: (classId: string) => ['class-progress', classId] as const,
   waiting: () => ['waiting-answers'] as const,
 };

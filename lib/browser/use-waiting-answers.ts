@@ -1,78 +1,63 @@
 'use client';
 
-import { useQuery, useQueryClient } from '@tanstack/react-query';
+import { useQuery, useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { useCallback, useEffect } from 'react';
+import type { AttemptReply } from '@/lib/schemas/round';
 import { sendAttempt } from './exercises';
+import { rememberPegs } from './use-pegs';
 import { queryKeys } from './query-keys';
-import {
-  discardAnswer,
-  listWaiting,
-  sendWaiting,
-  type Sent,
-  type WaitingAnswer,
-} from './waiting-answers';
+import { listWaiting, sendWaiting, type Sent, type WaitingAnswer } from './waiting-answers';
 
-/** The answers that wait on this device, seen by one person. */
-export interface Waiting {
-  readonly mine: readonly WaitingAnswer[];
-  /** How many answers of other people wait here; only that they do is shown. */
-  readonly others: number;
-  /** Tries to deliver mine now. */
-  readonly sendNow: () => Promise<readonly Sent[]>;
-  readonly discard: (key: string) => Promise<void>;
-  readonly refresh: () => Promise<void>;
-}
+const none: readonly WaitingAnswer[] = [];
 
-/**
- * Watches the answers that wait on this device and delivers this person's own: when the page opens
- * and whenever the network comes back.
- * @param personId who is signed in, or null: then nothing is ever sent.
- */
-export function useWaitingAnswers(
-  personId: string | null,
-  onSent?: (sent: readonly Sent[]) => void,
-): Waiting {
-  const client = useQueryClient();
-  const { data = [] } = useQuery({
+/** The answers that wait on this device, whoever gave them. */
+export function useWaitingAnswers(): readonly WaitingAnswer[] {
+  const { data } = useQuery({
     queryKey: queryKeys.waiting(),
     queryFn: listWaiting,
     networkMode: 'always',
     staleTime: 0,
+    retry: false,
   });
+  return data ?? none;
+}
 
-  const refresh = useCallback(
-    () => client.invalidateQueries({ queryKey: queryKeys.waiting() }),
-    [client],
-  );
-  const sendNow = useCallback(async () => {
+/** Makes every view of the waiting answers look again. */
+export function refreshWaiting(client: QueryClient): Promise<void> {
+  return client.invalidateQueries({ queryKey: queryKeys.waiting() });
+}
+
+/** Puts what came back for an attempt where the page's exercises and pegs read it. */
+export function rememberReply(client: QueryClient, personId: string, reply: AttemptReply): void {
+  const { exerciseId, units } = reply.round;
+  client.setQueryData(queryKeys.round(personId, exerciseId, units), reply.round);
+  rememberPegs(client, personId, reply.pegs);
+}
+
+/**
+ * Delivers this person's waiting answers: when the page opens and whenever the network comes back.
+ * @param personId who is signed in, or null: then nothing is sent.
+ * @returns a function that tries at once.
+ */
+export function useDelivery(personId: string | null): () => Promise<readonly Sent[]> {
+  const client = useQueryClient();
+  const deliver = useCallback(async () => {
     if (personId === null) return [];
     const sent = await sendWaiting(personId, sendAttempt);
-    if (sent.length > 0) {
-      await refresh();
-      onSent?.(sent);
+    for (const one of sent) {
+      if (one.outcome === 'marked') rememberReply(client, personId, one.reply);
     }
+    if (sent.length > 0) await refreshWaiting(client);
     return sent;
-  }, [personId, refresh, onSent]);
-  const discard = useCallback(
-    async (key: string) => {
-      await discardAnswer(key);
-      await refresh();
-    },
-    [refresh],
-  );
+  }, [client, personId]);
 
   useEffect(() => {
-    const deliver = () => void sendNow();
-    deliver();
-    window.addEventListener('online', deliver);
-    return () => window.removeEventListener('online', deliver);
-  }, [sendNow]);
+    // Where the browser keeps nothing (a private window), nothing waits either.
+    const attempt = () => void deliver().catch(() => undefined);
+    attempt();
+    window.addEventListener('online', attempt);
+    return () => window.removeEventListener('online', attempt);
+  }, [deliver]);
 
-  return {
-    mine: data.filter((answer) => answer.personId === personId),
-    others: data.filter((answer) => answer.personId !== personId).length,
-    sendNow,
-    discard,
-    refresh,
-  };
+  return deliver;
 }
