@@ -1,5 +1,10 @@
-import type { Metadata } from 'next';
+import type { Metadata, Viewport } from 'next';
 import localFont from 'next/font/local';
+import { connection } from 'next/server';
+import { Providers } from './_components/providers';
+import { SiteFooter } from './_components/site-footer';
+import { SiteHeader } from './_components/site-header';
+import { SkipLink } from './_components/skip-link';
 import './globals.css';
 
 const besley = localFont({
@@ -35,10 +40,26 @@ export const metadata: Metadata = {
   description: 'The mechanisms that move wooden things, for people who make them.',
 };
 
-export default function RootLayout({ children }: Readonly<{ children: React.ReactNode }>) {
+export const viewport: Viewport = {
+  themeColor: [
+    { media: '(prefers-color-scheme: light)', color: '#fbfaf5' },
+    { media: '(prefers-color-scheme: dark)', color: '#161a17' },
+  ],
+};
+
+export default async function RootLayout({ children }: Readonly<{ children: React.ReactNode }>) {
+  // A nonce never reaches a page made at build time: every document is made when it is asked for.
+  await connection();
   return (
-    <html lang="en" className={`${besley.variable} ${text.variable} ${mono.variable}`}>
-      <body>{children}</body>
+    <html lang="en-GB" className={`${besley.variable} ${text.variable} ${mono.variable}`}>
+      <body>
+        <SkipLink />
+        <Providers>
+          <SiteHeader viewer={null} />
+          {children}
+          <SiteFooter />
+        </Providers>
+      </body>
     </html>
   );
 }
