@@ -1,0 +1,68 @@
+import { randomUUID } from 'node:crypto';
+import * as z from 'zod/mini';
+import { currentViewer } from '@/lib/auth/viewer';
+import type { Viewer } from '@/lib/policy/viewer';
+import { refuseForeignOrigin, refuseOtherContent } from './guard';
+import { problem } from './problem';
+
+/** The largest body that is read: answers are short. */
+const LARGEST_BODY = 64 * 1024;
+
+/** Answers a reading request for a signed-in person; surprises are logged under an id. */
+export async function handleRead(work: (viewer: Viewer) => Promise<Response>): Promise<Response> {
+  return guarded(async () => {
+    const viewer = await currentViewer();
+    return viewer === null ? problem(401, 'Sign in first.') : work(viewer);
+  });
+}
+
+/**
+ * Answers a writing request: where it comes from → who asks → what is sent (an unknown key is an
+ * error) → the work itself.
+ */
+export async function handleWrite<Schema extends z.ZodMiniType>(
+  request: Request,
+  schema: Schema,
+  work: (viewer: Viewer, body: z.output<Schema>) => Promise<Response>,
+): Promise<Response> {
+  return guarded(async () => {
+    const refused = refuseForeignOrigin(request) ?? refuseOtherContent(request);
+    if (refused) return refused;
+    const viewer = await currentViewer();
+    if (viewer === null) return problem(401, 'Sign in first.');
+    const body = await readBody(request);
+    if (body instanceof Response) return body;
+    const parsed = z.safeParse(schema, body.value);
+    if (!parsed.success) {
+      return problem(422, 'Some of it is missing or not as expected.', {
+        errors: parsed.error.issues.map((issue) => ({
+          field: issue.path.map(String).join('.'),
+          message: issue.message,
+        })),
+      });
+    }
+    return work(viewer, parsed.data);
+  });
+}
+
+async function readBody(request: Request): Promise<{ value: unknown } | Response> {
+  if (Number(request.headers.get('content-length') ?? 0) > LARGEST_BODY) return problem(413);
+  const text = await request.text();
+  if (text.length > LARGEST_BODY) return problem(413);
+  try {
+    return { value: JSON.parse(text) as unknown };
+  } catch {
+    return problem(400, 'The body is not JSON.');
+  }
+}
+
+/** No surprise leaves as a stack trace: it is logged, and the person is told its id. */
+async function guarded(work: () => Promise<Response>): Promise<Response> {
+  try {
+    return await work();
+  } catch (error) {
+    const id = randomUUID();
+    console.error(`[${id}]`, error);
+    return problem(500, 'Try again; if it happens again, tell us this number.', { id });
+  }
+}

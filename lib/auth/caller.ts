@@ -1,0 +1,17 @@
+import 'server-only';
+import { siteEnvironment } from '@/lib/env';
+
+/**
+ * The network address of whoever calls, out of what the trusted proxies wrote; null when there is
+ * no proxy to be trusted, because the header then says whatever the caller likes.
+ */
+export function callerAddress(forwardedFor: string | null | undefined): string | null {
+  const { trustedProxies } = siteEnvironment();
+  if (trustedProxies === 0 || !forwardedFor) return null;
+  return (
+    forwardedFor
+      .split(',')
+      .map((part) => part.trim())
+      .at(-trustedProxies) ?? null
+  );
+}

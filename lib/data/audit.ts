@@ -1,0 +1,39 @@
+import 'server-only';
+import type { Transaction } from 'sequelize';
+import { models } from '@/models';
+
+/** What can be found in the audit log. */
+export type AuditedAction =
+  | 'signed in'
+  | 'sign-in refused'
+  | 'signed out'
+  | 'password set'
+  | 'link made'
+  | 'person created'
+  | 'person disabled'
+  | 'person enabled'
+  | 'administrator made'
+  | 'class created'
+  | 'member added'
+  | 'member removed'
+  | 'work set'
+  | 'work withdrawn'
+  | "learner's work viewed";
+
+/** One line of the audit log. It never holds a password, a secret or a link. */
+export interface AuditLine {
+  readonly actorId: string | null;
+  readonly action: AuditedAction;
+  readonly objectKind: 'person' | 'learner' | 'class' | 'assignment' | 'attempt' | 'session';
+  readonly objectId?: string | null;
+  readonly classId?: string | null;
+  readonly detail?: Readonly<Record<string, string | number | boolean | null>>;
+}
+
+/** Adds a line, within the transaction of what it is about. */
+export async function recordAudit(line: AuditLine, transaction?: Transaction): Promise<void> {
+  await models().AuditEntry.create(
+    { ...line, detail: { ...line.detail } },
+    { transaction, returning: false },
+  );
+}

@@ -1,0 +1,89 @@
+import 'server-only';
+import { availableParallelism } from 'node:os';
+import { hash, verify } from '@node-rs/argon2';
+import { commonPasswords } from './common-passwords.data';
+
+/**
+ * Passwords are kept as argon2id at OWASP's parameters (Password Storage Cheat Sheet: 19 MiB,
+ * two passes, one lane; argon2id is what the package takes by itself), worked out by a thread of its own, and never many at a time.
+ */
+const parameters = {
+  memoryCost: 19_456,
+  timeCost: 2,
+  parallelism: 1,
+};
+
+export const leastPasswordLength = 10;
+export const mostPasswordLength = 256;
+
+/** Why a password cannot be taken. */
+export type PasswordComplaint = 'too short' | 'too long' | 'too common' | 'names you';
+
+/**
+ * What is wrong with a new password, or null: its length, its being on the list of common ones,
+ * or its being made of what everybody knows about the person. There are no rules of composition.
+ */
+export function complaintAbout(
+  password: string,
+  known: readonly string[],
+): PasswordComplaint | null {
+  const length = [...password].length;
+  if (length < leastPasswordLength) return 'too short';
+  if (length > mostPasswordLength) return 'too long';
+  const plain = password.toLowerCase().replace(/[^a-z0-9]/g, '');
+  if (isCommon(plain)) return 'too common';
+  const names = known.map((word) => word.toLowerCase().replace(/[^a-z0-9]/g, ''));
+  return names.some((name) => name.length > 3 && plain.replaceAll(name, '').length < 4)
+    ? 'names you'
+    : null;
+}
+
+/** The hash to keep for `password`. */
+export async function hashPassword(password: string): Promise<string> {
+  return inTurn(() => hash(normal(password), parameters));
+}
+
+/**
+ * Whether `password` belongs to `kept`. With nothing kept it takes just as long and is false, so
+ * that the time does not say whether an address is known.
+ */
+export async function isPassword(kept: string | null, password: string): Promise<boolean> {
+  const against = kept ?? (await standIn());
+  const fits = await inTurn(() => verify(against, normal(password)));
+  return kept !== null && fits;
+}
+
+/** The same characters written in another way are the same password (NIST SP 800-63B, 3.1.1.2). */
+function normal(password: string): string {
+  return password.normalize('NFKC');
+}
+
+/** A common password, alone, repeated, or with digits hung on. */
+function isCommon(plain: string): boolean {
+  const stem = plain.replace(/^\d+|\d+$/g, '');
+  const repeated = /^(.{1,6}?)\1+$/.test(plain);
+  return repeated || commonPasswords.has(plain) || commonPasswords.has(stem) || /^\d*$/.test(stem);
+}
+
+let standInHash: Promise<string> | undefined;
+
+function standIn(): Promise<string> {
+  standInHash ??= hashPassword('nobody has this password');
+  return standInHash;
+}
+
+const places = availableParallelism() * 2;
+const waiting: (() => void)[] = [];
+let busy = 0;
+
+/** At most two pieces of work a core at a time; a flood of sign-ins waits instead of filling memory. */
+async function inTurn<Result>(work: () => Promise<Result>): Promise<Result> {
+  if (busy >= places) await new Promise<void>((resolve) => waiting.push(resolve));
+  busy += 1;
+  try {
+    return await work();
+  } finally {
+    busy -= 1;
+    waiting.shift()?.();
+  }
+}

@@ -1,0 +1,59 @@
+import 'server-only';
+import { createHash } from 'node:crypto';
+import { RateLimiterPostgres, RateLimiterRes } from 'rate-limiter-flexible';
+import { database } from '@/lib/db/connection';
+
+/** Something that may be tried only so often: how often, and within how many seconds. */
+const limits = {
+  'sign-in by account': { points: 10, duration: 15 * 60 },
+  'sign-in by address': { points: 100, duration: 15 * 60 },
+  'link by address': { points: 30, duration: 15 * 60 },
+  'attempt by learner': { points: 120, duration: 60 },
+} as const;
+
+/** What is counted. */
+export type Counted = keyof typeof limits;
+
+/** Whether one more try is allowed; if not, after how many seconds. */
+export type Allowance =
+  { readonly allowed: true } | { readonly allowed: false; readonly retryAfter: number };
+
+const limiters = new Map<Counted, { limiter: RateLimiterPostgres; of: unknown }>();
+
+/** Counts one try by `who` and says whether it is allowed; every instance counts together. */
+export async function countTry(what: Counted, who: string): Promise<Allowance> {
+  try {
+    await limiterOf(what).consume(hidden(who));
+    return { allowed: true };
+  } catch (refusal) {
+    if (!(refusal instanceof RateLimiterRes)) throw refusal;
+    return { allowed: false, retryAfter: Math.max(1, Math.ceil(refusal.msBeforeNext / 1000)) };
+  }
+}
+
+/** Forgets the tries of `who`, once they have got it right. */
+export async function forgetTries(what: Counted, who: string): Promise<void> {
+  await limiterOf(what).delete(hidden(who));
+}
+
+function limiterOf(what: Counted): RateLimiterPostgres {
+  const open = database();
+  const known = limiters.get(what);
+  if (known?.of === open) return known.limiter;
+  const limiter = new RateLimiterPostgres({
+    storeClient: open,
+    storeType: 'sequelize',
+    tableName: 'throttle',
+    tableCreated: true,
+    clearExpiredByTimeout: false,
+    keyPrefix: what,
+    ...limits[what],
+  });
+  limiters.set(what, { limiter, of: open });
+  return limiter;
+}
+
+/** Addresses are not kept in clear where they are only counted. */
+function hidden(who: string): string {
+  return createHash('sha256').update(who).digest('base64url');
+}
