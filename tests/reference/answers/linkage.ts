@@ -1,0 +1,3 @@
+import type { Family } from '../inputs';
+
+export const linkageAnswers: Family = {};
