@@ -16,31 +16,33 @@ export const dimensions = [
 ] as const;
 export type Dimension = (typeof dimensions)[number];
 
-/** A unit as it is written; the empty one belongs to ratios, counts and plain numbers. */
-export type Unit =
-  | 'mm'
-  | 'cm'
-  | 'm'
-  | 'in'
-  | 'ft'
-  | '°'
-  | 'minute of arc'
-  | 'second of arc'
-  | 'rad'
-  | 'rpm'
-  | 'r/s'
-  | 's'
-  | 'min'
-  | 'h'
-  | '%'
-  | 'N'
-  | 'lbf'
-  | 'mm/s'
-  | 'in/s'
-  | 'm/min'
-  | 'ft/min'
-  | '/h'
-  | '';
+/** Units as they are written; the empty one belongs to ratios, counts and plain numbers. */
+export const units = [
+  'mm',
+  'cm',
+  'm',
+  'in',
+  'ft',
+  '°',
+  'minute of arc',
+  'second of arc',
+  'rad',
+  'rpm',
+  'r/s',
+  's',
+  'min',
+  'h',
+  '%',
+  'N',
+  'lbf',
+  'mm/s',
+  'in/s',
+  'm/min',
+  'ft/min',
+  '/h',
+  '',
+] as const;
+export type Unit = (typeof units)[number];
 
 interface UnitFacts {
   readonly dimension: Dimension;
@@ -112,16 +114,16 @@ export function counterpart(unit: Unit): Unit | null {
 }
 
 /** The unit of length in a person's unit system. */
-export function lengthUnit(units: UnitSystem): 'mm' | 'in' {
-  return units === 'metric' ? 'mm' : 'in';
+export function lengthUnit(system: UnitSystem): 'mm' | 'in' {
+  return system === 'metric' ? 'mm' : 'in';
 }
 
 /** A length of the person's own unit in millimetres, for kinematics and benches. */
-export function toMillimetres(value: number, units: UnitSystem): number {
-  return units === 'metric' ? value : value * inch;
+export function toMillimetres(value: number, system: UnitSystem): number {
+  return system === 'metric' ? value : value * inch;
 }
 
 /** Millimetres in the person's own unit of length. */
-export function fromMillimetres(value: number, units: UnitSystem): number {
-  return units === 'metric' ? value : value / inch;
+export function fromMillimetres(value: number, system: UnitSystem): number {
+  return system === 'metric' ? value : value / inch;
 }

@@ -4,7 +4,7 @@
  * what it holds at little weight. Strict throughout: a field that is not named here does not pass.
  */
 import * as z from 'zod/mini';
-import { dimensions } from '@/lib/quantities/units';
+import { dimensions, units } from '@/lib/quantities/units';
 import { unitSystems } from '@/lib/quantities/unit-system';
 
 /** The longest answer that is read; anything longer is refused before it is looked at. */
@@ -30,8 +30,9 @@ const numberPartSchema = z.strictObject({
   key: name,
   label: z.string(),
   dimension: z.enum(dimensions),
-  unit: z.string(),
+  unit: z.enum(units),
   places: z.optional(z.number()),
+  of: z.optional(z.array(z.string())),
   expects: z.string(),
 });
 
@@ -69,7 +70,7 @@ const quantityFieldSchema = z.strictObject({
   key: name,
   label: z.string(),
   dimension: z.enum(dimensions),
-  unit: z.string(),
+  unit: z.enum(units),
   expects: z.string(),
 });
 
