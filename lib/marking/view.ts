@@ -160,7 +160,12 @@ function partView(part: Part, variant: Variant): PartShown {
 function fieldView(field: DesignField) {
   const { key, label } = field;
   if (field.kind === 'stock') {
-    return { kind: field.kind, key, label, choices: field.choices.map((choice) => ({ ...choice })) };
+    return {
+      kind: field.kind,
+      key,
+      label,
+      choices: field.choices.map((choice) => ({ ...choice })),
+    };
   }
   const { dimension, unit } = field.field;
   return { kind: field.kind, key, label, dimension, unit, expects: expects(field.field) };

@@ -1,4 +1,4 @@
-import { createEmptyCard, fsrs, Rating, type Grade } from 'ts-fsrs';
+import { createEmptyCard, fsrs, Rating, type Card, type Grade } from 'ts-fsrs';
 import type { ClosedRound } from './peg';
 
 /**
@@ -17,7 +17,7 @@ export function dueAfter(rounds: readonly ClosedRound[]): string | null {
   const inOrder = [...rounds].sort((one, other) => at(one).getTime() - at(other).getTime());
   const [first] = inOrder;
   if (first === undefined) return null;
-  const card = inOrder.reduce(
+  const card = inOrder.reduce<Card>(
     (before, round) => scheduler.next(before, at(round), gradeOf(round)).card,
     createEmptyCard(at(first)),
   );
