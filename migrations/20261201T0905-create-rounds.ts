@@ -12,6 +12,7 @@ export const createRounds: Migration = {
         units text not null,
         seed bigint not null,
         variant jsonb not null,
+        shown jsonb not null,
         opened_at timestamptz not null default now(),
         hints_taken smallint not null default 0,
         solution_seen_at timestamptz,

@@ -1,8 +1,8 @@
 import type { Migration } from '@/lib/db/migration';
 
 /**
- * What happened for each skill in each round. Whether a peg is home is never stored: it is
- * worked out from these facts by the rule in lib/retention.
+ * What a closed round showed of each skill. Whether a peg is home is never stored: it is worked
+ * out from these facts, and from the due times, by the rule in lib/retention.
  */
 export const createSkillFacts: Migration = {
   async up(database) {
@@ -11,30 +11,28 @@ export const createSkillFacts: Migration = {
         round_id uuid not null references rounds (id),
         skill text not null,
         learner_id uuid not null references learners (id),
-        first_tried_at timestamptz not null,
-        closed_at timestamptz,
-        right_unaided boolean,
+        closed_at timestamptz not null,
+        was_right boolean not null,
+        unaided boolean not null,
+        attempts integer not null,
         primary key (round_id, skill),
-        constraint skill_facts_outcome check ((closed_at is null) = (right_unaided is null))
+        constraint skill_facts_attempts check (attempts >= 0)
       )`);
     // Pegs: a learner's latest closed rounds, skill by skill.
-    await database.run(
-      'create index skill_facts_learner on skill_facts (learner_id, skill, closed_at desc)',
-    );
     await database.run(`
-      create table refreshers (
+      create index skill_facts_learner on skill_facts (learner_id, skill, closed_at desc)
+      include (was_right, unaided)`);
+    await database.run(`
+      create table due_skills (
         learner_id uuid not null references learners (id),
         skill text not null,
-        memory jsonb not null,
         due_at timestamptz not null,
         updated_at timestamptz not null default now(),
         primary key (learner_id, skill)
       )`);
-    // Today lists what is due.
-    await database.run('create index refreshers_due on refreshers (learner_id, due_at)');
   },
   async down(database) {
-    await database.run('drop table refreshers');
+    await database.run('drop table due_skills');
     await database.run('drop table skill_facts');
   },
 };

@@ -16,6 +16,7 @@ export class Round extends Model<InferAttributes<Round>, InferCreationAttributes
   declare units: 'metric' | 'inch';
   declare seed: number;
   declare variant: object;
+  declare shown: object;
   declare openedAt: CreationOptional<Date>;
   declare hintsTaken: CreationOptional<number>;
   declare solutionSeenAt: CreationOptional<Date | null>;
@@ -31,6 +32,7 @@ export class Round extends Model<InferAttributes<Round>, InferCreationAttributes
         units: { type: DataTypes.TEXT, allowNull: false },
         seed: { type: DataTypes.BIGINT, allowNull: false },
         variant: { type: DataTypes.JSONB, allowNull: false },
+        shown: { type: DataTypes.JSONB, allowNull: false },
         openedAt: { type: DataTypes.DATE, defaultValue: DataTypes.NOW },
         hintsTaken: { type: DataTypes.SMALLINT, defaultValue: 0 },
         solutionSeenAt: DataTypes.DATE,

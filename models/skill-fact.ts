@@ -1,7 +1,6 @@
 import {
   DataTypes,
   Model,
-  type CreationOptional,
   type InferAttributes,
   type InferCreationAttributes,
   type Sequelize,
@@ -15,9 +14,10 @@ export class SkillFact extends Model<
   declare roundId: string;
   declare skill: string;
   declare learnerId: string;
-  declare firstTriedAt: Date;
-  declare closedAt: CreationOptional<Date | null>;
-  declare rightUnaided: CreationOptional<boolean | null>;
+  declare closedAt: Date;
+  declare wasRight: boolean;
+  declare unaided: boolean;
+  declare attempts: number;
 
   static tie(sequelize: Sequelize): void {
     SkillFact.init(
@@ -25,9 +25,10 @@ export class SkillFact extends Model<
         roundId: { type: DataTypes.UUID, primaryKey: true },
         skill: { type: DataTypes.TEXT, primaryKey: true },
         learnerId: { type: DataTypes.UUID, allowNull: false },
-        firstTriedAt: { type: DataTypes.DATE, allowNull: false },
-        closedAt: DataTypes.DATE,
-        rightUnaided: DataTypes.BOOLEAN,
+        closedAt: { type: DataTypes.DATE, allowNull: false },
+        wasRight: { type: DataTypes.BOOLEAN, allowNull: false },
+        unaided: { type: DataTypes.BOOLEAN, allowNull: false },
+        attempts: { type: DataTypes.INTEGER, allowNull: false },
       },
       { sequelize, modelName: 'SkillFact', tableName: 'skill_facts', timestamps: false },
     );

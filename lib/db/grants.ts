@@ -6,6 +6,7 @@ export const appendOnlyTables: readonly string[] = [
   'audit_entries',
   'counted_attempts',
   'overrides',
+  'skill_facts',
 ];
 
 /** Tables that only the owner writes. */

@@ -47,16 +47,38 @@ export const pegRule =
  */
 export function pegOf({ rounds, due, now, timeZone }: PegFacts): Peg {
   const last = latest(rounds);
-  if (last.length === 0) return { state: 'open', detail: 'Not begun yet.' };
   const good = last.filter(({ right, unaided }) => right && unaided);
   const dates = new Set(good.map(({ closedAt }) => dateOf(closedAt, timeZone)));
-  if (good.length < rightWanted || dates.size < datesWanted) {
-    return { state: 'started', detail: whatIsMissing(good.length, last.length, dates.size) };
+  return pegFromCounts({ looked: last.length, good: good.length, dates: dates.size, due, now });
+}
+
+/** What a peg's state follows from, once the last four closed rounds have been counted. */
+export interface PegCounts {
+  /** How many closed rounds there are, four at most. */
+  readonly looked: number;
+  /** How many of these were right unaided. */
+  readonly good: number;
+  /** On how many dates, in the person's time zone, those were closed. */
+  readonly dates: number;
+  /** When the skill is due again, ISO 8601, or `null` while nothing brings it back. */
+  readonly due: string | null;
+  /** The moment at which the question is asked, ISO 8601. */
+  readonly now: string;
+}
+
+/**
+ * The same rule for rounds that were counted where they are kept.
+ * Throws a `RangeError` for a time that does not exist.
+ */
+export function pegFromCounts({ looked, good, dates, due, now }: PegCounts): Peg {
+  if (looked === 0) return { state: 'open', detail: 'Not begun yet.' };
+  if (good < rightWanted || dates < datesWanted) {
+    return { state: 'started', detail: whatIsMissing(good, looked, dates) };
   }
   if (due !== null && instant(due) <= instant(now)) {
     return { state: 'lifting', detail: 'Home, and due again: one round shows whether it holds.' };
   }
-  return { state: 'home', detail: `Home: ${good.length} of the last ${last.length} right alone.` };
+  return { state: 'home', detail: `Home: ${good} of the last ${looked} right alone.` };
 }
 
 /**
@@ -64,14 +86,25 @@ export function pegOf({ rounds, due, now, timeZone }: PegFacts): Peg {
  * @example dateOf('2026-03-01T23:30:00Z', 'Europe/Helsinki') // '2026-03-02'
  */
 export function dateOf(iso: string, timeZone: string): string {
-  const parts = new Intl.DateTimeFormat('en-GB', {
+  const parts = calendarOf(timeZone).formatToParts(instant(iso));
+  const part = (type: string) => parts.find((each) => each.type === type)?.value ?? '';
+  return `${part('year')}-${part('month')}-${part('day')}`;
+}
+
+/** Making one takes a hundred times as long as using it. */
+const calendars = new Map<string, Intl.DateTimeFormat>();
+
+function calendarOf(timeZone: string): Intl.DateTimeFormat {
+  const known = calendars.get(timeZone);
+  if (known !== undefined) return known;
+  const made = new Intl.DateTimeFormat('en-GB', {
     timeZone,
     year: 'numeric',
     month: '2-digit',
     day: '2-digit',
-  }).formatToParts(instant(iso));
-  const part = (type: string) => parts.find((each) => each.type === type)?.value ?? '';
-  return `${part('year')}-${part('month')}-${part('day')}`;
+  });
+  calendars.set(timeZone, made);
+  return made;
 }
 
 function latest(rounds: readonly ClosedRound[]): readonly ClosedRound[] {

@@ -8,7 +8,6 @@ const limits = {
   'sign-in by account': { points: 10, duration: 15 * 60 },
   'sign-in by address': { points: 100, duration: 15 * 60 },
   'link by address': { points: 30, duration: 15 * 60 },
-  'attempt by learner': { points: 120, duration: 60 },
 } as const;
 
 /** What is counted. */

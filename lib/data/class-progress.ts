@@ -1,0 +1,174 @@
+import 'server-only';
+import { lessons } from '@/content/exercises/registry';
+import { now as presentTime } from '@/lib/clock';
+import { row, rows } from '@/lib/db/query';
+import type { Viewer } from '@/lib/policy/viewer';
+import { pegFromCounts } from '@/lib/retention/peg';
+import type { ClassProgress, Mark } from '@/lib/schemas/class-progress';
+import { isId, staffOfClass, staffValues } from './class-right';
+import { exerciseTitle, lessonName, lessonOfExercise } from './lesson-titles';
+import { skillName, skillsOfLesson } from './pegs';
+
+/**
+ * The progress of a class, for its instructors and the administrator; null for anybody else. One
+ * column a lesson of which something is set, one row a learner enrolled now. Three queries, whatever
+ * the size of the class.
+ */
+export async function findClassProgress(
+  viewer: Viewer,
+  classId: string,
+  now: Date = presentTime(),
+): Promise<ClassProgress | null> {
+  if (!isId(classId)) return null;
+  const values = staffValues(viewer, classId);
+  const found = await row<ClassRow>(classSql, values);
+  if (found === null) return null;
+  const columns = columnsOf(found.items);
+  const skillIds = columns.flatMap(({ lessonId }) => skillsOfLesson(lessonId));
+  const [pegs, marks] = await Promise.all([
+    rows<PegRow>(pegSql, [...values, skillIds]),
+    rows<MarkRow>(markSql, values),
+  ]);
+  const pegState = new Map(pegs.map((one) => [`${one.learnerId} ${one.skill}`, stateOf(one, now)]));
+  const markOf = new Map(marks.map((one) => [`${one.learnerId} ${one.exerciseId}`, one]));
+  return {
+    classId,
+    name: found.name,
+    timeZone: found.timeZone,
+    lessons: columns,
+    learners: found.learners.map(({ learnerId, name }) => ({
+      learnerId,
+      name,
+      lessons: columns.map(({ lessonId, exercises }) => ({
+        lessonId,
+        pegs: skillsOfLesson(lessonId).map((skill) => ({
+          skill,
+          name: skillName(skill),
+          state: pegState.get(`${learnerId} ${skill}`) ?? 'open',
+        })),
+        exercises: exercises.map(({ exerciseId }) =>
+          cellOf(exerciseId, markOf.get(`${learnerId} ${exerciseId}`)),
+        ),
+      })),
+    })),
+  };
+}
+
+function columnsOf(items: readonly ItemRow[]): ClassProgress['lessons'] {
+  const byLesson = new Map<string, ItemRow[]>();
+  for (const item of items) {
+    const lessonId = item.lessonId ?? lessonOfExercise(item.exerciseId) ?? 'other';
+    byLesson.set(lessonId, [...(byLesson.get(lessonId) ?? []), item]);
+  }
+  const order = lessons.map(({ id }) => id);
+  return [...byLesson]
+    .sort(([one], [other]) => order.indexOf(one) - order.indexOf(other))
+    .map(([lessonId, set]) => ({
+      lessonId,
+      title: lessonName(lessonId).title,
+      dueAt: latest(set.map(({ dueAt }) => new Date(dueAt).toISOString())),
+      exercises: [...new Set(set.map(({ exerciseId }) => exerciseId))].map((exerciseId) => ({
+        exerciseId,
+        title: exerciseTitle(exerciseId),
+      })),
+    }));
+}
+
+function latest(moments: readonly string[]): string | null {
+  return [...moments].sort().at(-1) ?? null;
+}
+
+function stateOf({ looked, good, dates }: PegRow, now: Date) {
+  return pegFromCounts({ looked, good, dates, due: null, now: now.toISOString() }).state;
+}
+
+function cellOf(
+  exerciseId: string,
+  found: MarkRow | undefined,
+): ClassProgress['learners'][number]['lessons'][number]['exercises'][number] {
+  if (found === undefined) {
+    return { exerciseId, mark: 'none', attempts: 0, attemptId: null, late: false };
+  }
+  const { mark, attempts, attemptId, late } = found;
+  return { exerciseId, mark, attempts, attemptId, late };
+}
+
+interface ItemRow {
+  readonly exerciseId: string;
+  readonly lessonId: string | null;
+  readonly dueAt: string;
+}
+
+interface ClassRow {
+  readonly name: string;
+  readonly timeZone: string;
+  readonly items: readonly ItemRow[];
+  readonly learners: readonly { readonly learnerId: string; readonly name: string }[];
+}
+
+const classSql = `
+  select g.name, g.time_zone as "timeZone",
+    coalesce((
+      select json_agg(json_build_object(
+        'exerciseId', i.exercise_id, 'lessonId', i.lesson_id, 'dueAt', a.due_at)
+        order by a.due_at, i.position)
+      from assignments a join assignment_items i on i.assignment_id = a.id
+      where a.class_id = g.id and a.withdrawn_at is null), '[]') as items,
+    coalesce((
+      select json_agg(json_build_object('learnerId', l.id, 'name', p.name) order by p.name, l.id)
+      from memberships m join people p on p.id = m.person_id join learners l on l.person_id = p.id
+      where m.class_id = g.id and m.role = 'learner' and m.left_at is null), '[]') as learners
+  from class_groups g where ${staffOfClass}`;
+
+/** The learners enrolled now, under the same right: repeated in every query, never taken on trust. */
+const enrolled = `
+  select l.id, p.time_zone from class_groups g
+  join memberships m on m.class_id = g.id and m.role = 'learner' and m.left_at is null
+  join people p on p.id = m.person_id
+  join learners l on l.person_id = p.id
+  where ${staffOfClass}`;
+
+interface PegRow {
+  readonly learnerId: string;
+  readonly skill: string;
+  readonly looked: number;
+  readonly good: number;
+  readonly dates: number;
+}
+
+/** The last four closed rounds of each learner and skill, counted as the peg rule asks. */
+const pegSql = `
+  select e.id as "learnerId", wanted.skill, count(*)::int as looked,
+    (count(*) filter (where f.good))::int as good,
+    (count(distinct (f.closed_at at time zone e.time_zone)::date) filter (where f.good))::int
+      as dates
+  from (${enrolled}) e
+  cross join unnest($4::text[]) as wanted (skill)
+  cross join lateral (
+    select s.closed_at, s.was_right and s.unaided as good from skill_facts s
+    where s.learner_id = e.id and s.skill = wanted.skill
+    order by s.closed_at desc limit 4) f
+  group by e.id, wanted.skill`;
+
+interface MarkRow {
+  readonly learnerId: string;
+  readonly exerciseId: string;
+  readonly mark: Mark;
+  readonly attempts: number;
+  readonly attemptId: string;
+  readonly late: boolean;
+}
+
+/** The best counted attempt of each learner and exercise: right before partly before wrong. */
+const markSql = `
+  select distinct on (c.learner_id, i.exercise_id)
+    c.learner_id as "learnerId", i.exercise_id as "exerciseId", a.verdict as mark,
+    a.id as "attemptId", c.late,
+    (count(*) over (partition by c.learner_id, i.exercise_id))::int as attempts
+  from (${enrolled}) e
+  join counted_attempts c on c.learner_id = e.id
+  join assignment_items i on i.id = c.item_id
+  join assignments s on s.id = i.assignment_id and s.class_id = $1 and s.withdrawn_at is null
+  join attempts a on a.id = c.attempt_id
+  order by c.learner_id, i.exercise_id,
+    array_position(array['right', 'partly', 'wrong'], a.verdict), a.created_at desc`;

@@ -1,0 +1,97 @@
+import 'server-only';
+import type { Transaction } from 'sequelize';
+import { row } from '@/lib/db/query';
+import type { ExerciseDefinition, Variant } from '@/lib/marking/definition';
+import type { Marking } from '@/lib/marking/marking';
+import { roundView } from '@/lib/marking/view';
+import type { AttemptView, RoundView } from '@/lib/schemas/round';
+
+/** A marking as it is kept with its attempt. */
+export type KeptMarking = Omit<Marking, 'outcome'>;
+
+/** A round as the record has it, with its attempts from the first to the last. */
+export interface RoundRecord {
+  readonly roundId: string;
+  readonly exerciseId: string;
+  readonly variant: Variant;
+  readonly hintsTaken: number;
+  readonly solutionSeen: boolean;
+  readonly closed: boolean;
+  readonly attempts: readonly {
+    readonly attemptId: string;
+    readonly createdAt: string;
+    readonly marking: KeptMarking;
+  }[];
+}
+
+const columns = `
+  r.id as "roundId", r.exercise_id as "exerciseId", r.variant, r.hints_taken as "hintsTaken",
+  r.solution_seen_at is not null as "solutionSeen", r.closed_at is not null as closed,
+  coalesce((
+    select json_agg(json_build_object(
+      'attemptId', a.id, 'createdAt', a.created_at, 'marking', a.marking) order by a.created_at)
+    from attempts a where a.round_id = r.id), '[]') as attempts`;
+
+/** The learner's own round by its id, or null. */
+export function findRoundRecord(
+  learnerId: string,
+  roundId: string,
+  transaction?: Transaction,
+): Promise<RoundRecord | null> {
+  return row<RoundRecord>(
+    `select ${columns} from rounds r where r.id = $1 and r.learner_id = $2`,
+    [roundId, learnerId],
+    transaction,
+  );
+}
+
+/**
+ * The learner's latest round at this version of an exercise, an open one first; in any units when
+ * none are given.
+ */
+export function findLatestRecord(
+  learnerId: string,
+  exerciseId: string,
+  version: number,
+  units: string | null,
+  transaction?: Transaction,
+): Promise<RoundRecord | null> {
+  return row<RoundRecord>(
+    `select ${columns} from rounds r
+     where r.learner_id = $1 and r.exercise_id = $2 and r.definition_version = $3
+       and ($4::text is null or r.units = $4)
+     order by r.closed_at is null desc, r.opened_at desc limit 1`,
+    [learnerId, exerciseId, version, units],
+    transaction,
+  );
+}
+
+/** The round as its learner sees it: nothing of the answer, and no slip not yet made. */
+export function viewRound(definition: ExerciseDefinition, record: RoundRecord): RoundView {
+  return roundView(definition, record.variant, {
+    roundId: record.roundId,
+    hintsTaken: record.hintsTaken,
+    solutionSeen: record.solutionSeen,
+    closed: record.closed,
+    attempts: record.attempts.map(({ attemptId, createdAt, marking }) =>
+      viewAttempt(attemptId, createdAt, marking),
+    ),
+  });
+}
+
+/** An attempt as its learner sees it. */
+export function viewAttempt(
+  attemptId: string,
+  createdAt: string,
+  { verdict, parts, message, nextStep, closesRound }: KeptMarking,
+): AttemptView {
+  return {
+    attemptId,
+    createdAt: new Date(createdAt).toISOString(),
+    verdict,
+    parts: [...parts],
+    message,
+    nextStep,
+    closesRound,
+  };
+}
