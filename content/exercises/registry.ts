@@ -1,5 +1,12 @@
 import 'server-only';
 import type { ExerciseDefinition } from '@/lib/marking/definition';
+import { edgingStrip } from './drawing-and-copying/edging-strip';
+import { groovesAndBar } from './drawing-and-copying/grooves-and-bar';
+import { moveThePenOut } from './drawing-and-copying/move-the-pen-out';
+import { ovalFromPins } from './drawing-and-copying/oval-from-pins';
+import { pinsForAnOval } from './drawing-and-copying/pins-for-an-oval';
+import { setThePins } from './drawing-and-copying/set-the-pins';
+import { whereThePenStands } from './drawing-and-copying/where-the-pen-stands';
 
 /** What an exercise shows that a learner can do; the unit of progress. */
 export interface Skill {
@@ -18,7 +25,15 @@ export interface LessonEntry {
   readonly prediction: string;
 }
 
-const definitions: readonly ExerciseDefinition[] = [];
+const definitions: readonly ExerciseDefinition[] = [
+  moveThePenOut,
+  ovalFromPins,
+  pinsForAnOval,
+  groovesAndBar,
+  edgingStrip,
+  whereThePenStands,
+  setThePins,
+];
 
 /** Every exercise by its id. Definitions, answers and slips stay on the server. */
 export const exercises: ReadonlyMap<string, ExerciseDefinition> = new Map(

@@ -20,7 +20,8 @@ export type AmountProblem =
   | { readonly problem: 'top-heavy'; readonly text: string }
   | { readonly problem: 'malformed' };
 
-const mostDigits = 12;
+/** As many as a calculator may show, and a few more. */
+const mostDigits = 20;
 
 /**
  * The number that starts at token `start`: `79.4`, `79,4`, `5/16`, `3 1/8`, `3-1/8`, with a minus
