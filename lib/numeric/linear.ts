@@ -1,3 +1,5 @@
+import { at } from '@/lib/numeric/at';
+
 /**
  * Solve `matrix · x = right` in place: `right` becomes x, `matrix` is used up, nothing is allocated.
  *
@@ -110,8 +112,4 @@ function swapRows(matrix: Float64Array, right: Float64Array, n: number, i: numbe
   const kept = at(right, i);
   right[i] = at(right, j);
   right[j] = kept;
-}
-
-function at(values: Float64Array, index: number): number {
-  return values[index] ?? 0;
 }

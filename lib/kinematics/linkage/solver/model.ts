@@ -1,0 +1,183 @@
+import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import type { Point } from '@/lib/geometry/point';
+import type { Linkage, Relation, SlideRelation } from '@/lib/kinematics/linkage/solver/linkage';
+
+/** A rigid body: its points by number, and where they lie in its own frame. */
+export interface Body {
+  readonly points: readonly number[];
+  readonly shape: ReadonlyMap<number, Point>;
+  /** The driven direction, if an angle drives this body. */
+  readonly driven?: { readonly from: number; readonly to: number; readonly drive: number };
+}
+
+/** A linkage with names turned into numbers, checked. */
+export interface Model {
+  readonly names: readonly string[];
+  readonly start: Float64Array;
+  readonly fixed: ReadonlySet<number>;
+  readonly bodies: readonly Body[];
+  readonly slides: readonly SlideRelation[];
+  /** By slide: the place in the drive that runs it. */
+  readonly runs: ReadonlyMap<SlideRelation, number>;
+  readonly leads: readonly { readonly point: number; readonly drive: number }[];
+  readonly driveLength: number;
+  /** Greatest distance of two points of the starting pose: the scale for tolerances. */
+  readonly size: number;
+}
+
+const CALLER = 'planLinkage';
+
+/** Numbers for names, and every argument looked at: throws `RangeError` for nonsense. */
+export function modelOf(linkage: Linkage): Model {
+  const names = Object.keys(linkage.points);
+  const numbers = new Map(names.map((name, k) => [name, k]));
+  const find = (name: string): number => {
+    const found = numbers.get(name);
+    if (found === undefined)
+      throw new RangeError(`${CALLER}: point is ${name}; expected a point of the linkage`);
+    return found;
+  };
+  const start = new Float64Array(2 * names.length);
+  names.forEach((name, k) => {
+    start[2 * k] = requireFinite(CALLER, `${name}.x`, linkage.points[name]?.x ?? Number.NaN);
+    start[2 * k + 1] = requireFinite(CALLER, `${name}.y`, linkage.points[name]?.y ?? Number.NaN);
+  });
+  const slides = (linkage.slides ?? []).map(({ point, along, through, offset = 0 }) => ({
+    kind: 'slide' as const,
+    p: find(point),
+    through: find(through ?? along[0]),
+    from: find(along[0]),
+    to: find(along[1]),
+    offset: requireFinite(CALLER, 'offset', offset),
+  }));
+  const drivers = numberDrivers(linkage, find);
+  const bodies = bodiesOf(linkage, find).map((body) => {
+    const driven = drivers.angles.find(
+      ({ from, to }) => body.shape.has(from) && body.shape.has(to),
+    );
+    return driven ? { ...body, driven } : body;
+  });
+  for (const angle of drivers.angles) {
+    if (!bodies.some((body) => body.driven === angle)) {
+      throw new RangeError(
+        `${CALLER}: driver turns ${names[angle.from]} to ${names[angle.to]}; expected two points of one bar or plate`,
+      );
+    }
+  }
+  const runs = new Map(
+    drivers.runs.map(({ point, drive }) => [slideOf(slides, point, names), drive]),
+  );
+  const size = Math.max(
+    spreadOf(start),
+    ...bodies.map(({ shape }) => spreadOf([...shape.values()].flatMap(({ x, y }) => [x, y]))),
+  );
+  return {
+    names,
+    start,
+    fixed: new Set(linkage.fixed.map(find)),
+    bodies,
+    slides,
+    runs,
+    leads: drivers.leads,
+    driveLength: drivers.length,
+    size: requirePositive(CALLER, 'size', size),
+  };
+}
+
+/** Every relation of a body, its first two points carrying the others. */
+export function relationsOf({ points, shape, driven }: Body): readonly Relation[] {
+  const [a = 0, b = 0, ...rest] = points;
+  const turned: Relation[] = driven
+    ? [{ kind: 'angle', a: driven.from, b: driven.to, shift: 0, drive: driven.drive }]
+    : [];
+  return [distanceOf(shape, a, b), ...rest.map((p) => rigidOf(shape, p, a, b)), ...turned];
+}
+
+export function distanceOf(shape: ReadonlyMap<number, Point>, p: number, q: number): Relation {
+  const [from, to] = [localOf(shape, p), localOf(shape, q)];
+  return { kind: 'distance', p, q, length: Math.hypot(to.x - from.x, to.y - from.y) };
+}
+
+export function rigidOf(
+  shape: ReadonlyMap<number, Point>,
+  p: number,
+  a: number,
+  b: number,
+): Relation {
+  const [origin, end, at] = [localOf(shape, a), localOf(shape, b), localOf(shape, p)];
+  const [ux, uy] = [end.x - origin.x, end.y - origin.y];
+  const [wx, wy] = [at.x - origin.x, at.y - origin.y];
+  const squared = ux * ux + uy * uy;
+  return {
+    kind: 'rigid',
+    p,
+    a,
+    b,
+    along: (wx * ux + wy * uy) / squared,
+    across: (wy * ux - wx * uy) / squared,
+  };
+}
+
+export function localOf(shape: ReadonlyMap<number, Point>, p: number): Point {
+  return shape.get(p) ?? { x: 0, y: 0 };
+}
+
+function bodiesOf(linkage: Linkage, find: (name: string) => number): readonly Body[] {
+  const bars = (linkage.bars ?? []).map(({ ends, length }) => {
+    requirePositive(CALLER, `length of bar ${ends.join('–')}`, length);
+    return { [ends[0]]: { x: 0, y: 0 }, [ends[1]]: { x: length, y: 0 } };
+  });
+  const plates = (linkage.plates ?? []).map(({ shape }) => shape);
+  return [...bars, ...plates].map((shape) => {
+    const entries = Object.entries(shape);
+    const named = new Map(entries.map(([name, at]) => [find(name), at]));
+    const apart = entries.every(([, p], k) =>
+      entries
+        .slice(k + 1)
+        .every(([, q]) => requireFinite(CALLER, 'shape', Math.hypot(p.x - q.x, p.y - q.y)) > 0),
+    );
+    if (entries.length < 2 || !apart) {
+      throw new RangeError(
+        `${CALLER}: body is ${entries.map(([name]) => name).join(', ')}; expected two or more different points`,
+      );
+    }
+    return { points: [...named.keys()], shape: named };
+  });
+}
+
+function numberDrivers(linkage: Linkage, find: (name: string) => number) {
+  const angles: { from: number; to: number; drive: number }[] = [];
+  const runs: { point: number; drive: number }[] = [];
+  const leads: { point: number; drive: number }[] = [];
+  let length = 0;
+  for (const driver of linkage.drivers) {
+    if (driver.kind === 'angle')
+      angles.push({ from: find(driver.from), to: find(driver.to), drive: length });
+    else if (driver.kind === 'slide') runs.push({ point: find(driver.point), drive: length });
+    else leads.push({ point: find(driver.point), drive: length });
+    length += driver.kind === 'lead' ? 2 : 1;
+  }
+  return { angles, runs, leads, length };
+}
+
+function slideOf(
+  slides: readonly SlideRelation[],
+  point: number,
+  names: readonly string[],
+): SlideRelation {
+  const slide = slides.find(({ p }) => p === point);
+  if (!slide)
+    throw new RangeError(
+      `${CALLER}: driver slides ${names[point]}; expected a point with a groove`,
+    );
+  return slide;
+}
+
+/** The diagonal of the box round points given as x, y, x, y … */
+function spreadOf(values: ArrayLike<number>): number {
+  const [xs, ys] = [
+    Array.from(values).filter((_, k) => k % 2 === 0),
+    Array.from(values).filter((_, k) => k % 2 === 1),
+  ];
+  return Math.hypot(Math.max(...xs) - Math.min(...xs), Math.max(...ys) - Math.min(...ys));
+}

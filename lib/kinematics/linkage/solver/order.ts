@@ -1,0 +1,166 @@
+import type { Relation } from '@/lib/kinematics/linkage/solver/linkage';
+import {
+  distanceOf,
+  relationsOf,
+  rigidOf,
+  type Model,
+} from '@/lib/kinematics/linkage/solver/model';
+import { aim, shift } from '@/lib/kinematics/linkage/solver/order-bodies';
+import {
+  angleOf,
+  lociOf,
+  reachOf,
+  type OrderedStep,
+  type Progress,
+} from '@/lib/kinematics/linkage/solver/progress';
+
+/** What the ordering of the dyads came to: steps, relations to check, and what it did not reach. */
+export interface Ordering {
+  readonly steps: readonly OrderedStep[];
+  readonly checks: readonly Relation[];
+  readonly unplaced: readonly number[];
+  readonly unused: readonly Relation[];
+}
+
+/** Order the dyads of a linkage: one placed point after another, for as long as any can be placed. */
+export function orderDyads(model: Model): Ordering {
+  const progress: Progress = {
+    model,
+    placed: new Set([...model.fixed, ...model.leads.map(({ point }) => point)]),
+    joined: new Set(),
+    done: new Set(),
+    turned: new Set(),
+    usedSlides: new Set(),
+    usedRuns: new Set(),
+    steps: [],
+    checks: [],
+  };
+  while (
+    carry(progress) ||
+    turn(progress) ||
+    run(progress) ||
+    meet(progress) ||
+    aim(progress) ||
+    shift(progress)
+  );
+  return finish(progress);
+}
+
+function finish({
+  model,
+  placed,
+  done,
+  turned,
+  usedSlides,
+  usedRuns,
+  steps,
+  checks,
+}: Progress): Ordering {
+  const left = [
+    ...model.bodies
+      .filter((body) => !done.has(body))
+      .flatMap((body) => relationsOf(turned.has(body) ? { ...body, driven: undefined } : body)),
+    ...model.slides.filter((slide) => !usedSlides.has(slide)),
+    ...[...model.runs]
+      .filter(([slide]) => !usedRuns.has(slide))
+      .map(([slide, drive]) => reachOf(slide, drive)),
+  ];
+  const unplaced = model.names.map((_, k) => k).filter((k) => !placed.has(k));
+  const settled = (relation: Relation) =>
+    relation.kind !== 'distance' && relation.kind !== 'rigid' && relation.kind !== 'angle'
+      ? [relation.p, relation.through, relation.from, relation.to].every((p) => placed.has(p))
+      : false;
+  return {
+    steps,
+    checks: [...checks, ...left.filter(settled)],
+    unplaced,
+    unused: left.filter((relation) => !settled(relation)),
+  };
+}
+
+/** A body with two known points carries the rest; what was known twice becomes a check. */
+function carry({ model, placed, joined, done, turned, steps, checks }: Progress): boolean {
+  for (const body of model.bodies) {
+    const [a, b] = body.points.filter((p) => placed.has(p));
+    if (done.has(body) || a === undefined || b === undefined) continue;
+    if (!joined.has(body)) checks.push(distanceOf(body.shape, a, b));
+    for (const p of body.points.filter((point) => point !== a && point !== b)) {
+      const rigid = rigidOf(body.shape, p, a, b);
+      if (placed.has(p)) checks.push(rigid);
+      else if (rigid.kind === 'rigid')
+        steps.push({ method: { kind: 'carry', rigid }, points: [p], relations: [rigid] });
+      placed.add(p);
+    }
+    if (body.driven && !turned.has(body))
+      checks.push(angleOf(body, body.driven.from, body.driven.to));
+    done.add(body);
+    return true;
+  }
+  return false;
+}
+
+/** A driven body with one known point. */
+function turn({ model, placed, joined, done, turned, steps }: Progress): boolean {
+  for (const body of model.bodies) {
+    const pivot = body.points.find((p) => placed.has(p));
+    if (done.has(body) || !body.driven || pivot === undefined) continue;
+    const { from, to } = body.driven;
+    const p = pivot === from ? to : from;
+    const distance = distanceOf(body.shape, pivot, p);
+    const angle = angleOf(body, pivot, p);
+    if (distance.kind !== 'distance' || angle.kind !== 'angle') continue;
+    steps.push({
+      method: { kind: 'turn', distance, angle, p },
+      points: [p],
+      relations: [distance, angle],
+    });
+    placed.add(p);
+    joined.add(body);
+    turned.add(body);
+    return true;
+  }
+  return false;
+}
+
+/** A driven slide in a known groove. */
+function run({ model, placed, usedSlides, usedRuns, steps }: Progress): boolean {
+  for (const [slide, drive] of model.runs) {
+    const known = [slide.through, slide.from, slide.to].every((p) => placed.has(p));
+    const reach = reachOf(slide, drive);
+    if (!known || placed.has(slide.p) || reach.kind !== 'reach') continue;
+    steps.push({
+      method: { kind: 'run', slide, reach },
+      points: [slide.p],
+      relations: [slide, reach],
+    });
+    placed.add(slide.p);
+    usedSlides.add(slide);
+    usedRuns.add(slide);
+    return true;
+  }
+  return false;
+}
+
+/** A point on two known loci. */
+function meet(progress: Progress): boolean {
+  const { model, placed, steps } = progress;
+  for (const p of model.names.keys()) {
+    if (placed.has(p)) continue;
+    const [first, second] = lociOf(progress, p);
+    if (!first || !second) continue;
+    const ordered =
+      first.locus.kind === 'slide' && second.locus.kind === 'distance'
+        ? [second, first]
+        : [first, second];
+    const [one = first, two = second] = ordered;
+    steps.push({
+      method: { kind: 'meet', p, first: one.locus, second: two.locus },
+      points: [p],
+      relations: [one.locus, two.locus],
+    });
+    placed.add(p);
+    for (const { mark } of [one, two]) mark();
+    return true;
+  }
+  return false;
+}

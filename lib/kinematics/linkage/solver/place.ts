@@ -1,0 +1,181 @@
+import { at } from '@/lib/numeric/at';
+import { solveLinear } from '@/lib/numeric/linear';
+import type { Plan, Step } from '@/lib/kinematics/linkage/solver/plan';
+import type { Motion } from '@/lib/kinematics/linkage/solver/block';
+import { writeRelation } from '@/lib/kinematics/linkage/solver/relations';
+import { takeStep, type Choice } from '@/lib/kinematics/linkage/solver/steps';
+
+/**
+ * Share of the linkage's size by which a dyad may fail to meet and still count as meeting: what
+ * rounding does at the end of a stroke, where two circles touch.
+ */
+const TOUCH_TOLERANCE = 1e-12;
+/** Share of the size by which a bar more than is needed may misfit before it stops the linkage. */
+const CHECK_TOLERANCE = 1e-9;
+/** Newton's iteration ends when no point moves by more than this share of the size. */
+const STEP_TOLERANCE = 1e-14;
+const NEWTON_TURNS = 40;
+
+/**
+ * Settle every point in `pose` for a drive. Gives the least slack of all steps: how far the
+ * tightest dyad is from its limit, negative by as much as it does not close. `report`, if given,
+ * takes the number of the step that failed first, or −1.
+ */
+export function runSteps(
+  plan: Plan,
+  drive: ArrayLike<number>,
+  choice: Choice,
+  pose: Float64Array,
+  report?: Int32Array,
+): number {
+  const { model, steps, scratch } = plan;
+  for (let k = 0; k < model.leads.length; k += 1) {
+    const lead = model.leads[k];
+    if (!lead) continue;
+    pose[2 * lead.point] = at(drive, lead.drive);
+    pose[2 * lead.point + 1] = at(drive, lead.drive + 1);
+  }
+  const touch = -TOUCH_TOLERANCE * model.size;
+  let least = Number.MAX_VALUE;
+  let failed = -1;
+  for (let k = 0; k < steps.length; k += 1) {
+    const step = steps[k];
+    if (!step) continue;
+    const { method } = step;
+    const slack =
+      method.kind === 'solve'
+        ? solveStep(plan, step, drive, pose)
+        : takeStep(method, k, pose, drive, choice, scratch);
+    if (failed < 0 && slack < least) least = slack;
+    if (failed < 0 && slack < touch) failed = k;
+  }
+  if (plan.checks.length > 0 && failed < 0) {
+    const misfit = checkAll(plan, drive, pose);
+    if (misfit > CHECK_TOLERANCE * model.size) {
+      least = -misfit;
+      failed = steps.length;
+    }
+  }
+  if (report) report[0] = failed;
+  return failed < 0 && least < 0 ? 0 : least;
+}
+
+/** Newton's iteration, with halved steps, on the relations of one step from the pose as it stands. */
+function solveStep(plan: Plan, step: Step, drive: ArrayLike<number>, pose: Float64Array): number {
+  const { points, relations, block } = step;
+  const motion = still(plan, pose, drive);
+  let error = writeAll(step, motion);
+  for (let turn = 0; turn < NEWTON_TURNS; turn += 1) {
+    if (solveLinear(block.matrix, block.right, 2 * points.length) === 0)
+      return -Math.max(error, plan.model.size * CHECK_TOLERANCE);
+    const moved = movePoints(step, pose, 1);
+    let share = 1;
+    let next = writeError(plan, step, motion);
+    while (!(next <= error) && share > 1 / 64) {
+      movePoints(step, pose, -share / 2);
+      share /= 2;
+      next = writeError(plan, step, motion);
+    }
+    error = next;
+    if (moved <= STEP_TOLERANCE * plan.model.size || error === 0) break;
+    error = writeAll(step, motion);
+  }
+  return error <= CHECK_TOLERANCE * plan.model.size && relations.length > 0
+    ? Number.MAX_VALUE
+    : -error;
+}
+
+/** Fill the step's block for Newton; gives the largest error. */
+function writeAll({ relations, block }: Step, motion: Motion): number {
+  let row = 0;
+  for (let k = 0; k < relations.length; k += 1) {
+    const relation = relations[k];
+    if (relation) row = writeRelation(relation, 0, motion, block, row);
+  }
+  return largest(block.right, row);
+}
+
+/** The largest error of the pose as it stands; the step's own block stays as it is. */
+function writeError({ checkBlock }: Plan, { relations }: Step, motion: Motion): number {
+  let worst = 0;
+  for (let k = 0; k < relations.length; k += 1) {
+    const relation = relations[k];
+    if (!relation) continue;
+    const rows = writeRelation(relation, 0, motion, checkBlock, 0);
+    worst = Math.max(worst, largest(checkBlock.right, rows));
+  }
+  return worst;
+}
+
+/** Move the points of a step by `share` of the solution in its block; gives the largest move. */
+function movePoints({ points, block }: Step, pose: Float64Array, share: number): number {
+  let most = 0;
+  for (let k = 0; k < points.length; k += 1) {
+    const p = points[k] ?? 0;
+    const x = share * at(block.right, 2 * k);
+    const y = share * at(block.right, 2 * k + 1);
+    pose[2 * p] = at(pose, 2 * p) + x;
+    pose[2 * p + 1] = at(pose, 2 * p + 1) + y;
+    most = Math.max(most, Math.abs(x), Math.abs(y));
+  }
+  return most;
+}
+
+/** The largest misfit of the relations that no step needed. */
+function checkAll(plan: Plan, drive: ArrayLike<number>, pose: Float64Array): number {
+  const motion = still(plan, pose, drive);
+  let worst = 0;
+  for (let k = 0; k < plan.checks.length; k += 1) {
+    const check = plan.checks[k];
+    if (!check) continue;
+    const rows = writeRelation(check, 0, motion, plan.checkBlock, 0);
+    worst = Math.max(worst, largest(plan.checkBlock.right, rows));
+  }
+  return worst;
+}
+
+/**
+ * Velocities or accelerations of all points, one step after another, in the pose as it stands.
+ * Gives the smallest pivot met, near 0 at a dead centre; then the rates are not to be used.
+ */
+export function runRates(plan: Plan, order: 1 | 2, motion: Motion, out: Float64Array): number {
+  const { model, steps } = plan;
+  out.fill(0);
+  for (const { point, drive } of model.leads) {
+    const source = order === 1 ? motion.speeds : motion.accelerations;
+    out[2 * point] = at(source, drive);
+    out[2 * point + 1] = at(source, drive + 1);
+  }
+  let pivot = 1;
+  for (let k = 0; k < steps.length; k += 1) {
+    const step = steps[k];
+    if (!step) continue;
+    const { points, relations, block } = step;
+    let row = 0;
+    for (let r = 0; r < relations.length; r += 1) {
+      const relation = relations[r];
+      if (relation) row = writeRelation(relation, order, motion, block, row);
+    }
+    const found = solveLinear(block.matrix, block.right, 2 * points.length);
+    pivot = Math.min(pivot, found);
+    for (let c = 0; c < points.length && found > 0; c += 1) {
+      const p = points[c] ?? 0;
+      out[2 * p] = at(block.right, 2 * c);
+      out[2 * p + 1] = at(block.right, 2 * c + 1);
+    }
+  }
+  return pivot;
+}
+
+/** The plan's own working motion, set to a pose and a drive; of the rates nothing is read. */
+function still({ motion }: Plan, pose: Float64Array, drive: ArrayLike<number>): Motion {
+  motion.pose = pose;
+  motion.drive = drive;
+  return motion;
+}
+
+function largest(values: Float64Array, length: number): number {
+  let most = 0;
+  for (let k = 0; k < length; k += 1) most = Math.max(most, Math.abs(at(values, k)));
+  return most;
+}

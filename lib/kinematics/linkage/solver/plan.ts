@@ -1,0 +1,92 @@
+import type { Relation, SlideRelation } from '@/lib/kinematics/linkage/solver/linkage';
+import type { Model } from '@/lib/kinematics/linkage/solver/model';
+import type { Block, Motion } from '@/lib/kinematics/linkage/solver/block';
+
+type Distance = Extract<Relation, { kind: 'distance' }>;
+type Angle = Extract<Relation, { kind: 'angle' }>;
+type Rigid = Extract<Relation, { kind: 'rigid' }>;
+type Reach = Extract<Relation, { kind: 'reach' }>;
+
+/** What settles one point beside another: the circle of a bar, or a groove. */
+export type Locus = Distance | SlideRelation;
+
+/** How the points of a step are found. Relations and points of the step are in `StepBase`. */
+export type Method =
+  /** One point on two loci. */
+  | { readonly kind: 'meet'; readonly p: number; readonly first: Locus; readonly second: Locus }
+  /** One point at the end of a driven bar. */
+  | {
+      readonly kind: 'turn';
+      readonly distance: Distance;
+      readonly angle: Angle;
+      readonly p: number;
+    }
+  /** One more point of a body with two known ones. */
+  | { readonly kind: 'carry'; readonly rigid: Rigid }
+  /** One point run along its groove. */
+  | { readonly kind: 'run'; readonly slide: SlideRelation; readonly reach: Reach }
+  /** A body about a known pivot, turned until its groove passes through a known point. */
+  | {
+      readonly kind: 'aim';
+      readonly pivot: number;
+      readonly target: number;
+      /** Distance of the target from the pivot, square to the groove. */
+      readonly off: number;
+      /** Points of the body from the pivot: `x` square to the groove, `y` against its direction. */
+      readonly members: readonly { readonly p: number; readonly x: number; readonly y: number }[];
+    }
+  /** A body whose direction is driven, moved until each of two of its points is on a locus. */
+  | {
+      readonly kind: 'shift';
+      readonly p: number;
+      readonly q: number;
+      readonly first: Locus;
+      readonly second: Locus;
+      readonly distance: Distance;
+      readonly angle: Angle;
+    }
+  /** Whatever no such order reaches: Newton's iteration. */
+  | { readonly kind: 'solve' };
+
+/** A step of a plan: it settles some points by as many equations as they have coordinates. */
+export interface Step {
+  readonly method: Method;
+  readonly points: readonly number[];
+  readonly relations: readonly Relation[];
+  readonly block: Block;
+}
+
+/**
+ * The order in which the points of a linkage are found, worked out once. Its arrays are working
+ * space: a plan is used by one caller at a time.
+ */
+export interface Plan {
+  readonly model: Model;
+  readonly steps: readonly Step[];
+  /** Relations that no step needed: they must come out by themselves, or it does not close. */
+  readonly checks: readonly Relation[];
+  readonly checkBlock: Block;
+  readonly scratch: Float64Array;
+  /** Where the points would go if they kept their way. */
+  readonly expected: Float64Array;
+  /** For errors of position; its pose and drive are set before each use. */
+  readonly motion: {
+    pose: Float64Array;
+    drive: ArrayLike<number>;
+  } & Pick<Motion, 'velocity' | 'acceleration' | 'speeds' | 'accelerations'>;
+}
+
+/** Working space for equations in the coordinates of some points. */
+export function blockFor(points: readonly number[], pointCount: number, rows: number): Block {
+  const columns = new Int32Array(pointCount).fill(-1);
+  points.forEach((p, k) => {
+    columns[p] = 2 * k;
+  });
+  const width = 2 * points.length;
+  return {
+    columns,
+    width,
+    matrix: new Float64Array(Math.max(rows, 1) * Math.max(width, 1)),
+    right: new Float64Array(Math.max(rows, 1)),
+  };
+}

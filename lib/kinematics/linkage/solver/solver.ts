@@ -1,0 +1,187 @@
+import { at } from '@/lib/numeric/at';
+import { requireFinite } from '@/lib/numeric/require';
+import type { Point } from '@/lib/geometry/point';
+import { branchIn } from '@/lib/kinematics/linkage/solver/branch';
+import { runRates, runSteps } from '@/lib/kinematics/linkage/solver/place';
+import type { Plan } from '@/lib/kinematics/linkage/solver/plan';
+
+export type { Bar, Driver, Linkage, Plate, Slide } from '@/lib/kinematics/linkage/solver/linkage';
+
+/** Least pivot, of rows scaled to 1, at which velocities are still told: below it is a dead centre. */
+const DEAD_CENTRE = 1e-9;
+
+/** Points by name. */
+export type NamedPoints = Readonly<Record<string, Point>>;
+
+/** Where the points of a linkage stand, or by how much it does not close. */
+export type LinkageOutcome =
+  | { readonly outcome: 'closes'; readonly points: NamedPoints; readonly slack: number }
+  | {
+      readonly outcome: 'does-not-close';
+      /** Length by which the loci of `at` fail to meet, or a spare bar fails to fit. */
+      readonly by: number;
+      /** The points that the failing step should have placed; empty for a spare bar. */
+      readonly at: readonly string[];
+      /** The linkage as far as it can be laid out. */
+      readonly points: NamedPoints;
+    };
+
+export interface SolveOptions {
+  /** The assembly, from `branchOf`; that of the starting pose if left out. */
+  readonly branch?: Int8Array;
+  /** The pose from which Newton's iteration sets out, where the plan needs it. */
+  readonly from?: ArrayLike<number>;
+}
+
+/** A new copy of the starting pose: x, y of each point in the order of the linkage's own. */
+export function startPose({ model }: Plan): Float64Array {
+  return model.start.slice();
+}
+
+/** The assembly that a pose belongs to: for each step 1 (left, ahead) or −1 (right, behind). */
+export function branchOf(plan: Plan, pose: ArrayLike<number> = plan.model.start): Int8Array {
+  return branchIn(plan, pose);
+}
+
+/**
+ * Place every point for a drive, in `pose`, without allocating: the step of an animation.
+ *
+ * `pose` comes from `startPose` and is written over; Newton's steps set out from it, so a drive
+ * should move on in small steps. Gives 0, or the length by which the linkage does not close, when
+ * the points stand as far as it can be laid out. Throws `RangeError` for a drive of another length
+ * than the drivers ask for, or not finite.
+ */
+export function placeLinkage(
+  plan: Plan,
+  drive: ArrayLike<number>,
+  branch: Int8Array,
+  pose: Float64Array,
+): number {
+  requireDrive('placeLinkage', plan, drive);
+  const slack = runSteps(plan, drive, { branch, expected: undefined }, pose);
+  return slack < 0 ? -slack : 0;
+}
+
+/**
+ * As `placeLinkage`, on the assembly that carries on the way from `before` to `now`: at a change
+ * point the points keep their direction. `branch` is written over with the assembly chosen.
+ */
+export function carryOnLinkage(
+  plan: Plan,
+  drive: ArrayLike<number>,
+  before: Float64Array,
+  now: Float64Array,
+  branch: Int8Array,
+  pose: Float64Array,
+): number {
+  requireDrive('carryOnLinkage', plan, drive);
+  for (let k = 0; k < pose.length; k += 1) pose[k] = 2 * at(now, k) - at(before, k);
+  const expected = plan.expected;
+  expected.set(pose);
+  for (const p of plan.model.fixed) {
+    pose[2 * p] = at(now, 2 * p);
+    pose[2 * p + 1] = at(now, 2 * p + 1);
+  }
+  const slack = runSteps(plan, drive, { branch, expected }, pose);
+  return slack < 0 ? -slack : 0;
+}
+
+/**
+ * Where every point stands for a drive, by name.
+ *
+ * The drive has a number for each driver, in order; a led point has two. Outcomes: `closes` with
+ * the least slack of any dyad, `does-not-close` with the length. Throws as `placeLinkage`.
+ */
+export function solveLinkage(
+  plan: Plan,
+  drive: ArrayLike<number>,
+  { branch = branchOf(plan), from = plan.model.start }: SolveOptions = {},
+): LinkageOutcome {
+  requireDrive('solveLinkage', plan, drive);
+  const pose = Float64Array.from(from);
+  const report = new Int32Array(1);
+  const slack = runSteps(plan, drive, { branch, expected: undefined }, pose, report);
+  const points = named(plan, pose);
+  if (slack >= 0) return { outcome: 'closes', points, slack };
+  const step = plan.steps[at(report, 0)];
+  const failing = (step?.points ?? []).map((p) => plan.model.names[p] ?? '');
+  return { outcome: 'does-not-close', by: -slack, at: failing, points };
+}
+
+/** How fast every point moves, or why nothing can be said. */
+export type MotionOutcome =
+  | {
+      readonly outcome: 'moves';
+      readonly points: NamedPoints;
+      readonly velocities: NamedPoints;
+      readonly accelerations: NamedPoints;
+    }
+  | { readonly outcome: 'dead-centre'; readonly points: NamedPoints }
+  | Extract<LinkageOutcome, { readonly outcome: 'does-not-close' }>;
+
+/**
+ * Position, velocity and acceleration of every point, for the drive, its speeds and its
+ * accelerations (a second, or whatever unit of time they are in).
+ *
+ * Outcomes: `moves`; `dead-centre`, where the drive cannot say how the linkage moves on;
+ * `does-not-close`. Throws as `placeLinkage`.
+ */
+export function moveLinkage(
+  plan: Plan,
+  drive: ArrayLike<number>,
+  speeds: ArrayLike<number>,
+  accelerations: ArrayLike<number>,
+  options: SolveOptions = {},
+): MotionOutcome {
+  requireDrive('moveLinkage', plan, speeds);
+  requireDrive('moveLinkage', plan, accelerations);
+  const placed = solveLinkage(plan, drive, options);
+  if (placed.outcome === 'does-not-close') return placed;
+  const pose = Float64Array.from(
+    plan.model.names.flatMap((name) => [placed.points[name]?.x ?? 0, placed.points[name]?.y ?? 0]),
+  );
+  const velocity = new Float64Array(pose.length);
+  const acceleration = new Float64Array(pose.length);
+  const pivot = rateLinkage(plan, { pose, drive, speeds, accelerations, velocity, acceleration });
+  if (pivot < DEAD_CENTRE) return { outcome: 'dead-centre', points: placed.points };
+  return {
+    outcome: 'moves',
+    points: placed.points,
+    velocities: named(plan, velocity),
+    accelerations: named(plan, acceleration),
+  };
+}
+
+/** A pose with its drive, and room for the rates. */
+export interface RatedPose {
+  readonly pose: Float64Array;
+  readonly drive: ArrayLike<number>;
+  readonly speeds: ArrayLike<number>;
+  readonly accelerations: ArrayLike<number>;
+  readonly velocity: Float64Array;
+  readonly acceleration: Float64Array;
+}
+
+/**
+ * Write velocity and acceleration of every point of a placed pose, without allocating. Gives the
+ * smallest scaled pivot of the equations: under 1e-9 is a dead centre, and the rates say nothing.
+ */
+export function rateLinkage(plan: Plan, rated: RatedPose): number {
+  const first = runRates(plan, 1, rated, rated.velocity);
+  return Math.min(first, runRates(plan, 2, rated, rated.acceleration));
+}
+
+function named({ model }: Plan, values: ArrayLike<number>): NamedPoints {
+  return Object.fromEntries(
+    model.names.map((name, k) => [name, { x: at(values, 2 * k), y: at(values, 2 * k + 1) }]),
+  );
+}
+
+function requireDrive(caller: string, { model }: Plan, drive: ArrayLike<number>): void {
+  if (drive.length !== model.driveLength) {
+    throw new RangeError(
+      `${caller}: drive has ${drive.length} numbers; expected ${model.driveLength}`,
+    );
+  }
+  for (let k = 0; k < drive.length; k += 1) requireFinite(caller, 'drive', at(drive, k));
+}

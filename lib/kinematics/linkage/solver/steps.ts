@@ -1,0 +1,176 @@
+import { at } from '@/lib/numeric/at';
+import {
+  layLocus,
+  meetCircles,
+  meetGroove,
+  meetGrooves,
+} from '@/lib/kinematics/linkage/solver/loci';
+import type { Locus, Method } from '@/lib/kinematics/linkage/solver/plan';
+
+/** Where the parts of the scratch array lie: two loci and two meeting points. */
+const FIRST = 0;
+const SECOND = 4;
+const FOUND = 8;
+export const SCRATCH_LENGTH = 12;
+
+/** How one of two assemblies is chosen: the sign of step `k`, or what lies nearest to `expected`. */
+export interface Choice {
+  readonly branch: Int8Array;
+  readonly expected: Float64Array | undefined;
+}
+
+/**
+ * Settle the points of one step in `pose`; gives its slack, negative by as much as it does not
+ * close, and the largest number where nothing can fail. Branch 1 is left or ahead, −1 right or behind.
+ */
+export function takeStep(
+  method: Exclude<Method, { kind: 'solve' }>,
+  k: number,
+  pose: Float64Array,
+  drive: ArrayLike<number>,
+  choice: Choice,
+  scratch: Float64Array,
+): number {
+  switch (method.kind) {
+    case 'meet':
+      return takeMeet(method, k, pose, choice, scratch);
+    case 'carry':
+      return takeCarry(method, pose);
+    case 'turn': {
+      const { distance, angle, p } = method;
+      const direction = at(drive, angle.drive) + angle.shift;
+      pose[2 * p] = at(pose, 2 * angle.a) + distance.length * Math.cos(direction);
+      pose[2 * p + 1] = at(pose, 2 * angle.a + 1) + distance.length * Math.sin(direction);
+      return Number.MAX_VALUE;
+    }
+    case 'run': {
+      const { slide, reach } = method;
+      layLocus(slide, slide.p, pose, scratch, FIRST, 0, 0);
+      const along = at(drive, reach.drive);
+      pose[2 * slide.p] = at(scratch, FIRST) + along * at(scratch, FIRST + 2);
+      pose[2 * slide.p + 1] = at(scratch, FIRST + 1) + along * at(scratch, FIRST + 3);
+      return Number.MAX_VALUE;
+    }
+    case 'aim':
+      return takeAim(method, k, pose, choice);
+    case 'shift':
+      return takeShift(method, k, pose, drive, choice, scratch);
+  }
+}
+
+function takeMeet(
+  { p, first, second }: Extract<Method, { kind: 'meet' }>,
+  k: number,
+  pose: Float64Array,
+  choice: Choice,
+  scratch: Float64Array,
+): number {
+  layLocus(first, p, pose, scratch, FIRST, 0, 0);
+  layLocus(second, p, pose, scratch, SECOND, 0, 0);
+  return settle(first, second, p, k, pose, choice, scratch);
+}
+
+function takeCarry({ rigid }: Extract<Method, { kind: 'carry' }>, pose: Float64Array): number {
+  const { p, a, b, along, across } = rigid;
+  const x = at(pose, 2 * a);
+  const y = at(pose, 2 * a + 1);
+  const ux = at(pose, 2 * b) - x;
+  const uy = at(pose, 2 * b + 1) - y;
+  pose[2 * p] = x + along * ux - across * uy;
+  pose[2 * p + 1] = y + along * uy + across * ux;
+  return Number.MAX_VALUE;
+}
+
+function takeAim(
+  { pivot, target, off, members }: Extract<Method, { kind: 'aim' }>,
+  k: number,
+  pose: Float64Array,
+  { branch, expected }: Choice,
+): number {
+  const x = at(pose, 2 * pivot);
+  const y = at(pose, 2 * pivot + 1);
+  const dx = at(pose, 2 * target) - x;
+  const dy = at(pose, 2 * target + 1) - y;
+  const away = Math.hypot(dx, dy);
+  const swing = away > 0 ? Math.acos(Math.min(Math.max(off / away, -1), 1)) : 0;
+  const towards = Math.atan2(dy, dx);
+  const lead = members[0];
+  if (expected && lead) {
+    const far = (side: number) =>
+      Math.hypot(
+        x +
+          lead.x * Math.cos(towards + side * swing) -
+          lead.y * Math.sin(towards + side * swing) -
+          at(expected, 2 * lead.p),
+        y +
+          lead.x * Math.sin(towards + side * swing) +
+          lead.y * Math.cos(towards + side * swing) -
+          at(expected, 2 * lead.p + 1),
+      );
+    branch[k] = far(1) <= far(-1) ? 1 : -1;
+  }
+  const normal = towards + (at(branch, k) < 0 ? -swing : swing);
+  const cosine = Math.cos(normal);
+  const sine = Math.sin(normal);
+  for (let m = 0; m < members.length; m += 1) {
+    const member = members[m];
+    if (!member) continue;
+    pose[2 * member.p] = x + member.x * cosine - member.y * sine;
+    pose[2 * member.p + 1] = y + member.x * sine + member.y * cosine;
+  }
+  return away - Math.abs(off);
+}
+
+function takeShift(
+  { p, q, first, second, distance, angle }: Extract<Method, { kind: 'shift' }>,
+  k: number,
+  pose: Float64Array,
+  drive: ArrayLike<number>,
+  choice: Choice,
+  scratch: Float64Array,
+): number {
+  const direction = at(drive, angle.drive) + angle.shift;
+  const dx = distance.length * Math.cos(direction);
+  const dy = distance.length * Math.sin(direction);
+  const circleSecond = first.kind === 'slide' && second.kind === 'distance';
+  const own = circleSecond ? SECOND : FIRST;
+  layLocus(first, p, pose, scratch, own, 0, 0);
+  layLocus(second, q, pose, scratch, circleSecond ? FIRST : SECOND, -dx, -dy);
+  const slack = circleSecond
+    ? settle(second, first, p, k, pose, choice, scratch)
+    : settle(first, second, p, k, pose, choice, scratch);
+  pose[2 * q] = at(pose, 2 * p) + dx;
+  pose[2 * q + 1] = at(pose, 2 * p + 1) + dy;
+  return slack;
+}
+
+/** Put `p` on one of the meeting points of the two loci laid out in `scratch`. */
+function settle(
+  first: Locus,
+  second: Locus,
+  p: number,
+  k: number,
+  pose: Float64Array,
+  { branch, expected }: Choice,
+  scratch: Float64Array,
+): number {
+  scratch[FOUND] = scratch[FOUND + 2] = at(pose, 2 * p);
+  scratch[FOUND + 1] = scratch[FOUND + 3] = at(pose, 2 * p + 1);
+  const slack =
+    second.kind === 'distance'
+      ? meetCircles(scratch, FIRST, SECOND, FOUND)
+      : first.kind === 'distance'
+        ? meetGroove(scratch, FIRST, SECOND, FOUND)
+        : meetGrooves(scratch, FIRST, SECOND, FOUND);
+  if (expected) {
+    const ex = at(expected, 2 * p);
+    const ey = at(expected, 2 * p + 1);
+    const left = Math.hypot(at(scratch, FOUND) - ex, at(scratch, FOUND + 1) - ey);
+    const right = Math.hypot(at(scratch, FOUND + 2) - ex, at(scratch, FOUND + 3) - ey);
+    branch[k] = left <= right ? 1 : -1;
+  }
+  const from = at(branch, k) < 0 ? FOUND + 2 : FOUND;
+  pose[2 * p] = at(scratch, from);
+  pose[2 * p + 1] = at(scratch, from + 1);
+  return slack;
+}
