@@ -53,6 +53,7 @@ export type MarkName =
   | 'moving-pivot'
   | 'centre-mark'
   | 'arrowhead'
+  | 'sense'
   | 'pen'
   | 'stylus'
   | 'dot'

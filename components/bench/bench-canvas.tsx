@@ -1,0 +1,93 @@
+'use client';
+
+import type Konva from 'konva/lib/Core';
+import 'konva/lib/shapes/Circle';
+import { useEffect, useRef, useState } from 'react';
+import { Circle, Layer, Stage } from 'react-konva/lib/ReactKonvaCore';
+import type { BenchStore } from './bench-store';
+import { onThemeChange, readInk } from './colours';
+import { createPainter } from './painter';
+import { takeHold } from './take-hold';
+import { useShown } from './use-bench';
+import { pixelAt, viewOf, type Zoom } from './view';
+
+/** A fingertip on the page, px. */
+const fingertip = 22;
+
+interface BenchCanvasProps {
+  readonly store: BenchStore;
+  readonly width: number;
+  readonly height: number;
+  readonly zoom: Zoom;
+  readonly onPan: (shareX: number, shareY: number) => void;
+  readonly onReady: () => void;
+}
+
+/**
+ * The drawing on a canvas. Every frame goes from the store to the canvas without React; React only
+ * knows where the handles are when the mechanism itself is changed.
+ */
+export function BenchCanvas({ store, width, height, zoom, onPan, onReady }: BenchCanvasProps) {
+  const shown = useShown(store);
+  const drawing = useRef<Konva.Layer>(null);
+  const holds = useRef<Konva.Layer>(null);
+  const [themes, setThemes] = useState(0);
+  const view = viewOf(shown.frame, width, height, zoom);
+  const handles = shown.model.handles(shown.drive);
+
+  useEffect(() => onThemeChange(() => setThemes((count) => count + 1)), []);
+  useEffect(() => {
+    document.fonts?.ready.then(() => setThemes((count) => count + 1)).catch(() => undefined);
+  }, []);
+
+  useEffect(() => {
+    const [layer, holdLayer] = [drawing.current, holds.current];
+    const container = layer?.getStage()?.container();
+    if (!layer || !holdLayer || !container) return;
+    layer.destroyChildren();
+    const painter = createPainter(layer);
+    const ink = readInk(container);
+    const paint = () => {
+      const { model, frame, showing, ...state } = store.moment();
+      const now = viewOf(frame, width, height, zoom);
+      painter.paint(model.scene(state, showing), now, ink);
+      for (const { id, at } of model.handles(state.drive)) {
+        holdLayer.findOne(`#${CSS.escape(id)}`)?.position(pixelAt(now, at));
+      }
+    };
+    paint();
+    onReady();
+    return store.onFrame(paint);
+  }, [store, width, height, zoom, themes, onReady]);
+
+  return (
+    <Stage
+      width={width}
+      height={height}
+      onPointerDown={(event) => {
+        const stage = event.target.getStage();
+        if (event.target === stage && zoom.factor > 1) takeHold.ofGround(stage, event.evt, onPan);
+      }}
+    >
+      <Layer ref={drawing} listening={false} />
+      <Layer ref={holds}>
+        {handles.map((handle) => (
+          <Circle
+            key={handle.id}
+            id={handle.id}
+            {...pixelAt(view, handle.at)}
+            radius={Math.max(fingertip, handle.reach * view.scale)}
+            fill="transparent"
+            onPointerEnter={(event) => takeHold.hover(event.target.getStage(), true)}
+            onPointerLeave={(event) => takeHold.hover(event.target.getStage(), false)}
+            onPointerDown={(event) =>
+              takeHold.ofHandle(event.target.getStage(), event.evt, store, handle, () =>
+                viewOf(store.moment().frame, width, height, zoom),
+              )
+            }
+          />
+        ))}
+      </Layer>
+    </Stage>
+  );
+}

@@ -1,0 +1,72 @@
+import { write, writeNumber } from '@/lib/quantities/write';
+import type { BenchSettings } from './bench-spec';
+
+type Units = BenchSettings['units'];
+
+const millimetresInAnInch = 25.4;
+
+/**
+ * A length as it is read off a drawing: millimetres to a tenth, inches to a hundredth.
+ *
+ * @example lengthText(79.375, 'inch') // → '3.13 in'
+ */
+export function lengthText(mm: number, units: Units): string {
+  return units === 'inch'
+    ? `${fixedNumber(mm / millimetresInAnInch, 2)} in`
+    : `${fixedNumber(mm, 1)} mm`;
+}
+
+/**
+ * A length as it is set by a rule: millimetres without needless places, inches and fractions.
+ *
+ * @example ruleText(79.375, 'inch') // → '3 1/8 in'
+ */
+export function ruleText(mm: number, units: Units): string {
+  return units === 'inch' ? write(mm / millimetresInAnInch, 'in') : write(mm, 'mm');
+}
+
+/** A number with just these places and a true minus sign, so that its width stays as it turns. */
+export function fixedNumber(value: number, places: number): string {
+  const text = Math.abs(value).toFixed(places);
+  return value < 0 && Number(text) !== 0 ? `−${text}` : text;
+}
+
+/** A number with as many places as it needs, `places` of them at most. */
+export function shortNumber(value: number, places: number): string {
+  return writeNumber(value, places);
+}
+
+/** Radians as degrees in words. */
+export function angleText(angle: number, places = 1): string {
+  return `${fixedNumber(degrees(angle), places)}°`;
+}
+
+/** Radians as degrees. */
+export function degrees(angle: number): number {
+  return (angle * 180) / Math.PI;
+}
+
+/** Degrees as radians. */
+export function radians(angle: number): number {
+  return (angle * Math.PI) / 180;
+}
+
+/** mm as the number shown in the learner's unit. */
+export function shownLength(mm: number, units: Units): number {
+  return units === 'inch' ? mm / millimetresInAnInch : mm;
+}
+
+/** The number shown in the learner's unit as mm. */
+export function lengthFromShown(shown: number, units: Units): number {
+  return units === 'inch' ? shown * millimetresInAnInch : shown;
+}
+
+/** The name of the unit lengths are shown in. */
+export function lengthUnit(units: Units): 'mm' | 'in' {
+  return units === 'inch' ? 'in' : 'mm';
+}
+
+/** The nearest multiple of `step`. */
+export function toStep(value: number, step: number): number {
+  return Math.round(value / step) * step;
+}
