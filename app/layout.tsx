@@ -1,7 +1,7 @@
 import type { Metadata, Viewport } from 'next';
 import localFont from 'next/font/local';
-import { connection } from 'next/server';
-import { Providers } from './_components/providers';
+import { currentViewer } from '@/lib/auth/viewer';
+import { QueryProvider } from '@/lib/browser/query-provider';
 import { SiteFooter } from './_components/site-footer';
 import { SiteHeader } from './_components/site-header';
 import { SkipLink } from './_components/skip-link';
@@ -48,17 +48,18 @@ export const viewport: Viewport = {
 };
 
 export default async function RootLayout({ children }: Readonly<{ children: React.ReactNode }>) {
-  // A nonce never reaches a page made at build time: every document is made when it is asked for.
-  await connection();
+  // Reading the session also makes every document when it is asked for: a nonce never reaches a
+  // page made at build time.
+  const viewer = await currentViewer();
   return (
     <html lang="en-GB" className={`${besley.variable} ${text.variable} ${mono.variable}`}>
       <body>
         <SkipLink />
-        <Providers>
-          <SiteHeader viewer={null} />
+        <QueryProvider>
+          <SiteHeader viewer={viewer} />
           {children}
           <SiteFooter />
-        </Providers>
+        </QueryProvider>
       </body>
     </html>
   );

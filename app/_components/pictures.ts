@@ -1,3 +1,5 @@
+import { centreDistance } from '@/lib/kinematics/gear/mesh';
+import type { DriverAndDriven } from '@/lib/kinematics/train/ratio';
 import type { Arbor, BenchName, BenchSpec, FreeTrainSpec } from '@/lib/scene/bench-spec';
 
 const MODULE = 4;
@@ -7,7 +9,10 @@ function inLine(wheels: readonly (readonly number[])[]): readonly Arbor[] {
   let x = 0;
   let handsOn = 0;
   return wheels.map((teeth, index) => {
-    if (index > 0) x += (MODULE * (handsOn + (teeth[0] ?? 0))) / 2;
+    const takes = teeth[0] ?? 0;
+    if (index > 0) {
+      x += centreDistance({ module: MODULE, firstTeeth: handsOn, secondTeeth: takes });
+    }
     handsOn = teeth.at(-1) ?? 0;
     return { x, y: 0, wheels: teeth.map((count) => ({ teeth: count })), fast: true };
   });
@@ -18,8 +23,28 @@ function trainOf(...wheels: readonly (readonly number[])[]): FreeTrainSpec {
   return { bench: 'train', layout: 'free', module: MODULE, arbors: inLine(wheels), crank: 0 };
 }
 
-/** The train on the front page: a small wheel drives a large one, twice over. */
-export const landingTrain = trainOf([12], [36, 14], [28]);
+/** A train of pairs: each driven wheel sits fast beside the next driver. */
+function trainOfPairs(pairs: readonly DriverAndDriven[]): FreeTrainSpec {
+  const beside = (index: number) => (pairs[index + 1] ? [pairs[index + 1]?.[0] ?? 0] : []);
+  return trainOf(
+    [pairs[0]?.[0] ?? 0],
+    ...pairs.map(([, driven], index) => [driven, ...beside(index)]),
+  );
+}
+
+/** The pairs of the train on the front page: a small wheel drives a large one, twice over. */
+export const landingPairs: readonly DriverAndDriven[] = [
+  [12, 36],
+  [14, 28],
+];
+
+/** The train on the front page. */
+export const landingTrain = trainOfPairs(landingPairs);
+
+/** The same train in words: "12 on 36, and beside that 14 on 28". */
+export const landingWords = landingPairs
+  .map(([driver, driven]) => `${driver} teeth on ${driven}`)
+  .join(', and fast beside that ');
 
 const trammel: BenchSpec = {
   bench: 'trammel',

@@ -1,10 +1,12 @@
 import Link from 'next/link';
+import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { Wordmark } from '@/components/ui/wordmark';
 import { NavLinks } from './nav-links';
 import { linksFor, type NavigationViewer } from './navigation';
+import { UnitSwitch } from './unit-switch';
 
 interface SiteHeaderProps {
-  readonly viewer: NavigationViewer | null;
+  readonly viewer: (NavigationViewer & { readonly units: UnitSystem }) | null;
 }
 
 const account = [{ href: '/account', label: 'Account' }];
@@ -24,6 +26,7 @@ export function SiteHeader({ viewer }: SiteHeaderProps) {
           className="order-last w-full sm:order-none sm:w-auto"
         />
         <div className="ml-auto flex items-center gap-4">
+          {viewer ? <UnitSwitch units={viewer.units} /> : null}
           <NavLinks links={viewer ? account : signIn} label="Account" />
         </div>
       </div>

@@ -4,6 +4,7 @@ import { ButtonLink } from '@/components/ui/button';
 import { Page } from '@/components/ui/page';
 import { PageHeading } from '@/components/ui/page-heading';
 import { Section } from '@/components/ui/panel';
+import { pegRule } from '@/lib/retention/peg';
 
 export const metadata: Metadata = { title: 'For instructors' };
 
@@ -43,13 +44,9 @@ export default function ForInstructorsPage() {
         ))}
       </ul>
       <Section title="How a peg goes home">
-        <p className="mb-3 max-w-measure">
-          Each skill has a peg. It goes home when three of the learner’s last four finished turns at
-          that skill were right without help, on two different days at least. One lucky evening is
-          not enough, and no setting changes that.
-        </p>
-        <p className="max-w-measure">
-          A peg that has been left alone for long begins to lift: it is due again.
+        <p className="mb-3 max-w-measure">{pegRule}</p>
+        <p className="max-w-measure text-pencil">
+          One lucky evening is not enough, and no setting changes that.
         </p>
       </Section>
       <Section title="How to begin">

@@ -2,7 +2,7 @@ import type { PegView } from '@/lib/schemas/round';
 import { PegRail } from './peg-rail';
 import { pegWords } from './peg-words';
 
-/** Every skill on a line of its own: its peg, its name, its state in words and what that rests on. */
+/** Every skill on a line of its own: its peg, its name, and in words how it stands and why. */
 export function PegList({ pegs }: Readonly<{ pegs: readonly PegView[] }>) {
   return (
     <ul className="divide-y divide-rule border-y border-rule">
@@ -12,8 +12,7 @@ export function PegList({ pegs }: Readonly<{ pegs: readonly PegView[] }>) {
           <span className="min-w-0">
             <span className="block font-semibold">{peg.name}</span>
             <span className="block text-[0.9375rem] text-pencil">
-              {pegWords[peg.state]}
-              {peg.detail ? `: ${peg.detail}` : ''}
+              {peg.detail || pegWords[peg.state]}
             </span>
           </span>
         </li>

@@ -73,13 +73,17 @@ describe('a rail in words', () => {
 });
 
 describe('the list of pegs', () => {
-  it('says of each skill how far it is and what that rests on', () => {
+  it('says of each skill how it stands, in words', () => {
     render(
       <PegList
-        pegs={[{ ...peg('started', 'Ratio of a train'), detail: '2 of the last 4 turns right' }]}
+        pegs={[
+          { ...peg('started', 'Ratio of a train'), detail: 'Two right so far, one more to go.' },
+          { ...peg('open', 'Direction'), detail: '' },
+        ]}
       />,
     );
     expect(screen.getByText('Ratio of a train')).toBeVisible();
-    expect(screen.getByText('peg started: 2 of the last 4 turns right')).toBeVisible();
+    expect(screen.getByText('Two right so far, one more to go.')).toBeVisible();
+    expect(screen.getByText('open hole')).toBeVisible();
   });
 });

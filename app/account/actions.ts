@@ -1,0 +1,49 @@
+'use server';
+
+import { revalidatePath } from 'next/cache';
+import { passwordSentence } from '@/app/_components/password-sentence';
+import { readForm } from '@/app/_components/read-form';
+import type { FormState } from '@/components/ui/form-state';
+import { requireViewer } from '@/lib/auth/viewer';
+import { changePassword, updateAccount } from '@/lib/data/account';
+import { passwordChangeSchema, profileSchema } from '@/lib/schemas/person';
+
+/** Changes name, time zone and units of whoever is signed in. */
+export async function saveProfile(_state: FormState, form: FormData): Promise<FormState> {
+  const viewer = await requireViewer();
+  const reading = readForm(form, profileSchema);
+  if (!reading.ok) return reading.state;
+  await updateAccount(viewer, reading.data);
+  revalidatePath('/', 'layout');
+  return { outcome: 'done', message: 'Saved.', values: reading.values };
+}
+
+/** Changes the password of whoever is signed in. */
+export async function savePassword(_state: FormState, form: FormData): Promise<FormState> {
+  const viewer = await requireViewer();
+  const reading = readForm(form, passwordChangeSchema);
+  if (!reading.ok) return reading.state;
+  const { currentPassword, newPassword } = reading.data;
+  const change = await changePassword(viewer, { current: currentPassword, next: newPassword });
+  switch (change.outcome) {
+    case 'changed':
+      return {
+        outcome: 'done',
+        message: 'Your password is changed. You are signed out on every other device.',
+      };
+    case 'throttled':
+      return { outcome: 'refused', message: 'That was tried too often. Wait a while, then go on.' };
+    case 'wrong password':
+      return {
+        outcome: 'refused',
+        message: 'Not changed.',
+        errors: { currentPassword: 'That is not the password you have now.' },
+      };
+    case 'refused':
+      return {
+        outcome: 'refused',
+        message: 'Not changed.',
+        errors: { newPassword: passwordSentence(change.complaint) },
+      };
+  }
+}

@@ -1,0 +1,38 @@
+import type { Metadata } from 'next';
+import { notFound } from 'next/navigation';
+import { ActionForm } from '@/components/ui/action-form';
+import { Page } from '@/components/ui/page';
+import { PageHeading } from '@/components/ui/page-heading';
+import { Section } from '@/components/ui/panel';
+import { requireViewer } from '@/lib/auth/viewer';
+import { findAccount } from '@/lib/data/account';
+import { savePassword, saveProfile } from './actions';
+import { passwordFields, profileFields } from './_components/fields';
+import { SignOut } from './_components/sign-out';
+
+export const metadata: Metadata = { title: 'Account' };
+
+export default async function AccountPage() {
+  const viewer = await requireViewer();
+  const account = await findAccount(viewer);
+  if (account === null) notFound();
+  return (
+    <Page width="narrow">
+      <PageHeading eyebrow={account.email}>Account</PageHeading>
+      <Section title="About you">
+        <ActionForm action={saveProfile} fields={profileFields(account)} submit="Save" />
+      </Section>
+      <Section title="Password">
+        <ActionForm
+          action={savePassword}
+          fields={passwordFields}
+          submit="Change the password"
+          variant="secondary"
+        />
+      </Section>
+      <Section title="Leave">
+        <SignOut personId={viewer.personId} />
+      </Section>
+    </Page>
+  );
+}

@@ -1,0 +1,96 @@
+'use client';
+
+import clsx from 'clsx';
+import { useSearchParams } from 'next/navigation';
+import { Button } from '@/components/ui/button';
+import { Loading } from '@/components/ui/loading';
+import { Notice } from '@/components/ui/notice';
+import { Empty } from '@/components/ui/panel';
+import { sentenceFor } from '@/lib/browser/problem';
+import { useClassProgress } from '@/lib/browser/use-class-progress';
+import type { ClassProgress as Progress } from '@/lib/schemas/class-progress';
+import { ExercisesTable } from './exercises-table';
+import { LessonsTable } from './lessons-table';
+
+/** The lesson opened, kept in the address so that it can be handed on and gone back from. */
+function openLesson(lessonId: string | null): void {
+  window.history.pushState(null, '', lessonId === null ? '?' : `?lesson=${lessonId}`);
+}
+
+/** A class's progress, fetched by the page: all lessons, or one opened to its exercises. */
+export function ClassProgress({ classId }: Readonly<{ classId: string }>) {
+  const { data, error, refetch } = useClassProgress(classId);
+  if (data) return <ProgressTables progress={data} />;
+  if (!error) return <Loading lines={6} />;
+  return (
+    <>
+      <Notice tone="wrong" role="alert" title="The progress could not be fetched.">
+        {sentenceFor(error)}
+      </Notice>
+      <Button variant="secondary" onClick={() => void refetch()}>
+        Try again
+      </Button>
+    </>
+  );
+}
+
+function ProgressTables({ progress }: Readonly<{ progress: Progress }>) {
+  const opened = useSearchParams().get('lesson');
+  const lesson = progress.lessons.find((one) => one.lessonId === opened);
+  if (progress.lessons.length === 0) {
+    return (
+      <Empty title="Nothing is set yet">
+        Set a lesson below, and everybody’s pegs for it appear here.
+      </Empty>
+    );
+  }
+  if (progress.learners.length === 0) {
+    return (
+      <Empty title="Nobody learns in this class yet">
+        Once the administrator has put somebody into it, their pegs appear here.
+      </Empty>
+    );
+  }
+  return (
+    <>
+      <LessonChoice progress={progress} opened={lesson?.lessonId ?? null} />
+      {lesson ? (
+        <ExercisesTable progress={progress} lesson={lesson} />
+      ) : (
+        <LessonsTable progress={progress} onOpen={openLesson} />
+      )}
+    </>
+  );
+}
+
+interface LessonChoiceProps {
+  readonly progress: Progress;
+  readonly opened: string | null;
+}
+
+function LessonChoice({ progress, opened }: LessonChoiceProps) {
+  const choices = [
+    { id: null, title: 'All lessons' },
+    ...progress.lessons.map(({ lessonId, title }) => ({ id: lessonId, title })),
+  ];
+  return (
+    <div role="group" aria-label="What is shown" className="mb-3 flex flex-wrap gap-2 print:hidden">
+      {choices.map(({ id, title }) => (
+        <button
+          key={title}
+          type="button"
+          aria-pressed={id === opened}
+          onClick={() => openLesson(id)}
+          className={clsx(
+            'min-h-11 rounded border px-3.5 text-base',
+            id === opened
+              ? 'border-ink bg-board font-semibold text-ink'
+              : 'border-pencil text-pencil hover:text-ink',
+          )}
+        >
+          {title}
+        </button>
+      ))}
+    </div>
+  );
+}

@@ -1,0 +1,24 @@
+import { z } from 'zod';
+
+/** A new class. */
+export const newClassSchema = z.strictObject({
+  name: z
+    .string()
+    .trim()
+    .min(1, 'Type a name for the class.')
+    .max(100, 'A name may have 100 characters at most.'),
+  timeZone: z.string().min(1).max(60),
+});
+
+/** Somebody to be put into a class. */
+export const newMemberSchema = z.strictObject({
+  personId: z.uuid('Choose somebody from the list.'),
+  role: z.enum(['learner', 'instructor'], 'Choose learner or instructor.'),
+});
+
+/** A lesson set to a class: the date and time are those of the clock on the class's wall. */
+export const newAssignmentSchema = z.strictObject({
+  lessonId: z.string().regex(/^[a-z0-9-]{1,60}$/, 'Choose a lesson from the list.'),
+  dueOn: z.iso.date('Choose a day; it looks like 2026-12-08.'),
+  dueTime: z.iso.time({ precision: -1, error: 'Choose a time; it looks like 18:30.' }),
+});

@@ -1,0 +1,51 @@
+import { z } from 'zod';
+import { unitSystems } from '@/lib/quantities/unit-system';
+
+const name = z
+  .string()
+  .trim()
+  .min(1, 'Type a name.')
+  .max(100, 'A name may have 100 characters at most.');
+
+const email = z
+  .string()
+  .trim()
+  .toLowerCase()
+  .max(254, 'An address may have 254 characters at most.')
+  .pipe(z.email('That is not an address; one looks like you@example.org.'));
+
+const timeZone = z
+  .string()
+  .refine(isTimeZone, 'Choose a time zone from the list, such as Europe/London.');
+
+function isTimeZone(zone: string): boolean {
+  try {
+    new Intl.DateTimeFormat('en', { timeZone: zone });
+    return true;
+  } catch {
+    return false;
+  }
+}
+
+const units = z.enum(unitSystems, 'Choose millimetres or inches.');
+
+/** What an administrator says of a new person. */
+export const newPersonSchema = z.strictObject({
+  name,
+  email,
+  timeZone,
+  units,
+  isAdministrator: z.enum(['yes', 'no']).transform((said) => said === 'yes'),
+});
+
+/** What people may change about themselves. */
+export const profileSchema = z.strictObject({ name, timeZone, units });
+
+/** Changing a password: the old one is the proof. */
+export const passwordChangeSchema = z.strictObject({
+  currentPassword: z.string().min(1, 'Type the password you have now.').max(1000),
+  newPassword: z.string().min(1, 'Type a new password.').max(1000, 'That is longer than we take.'),
+});
+
+/** Millimetres or inches. */
+export const unitsSchema = units;
