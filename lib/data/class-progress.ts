@@ -159,16 +159,22 @@ interface MarkRow {
   readonly late: boolean;
 }
 
-/** The best counted attempt of each learner and exercise: right before partly before wrong. */
+/**
+ * The best counted attempt of each learner and exercise: right before partly before wrong, then the
+ * latest. An attempt that counts for two assignments is one attempt, late when it was for both.
+ */
 const markSql = `
-  select distinct on (c.learner_id, i.exercise_id)
-    c.learner_id as "learnerId", i.exercise_id as "exerciseId", a.verdict as mark,
-    a.id as "attemptId", c.late,
-    (count(*) over (partition by c.learner_id, i.exercise_id))::int as attempts
-  from (${enrolled}) e
-  join counted_attempts c on c.learner_id = e.id
-  join assignment_items i on i.id = c.item_id
-  join assignments s on s.id = i.assignment_id and s.class_id = $1 and s.withdrawn_at is null
-  join attempts a on a.id = c.attempt_id
-  order by c.learner_id, i.exercise_id,
+  select distinct on (t.learner_id, a.exercise_id)
+    t.learner_id as "learnerId", a.exercise_id as "exerciseId", a.verdict as mark,
+    a.id as "attemptId", t.late,
+    (count(*) over (partition by t.learner_id, a.exercise_id))::int as attempts
+  from (
+    select c.learner_id, c.attempt_id, bool_and(c.late) as late
+    from (${enrolled}) e
+    join counted_attempts c on c.learner_id = e.id
+    join assignment_items i on i.id = c.item_id
+    join assignments s on s.id = i.assignment_id and s.class_id = $1 and s.withdrawn_at is null
+    group by c.learner_id, c.attempt_id) t
+  join attempts a on a.id = t.attempt_id
+  order by t.learner_id, a.exercise_id,
     array_position(array['right', 'partly', 'wrong'], a.verdict), a.created_at desc`;

@@ -1,0 +1,196 @@
+import 'server-only';
+import { now as presentTime } from '@/lib/clock';
+import { row, rows, transact } from '@/lib/db/query';
+import type { Given } from '@/lib/marking/definition';
+import type { Viewer } from '@/lib/policy/viewer';
+import type { AttemptView, PegView } from '@/lib/schemas/round';
+import { recordAudit } from './audit';
+import { isId, staffOfClass, staffValues } from './class-right';
+import { exerciseTitle, lessonName, lessonOfExercise, type LessonName } from './lesson-titles';
+import { lastRoundsSql, pegViews, skillRounds, skillsOfLesson, type LastRoundRow } from './pegs';
+import { viewAttempt, type KeptMarking } from './round-record';
+
+/** A counted attempt in a list. */
+export interface CountedAttemptListed {
+  readonly attemptId: string;
+  readonly exerciseId: string;
+  readonly title: string;
+  readonly verdict: 'right' | 'partly' | 'wrong';
+  readonly createdAt: string;
+  readonly late: boolean;
+}
+
+/** A learner's work in one class. */
+export interface LearnerInClass {
+  readonly classId: string;
+  readonly className: string;
+  readonly timeZone: string;
+  readonly learnerId: string;
+  readonly name: string;
+  readonly lessons: readonly (LessonName & { readonly pegs: readonly PegView[] })[];
+  /** The attempts that count for the class, the latest first. */
+  readonly attempts: readonly CountedAttemptListed[];
+}
+
+/** A counted attempt with everything about it. */
+export interface AttemptInClass {
+  readonly classId: string;
+  readonly className: string;
+  readonly timeZone: string;
+  readonly learnerId: string;
+  readonly name: string;
+  readonly exerciseId: string;
+  readonly title: string;
+  readonly prompt: string;
+  readonly givens: readonly Given[];
+  readonly units: 'metric' | 'inch';
+  /** What was sent, as it was typed. */
+  readonly response: unknown;
+  readonly attempt: AttemptView;
+  readonly credit: number;
+  readonly unaided: boolean;
+  readonly hintsTaken: number;
+  readonly solutionSeen: boolean;
+  readonly late: boolean;
+  /** When the learner answered by their own clock, if that was away from the network. */
+  readonly answeredAt: string | null;
+}
+
+/**
+ * A learner's work in a class, for its instructors and the administrator, while the learner is
+ * enrolled; null otherwise. An administrator's look is noted in the audit log.
+ */
+export async function findLearnerInClass(
+  viewer: Viewer,
+  classId: string,
+  learnerId: string,
+  now: Date = presentTime(),
+): Promise<LearnerInClass | null> {
+  if (!isId(classId) || !isId(learnerId)) return null;
+  const found = await row<LearnerRow>(learnerSql, [...staffValues(viewer, classId), learnerId]);
+  if (found === null) return null;
+  await noteLook(viewer, classId, 'learner', learnerId);
+  const { personTimeZone, set, attempts, ...rest } = found;
+  const lessonIds = [
+    ...new Set(set.flatMap((item) => item.lessonId ?? lessonOfExercise(item.exerciseId) ?? [])),
+  ];
+  const skills = lessonIds.flatMap(skillsOfLesson);
+  const rounds = skillRounds(await rows<LastRoundRow>(lastRoundsSql, [learnerId, skills]));
+  return {
+    ...rest,
+    lessons: lessonIds.map((lessonId) => ({
+      ...lessonName(lessonId),
+      pegs: pegViews(skillsOfLesson(lessonId), rounds, personTimeZone, now),
+    })),
+    attempts: attempts.map((one) => ({
+      ...one,
+      title: exerciseTitle(one.exerciseId),
+      createdAt: new Date(one.createdAt).toISOString(),
+    })),
+  };
+}
+
+/**
+ * An attempt that counts for an assignment of the class, for its instructors and the administrator;
+ * null otherwise. All of it is as it was stored. An administrator's look is noted in the audit log.
+ */
+export async function findAttemptInClass(
+  viewer: Viewer,
+  classId: string,
+  attemptId: string,
+): Promise<AttemptInClass | null> {
+  if (!isId(classId) || !isId(attemptId)) return null;
+  const found = await row<AttemptRow>(attemptSql, [...staffValues(viewer, classId), attemptId]);
+  if (found === null) return null;
+  await noteLook(viewer, classId, 'attempt', attemptId);
+  const { marking, shown, createdAt, answeredAt, ...rest } = found;
+  return {
+    ...rest,
+    ...shown,
+    attempt: viewAttempt(attemptId, createdAt.toISOString(), marking),
+    answeredAt: answeredAt?.toISOString() ?? null,
+  };
+}
+
+/** Instructors look at their own classes; an administrator's look leaves a line. */
+async function noteLook(
+  viewer: Viewer,
+  classId: string,
+  objectKind: 'learner' | 'attempt',
+  objectId: string,
+): Promise<void> {
+  const teaches = viewer.memberships.some(
+    (one) => one.classId === classId && one.role === 'instructor',
+  );
+  if (teaches) return;
+  await transact((transaction) =>
+    recordAudit(
+      {
+        actorId: viewer.personId,
+        action: "learner's work viewed",
+        objectKind,
+        objectId,
+        classId,
+      },
+      transaction,
+    ),
+  );
+}
+
+interface LearnerRow extends Omit<LearnerInClass, 'lessons' | 'attempts'> {
+  readonly personTimeZone: string;
+  readonly set: readonly { readonly lessonId: string | null; readonly exerciseId: string }[];
+  readonly attempts: readonly Omit<CountedAttemptListed, 'title'>[];
+}
+
+const learnerSql = `
+  select g.id as "classId", g.name as "className", g.time_zone as "timeZone",
+    l.id as "learnerId", p.name, p.time_zone as "personTimeZone",
+    coalesce((
+      select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
+        order by s.due_at, i.position)
+      from assignments s join assignment_items i on i.assignment_id = s.id
+      where s.class_id = g.id and s.withdrawn_at is null), '[]') as set,
+    coalesce((
+      select json_agg(json_build_object('attemptId', a.id, 'exerciseId', a.exercise_id,
+        'verdict', a.verdict, 'createdAt', a.created_at, 'late', c.late) order by a.created_at desc)
+      from (
+        select c.attempt_id, bool_and(c.late) as late from counted_attempts c
+        join assignment_items i on i.id = c.item_id
+        join assignments s on s.id = i.assignment_id and s.class_id = g.id
+        where c.learner_id = l.id and s.withdrawn_at is null group by c.attempt_id) c
+      join attempts a on a.id = c.attempt_id), '[]') as attempts
+  from class_groups g
+  join memberships m on m.class_id = g.id and m.role = 'learner' and m.left_at is null
+  join people p on p.id = m.person_id
+  join learners l on l.person_id = p.id and l.id = $4
+  where ${staffOfClass}`;
+
+interface AttemptRow extends Omit<
+  AttemptInClass,
+  'title' | 'prompt' | 'givens' | 'attempt' | 'answeredAt'
+> {
+  readonly shown: Pick<AttemptInClass, 'title' | 'prompt' | 'givens'>;
+  readonly marking: KeptMarking;
+  readonly createdAt: Date;
+  readonly answeredAt: Date | null;
+}
+
+const attemptSql = `
+  select g.id as "classId", g.name as "className", g.time_zone as "timeZone",
+    l.id as "learnerId", p.name, a.exercise_id as "exerciseId", r.shown, r.units, a.response,
+    a.marking, a.credit, a.unaided, r.hints_taken as "hintsTaken",
+    r.solution_seen_at is not null as "solutionSeen", c.late, a.answered_at as "answeredAt",
+    a.created_at as "createdAt"
+  from class_groups g
+  join memberships m on m.class_id = g.id and m.role = 'learner' and m.left_at is null
+  join people p on p.id = m.person_id
+  join learners l on l.person_id = p.id
+  join attempts a on a.learner_id = l.id and a.id = $4
+  join rounds r on r.id = a.round_id
+  join lateral (
+    select bool_and(c.late) as late from counted_attempts c
+    join assignment_items i on i.id = c.item_id
+    join assignments s on s.id = i.assignment_id and s.class_id = g.id
+    where c.attempt_id = a.id and s.withdrawn_at is null having count(*) > 0) c on true
+  where ${staffOfClass}`;

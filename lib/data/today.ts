@@ -1,0 +1,150 @@
+import 'server-only';
+import { now as presentTime } from '@/lib/clock';
+import { row, rows } from '@/lib/db/query';
+import type { Viewer } from '@/lib/policy/viewer';
+import type { PegView } from '@/lib/schemas/round';
+import { exerciseTitle, lessonName, lessonOfExercise, type LessonName } from './lesson-titles';
+import { listPegs } from './progress';
+import { lessons } from '@/content/exercises/registry';
+
+/** An exercise that is set, and how the viewer stands with it. */
+export interface SetExercise {
+  readonly exerciseId: string;
+  readonly title: string;
+  readonly lesson: LessonName | null;
+  readonly mark: 'none' | 'right' | 'partly' | 'wrong';
+}
+
+/** Work that is set to the viewer. */
+export interface SetWork {
+  readonly assignmentId: string;
+  readonly classId: string;
+  readonly className: string;
+  readonly note: string;
+  readonly dueAt: string;
+  readonly timeZone: string;
+  readonly overdue: boolean;
+  readonly exercises: readonly SetExercise[];
+  readonly done: number;
+}
+
+/** Where the viewer was last. */
+export interface LastPlace {
+  readonly exerciseId: string;
+  readonly title: string;
+  readonly lesson: LessonName;
+  readonly at: string;
+  /** Whether the round there is still open. */
+  readonly open: boolean;
+}
+
+/** A lesson with the viewer's pegs. */
+export interface LessonPegs extends LessonName {
+  readonly pegs: readonly PegView[];
+}
+
+/** What a learner comes to. */
+export interface Today {
+  /** What is set, the next due first; work that is done leaves the list a week after it was due. */
+  readonly set: readonly SetWork[];
+  readonly last: LastPlace | null;
+  readonly lessons: readonly LessonPegs[];
+}
+
+/** What is set, where the viewer was, and the pegs of every lesson. Three queries. */
+export async function findToday(viewer: Viewer, now: Date = presentTime()): Promise<Today> {
+  const [set, last, pegs] = await Promise.all([
+    rows<SetRow>(setSql, [viewer.personId, viewer.learnerId, now]),
+    row<LastRow>(lastSql, [viewer.learnerId]),
+    listPegs(viewer, now),
+  ]);
+  const pegOf = new Map(pegs.map((peg) => [peg.skill, peg]));
+  return {
+    set: set.map((one) => workOf(one, now)),
+    last: last === null ? null : placeOf(last),
+    lessons: lessons.map(({ id, skills }) => ({
+      ...lessonName(id),
+      pegs: skills.flatMap((skill) => pegOf.get(skill) ?? []),
+    })),
+  };
+}
+
+function workOf({ items, dueAt, ...rest }: SetRow, now: Date): SetWork {
+  const exercises = items.map(({ exerciseId, lessonId, mark }) => {
+    const lesson = lessonId ?? lessonOfExercise(exerciseId);
+    return {
+      exerciseId,
+      title: exerciseTitle(exerciseId),
+      lesson: lesson === null ? null : lessonName(lesson),
+      mark,
+    };
+  });
+  const done = exercises.filter(({ mark }) => mark === 'right').length;
+  return {
+    ...rest,
+    dueAt: dueAt.toISOString(),
+    overdue: dueAt <= now && done < exercises.length,
+    exercises,
+    done,
+  };
+}
+
+function placeOf({ exerciseId, at, open }: LastRow): LastPlace | null {
+  const lessonId = lessonOfExercise(exerciseId);
+  if (lessonId === null) return null;
+  return {
+    exerciseId,
+    title: exerciseTitle(exerciseId),
+    lesson: lessonName(lessonId),
+    at: at.toISOString(),
+    open,
+  };
+}
+
+interface SetRow {
+  readonly assignmentId: string;
+  readonly classId: string;
+  readonly className: string;
+  readonly note: string;
+  readonly dueAt: Date;
+  readonly timeZone: string;
+  readonly items: readonly {
+    readonly exerciseId: string;
+    readonly lessonId: string | null;
+    readonly mark: SetExercise['mark'];
+  }[];
+}
+
+const setSql = `
+  select * from (
+    select a.id as "assignmentId", g.id as "classId", g.name as "className", a.note,
+      coalesce(e.due_at, a.due_at) as "dueAt", g.time_zone as "timeZone",
+      (select json_agg(json_build_object('exerciseId', i.exercise_id, 'lessonId', i.lesson_id,
+          'mark', coalesce((
+            select t.verdict from counted_attempts c join attempts t on t.id = c.attempt_id
+            where c.item_id = i.id and c.learner_id = $2
+            order by array_position(array['right', 'partly', 'wrong'], t.verdict) limit 1), 'none'))
+        order by i.position) from assignment_items i where i.assignment_id = a.id) as items
+    from memberships m
+    join class_groups g on g.id = m.class_id and g.archived_at is null
+    join assignments a on a.class_id = g.id and a.withdrawn_at is null and a.opens_at <= $3
+    left join extensions e on e.assignment_id = a.id and e.learner_id = $2
+    where m.person_id = $1 and m.role = 'learner' and m.left_at is null
+      and (not a.for_chosen_learners or exists (
+        select 1 from assignment_learners x
+        where x.assignment_id = a.id and x.learner_id = $2))) work
+  where "dueAt" > $3::timestamptz - interval '7 days' or exists (
+    select 1 from json_array_elements(items) item where item ->> 'mark' <> 'right')
+  order by "dueAt", "assignmentId"`;
+
+interface LastRow {
+  readonly exerciseId: string;
+  readonly at: Date;
+  readonly open: boolean;
+}
+
+const lastSql = `
+  select r.exercise_id as "exerciseId", r.closed_at is null as open,
+    greatest(r.opened_at, (select max(a.created_at) from attempts a where a.round_id = r.id)) as at
+  from rounds r where r.learner_id = $1
+  order by r.opened_at desc limit 1`;
