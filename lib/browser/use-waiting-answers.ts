@@ -2,7 +2,7 @@
 
 import { useQuery, useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { useCallback, useEffect } from 'react';
-import type { AttemptReply } from '@/lib/schemas/round';
+import type { AttemptReply, RoundView } from '@/lib/schemas/round';
 import { sendAttempt } from './exercises';
 import { rememberPegs } from './use-pegs';
 import { queryKeys } from './query-keys';
@@ -27,10 +27,16 @@ export function refreshWaiting(client: QueryClient): Promise<void> {
   return client.invalidateQueries({ queryKey: queryKeys.waiting() });
 }
 
-/** Puts what came back for an attempt where the page's exercises and pegs read it. */
+/**
+ * Puts what came back for an attempt where the page's exercises and pegs read it: wherever its
+ * round is shown, whichever units the reader has switched to since.
+ */
 export function rememberReply(client: QueryClient, personId: string, reply: AttemptReply): void {
-  const { exerciseId, units } = reply.round;
-  client.setQueryData(queryKeys.round(personId, exerciseId, units), reply.round);
+  const { round } = reply;
+  client.setQueriesData<RoundView | null>(
+    { queryKey: queryKeys.rounds(personId, round.exerciseId) },
+    (shown) => (shown?.roundId === round.roundId ? round : shown),
+  );
   rememberPegs(client, personId, reply.pegs);
 }
 
