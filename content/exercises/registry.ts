@@ -7,6 +7,13 @@ import { ovalFromPins } from './drawing-and-copying/oval-from-pins';
 import { pinsForAnOval } from './drawing-and-copying/pins-for-an-oval';
 import { setThePins } from './drawing-and-copying/set-the-pins';
 import { whereThePenStands } from './drawing-and-copying/where-the-pen-stands';
+import { joinTheArbors } from './toothed-wheels/join-the-arbors';
+import { lanternWheel } from './toothed-wheels/lantern-wheel';
+import { middleWheel } from './toothed-wheels/middle-wheel';
+import { rowOfWheels } from './toothed-wheels/row-of-wheels';
+import { turnsThroughPairs } from './toothed-wheels/turns-through-pairs';
+import { wheelThatReaches } from './toothed-wheels/wheel-that-reaches';
+import { whichTrainForTheLantern } from './toothed-wheels/which-train-for-the-lantern';
 
 /** What an exercise shows that a learner can do; the unit of progress. */
 export interface Skill {
@@ -26,6 +33,13 @@ export interface LessonEntry {
 }
 
 const definitions: readonly ExerciseDefinition[] = [
+  middleWheel,
+  lanternWheel,
+  rowOfWheels,
+  turnsThroughPairs,
+  wheelThatReaches,
+  whichTrainForTheLantern,
+  joinTheArbors,
   moveThePenOut,
   ovalFromPins,
   pinsForAnOval,
