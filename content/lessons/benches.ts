@@ -10,13 +10,13 @@ const rightAngle = Math.PI / 2;
 /** Three wheels in a row, each alone on its arbor; the teeth are those of the prediction. */
 function rowOfThree(units: UnitSystem): FreeTrainSpec {
   const teeth = [16, 48, 16];
-  const module = units === 'metric' ? 4 : toMillimetres(1 / 6, units);
+  const size = units === 'metric' ? 4 : toMillimetres(1 / 6, units);
   let x = 0;
   const arbors = teeth.map((count, index) => {
-    if (index > 0) x += (module * ((teeth[index - 1] ?? 0) + count)) / 2;
+    if (index > 0) x += (size * ((teeth[index - 1] ?? 0) + count)) / 2;
     return { x, y: 0, wheels: [{ teeth: count }], fast: true };
   });
-  return { bench: 'train', layout: 'free', module, arbors, crank: 0, units };
+  return { bench: 'train', layout: 'free', module: size, arbors, crank: 0, units };
 }
 
 const benches: Readonly<Record<string, BenchOf>> = {
