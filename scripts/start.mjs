@@ -190,7 +190,11 @@ async function main() {
     : '';
 
   if (!dev) buildIfChanged({ env });
-  const worker = startChild(process.execPath, ['--import', 'tsx', 'scripts/work.ts'], { env });
+  const worker = startChild(
+    process.execPath,
+    ['--conditions=react-server', '--import', 'tsx', 'scripts/work.ts'],
+    { env },
+  );
   started.push(() => stopChild(worker));
   const next = startChild(
     process.execPath,

@@ -49,7 +49,11 @@ export function run(command, args, { env, quiet = false, what = command } = {}) 
 
 /** Runs one of our TypeScript entry points to its end. */
 export function runEntry(script, { env, args = [], what, quiet } = {}) {
-  return run(process.execPath, ['--import', 'tsx', script, ...args], { env, what, quiet });
+  return run(process.execPath, ['--conditions=react-server', '--import', 'tsx', script, ...args], {
+    env,
+    what,
+    quiet,
+  });
 }
 
 /** Starts a child that is ended with us; `ended` resolves with its exit code. */
