@@ -1,6 +1,7 @@
 import type { Metadata, Viewport } from 'next';
 import localFont from 'next/font/local';
 import { currentViewer } from '@/lib/auth/viewer';
+import { WaitingNotice } from '@/components/exercise/waiting-notice';
 import { QueryProvider } from '@/lib/browser/query-provider';
 import { SiteFooter } from './_components/site-footer';
 import { SiteHeader } from './_components/site-header';
@@ -57,6 +58,7 @@ export default async function RootLayout({ children }: Readonly<{ children: Reac
         <SkipLink />
         <QueryProvider>
           <SiteHeader viewer={viewer} />
+          <WaitingNotice personId={viewer?.personId ?? null} signInHref="/sign-in" />
           {children}
           <SiteFooter />
         </QueryProvider>

@@ -76,7 +76,7 @@ function HelpPrice({
       ? 'The third hint gives up this round’s unaided mark.'
       : '';
   return (
-    <p role="status" className="basis-full text-[0.9375rem] text-pencil empty:hidden">
+    <p role="status" className="basis-full text-[0.9375rem] text-pencil">
       {price}
     </p>
   );

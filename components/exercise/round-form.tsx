@@ -56,7 +56,7 @@ export function RoundForm({ round, sending, waiting, onSend }: RoundFormProps) {
         <Button type="submit" aria-disabled={sending || waiting || undefined}>
           {sending ? 'Checking …' : checkWords(round.parts.length)}
         </Button>
-        <p role="status" className="font-semibold text-madder empty:hidden">
+        <p role="status" className="font-semibold text-madder">
           {checked && unanswered.length > 0 ? missingWords(unanswered.map((one) => one.label)) : ''}
         </p>
       </div>

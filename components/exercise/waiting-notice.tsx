@@ -11,7 +11,7 @@ interface WaitingNoticeProps {
   readonly signInHref: string;
 }
 
-const edge = 'mb-6 rounded border border-l-[6px] border-plum bg-paper px-4 py-3 print:hidden';
+const edge = 'mt-4 rounded border border-l-[6px] border-plum bg-paper px-4 py-3 print:hidden';
 
 /**
  * Says that answers wait on this device, delivers this person's own as soon as it can, and tells
@@ -30,7 +30,7 @@ export function WaitingNotice({ personId, signInHref }: WaitingNoticeProps) {
     await refreshWaiting(client);
   };
   return (
-    <div role="status">
+    <div role="status" className="mx-auto w-full max-w-[1148px] px-4 sm:px-6">
       {unsent > 0 ? (
         <div className={edge}>
           <p className="font-semibold text-plum">

@@ -1,6 +1,6 @@
 import 'server-only';
 import type { Transaction } from 'sequelize';
-import { row } from '@/lib/db/query';
+import { row, rows } from '@/lib/db/query';
 import type { ExerciseDefinition, Variant } from '@/lib/marking/definition';
 import type { Marking } from '@/lib/marking/marking';
 import { roundView } from '@/lib/marking/view';
@@ -63,6 +63,34 @@ export function findLatestRecord(
      order by r.closed_at is null desc, r.opened_at desc limit 1`,
     [learnerId, exerciseId, version, units],
     transaction,
+  );
+}
+
+/** Which rounds are wanted: of one version of an exercise, in some units or (null) in any. */
+export interface RecordWanted {
+  readonly exerciseId: string;
+  readonly version: number;
+  readonly units: string | null;
+}
+
+/** The learner's latest round at each of these exercises, an open one first. */
+export function listLatestRecords(
+  learnerId: string,
+  wanted: readonly RecordWanted[],
+): Promise<RoundRecord[]> {
+  return rows<RoundRecord>(
+    `select distinct on (r.exercise_id) ${columns}
+     from unnest($2::text[], $3::int[], $4::text[]) wanted (exercise_id, version, units)
+     join rounds r on r.learner_id = $1 and r.exercise_id = wanted.exercise_id
+       and r.definition_version = wanted.version
+       and (wanted.units is null or r.units = wanted.units)
+     order by r.exercise_id, r.closed_at is null desc, r.opened_at desc`,
+    [
+      learnerId,
+      wanted.map(({ exerciseId }) => exerciseId),
+      wanted.map(({ version }) => version),
+      wanted.map(({ units }) => units),
+    ],
   );
 }
 

@@ -9,7 +9,13 @@ import { hintsTotal } from '@/lib/marking/view';
 import type { Viewer } from '@/lib/policy/viewer';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import type { RoundView } from '@/lib/schemas/round';
-import { findLatestRecord, findRoundRecord, viewRound, type RoundRecord } from './round-record';
+import {
+  findLatestRecord,
+  findRoundRecord,
+  listLatestRecords,
+  viewRound,
+  type RoundRecord,
+} from './round-record';
 import { factsOf, insertFactsSql } from './skill-facts';
 
 /** Which round is wanted. */
@@ -28,6 +34,30 @@ export async function findRound(viewer: Viewer, wanted: RoundWanted): Promise<Ro
   if (definition === undefined) return null;
   const record = await findStanding(viewer, definition, wanted.units ?? viewer.units);
   return record === null ? null : viewRound(definition, record);
+}
+
+/**
+ * The viewer's rounds at several exercises, each as `findRound` would give it, in one query; an
+ * exercise without a round is not among them. Writes nothing.
+ */
+export async function listRounds(
+  viewer: Viewer,
+  exerciseIds: readonly string[],
+  units: UnitSystem = viewer.units,
+): Promise<RoundView[]> {
+  const definitions = exerciseIds.flatMap((id) => exercises.get(id) ?? []);
+  const records = await listLatestRecords(
+    viewer.learnerId,
+    definitions.map(({ id, version, kind }) => ({
+      exerciseId: id,
+      version,
+      units: kind === 'prediction' ? null : units,
+    })),
+  );
+  return records.flatMap((record) => {
+    const definition = exercises.get(record.exerciseId);
+    return definition === undefined ? [] : [viewRound(definition, record)];
+  });
 }
 
 /**

@@ -1,7 +1,6 @@
 import 'katex/dist/katex.min.css';
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
-import { WaitingNotice } from '@/components/exercise/waiting-notice';
 import { BenchLockProvider } from '@/components/lesson/bench-lock';
 import { RuleMargin } from '@/components/lesson/rule-margin';
 import { Page } from '@/components/ui/page';
@@ -38,7 +37,6 @@ export default async function LessonPage({ params }: Props) {
           <PageHeading eyebrow={`Unit ${lesson.unitNumber} · ${lesson.unitTitle}`}>
             {lesson.title}
           </PageHeading>
-          <WaitingNotice personId={personId} signInHref={signInHref} />
           <BenchLockProvider predicted={work.predicted}>
             <Text components={lessonNames(id, work, { personId, units, signInHref })} />
           </BenchLockProvider>

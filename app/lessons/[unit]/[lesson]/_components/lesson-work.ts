@@ -1,7 +1,7 @@
 import 'server-only';
 import { exercises, lessons } from '@/content/exercises/registry';
 import { findLessonProgress } from '@/lib/data/progress';
-import { findRound } from '@/lib/data/rounds';
+import { listRounds } from '@/lib/data/rounds';
 import type { Viewer } from '@/lib/policy/viewer';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import type { PegView, RoundView } from '@/lib/schemas/round';
@@ -36,17 +36,15 @@ export async function findLessonWork(
   const [rounds, progress] =
     viewer === null
       ? [[], null]
-      : await Promise.all([
-          Promise.all(ids.map((exerciseId) => findRound(viewer, { exerciseId, units }))),
-          findLessonProgress(viewer, lessonId),
-        ]);
+      : await Promise.all([listRounds(viewer, ids, units), findLessonProgress(viewer, lessonId)]);
   return {
-    exercises: ids.flatMap((id, index) => {
+    exercises: ids.flatMap((id) => {
       const definition = exercises.get(id);
       if (definition === undefined) return [];
       const { title, skills } = definition;
+      const round = rounds.find((one) => one.exerciseId === id) ?? null;
       const sample = viewer === null ? sampleRound(id, units) : null;
-      return [{ id, title, skills, round: rounds[index] ?? null, sample }];
+      return [{ id, title, skills, round, sample }];
     }),
     predicted: progress?.predicted ?? false,
     pegs: progress?.pegs ?? [],
