@@ -131,21 +131,3 @@ export function meshPhase(
   const rolled = ((fromFirst - firstAngle) * first) / second;
   return fromSecond - Math.PI / second + (mesh.ring ? -rolled : rolled);
 }
-
-/**
- * How far a rack has moved when its pinion stands at `angle`: one pitch circumference a turn.
- *
- * The rack lies below the pinion along x with a tooth space under the centre when the pinion, at
- * angle −π/2, points a tooth down; a pinion turning counter-clockwise drives it towards +x.
- *
- * @throws RangeError for nonsense.
- * @example rackTravel({ module: 3, teeth: 20 }, 2 * Math.PI) // → 188.49555921538757
- */
-export function rackTravel(
-  pinion: { readonly module: number; readonly teeth: number },
-  angle: number,
-): number {
-  requirePositive('rackTravel', 'module', pinion.module);
-  requireCount('rackTravel', 'teeth', pinion.teeth);
-  return (pinion.module * pinion.teeth * requireFinite('rackTravel', 'angle', angle)) / 2;
-}

@@ -1,9 +1,9 @@
-import { bisect } from '@/lib/numeric/bisection';
 import { involute, involuteInverse, pressureAngleAt } from '@/lib/kinematics/gear/involute';
 import type { CompleteGearSpec } from '@/lib/kinematics/gear/proportions';
 import { cuttingRack, filletPoint, undercutDepth } from '@/lib/kinematics/gear/root-fillet';
 import type { CuttingRack } from '@/lib/kinematics/gear/root-fillet';
 import { requirePositive } from '@/lib/numeric/require';
+import { findRoot } from '@/lib/numeric/root';
 
 /** A point of a tooth: its radius, and its angle from the middle of the tooth. */
 export interface ToothPoint {
@@ -105,8 +105,8 @@ function crossing(
     const below = (rack.lastNormal * step) / crossingSteps;
     if (fillet(below).radius < curve.baseRadius) break;
     if (outside(below) < 0) {
-      const found = bisect(outside, below, above);
-      return found.outcome === 'root' ? found.root : below;
+      const found = findRoot(outside, below, above);
+      return found.outcome === 'found' ? found.x : below;
     }
     above = below;
   }
@@ -126,8 +126,8 @@ function lastNormal(
   for (let step = 1; step <= crossingSteps; step += 1) {
     const normal = (joint * step) / crossingSteps;
     if (room(normal) < 0) {
-      const found = bisect(room, (joint * (step - 1)) / crossingSteps, normal);
-      return found.outcome === 'root' ? found.root : 0;
+      const found = findRoot(room, (joint * (step - 1)) / crossingSteps, normal);
+      return found.outcome === 'found' ? found.x : 0;
     }
   }
   return joint;

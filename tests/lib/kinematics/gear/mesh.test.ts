@@ -6,8 +6,8 @@ import {
   meshPhase,
   meshState,
   pitchLineSpeed,
-  rackTravel,
 } from '@/lib/kinematics/gear/mesh';
+import { rackTravel } from '@/lib/kinematics/gear/rack';
 
 const turn = 2 * Math.PI;
 /** How far `angle` lies from the nearest multiple of `step`. */
