@@ -89,6 +89,29 @@ export function written(a: Fraction): string {
 }
 
 /**
+ * The fraction that a written number stands for: `3.14`, `-1.5e-3` or `22/7`.
+ *
+ * @throws RangeError for anything else.
+ * @example readFraction('25.4') // → { numerator: 127n, denominator: 5n }
+ */
+export function readFraction(text: string): Fraction {
+  const over = text.split('/');
+  const [above, below] = [over[0] ?? '', over[1]];
+  if (over.length > 2) throw unreadable(text);
+  return below === undefined ? readDecimal(above) : divide(readDecimal(above), readDecimal(below));
+}
+
+/**
+ * The fraction that a number stands for as it is written down, so that 0.1 is one tenth.
+ *
+ * @throws RangeError for a number that is not finite.
+ * @example decimalFraction(1.27) // → { numerator: 127n, denominator: 100n }
+ */
+export function decimalFraction(value: number): Fraction {
+  return readDecimal(String(value));
+}
+
+/**
  * The greatest whole number that divides both; 0 if both are 0.
  *
  * @example greatestCommonDivisor(24n, 60n) // → 12n
@@ -113,4 +136,19 @@ function whole(name: string, value: number | bigint): bigint {
 
 function bits(value: bigint): number {
   return (value < 0n ? -value : value).toString(2).length;
+}
+
+function readDecimal(text: string): Fraction {
+  const parts = /^\s*([+-]?)(\d*)(?:\.(\d*))?(?:[eE]([+-]?\d{1,3}))?\s*$/.exec(text);
+  const [, sign = '', before = '', after = '', power = '0'] = parts ?? [];
+  if (!parts || before + after === '') throw unreadable(text);
+  const digits = BigInt(before + after) * (sign === '-' ? -1n : 1n);
+  const shift = Number(power) - after.length;
+  return shift >= 0
+    ? lowest(digits * 10n ** BigInt(shift), 1n)
+    : lowest(digits, 10n ** BigInt(-shift));
+}
+
+function unreadable(text: string): RangeError {
+  return new RangeError(`readFraction: text is ${JSON.stringify(text)}; expected a number or a/b`);
 }

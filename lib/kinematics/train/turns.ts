@@ -1,5 +1,5 @@
 import { analyseTrain } from '@/lib/kinematics/train/graph';
-import type { Shares, Train, TrainAnalysis } from '@/lib/kinematics/train/graph';
+import type { Shares, Train, TrainAnalysis, TrainMesh } from '@/lib/kinematics/train/graph';
 import { isZero, toNumber } from '@/lib/numeric/fraction';
 import { requireFinite } from '@/lib/numeric/require';
 
@@ -38,6 +38,20 @@ export function turnsOfTrain(train: Train, drives: Readonly<Record<string, numbe
     requireFinite('turnsOfTrain', `drive of ${body}`, drives[body] ?? Number.NaN),
   );
   return turnsOfAnalysis(analyseTrain(train), values);
+}
+
+/**
+ * The turns of bodies in mesh when some are held and some are driven: `turnsOfTrain` in one breath.
+ *
+ * @throws RangeError as `turnsOfTrain` does.
+ * @example turnsOfMeshes([{ first: 'a', firstTeeth: 20, second: 'b', secondTeeth: 40 }], { a: 4 }).outcome // → 'turns'
+ */
+export function turnsOfMeshes(
+  meshes: readonly TrainMesh[],
+  drives: Readonly<Record<string, number>>,
+  held: readonly string[] = [],
+): TrainTurns {
+  return turnsOfTrain({ meshes, driven: Object.keys(drives), held }, drives);
 }
 
 /**
