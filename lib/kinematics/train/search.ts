@@ -1,7 +1,7 @@
 import { trainProduct } from '@/lib/kinematics/train/ratio';
 import type { DriverAndDriven } from '@/lib/kinematics/train/ratio';
 import { pairedWithin } from '@/lib/kinematics/train/pairing';
-import { areApart, firstFrom, wheelSets } from '@/lib/kinematics/train/wheel-sets';
+import { areApart, firstFrom, gatherWheelSets } from '@/lib/kinematics/train/wheel-sets';
 import type { WheelSet } from '@/lib/kinematics/train/wheel-sets';
 import type { Fraction } from '@/lib/numeric/fraction';
 import { requireCount, requirePositive } from '@/lib/numeric/require';
@@ -77,7 +77,13 @@ export function* searchInPortions(
   const wanted = complete(search);
   const lacking = (search.reuse ? 1 : 2 * stages) - wanted.wheels.length;
   if (lacking > 0) return { outcome: 'too-few-wheels', lacking };
-  const sets = wheelSets(wanted.wheels, stages, wanted.reuse);
+  const gathering = gatherWheelSets(wanted.wheels, stages, wanted.reuse);
+  let gathered = gathering.next();
+  while (!gathered.done) {
+    yield { done: 0 };
+    gathered = gathering.next();
+  }
+  const sets = gathered.value;
   let best: Candidate | null = null;
   for (let index = 0; index < sets.length; index += 1) {
     const driven = sets[index];

@@ -7,6 +7,9 @@ export interface WheelSet {
   readonly teeth: number;
 }
 
+/** Sets gathered between two pauses: a few milliseconds. */
+const portion = 4000;
+
 /**
  * Every set of `size` wheels of a stock, by rising product.
  *
@@ -18,19 +21,35 @@ export function wheelSets(
   size: number,
   reuse: boolean,
 ): readonly WheelSet[] {
-  const sets: WheelSet[] = [];
-  const grow = (from: number, places: readonly number[], product: number, teeth: number): void => {
-    if (places.length === size) {
-      sets.push({ product, places, teeth });
-      return;
-    }
-    for (let place = from; place < stock.length; place += 1) {
-      const count = stock[place] ?? 1;
-      grow(reuse ? place : place + 1, [...places, place], product * count, teeth + count);
-    }
-  };
-  grow(0, [], 1, 0);
-  return sets.sort((a, b) => a.product - b.product || a.teeth - b.teeth);
+  const portions = gatherWheelSets(stock, size, reuse);
+  let step = portions.next();
+  while (!step.done) step = portions.next();
+  return step.value;
+}
+
+/**
+ * The same in portions, each yielding how many sets have been gathered.
+ *
+ * @example gatherWheelSets([10, 20, 30], 2, false).next().done // → true
+ */
+export function* gatherWheelSets(
+  stock: readonly number[],
+  size: number,
+  reuse: boolean,
+): Generator<number, readonly WheelSet[]> {
+  // Sets of one product share a drawer, so that only the products, plain numbers, are sorted.
+  const drawers = new Map<number, WheelSet[]>();
+  let places: readonly number[] | null = Array.from({ length: size }, (_, k) => (reuse ? 0 : k));
+  for (let gathered = 1; places; gathered += 1) {
+    const set = setOf(stock, places);
+    const drawer = drawers.get(set.product);
+    if (drawer) drawer.push(set);
+    else drawers.set(set.product, [set]);
+    places = following(places, stock.length, reuse);
+    if (gathered % portion === 0) yield gathered;
+  }
+  const products = Float64Array.from(drawers.keys()).sort();
+  return Array.from(products, (product) => drawers.get(product) ?? []).flat();
 }
 
 /**
@@ -55,4 +74,29 @@ export function firstFrom(sets: readonly WheelSet[], product: number): number {
  */
 export function areApart(a: WheelSet, b: WheelSet): boolean {
   return a.places.every((place) => !b.places.includes(place));
+}
+
+function setOf(stock: readonly number[], places: readonly number[]): WheelSet {
+  let [product, teeth] = [1, 0];
+  for (const place of places) {
+    product *= stock[place] ?? 1;
+    teeth += stock[place] ?? 0;
+  }
+  return { product, places, teeth };
+}
+
+/** The next choice of rising places, or null after the last. */
+function following(
+  places: readonly number[],
+  stock: number,
+  reuse: boolean,
+): readonly number[] | null {
+  const step = reuse ? 0 : 1;
+  for (let k = places.length - 1; k >= 0; k -= 1) {
+    const next = (places[k] ?? 0) + 1;
+    if (next + (places.length - 1 - k) * step < stock) {
+      return places.map((place, index) => (index < k ? place : next + (index - k) * step));
+    }
+  }
+  return null;
 }
