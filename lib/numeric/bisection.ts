@@ -15,7 +15,7 @@ const maximumHalvings = 110;
  * `curve` must be continuous there; the root is good to the last digit of the larger end.
  *
  * @throws RangeError if an end is no number.
- * @example bisect((x) => x * x - 2, 0, 2) // → { outcome: 'root', root: 1.4142135623730951 }
+ * @example bisect((x) => x * x - 2, 0, 2) // → { outcome: 'root', root: 1.41421356237 }
  */
 export function bisect(curve: (x: number) => number, low: number, high: number): Bisection {
   let a = requireFinite('bisect', 'low', low);

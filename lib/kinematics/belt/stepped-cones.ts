@@ -96,7 +96,7 @@ export function stepForLoop(wanted: {
  * wheels of the step meet.
  *
  * @throws RangeError for nonsense.
- * @example slackOnStep({ driver: 120, driven: 120 }, { centreDistance: 400, lay: 'open', length: 1186 }) // → 9.0088815
+ * @example slackOnStep({ driver: 120, driven: 120 }, { centreDistance: 400, lay: 'open', length: 1186 }) // → 9.0088816
  */
 export function slackOnStep(
   step: ConeStep,

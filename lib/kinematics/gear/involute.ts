@@ -28,7 +28,7 @@ export interface UnwoundCord {
  *
  * @throws RangeError for an angle outside that.
  * Source: any book of gears; Machinery's Handbook tabulates it.
- * @example involute(Math.PI / 9) // → 0.014904383867336446
+ * @example involute(Math.PI / 9) // → 0.0149043838673
  */
 export function involute(angle: number): number {
   requireWithin('involute', 'angle', angle, 0, Math.PI / 2 - Number.EPSILON);
@@ -93,7 +93,7 @@ export function unwindCord(baseRadius: number, unwound: number): UnwoundCord {
  * In radians; at or inside the base circle, where there is no involute, it is 0, the limit.
  *
  * @throws RangeError for a radius that is not positive.
- * @example pressureAngleAt(50, 100) // → 1.0471975511965979
+ * @example pressureAngleAt(50, 100) // → 1.04719755
  */
 export function pressureAngleAt(baseRadius: number, radius: number): number {
   requirePositive('pressureAngleAt', 'baseRadius', baseRadius);

@@ -40,7 +40,7 @@ const arcStep = Math.PI / 90;
  *
  * @throws RangeError for nonsense, and if no tooth or no space is left by shift, angle or backlash.
  * Source: ISO 53:1998 for the rack; the curves are its envelope, checked in the tests by rolling it.
- * @example involuteOutline({ module: 3, teeth: 24, pressureAngle: Math.PI / 9 }).length // → 984
+ * @example involuteOutline({ module: 3, teeth: 24, pressureAngle: Math.PI / 9 }).length // → 960
  */
 export function involuteOutline(spec: OutlineSpec): readonly Point[] {
   const side = sideOf('involuteOutline', spec);
@@ -62,7 +62,7 @@ export function involuteOutline(spec: OutlineSpec): readonly Point[] {
  * their amounts.
  *
  * @throws RangeError as `involuteOutline` does.
- * @example toothLimits({ module: 1, teeth: 10, pressureAngle: Math.PI / 9 }).undercutBy // → 0.41511110
+ * @example toothLimits({ module: 1, teeth: 10, pressureAngle: Math.PI / 9 }).undercutBy // → 0.41511111
  */
 export function toothLimits(spec: OutlineSpec): ToothLimits {
   const { formRadius, tipRadius, pointedBy, undercutBy } = sideOf('toothLimits', spec);

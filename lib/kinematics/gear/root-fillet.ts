@@ -31,7 +31,7 @@ export interface FilletPoint {
  * of a rack is left at that depth; the caller refuses it.
  *
  * Source: ISO 53:1998; corner radius c/(1 − sin α) from the tangency of arc, flank and tip line.
- * @example cuttingRack({ module: 1, teeth: 20, pressureAngle: Math.PI / 9, shift: 0, addendum: 1, clearance: 0.25 }, 0).corner // → 0.37995110
+ * @example cuttingRack({ module: 1, teeth: 20, pressureAngle: Math.PI / 9, shift: 0, addendum: 1, clearance: 0.25 }, 0).corner // → 0.37995084
  */
 export function cuttingRack(gear: CompleteGearSpec, backlash: number): CuttingRack {
   const { module, pressureAngle } = gear;
@@ -74,7 +74,7 @@ export function filletPoint(rack: CuttingRack, normal: number): FilletPoint {
  * How far the straight flank of the cutting rack reaches past the point where the line of action
  * touches the base circle, measured along the radius; positive means that the foot is undercut.
  *
- * @example undercutDepth({ pitchRadius: 5, corner: 0, depth: 1, offset: 0.4, lastNormal: Math.PI / 2 - Math.PI / 9 }) // → 0.41511110778
+ * @example undercutDepth({ pitchRadius: 5, corner: 0, depth: 1, offset: 0.4, lastNormal: Math.PI / 2 - Math.PI / 9 }) // → 0.4151111078
  */
 export function undercutDepth(rack: CuttingRack): number {
   const cosine = Math.cos(rack.lastNormal);

@@ -39,7 +39,7 @@ const crossingSteps = 96;
  * fillet ends where it cuts the involute; where the sides meet below the tip circle, there.
  *
  * @throws RangeError if no tooth or no tooth space is left.
- * @example toothSide({ module: 1, teeth: 10, pressureAngle: Math.PI / 9, shift: 0, addendum: 1, clearance: 0.25 }, 0, 10, 8).undercutBy // → 0.41511110
+ * @example toothSide({ module: 1, teeth: 10, pressureAngle: Math.PI / 9, shift: 0, addendum: 1, clearance: 0.25 }, 0, 10, 8).undercutBy // → 0.41511111
  */
 export function toothSide(
   gear: CompleteGearSpec,

@@ -67,7 +67,7 @@ export function rungWithin(value: number, tolerance: number): Fraction {
  *
  * @throws RangeError for ratios that are not positive.
  * Source: drift = time·(reached/wanted − 1) (lesson 2.3).
- * @example driftOf(59 / 57, 1.03505, 1440) // → 0.05225
+ * @example driftOf(59 / 57, 1.03505, 1440) // → 0.0524765
  */
 export function driftOf(reached: number, wanted: number, time: number): number {
   requirePositive('driftOf', 'reached', reached);

@@ -33,8 +33,8 @@ function evaluate(text: string, scope: Record<string, unknown>): unknown {
 }
 
 function expectedFrom(text: string): unknown {
-  const marked = text.replace(/'[^']*'|(?<![\w.])-?\d+(?:\.\d+)?(?:e-?\d+)?/g, (found) =>
-    found.startsWith("'") ? found : `new Printed('${found}')`,
+  const marked = text.replace(/'[^']*'|(?<![\w.])-?\d+(?:\.\d+)?(?:e-?\d+)?n?/g, (found) =>
+    found.startsWith("'") || found.endsWith('n') ? found : `new Printed('${found}')`,
   );
   return evaluate(marked, { Printed });
 }
