@@ -1,5 +1,12 @@
 import 'server-only';
 import type { ExerciseDefinition } from '@/lib/marking/definition';
+import { barOfThree } from './drawing-and-copying/bar-of-three';
+import { howLargeTheCopy } from './drawing-and-copying/how-large-the-copy';
+import { holesForAScale } from './drawing-and-copying/holes-for-a-scale';
+import { reachAndTremor } from './drawing-and-copying/reach-and-tremor';
+import { whichCopiesTrue } from './drawing-and-copying/which-copies-true';
+import { copyAtThreeToTwo } from './drawing-and-copying/copy-at-three-to-two';
+import { signForTheBoard } from './drawing-and-copying/sign-for-the-board';
 import { edgingStrip } from './drawing-and-copying/edging-strip';
 import { groovesAndBar } from './drawing-and-copying/grooves-and-bar';
 import { moveThePenOut } from './drawing-and-copying/move-the-pen-out';
@@ -47,6 +54,13 @@ const definitions: readonly ExerciseDefinition[] = [
   edgingStrip,
   whereThePenStands,
   setThePins,
+  barOfThree,
+  howLargeTheCopy,
+  holesForAScale,
+  reachAndTremor,
+  whichCopiesTrue,
+  copyAtThreeToTwo,
+  signForTheBoard,
 ];
 
 /** Every exercise by its id. Definitions, answers and slips stay on the server. */

@@ -44,7 +44,10 @@ export interface Given {
 /** The values of earlier number parts: the true ones, or the learner's own for follow-through. */
 export type Earlier = Readonly<Record<string, number>>;
 
-/** A setting of a bench's controls or of a design's fields: millimetres, radians, counts, names. */
+/**
+ * A setting of a bench's controls, in millimetres, radians, counts and names; or of a design's
+ * fields, each in the unit of its field.
+ */
 export type Setting = Readonly<Record<string, number | string>>;
 
 interface PartBase {

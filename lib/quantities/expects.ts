@@ -17,6 +17,7 @@ const called: Readonly<Record<Dimension, string>> = {
   length: 'a length',
   angle: 'an angle',
   ratio: 'a ratio',
+  scale: 'a scale',
   count: 'a whole number',
   plain: 'a plain number',
   turning: 'turns a minute',
@@ -43,6 +44,8 @@ export function expects(field: Field): string {
       return `an angle in degrees, such as 22.5 or 22° 30′${places}`;
     case 'ratio':
       return `turns of ${first ?? 'the one'} for one turn of ${second ?? 'the other'}, such as 3, 3:1 or 1/3`;
+    case 'scale':
+      return 'how many times as large, such as 1.5, 3:2 or 2/3';
     case 'count':
       return first === undefined ? 'a whole number' : `a whole number of ${first}, such as 36`;
     case 'plain':

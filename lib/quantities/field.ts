@@ -27,6 +27,9 @@ export function ratioField(turning: string, forOneTurnOf: string): Field {
   return { dimension: 'ratio', unit: '', of: [turning, forOneTurnOf] };
 }
 
+/** How many times as large one thing is as another. */
+export const scaleField: Field = { dimension: 'scale', unit: '' };
+
 /** A number without a unit. */
 export const plainField: Field = { dimension: 'plain', unit: '' };
 

@@ -48,7 +48,7 @@ function readWithin(text: string, field: Field): { value: number; echo: string }
   if (text.trim() === '') return { reason: 'empty' };
   const pieces = tokens(text);
   if (pieces === null) return { reason: 'unreadable' };
-  if (field.dimension === 'ratio') return readRatio(pieces, field);
+  if (isRatio(field)) return readRatio(pieces, field);
   if (field.dimension === 'count' || field.dimension === 'plain') return readPlain(pieces, field);
   const terms = readTerms(pieces, field);
   if ('reason' in terms) return terms;
@@ -68,12 +68,17 @@ function readRatio(pieces: readonly Token[], field: Field) {
   return ratio(above.value / below.value, `${above.text} : ${below.text}`, field);
 }
 
-function ratio(value: number, text: string, { of = [] }: Field) {
+function ratio(value: number, text: string, { dimension, of = [] }: Field) {
   const [turning = 'the one', forOneTurn = 'the other'] = of;
-  const turns = /[:/]/.test(text) && !/^1.[0-9]+$/.test(text) ? writeNumber(value, 4) : text;
-  const said = turns === text ? text : `${text}, that is ${turns}`;
+  const number = /[:/]/.test(text) && !/^1.[0-9]+$/.test(text) ? writeNumber(value, 4) : text;
+  const said = number === text ? text : `${text}, that is ${number}`;
+  if (dimension === 'scale') return { value, echo: `${said} times` };
   const noun = Math.abs(value) <= 1 ? 'turn' : 'turns';
   return { value, echo: `${said} ${noun} of ${turning} for one turn of ${forOneTurn}` };
+}
+
+function isRatio({ dimension }: Field): boolean {
+  return dimension === 'ratio' || dimension === 'scale';
 }
 
 function readPlain(pieces: readonly Token[], field: Field) {
@@ -183,7 +188,7 @@ function amountAt(
     case 'many-digits':
       return { reason: 'too-long' };
     default:
-      return field.dimension !== 'ratio' && pieces.some((piece) => piece.text === ':')
+      return !isRatio(field) && pieces.some((piece) => piece.text === ':')
         ? { reason: 'ratio-elsewhere' }
         : { reason: 'unreadable' };
   }
@@ -195,7 +200,7 @@ function afterwards(pieces: readonly Token[], from: number, field: Field): Refus
 
 function wrongUnit(name: string, field: Field): Refusal {
   if (name.startsWith(':')) {
-    return { reason: field.dimension === 'ratio' ? 'unreadable' : 'ratio-elsewhere' };
+    return { reason: isRatio(field) ? 'unreadable' : 'ratio-elsewhere' };
   }
   const other = otherDimensionOf(name, field.dimension);
   return other === null ? { reason: 'unreadable' } : { reason: 'other-dimension', other };

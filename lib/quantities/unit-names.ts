@@ -65,6 +65,7 @@ const names: Readonly<Record<Dimension, Readonly<Record<string, Unit>>>> = {
   },
   rate: { '/h': '/h', 'per hour': '/h', 'an hour': '/h' },
   ratio: {},
+  scale: {},
   count: {},
   plain: {},
 };

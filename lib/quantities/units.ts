@@ -5,6 +5,7 @@ export const dimensions = [
   'length',
   'angle',
   'ratio',
+  'scale',
   'count',
   'plain',
   'turning',

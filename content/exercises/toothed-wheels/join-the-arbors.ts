@@ -200,18 +200,16 @@ function rowOf(setting: Setting): Row {
 /** From the first arbor to the last, mm. */
 function reachOf(toothModule: number, first: number, { last, idlers, idlerTeeth }: Row): number {
   const wheels = [first, ...Array<number>(idlers).fill(idlerTeeth), last];
-  return wheels
-    .slice(1)
-    .reduce(
-      (sum, teeth, index) =>
-        sum +
-        centreDistance({
-          module: toothModule,
-          firstTeeth: wheels[index] ?? teeth,
-          secondTeeth: teeth,
-        }),
-      0,
-    );
+  return wheels.slice(1).reduce(
+    (sum, teeth, index) =>
+      sum +
+      centreDistance({
+        module: toothModule,
+        firstTeeth: wheels[index] ?? teeth,
+        secondTeeth: teeth,
+      }),
+    0,
+  );
 }
 
 /** What stays open between the rims, mm; less than nothing where they overlap. */
