@@ -1,6 +1,6 @@
-import { bisect } from '@/lib/numeric/bisection';
 import { finiteResult } from '@/lib/numeric/finite-result';
 import { requireNonNegative, requirePositive, requireWithin } from '@/lib/numeric/require';
+import { findRoot } from '@/lib/numeric/root';
 import { type BoltGroove, grooveRadius, requireGroove } from './bolt-groove';
 
 /** Where the pin and the bolt are. */
@@ -43,9 +43,9 @@ export function boltTravel(groove: BoltGroove, knobAngle: number): BoltOutcome {
   const knobAt = (place: number) => place + start - Math.asin(offset / grooveRadius(groove, place));
   const whole = groove.slopeAngle + 2 * groove.dwellAngle;
   requireWithin('boltTravel', 'knobAngle', knobAngle, 0, knobAt(whole) * (1 + 1e-12));
-  const found = bisect((place) => knobAt(place) - knobAngle, 0, whole);
+  const found = findRoot((place) => knobAt(place) - knobAngle, 0, whole);
   const place =
-    offset === 0 ? Math.min(knobAngle, whole) : found.outcome === 'root' ? found.root : whole;
+    offset === 0 ? Math.min(knobAngle, whole) : found.outcome === 'found' ? found.x : whole;
   const pinRadius = grooveRadius(groove, place);
   const travel = reach(pinRadius, offset) - inner;
   return finiteResult('boltTravel', {
