@@ -1,5 +1,8 @@
 import 'server-only';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
+import { pantographFigures } from './drawing-and-copying/pantograph.figures';
+import { trammelFigures } from './drawing-and-copying/trammel-and-oval.figures';
+import { trainFigures } from './toothed-wheels/train-of-toothed-wheels.figures';
 
 /** One step of a worked example: what is done, and what comes out. */
 export interface WorkedStep {
@@ -30,7 +33,11 @@ export interface LessonFigures {
 /** How one lesson works out its numbers. */
 export type FiguresOf = (units: UnitSystem, seed: number) => LessonFigures;
 
-const figuresByLesson: Readonly<Record<string, FiguresOf>> = {};
+const figuresByLesson: Readonly<Record<string, FiguresOf>> = {
+  'train-of-toothed-wheels': trainFigures,
+  'trammel-and-oval': trammelFigures,
+  pantograph: pantographFigures,
+};
 
 /**
  * The numbers that a lesson's prose and worked example show, in one unit system. The worked example
