@@ -96,10 +96,12 @@ export async function takeHint(
   const definition = exercises.get(exerciseId);
   if (definition === undefined) return null;
   await rows(
-    `update rounds set hints_taken = least($4, greatest(rounds.hints_taken, asked.hints_taken + 1))
-     from (select hints_taken from rounds
+    `with asked as (
+       select hints_taken + 1 as wanted from rounds
        where id = $1 and learner_id = $2 and exercise_id = $3 and closed_at is null
-       for update) asked
+       for update)
+     update rounds set hints_taken = least($4, greatest(rounds.hints_taken, asked.wanted))
+     from asked
      where learner_id = $2 and exercise_id = $3 and closed_at is null
      returning id`,
     [roundId, viewer.learnerId, exerciseId, hintsTotal],

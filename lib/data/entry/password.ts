@@ -32,10 +32,11 @@ export function complaintAbout(
   if (length > mostPasswordLength) return 'too long';
   const plain = password.toLowerCase().replace(/[^a-z0-9]/g, '');
   if (isCommon(plain)) return 'too common';
-  const names = known.map((word) => word.toLowerCase().replace(/[^a-z0-9]/g, ''));
-  return names.some((name) => name.length > 3 && plain.replaceAll(name, '').length < 4)
-    ? 'names you'
-    : null;
+  const left = known
+    .map((word) => word.toLowerCase().replace(/[^a-z0-9]/g, ''))
+    .filter((word) => word.length > 3)
+    .reduce((rest, word) => rest.replaceAll(word, ''), plain);
+  return left !== plain && left.length < 4 ? 'names you' : null;
 }
 
 /** The hash to keep for `password`. */
