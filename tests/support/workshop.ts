@@ -33,7 +33,7 @@ export interface Workshop {
 }
 
 /** Names a fresh copy of the migrated template in the environment. */
-export function useTestDatabase(): TestDatabase {
+export function takeTestDatabase(): TestDatabase {
   const database = createTestDatabase();
   process.env.DATABASE_URL = database.app;
   process.env.DATABASE_MIGRATION_URL = database.owner;
@@ -47,7 +47,7 @@ export function useTestDatabase(): TestDatabase {
 
 /** Opens the workshop; call it in `beforeAll`, and `close` in `afterAll`. */
 export async function openWorkshop(): Promise<Workshop> {
-  const database = useTestDatabase();
+  const database = takeTestDatabase();
   const harbour = await makeClass('The harbour');
   const quay = await makeClass('The quay');
   return {
