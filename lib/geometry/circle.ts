@@ -24,7 +24,7 @@ export type CirclesOutcome =
 /**
  * Where two circles meet: `left` and `right` of the ray from the first centre to the second.
  *
- * Outcomes: `meet`; `touch`, within 1e-12 of the larger size; `apart` or `inside` with the gap
+ * Outcomes: `meet`; `touch`, also when they miss by no more than 1e-12 of the larger size; `apart` or `inside` with the gap
  * between the curves; `same`, when they cover one another. Throws `RangeError` for a negative
  * radius.
  * @example intersectCircles({ centre: ORIGIN, radius: 5 }, { centre: { x: 6, y: 0 }, radius: 5 }) // → { outcome: 'meet', left: { x: 3, y: 4 }, right: { x: 3, y: -4 } }
@@ -46,8 +46,7 @@ export function intersectCircles(first: Circle, second: Circle): CirclesOutcome 
     x: first.centre.x + share * along.x - side * up * along.y,
     y: first.centre.y + share * along.y + side * up * along.x,
   });
-  if (d >= r1 + r2 - slack || d <= Math.abs(r1 - r2) + slack)
-    return { outcome: 'touch', at: at(0) };
+  if (squared <= 0) return { outcome: 'touch', at: at(0) };
   return { outcome: 'meet', left: at(1), right: at(-1) };
 }
 
@@ -60,7 +59,7 @@ export type LineCircleOutcome =
 /**
  * Where a line meets a circle: `ahead` and `behind` along the line's direction.
  *
- * Outcomes: `meet`; `touch`, within 1e-12 of the radius; `apart` with the distance from the line
+ * Outcomes: `meet`; `touch`, also when it misses by no more than 1e-12 of the radius; `apart` with the distance from the line
  * to the curve. Throws `RangeError` for a negative radius or a line without direction.
  * @example intersectLineCircle({ through: { x: 0, y: 3 }, along: { x: 1, y: 0 } }, { centre: ORIGIN, radius: 5 }) // → { outcome: 'meet', ahead: { x: 4, y: 3 }, behind: { x: -4, y: 3 } }
  */
@@ -73,7 +72,7 @@ export function intersectLineCircle(line: Line, circle: Circle): LineCircleOutco
   if (Math.abs(off) > radius + slack) return { outcome: 'apart', gap: Math.abs(off) - radius };
   const half = Math.sqrt(Math.max((radius - off) * (radius + off), 0));
   const at = (s: number): Point => ({ x: line.through.x + s * u.x, y: line.through.y + s * u.y });
-  if (Math.abs(off) >= radius - slack) return { outcome: 'touch', at: at(foot) };
+  if (half === 0) return { outcome: 'touch', at: at(foot) };
   return { outcome: 'meet', ahead: at(foot + half), behind: at(foot - half) };
 }
 

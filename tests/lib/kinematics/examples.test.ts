@@ -22,7 +22,7 @@ class Printed {
     this.tolerance =
       decimals === undefined
         ? 1e-9 * Math.max(1, Math.abs(this.value))
-        : 0.51 * 10 ** (Number(exponent) - decimals);
+        : Math.max(1.01 * 10 ** (Number(exponent) - decimals), 1e-14 * Math.abs(this.value));
   }
 }
 
