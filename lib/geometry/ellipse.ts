@@ -1,4 +1,5 @@
-import { requireNonNegative } from '@/lib/numeric/require';
+import { requireNonNegative, requirePositive } from '@/lib/numeric/require';
+import type { Point } from '@/lib/geometry/point';
 
 /** An ellipse by its half axes, in any one unit; the two may be equal, and either may be nought. */
 export interface EllipseSize {
@@ -95,6 +96,18 @@ export function ellipseFoci(size: EllipseSize): EllipseFoci {
     eccentricity: a === 0 ? 0 : focalDistance / a,
     stringLoop: 2 * (a + focalDistance),
   };
+}
+
+/**
+ * `(along/a)² + (across/b)²` of a point: 1 on an ellipse about the origin, less within, more outside.
+ *
+ * `halfX` and `halfY` are its half axes along x and y. Throws `RangeError` unless both are positive.
+ * @example ellipseLocus(150, 90, { x: 150, y: 0 }) // → 1
+ */
+export function ellipseLocus(halfX: number, halfY: number, { x, y }: Point): number {
+  const along = x / requirePositive('ellipseLocus', 'halfX', halfX);
+  const across = y / requirePositive('ellipseLocus', 'halfY', halfY);
+  return along * along + across * across;
 }
 
 function ordered(caller: string, size: EllipseSize): readonly [number, number] {

@@ -1,5 +1,14 @@
-import { requireFinite, requireNonNegative, requirePositive } from '@/lib/numeric/require';
-import { PANTOGRAPH_ROLES, type PantographSetUp } from '@/lib/kinematics/linkage/pantograph';
+import {
+  requireFinite,
+  requireNonNegative,
+  requirePositive,
+  requireWithin,
+} from '@/lib/numeric/require';
+import {
+  PANTOGRAPH_ROLES,
+  type Pantograph,
+  type PantographSetUp,
+} from '@/lib/kinematics/linkage/pantograph';
 
 /** The holes for a wanted scale, or why there are none. */
 export type HolesOutcome =
@@ -49,6 +58,18 @@ export function pantographHoles(
     stylusBar: secondHole,
     otherBar: first - firstHole,
   };
+}
+
+/**
+ * The pantograph whose second hole takes the same share of its bar as the first, so that it copies
+ * true to shape. Throws `RangeError` for bars that are not positive or a hole beyond the bar.
+ * @example truePantograph(350, 280, 140).secondHole // → 112
+ */
+export function truePantograph(first: number, second: number, firstHole: number): Pantograph {
+  requirePositive('truePantograph', 'first', first);
+  requirePositive('truePantograph', 'second', second);
+  requireWithin('truePantograph', 'firstHole', firstHole, 0, first);
+  return { first, second, firstHole, secondHole: (second * firstHole) / first };
 }
 
 /**

@@ -1,4 +1,5 @@
 import { requireFinite, requireNonNegative, requirePositive } from '@/lib/numeric/require';
+import type { Point } from '@/lib/geometry/point';
 import type { Trammel } from '@/lib/kinematics/linkage/trammel';
 
 /**
@@ -9,6 +10,58 @@ import type { Trammel } from '@/lib/kinematics/linkage/trammel';
 export function pinsApart(trammel: Trammel): number {
   const upright = requireFinite('pinsApart', 'uprightPin', trammel.uprightPin);
   return Math.abs(upright - requireFinite('pinsApart', 'levelPin', trammel.levelPin));
+}
+
+/**
+ * A trammel told by its bar from the upright groove's pin A to the level groove's pin B.
+ *
+ * The pen lies `beyond` B on the bar, or `fromMiddle` on from the bar's middle, and `beside` to the
+ * left; `lean` is the angle by which the bar slopes down from A to B, radians. Gives the trammel
+ * and the bar's angle for `trammelPose`. Throws `RangeError` unless one of the two places is given.
+ * @example barTrammel({ spacing: 60, beyond: 90, lean: 0.5 }) // → { trammel: { uprightPin: 150, levelPin: 90 }, angle: -0.5 }
+ */
+export function barTrammel({
+  spacing,
+  beyond,
+  fromMiddle,
+  lean = 0,
+  ...rest
+}: {
+  readonly spacing: number;
+  readonly beyond?: number;
+  readonly fromMiddle?: number;
+  readonly lean?: number;
+} & Pick<Trammel, 'beside' | 'grooveAngle'>): {
+  readonly trammel: Trammel;
+  readonly angle: number;
+} {
+  requirePositive('barTrammel', 'spacing', spacing);
+  const fromB = beyond ?? (fromMiddle ?? Number.NaN) - spacing / 2;
+  const levelPin = requireFinite('barTrammel', 'beyond or fromMiddle', fromB);
+  return {
+    trammel: { ...rest, uprightPin: levelPin + spacing, levelPin },
+    angle: 0 - requireFinite('barTrammel', 'lean', lean),
+  };
+}
+
+/**
+ * Half axes along x and along y of the oval drawn on the bar, in square grooves.
+ * @example halfAxes({ uprightPin: 65, levelPin: -35 }) // → { x: 65, y: 35 }
+ */
+export function halfAxes({ uprightPin, levelPin }: Trammel): Point {
+  return {
+    x: Math.abs(requireFinite('halfAxes', 'uprightPin', uprightPin)),
+    y: Math.abs(requireFinite('halfAxes', 'levelPin', levelPin)),
+  };
+}
+
+/**
+ * Diameter of the circle through both pins and the crossing, which rolls inside one twice its size:
+ * the pins' distance over the sine of the angle between the grooves. Source: Cardan.
+ * @example cardanDiameter({ uprightPin: 50, levelPin: -50, grooveAngle: radians(60) }) // → 115.470054
+ */
+export function cardanDiameter(trammel: Trammel): number {
+  return grooveTravel(trammel) / 2;
 }
 
 /**
