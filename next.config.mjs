@@ -8,7 +8,7 @@ const config = {
   poweredByHeader: false,
   reactStrictMode: true,
   agentRules: false,
-  experimental: { agentUpgrade: false },
+  experimental: { agentUpgrade: false, authInterrupts: true },
   images: { unoptimized: true, remotePatterns: [] },
   serverExternalPackages: [
     'sequelize',

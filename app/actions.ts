@@ -1,7 +1,7 @@
 'use server';
 
 import { requireViewer } from '@/lib/auth/viewer';
-import { updateUnits } from '@/lib/data/account';
+import { updatePreferences } from '@/lib/data/people';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { unitsSchema } from '@/lib/schemas/person';
 
@@ -9,5 +9,5 @@ import { unitsSchema } from '@/lib/schemas/person';
 export async function setUnits(units: UnitSystem): Promise<void> {
   const viewer = await requireViewer();
   const reading = unitsSchema.safeParse(units);
-  if (reading.success) await updateUnits(viewer, reading.data);
+  if (reading.success) await updatePreferences(viewer, { units: reading.data });
 }

@@ -5,7 +5,8 @@ import { passwordSentence } from '@/app/_components/password-sentence';
 import { readForm } from '@/app/_components/read-form';
 import type { FormState } from '@/components/ui/form-state';
 import { requireViewer } from '@/lib/auth/viewer';
-import { changePassword, updateAccount } from '@/lib/data/account';
+import { changePassword } from '@/lib/data/account';
+import { updatePreferences } from '@/lib/data/people';
 import { passwordChangeSchema, profileSchema } from '@/lib/schemas/person';
 
 /** Changes name, time zone and units of whoever is signed in. */
@@ -13,7 +14,7 @@ export async function saveProfile(_state: FormState, form: FormData): Promise<Fo
   const viewer = await requireViewer();
   const reading = readForm(form, profileSchema);
   if (!reading.ok) return reading.state;
-  await updateAccount(viewer, reading.data);
+  await updatePreferences(viewer, reading.data);
   revalidatePath('/', 'layout');
   return { outcome: 'done', message: 'Saved.', values: reading.values };
 }

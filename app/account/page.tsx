@@ -1,11 +1,10 @@
 import type { Metadata } from 'next';
-import { notFound } from 'next/navigation';
 import { ActionForm } from '@/components/ui/action-form';
 import { Page } from '@/components/ui/page';
 import { PageHeading } from '@/components/ui/page-heading';
 import { Section } from '@/components/ui/panel';
 import { requireViewer } from '@/lib/auth/viewer';
-import { findAccount } from '@/lib/data/account';
+import { findOwnAddress } from '@/lib/data/account';
 import { savePassword, saveProfile } from './actions';
 import { passwordFields, profileFields } from './_components/fields';
 import { SignOut } from './_components/sign-out';
@@ -14,13 +13,12 @@ export const metadata: Metadata = { title: 'Account' };
 
 export default async function AccountPage() {
   const viewer = await requireViewer();
-  const account = await findAccount(viewer);
-  if (account === null) notFound();
+  const address = await findOwnAddress(viewer);
   return (
     <Page width="narrow">
-      <PageHeading eyebrow={account.email}>Account</PageHeading>
+      <PageHeading eyebrow={address}>Account</PageHeading>
       <Section title="About you">
-        <ActionForm action={saveProfile} fields={profileFields(account)} submit="Save" />
+        <ActionForm action={saveProfile} fields={profileFields(viewer)} submit="Save" />
       </Section>
       <Section title="Password">
         <ActionForm

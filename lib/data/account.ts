@@ -2,18 +2,9 @@ import 'server-only';
 import { now as presentTime } from '@/lib/clock';
 import { row, rows, transact } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
-import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { recordAudit } from './audit';
 import { complaintAbout, hashPassword, isPassword, type PasswordComplaint } from './entry/password';
 import { countTry, forgetTries } from './entry/throttle';
-
-/** What people say about themselves. */
-export interface Account {
-  readonly name: string;
-  readonly email: string;
-  readonly timeZone: string;
-  readonly units: UnitSystem;
-}
 
 /** What changing one's password comes to. */
 export type PasswordChange =
@@ -22,38 +13,12 @@ export type PasswordChange =
   | { readonly outcome: 'throttled' }
   | { readonly outcome: 'refused'; readonly complaint: PasswordComplaint };
 
-/** The viewer's own account. */
-export async function findAccount(viewer: Viewer): Promise<Account | null> {
-  return row<Account>(
-    'select name, email, time_zone as "timeZone", units from people where id = $1',
-    [viewer.personId],
-  );
-}
-
-/** Changes what the viewer says about themselves. */
-export async function updateAccount(
-  viewer: Viewer,
-  { name, timeZone, units }: Omit<Account, 'email'>,
-  now: Date = presentTime(),
-): Promise<void> {
-  await rows(
-    `update people set name = $2, time_zone = $3, units = $4, updated_at = $5
-     where id = $1 returning id`,
-    [viewer.personId, name, timeZone, units, now],
-  );
-}
-
-/** Changes the units in which the viewer works; open rounds of the other units stay open. */
-export async function updateUnits(
-  viewer: Viewer,
-  units: UnitSystem,
-  now: Date = presentTime(),
-): Promise<void> {
-  await rows('update people set units = $2, updated_at = $3 where id = $1 returning id', [
+/** The address with which the viewer signs in. */
+export async function findOwnAddress(viewer: Viewer): Promise<string | null> {
+  const person = await row<{ email: string | null }>('select email from people where id = $1', [
     viewer.personId,
-    units,
-    now,
   ]);
+  return person?.email ?? null;
 }
 
 /**

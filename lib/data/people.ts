@@ -41,7 +41,18 @@ export type PersonCreated =
   | { readonly outcome: 'not allowed' };
 
 /** Everybody, by name, for the administrator; nobody for anybody else. Three parts, one query. */
-export async function listPeople(viewer: Viewer): Promise<PersonListed[]> {
+export function listPeople(viewer: Viewer): Promise<PersonListed[]> {
+  return people(viewer, null);
+}
+
+/** One person, for the administrator; null for anybody else and for somebody who is not there. */
+export async function findPerson(viewer: Viewer, personId: string): Promise<PersonListed | null> {
+  if (!isId(personId)) return null;
+  const [person] = await people(viewer, personId);
+  return person ?? null;
+}
+
+async function people(viewer: Viewer, personId: string | null): Promise<PersonListed[]> {
   const found = await rows<Omit<PersonListed, 'lastSeenAt'> & { lastSeenAt: Date | null }>(
     `select p.id as "personId", p.name, p.email, p.is_administrator as "isAdministrator",
        p.disabled_at is not null as disabled, p.password_hash is not null as "hasPassword",
@@ -51,8 +62,10 @@ export async function listPeople(viewer: Viewer): Promise<PersonListed[]> {
            order by g.name)
          from memberships m join class_groups g on g.id = m.class_id and g.archived_at is null
          where m.person_id = p.id and m.left_at is null), '[]') as classes
-     from people p where $1::boolean and p.erased_at is null order by p.name, p.id`,
-    [can(viewer, 'look after people')],
+     from people p
+     where $1::boolean and p.erased_at is null and ($2::uuid is null or p.id = $2::uuid)
+     order by p.name, p.id`,
+    [can(viewer, 'look after people'), personId],
   );
   return found.map((one) => ({ ...one, lastSeenAt: one.lastSeenAt?.toISOString() ?? null }));
 }

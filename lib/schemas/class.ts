@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { email, timeZone } from './person';
 
 /** A new class. */
 export const newClassSchema = z.strictObject({
@@ -7,12 +8,12 @@ export const newClassSchema = z.strictObject({
     .trim()
     .min(1, 'Type a name for the class.')
     .max(100, 'A name may have 100 characters at most.'),
-  timeZone: z.string().min(1).max(60),
+  timeZone,
 });
 
 /** Somebody to be put into a class. */
 export const newMemberSchema = z.strictObject({
-  personId: z.uuid('Choose somebody from the list.'),
+  email,
   role: z.enum(['learner', 'instructor'], 'Choose learner or instructor.'),
 });
 
@@ -21,4 +22,5 @@ export const newAssignmentSchema = z.strictObject({
   lessonId: z.string().regex(/^[a-z0-9-]{1,60}$/, 'Choose a lesson from the list.'),
   dueOn: z.iso.date('Choose a day; it looks like 2026-12-08.'),
   dueTime: z.iso.time({ precision: -1, error: 'Choose a time; it looks like 18:30.' }),
+  note: z.string().trim().max(500, 'A note may have 500 characters at most.'),
 });

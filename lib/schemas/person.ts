@@ -7,14 +7,16 @@ const name = z
   .min(1, 'Type a name.')
   .max(100, 'A name may have 100 characters at most.');
 
-const email = z
+/** An address, as it is kept: without blanks around it and in small letters. */
+export const email = z
   .string()
   .trim()
   .toLowerCase()
   .max(254, 'An address may have 254 characters at most.')
   .pipe(z.email('That is not an address; one looks like you@example.org.'));
 
-const timeZone = z
+/** A time zone by its IANA name. */
+export const timeZone = z
   .string()
   .refine(isTimeZone, 'Choose a time zone from the list, such as Europe/London.');
 
@@ -33,8 +35,6 @@ const units = z.enum(unitSystems, 'Choose millimetres or inches.');
 export const newPersonSchema = z.strictObject({
   name,
   email,
-  timeZone,
-  units,
   isAdministrator: z.enum(['yes', 'no']).transform((said) => said === 'yes'),
 });
 

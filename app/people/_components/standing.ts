@@ -1,0 +1,10 @@
+import type { PersonListed } from '@/lib/data/people';
+
+/** How somebody's account stands, in words. */
+export function standingOf(
+  person: Pick<PersonListed, 'disabled' | 'hasPassword' | 'isAdministrator'>,
+): string {
+  if (person.disabled) return 'disabled';
+  if (!person.hasPassword) return 'no password yet';
+  return person.isAdministrator ? 'administrator' : 'in use';
+}

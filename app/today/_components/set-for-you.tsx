@@ -1,0 +1,75 @@
+import Link from 'next/link';
+import { sayWhen } from '@/components/progress/say-due';
+import { Empty } from '@/components/ui/panel';
+import { Cell, ColumnName, HeadRow, Row, RowName, Table } from '@/components/ui/table';
+import type { SetWork } from '@/lib/data/today';
+
+/** What is set, the next due first. */
+export function SetForYou({ set }: Readonly<{ set: readonly SetWork[] }>) {
+  if (set.length === 0) {
+    return (
+      <Empty title="Nothing is set">
+        When your instructor sets a lesson it stands here with its date. Until then every lesson is
+        yours to open.
+      </Empty>
+    );
+  }
+  return (
+    <Table caption="Set for your class">
+      <HeadRow>
+        <ColumnName>What</ColumnName>
+        <ColumnName>Due</ColumnName>
+        <ColumnName>Left</ColumnName>
+      </HeadRow>
+      <tbody>
+        {set.map((work) => (
+          <SetRow key={work.assignmentId} work={work} />
+        ))}
+      </tbody>
+    </Table>
+  );
+}
+
+function SetRow({ work }: Readonly<{ work: SetWork }>) {
+  const left = work.exercises.length - work.done;
+  return (
+    <Row>
+      <RowName>
+        {placesOf(work).map(({ path, title }) => (
+          <Link key={path} href={path} prefetch={false} className="link link-target mr-4">
+            {title}
+          </Link>
+        ))}
+        <span className="block text-[0.9375rem] text-pencil">
+          {work.className}
+          {work.note ? `: ${work.note}` : ''}
+        </span>
+      </RowName>
+      <Cell className="whitespace-nowrap">
+        {work.overdue && left > 0 ? (
+          <strong className="text-madder">{sayWhen(work.dueAt, work.timeZone)}, late</strong>
+        ) : (
+          sayWhen(work.dueAt, work.timeZone)
+        )}
+      </Cell>
+      <Cell>{left === 0 ? <Done /> : `${left} ${left === 1 ? 'exercise' : 'exercises'}`}</Cell>
+    </Row>
+  );
+}
+
+function Done() {
+  return (
+    <span className="font-semibold text-leaf">
+      <span aria-hidden="true">✓ </span>done
+    </span>
+  );
+}
+
+/** The lessons of the work, each once; an exercise set by itself stands under its own name. */
+function placesOf(work: SetWork): readonly { path: string; title: string }[] {
+  const places = new Map<string, string>();
+  for (const exercise of work.exercises) {
+    if (exercise.lesson) places.set(exercise.lesson.path, exercise.lesson.title);
+  }
+  return [...places].map(([path, title]) => ({ path, title }));
+}
