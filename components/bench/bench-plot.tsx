@@ -15,7 +15,7 @@ export function BenchPlot({ plot, drive }: BenchPlotProps) {
   const x = scaleLinear([plot.across.least, plot.across.most], [inside.left, inside.right]);
   const y = scaleLinear([plot.up.least, plot.up.most], [inside.bottom, inside.top]);
   const path = (points: Plot['lines'][number]['points']) =>
-    `M${points.map((point) => `${x(point.x).toFixed(1)} ${y(point.y).toFixed(1)}`).join('L')}`;
+    `M${points.map((point) => `${brief(x(point.x))} ${brief(y(point.y))}`).join('L')}`;
   const now = plot.now(drive);
   return (
     <figure className="m-0">
@@ -23,10 +23,10 @@ export function BenchPlot({ plot, drive }: BenchPlotProps) {
       <svg viewBox={`0 0 ${width} ${height}`} role="img" aria-label={plot.title} className="w-full">
         <g className="stroke-rule">
           {plot.across.ticks.map((tick) => (
-            <path key={`x${tick}`} d={`M${x(tick)} ${inside.top}V${inside.bottom}`} />
+            <path key={`x${tick}`} d={`M${brief(x(tick))} ${inside.top}V${inside.bottom}`} />
           ))}
           {plot.up.ticks.map((tick) => (
-            <path key={`y${tick}`} d={`M${inside.left} ${y(tick)}H${inside.right}`} />
+            <path key={`y${tick}`} d={`M${inside.left} ${brief(y(tick))}H${inside.right}`} />
           ))}
         </g>
         <path
@@ -35,12 +35,12 @@ export function BenchPlot({ plot, drive }: BenchPlotProps) {
         />
         <g className="fill-pencil font-mono text-[12px]">
           {plot.across.ticks.map((tick) => (
-            <text key={tick} x={x(tick)} y={inside.bottom + 16} textAnchor="middle">
+            <text key={tick} x={brief(x(tick))} y={inside.bottom + 16} textAnchor="middle">
               {shortNumber(tick, 2)}
             </text>
           ))}
           {plot.up.ticks.map((tick) => (
-            <text key={tick} x={inside.left - 6} y={y(tick)} dy="0.35em" textAnchor="end">
+            <text key={tick} x={inside.left - 6} y={brief(y(tick))} dy="0.35em" textAnchor="end">
               {shortNumber(tick, 2)}
             </text>
           ))}
@@ -79,6 +79,11 @@ export function BenchPlot({ plot, drive }: BenchPlotProps) {
   );
 }
 
+/** To a tenth of a pixel: servers and browsers may differ in the last digits of a sine. */
+function brief(value: number): number {
+  return Math.round(value * 10) / 10;
+}
+
 interface DotProps {
   readonly x: (value: number) => number;
   readonly y: (value: number) => number;
@@ -88,7 +93,7 @@ interface DotProps {
 
 function Dot({ x, y, at, role }: DotProps) {
   if (!at) return null;
-  const [cx, cy] = [x(at.x), y(at.y)];
+  const [cx, cy] = [brief(x(at.x)), brief(y(at.y))];
   const inFrame =
     cx >= inside.left && cx <= inside.right && cy >= inside.top && cy <= inside.bottom;
   return inFrame ? <circle cx={cx} cy={cy} r={4} style={{ fill: `var(--${role})` }} /> : null;

@@ -66,8 +66,8 @@ function NumbersTable({ table }: { readonly table: BenchTable }) {
           </tr>
         </thead>
         <tbody>
-          {table.rows.map((row) => (
-            <tr key={row.join('|')} className="border-b border-rule">
+          {table.rows.map((row, index) => (
+            <tr key={index} className="border-b border-rule">
               {row.map((cell, column) => (
                 <td key={table.head[column]} className="px-2 py-1 font-mono tabular-nums">
                   {cell}

@@ -55,7 +55,7 @@ function BenchFrame({ spec, title, locked = false, lockedNotice, onSettingChange
     <section
       ref={setFrame}
       aria-labelledby={`${id}-title`}
-      className="@container my-6 max-w-full border border-ink bg-paper"
+      className="@container my-6 w-full border border-ink bg-paper"
     >
       <TitleStrip
         store={store}

@@ -24,7 +24,7 @@ interface DrawingBoxProps {
 }
 
 /**
- * The drawing: a still picture from the first byte on, over which the canvas comes to stand at the
+ * The drawing: a still picture (whose last digits may differ between server and browser) from the first byte on, over which the canvas comes to stand at the
  * same size; on paper the still picture again, brought up to date.
  */
 export function DrawingBox(props: DrawingBoxProps) {
@@ -35,7 +35,7 @@ export function DrawingBox(props: DrawingBoxProps) {
   const onReady = useCallback(() => setLive(true), []);
   const [aspect] = useState(() => {
     const { left, right, bottom, top } = store.moment().frame;
-    return (right - left) / (top - bottom);
+    return ((right - left) / (top - bottom)).toFixed(3);
   });
   const picture = useMemo(() => {
     const { model, frame, showing, ...state } = store.moment();
@@ -61,11 +61,12 @@ export function DrawingBox(props: DrawingBoxProps) {
       aria-labelledby={labelledBy}
       aria-describedby={describedBy}
       className="drawing-box relative w-full overflow-hidden bg-paper"
-      style={{ aspectRatio: String(aspect) }}
+      style={{ aspectRatio: aspect }}
       data-live={live && !locked}
     >
       <div
         className="drawing-still absolute inset-0"
+        suppressHydrationWarning
         dangerouslySetInnerHTML={{ __html: picture }}
       />
       {size && !locked ? (

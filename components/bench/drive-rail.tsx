@@ -16,18 +16,19 @@ export function DriveRail({ store, id }: DriveRailProps) {
   const { model, drive, running, pace } = useShown(store);
   const control = model.drive;
   const raw = control.toShown(drive);
-  const shown = control.round === null ? raw : wrapped(raw, control.least, control.round);
+  const exact = control.round === null ? raw : wrapped(raw, control.least, control.round);
+  const shown = Number(exact.toFixed(control.places + 2));
   const text = fixedNumber(shown, control.places);
   const moveTo = (value: number) => {
     store.run(false);
-    store.moveTo(control.fromShown(value + raw - shown), 'drive');
+    store.moveTo(control.fromShown(value + raw - exact), 'drive');
   };
   const { pace: paces } = control;
   return (
     <div className="grid gap-x-4 gap-y-1 @2xl:grid-cols-[auto_1fr_auto] @2xl:items-center">
       <div className="flex gap-2">
         <button type="button" className={railButton('main')} onClick={() => store.run(!running)}>
-          {running ? 'Pause' : 'Turn'}
+          {running ? 'Pause' : control.verb}
         </button>
         <button type="button" className={railButton()} onClick={() => store.stepBy(-1)}>
           Step back

@@ -23,7 +23,7 @@ export function SettingsPanel({ store }: SettingsPanelProps) {
   return (
     <fieldset className="border-t border-ink px-4 py-3">
       <legend className="sr-only">Set the mechanism</legend>
-      <div className="grid items-end gap-x-6 gap-y-3 @xl:grid-cols-2 @4xl:grid-cols-3">
+      <div className="grid items-start gap-x-6 gap-y-3 @xl:grid-cols-2 @4xl:grid-cols-3">
         {model.controls.map((control) => (
           <Setting key={control.key} control={control} onSet={set} />
         ))}
@@ -45,7 +45,11 @@ function Setting({ control, onSet }: SettingProps) {
       return <ChoiceSetting control={control} onSet={onSet} />;
     case 'action':
       return (
-        <button type="button" className={railButton()} onClick={() => onSet(control.key, '')}>
+        <button
+          type="button"
+          className={`${railButton()} self-end`}
+          onClick={() => onSet(control.key, '')}
+        >
           {control.label}
         </button>
       );
@@ -60,6 +64,10 @@ function NumberSetting({ control, onSet }: SettingProps<NumberControl>) {
       <label htmlFor={id} className="block text-[0.9375rem] font-semibold">
         {label}
       </label>
+      <NumberEntry
+        {...{ id, label, unit, value, text, spoken, least, most, step, field }}
+        onChange={(next) => onSet(key, next)}
+      />
       {(most - least) / step > manyNotches && control.slides ? (
         <input
           type="range"
@@ -73,10 +81,6 @@ function NumberSetting({ control, onSet }: SettingProps<NumberControl>) {
           onChange={(event) => onSet(key, Number(event.target.value))}
         />
       ) : null}
-      <NumberEntry
-        {...{ id, label, unit, value, text, spoken, least, most, step, field }}
-        onChange={(next) => onSet(key, next)}
-      />
     </div>
   );
 }

@@ -26,7 +26,7 @@ export function TitleStrip({ store, id, title, scale, locked }: TitleStripProps)
         {readouts.map(({ key, label, value }) => (
           <Cell key={key} label={label} value={value} />
         ))}
-        <Cell label="Scale" value={`${scaleText(scale)} ${units}`} />
+        <Cell label="Scale" value={`${scaleText(scale)}, ${units}`} />
       </dl>
     </div>
   );

@@ -31,6 +31,7 @@ export const appearance: Readonly<Record<Role, Paint>> = {
   timber: { fill: 'timber', stroke: 'ink', width: 1.5 },
   driver: { fill: 'brass-fill', stroke: 'brass', width: 1.5 },
   opening: { fill: 'paper', stroke: 'ink', width: 1.5 },
+  hole: { fill: 'paper', stroke: 'pencil', width: 0.75 },
   void: { fill: 'board', stroke: 'rule', width: 1 },
   outline: { stroke: 'ink', width: 1.5 },
   hidden: { stroke: 'ink', width: 1, dash: dashes },
@@ -76,6 +77,7 @@ export const symbols: Readonly<Record<MarkName, readonly SymbolStroke[]>> = {
   'moving-pivot': [{ circle: [0, 0, 5], fill: 'paper', stroke: 'ink', width: 1.5 }, ...crossOf(3)],
   'centre-mark': crossOf(6),
   arrowhead: [{ points: [-9, 3, 0, 0, -9, -3], closed: false, stroke: 'pencil', width: 1 }],
+  'grain-arrow': [{ points: [-9, 4, 0, 0, -9, -4], closed: false, stroke: 'brass', width: 1 }],
   sense: [{ points: [-6, 4, 3, 0, -6, -4], closed: true, fill: 'ink', width: 0 }],
   pen: [
     { circle: [0, 0, 6.5], fill: 'chalk', stroke: 'paper', width: 2 },

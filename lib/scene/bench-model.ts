@@ -24,6 +24,8 @@ export interface Readout {
 
 /** The driver's control; `toShown` and `fromShown` are between radians or mm and what is read. */
 export interface DriveControl {
+  /** What its button does: `Turn`, `Lead`. */
+  readonly verb: string;
   readonly label: string;
   /** What the shown number counts: `turns to the right`, `°`, `mm along the drawing`. */
   readonly unit: string;

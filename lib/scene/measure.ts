@@ -1,4 +1,6 @@
-import { write, writeNumber } from '@/lib/quantities/write';
+import { degrees } from '@/lib/geometry/angle';
+import { write, writeNumber, writeParts } from '@/lib/quantities/write';
+import type { Point } from '@/lib/geometry/point';
 import type { BenchSettings } from './bench-spec';
 
 type Units = BenchSettings['units'];
@@ -41,16 +43,6 @@ export function angleText(angle: number, places = 1): string {
   return `${fixedNumber(degrees(angle), places)}°`;
 }
 
-/** Radians as degrees. */
-export function degrees(angle: number): number {
-  return (angle * 180) / Math.PI;
-}
-
-/** Degrees as radians. */
-export function radians(angle: number): number {
-  return (angle * Math.PI) / 180;
-}
-
 /** mm as the number shown in the learner's unit. */
 export function shownLength(mm: number, units: Units): number {
   return units === 'inch' ? mm / millimetresInAnInch : mm;
@@ -69,4 +61,17 @@ export function lengthUnit(units: Units): 'mm' | 'in' {
 /** The nearest multiple of `step`. */
 export function toStep(value: number, step: number): number {
   return Math.round(value / step) * step;
+}
+
+/** A length as it stands in a box whose unit is written beside it. */
+export function boxText(mm: number, units: Units): string {
+  const shown = shownLength(mm, units);
+  return writeParts(shown, lengthUnit(units)).value;
+}
+
+/** Where a point lies, in words of the compass: `120.0 mm east, 40.0 mm north`. */
+export function compassText({ x, y }: Point, units: Units): string {
+  const across = `${lengthText(Math.abs(x), units)} ${x < 0 ? 'west' : 'east'}`;
+  const up = `${lengthText(Math.abs(y), units)} ${y < 0 ? 'south' : 'north'}`;
+  return `${across}, ${up}`;
 }

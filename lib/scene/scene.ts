@@ -22,7 +22,8 @@ export interface Bounds {
  * What a line or a face stands for, after the usual practice of technical drawing:
  *
  * - `timber` the face of a wooden part, `driver` the face of the member that the hand turns,
- *   `opening` a groove or hole, through which the paper shows, `void` a part greyed out of play;
+ *   `opening` a groove through which the paper shows, `hole` a small one bored through a bar,
+ *   `void` a part greyed out of play;
  * - `outline` a visible edge, `hidden` an edge behind something, `centre` a centre line,
  *   `pitch` a pitch circle, `dimension` dimension and extension lines, `grain` the way of the wood;
  * - `tracing` the path left by a marked point, `guide` something to follow or to reach,
@@ -34,6 +35,7 @@ export type Role =
   | 'driver'
   | 'opening'
   | 'void'
+  | 'hole'
   | 'outline'
   | 'hidden'
   | 'centre'
@@ -54,6 +56,7 @@ export type MarkName =
   | 'centre-mark'
   | 'arrowhead'
   | 'sense'
+  | 'grain-arrow'
   | 'pen'
   | 'stylus'
   | 'dot'

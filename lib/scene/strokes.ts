@@ -60,9 +60,16 @@ export function label(
 
 /**
  * A dimension between two points: extension lines, a line with an arrow at each end, the figure in
- * its middle. `offset` mm is how far it stands off, to the left of the way from `from` to `to`.
+ * its middle. `offset` mm is how far it stands off, to the left of the way from `from` to `to`; the
+ * extension lines begin at the share `clear` of it.
  */
-export function dimension(from: Point, to: Point, offset: number, text: string): Shape[] {
+export function dimension(
+  from: Point,
+  to: Point,
+  offset: number,
+  text: string,
+  clear = 0.12,
+): Shape[] {
   const angle = Math.atan2(to.y - from.y, to.x - from.x);
   const out = { x: -Math.sin(angle) * offset, y: Math.cos(angle) * offset };
   const past = 1 + 4 / Math.max(Math.abs(offset), 8);
@@ -72,8 +79,8 @@ export function dimension(from: Point, to: Point, offset: number, text: string):
     Math.abs(offset) < 1e-9
       ? []
       : [
-          line('dimension', moved(from, out, 0.12), moved(from, out, past)),
-          line('dimension', moved(to, out, 0.12), moved(to, out, past)),
+          line('dimension', moved(from, out, clear), moved(from, out, past)),
+          line('dimension', moved(to, out, clear), moved(to, out, past)),
         ];
   return [
     ...extensions,

@@ -55,6 +55,7 @@ export function trainInLine(
 function crankControl(setup: TrainSetup, start: number): DriveControl {
   const teeth = setup.wheels.find(({ arbor }) => arbor === setup.crank)?.teeth ?? 1;
   return {
+    verb: 'Turn',
     label: 'Crank',
     unit: 'turns to the right',
     least: -10,

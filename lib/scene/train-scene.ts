@@ -286,6 +286,7 @@ function trainBounds(setup: TrainSetup, reach: number): Bounds {
   ]);
   const wheels = grown(boundsOf(corners), 2 * module);
   const width = wheels.right - wheels.left;
-  const below = width * rowsHeight(setup.wheels.length);
-  return withAspect({ ...wheels, bottom: wheels.bottom - below }, 1.25, 2.6);
+  const hidden = setup.spec.hide?.includes('teeth') ?? false;
+  const below = hidden ? 0 : width * rowsHeight(setup.wheels.length);
+  return withAspect({ ...wheels, bottom: wheels.bottom - below }, 1.5, 2.6);
 }

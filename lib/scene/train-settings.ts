@@ -2,7 +2,7 @@ import type { Point } from '@/lib/geometry/point';
 import type { Arbor, FreeTrainSpec, PostsTrainSpec, SettingValues, TrainSpec } from './bench-spec';
 import { lengthField, plainField, countField, type Field } from '@/lib/quantities/field';
 import type { ChoiceControl, NumberControl, SettingControl } from './bench-model';
-import { degrees, radians } from './measure';
+import { degrees, radians } from '@/lib/geometry/angle';
 import { handsOn, standard, takes } from './train-setup';
 
 /** Inch learners choose a diametral pitch, teeth for each inch of pitch diameter. */
