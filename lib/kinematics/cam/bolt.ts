@@ -39,13 +39,7 @@ export function boltTravel(groove: BoltGroove, knobAngle: number): BoltOutcome {
   const follows = 1 + (offset / groove.innerRadius) * (groove.gain / groove.slopeAngle / inner);
   if (follows <= 0)
     return finiteResult('boltTravel', { outcome: 'pin-cannot-follow', by: -follows });
-  const start = Math.asin(offset / groove.innerRadius);
-  const knobAt = (place: number) => place + start - Math.asin(offset / grooveRadius(groove, place));
-  const whole = groove.slopeAngle + 2 * groove.dwellAngle;
-  requireWithin('boltTravel', 'knobAngle', knobAngle, 0, knobAt(whole) * (1 + 1e-12));
-  const found = findRoot((place) => knobAt(place) - knobAngle, 0, whole);
-  const place =
-    offset === 0 ? Math.min(knobAngle, whole) : found.outcome === 'found' ? found.x : whole;
+  const place = placeUnder(groove, offset, knobAngle);
   const pinRadius = grooveRadius(groove, place);
   const travel = reach(pinRadius, offset) - inner;
   return finiteResult('boltTravel', {
@@ -138,8 +132,24 @@ export function boltPull(groove: BoltGroove, knobRadius: number): number {
   return finiteResult('boltPull', knobRadius * (groove.slopeAngle / groove.gain));
 }
 
+/** The place of the groove under the pin: on the arcs at once, on the slope by a root. */
+function placeUnder(groove: BoltGroove, offset: number, knobAngle: number): number {
+  const { dwellAngle, slopeAngle } = groove;
+  const ahead = (place: number) =>
+    Math.asin(offset / groove.innerRadius) - Math.asin(offset / grooveRadius(groove, place));
+  const slopeEnd = dwellAngle + slopeAngle;
+  const gone = slopeEnd + ahead(slopeEnd);
+  requireWithin('boltTravel', 'knobAngle', knobAngle, 0, (gone + dwellAngle) * (1 + 1e-12));
+  if (knobAngle <= dwellAngle) return knobAngle;
+  if (knobAngle >= gone) return slopeEnd + (knobAngle - gone);
+  if (offset === 0) return knobAngle;
+  const beyond = (place: number) => place + ahead(place) - knobAngle;
+  const found = findRoot(beyond, dwellAngle, slopeEnd, { tolerance: 1e-15 * slopeEnd });
+  return found.outcome === 'found' ? found.x : Number.NaN;
+}
+
 function reach(radius: number, offset: number): number {
-  return Math.sqrt(radius - offset) * Math.sqrt(radius + offset);
+  return offset === 0 ? radius : Math.sqrt(radius - offset) * Math.sqrt(radius + offset);
 }
 
 function partAt({ dwellAngle, slopeAngle }: BoltGroove, place: number): BoltPlace['part'] {

@@ -1,8 +1,8 @@
 import { findExtremes } from '@/lib/numeric/extremes';
 import { finiteResult } from '@/lib/numeric/finite-result';
-import { requireNonNegative, requireWithin } from '@/lib/numeric/require';
+import { requireNonNegative } from '@/lib/numeric/require';
 import { rolledCurve } from './rolled-curve';
-import { type Rise, requireRise, riseMotion } from './rise';
+import { type Rise, requireRise, requireTurned, riseMotion } from './rise';
 import { type OutOfReach, type TranslatingRoller, restHeight } from './translating-roller';
 
 /** A radius of curvature, above 0 where the curve bulges outward. */
@@ -49,7 +49,7 @@ export function pitchCurvature(
   turned: number,
 ): PitchCurvature {
   requireRise('pitchCurvature', rise);
-  requireWithin('pitchCurvature', 'turned', turned, 0, rise.angle);
+  requireTurned('pitchCurvature', rise, turned);
   const rest = restHeight(follower);
   if (rest.outcome === 'out-of-reach') return rest;
   const curvature = curvatureOnRise(rise, follower.offset, rest.height, turned);

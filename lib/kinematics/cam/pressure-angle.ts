@@ -2,7 +2,7 @@ import { findExtremes } from '@/lib/numeric/extremes';
 import { finiteResult } from '@/lib/numeric/finite-result';
 import { requireFinite, requireNonNegative, requireWithin } from '@/lib/numeric/require';
 import { peakFactors } from './peak-factors';
-import { type Rise, requireRise, riseMotion } from './rise';
+import { type Rise, requireRise, requireTurned, riseMotion } from './rise';
 import { type OutOfReach, type TranslatingRoller, restHeight } from './translating-roller';
 
 /** How far the cam's push leans from the follower's line. */
@@ -28,7 +28,7 @@ export function pressureAngle(
   turned: number,
 ): PressureAngle {
   requireRise('pressureAngle', rise);
-  requireWithin('pressureAngle', 'turned', turned, 0, rise.angle);
+  requireTurned('pressureAngle', rise, turned);
   const rest = restHeight(follower);
   if (rest.outcome === 'out-of-reach') return rest;
   const { position, velocity } = riseMotion(rise, turned);

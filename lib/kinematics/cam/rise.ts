@@ -27,9 +27,9 @@ export interface Rise {
  */
 export function riseMotion(rise: Rise, turned: number, speed = 1): Motion {
   requireRise('riseMotion', rise);
-  requireWithin('riseMotion', 'turned', turned, 0, rise.angle);
+  requireTurned('riseMotion', rise, turned);
   requireFinite('riseMotion', 'speed', speed);
-  const f = motionLaw(rise.law, turned / rise.angle);
+  const f = motionLaw(rise.law, Math.min(1, turned / rise.angle));
   const pace = speed / rise.angle;
   return finiteResult('riseMotion', {
     position: rise.lift * f.position,
@@ -77,6 +77,14 @@ export function floatSpeed(rise: Rise, pull: number): FloatSpeed {
   if (slowing === 'infinite') return { outcome: 'thrown-at-any-speed' };
   const speed = rise.angle * Math.sqrt(pull / rise.lift / -slowing);
   return finiteResult('floatSpeed', { outcome: 'floats-above', speed });
+}
+
+/** A place reckoned in another way may lie past the end of a rise by its last digits. */
+const endSlack = 1 + 1e-12;
+
+/** Refuses a place outside a rise. */
+export function requireTurned(caller: string, rise: Rise, turned: number): void {
+  requireWithin(caller, 'turned', turned, 0, rise.angle * endSlack);
 }
 
 /** Refuses a rise that is none: the guard of every function that takes one. */
