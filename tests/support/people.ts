@@ -1,0 +1,16 @@
+import { demoAddress, demoAdministrator, demoClasses, demoPassword } from '../../scripts/demo/people.data';
+
+/** Who the end-to-end tests sign in as: people of the demo workshop. */
+const [tuesday] = demoClasses;
+if (!tuesday) throw new Error('The demo workshop has no class.');
+const [firstLearner] = tuesday.learners;
+const [instructor] = tuesday.instructors;
+if (!firstLearner || !instructor) throw new Error('The first class of the demo is empty.');
+
+export const password = demoPassword;
+export const demo = {
+  administrator: demoAddress(demoAdministrator.name),
+  instructor: demoAddress(instructor),
+  learner: demoAddress(firstLearner.name),
+  className: tuesday.name,
+} as const;
