@@ -78,6 +78,7 @@ export async function openRound(
   if (standing !== null && (!standing.closed || definition.kind === 'prediction')) {
     return viewRound(definition, standing);
   }
+  if (standing === null) await closeOlder(viewer, definition, now);
   await insertRound(viewer, definition, units, now, seed);
   const opened = await findStanding(viewer, definition, units);
   return opened === null ? null : viewRound(definition, opened);
@@ -154,8 +155,7 @@ function findStanding(
 
 /**
  * Draws a variant and keeps it with the words in which it was put, unless a round is open already.
- * Rounds of an older version can no longer be marked and are closed. Hints count across both
- * units: a round opened beside another begins with the hints taken there.
+ * Hints count across both units: a round opened beside another begins with the hints taken there.
  */
 async function insertRound(
   { learnerId }: Viewer,
@@ -170,34 +170,37 @@ async function insertRound(
     prompt: definition.prompt(variant),
     givens: definition.givens(variant),
   };
-  await transact(async (transaction) => {
-    await rows(
-      `update rounds set closed_at = greatest($4, opened_at)
-       where learner_id = $1 and exercise_id = $2 and definition_version <> $3
-         and closed_at is null
-       returning id`,
-      [learnerId, definition.id, definition.version, now],
-      transaction,
-    );
-    await rows(
-      `insert into rounds (learner_id, exercise_id, definition_version, units, seed, variant,
-         shown, opened_at, hints_taken)
-       select $1, $2, $3, $4, $5, $6::jsonb, $7::jsonb, $8, coalesce((
-         select max(o.hints_taken) from rounds o
-         where o.learner_id = $1 and o.exercise_id = $2 and o.closed_at is null), 0)
-       on conflict (learner_id, exercise_id, units) where closed_at is null do nothing
-       returning id`,
-      [
-        learnerId,
-        definition.id,
-        definition.version,
-        units,
-        seed,
-        JSON.stringify(variant),
-        JSON.stringify(shown),
-        now,
-      ],
-      transaction,
-    );
-  });
+  await rows(
+    `insert into rounds (learner_id, exercise_id, definition_version, units, seed, variant,
+       shown, opened_at, hints_taken)
+     select $1, $2, $3, $4, $5, $6::jsonb, $7::jsonb, $8, coalesce((
+       select max(o.hints_taken) from rounds o
+       where o.learner_id = $1 and o.exercise_id = $2 and o.closed_at is null), 0)
+     on conflict (learner_id, exercise_id, units) where closed_at is null do nothing
+     returning id`,
+    [
+      learnerId,
+      definition.id,
+      definition.version,
+      units,
+      seed,
+      JSON.stringify(variant),
+      JSON.stringify(shown),
+      now,
+    ],
+  );
+}
+
+/** Rounds of an older version of their exercise can no longer be marked, and are closed. */
+async function closeOlder(
+  { learnerId }: Viewer,
+  { id, version }: ExerciseDefinition,
+  now: Date,
+): Promise<void> {
+  await rows(
+    `update rounds set closed_at = greatest($4, opened_at)
+     where learner_id = $1 and exercise_id = $2 and definition_version <> $3 and closed_at is null
+     returning id`,
+    [learnerId, id, version, now],
+  );
 }
