@@ -90,10 +90,11 @@ export interface EllipseFoci {
  */
 export function ellipseFoci(size: EllipseSize): EllipseFoci {
   const [a, b] = ordered('ellipseFoci', size);
-  const focalDistance = Math.sqrt(a - b) * Math.sqrt(a + b);
+  const eccentricity = a === 0 ? 0 : Math.sqrt((1 - b / a) * (1 + b / a));
+  const focalDistance = a * eccentricity;
   return {
     focalDistance,
-    eccentricity: a === 0 ? 0 : focalDistance / a,
+    eccentricity,
     stringLoop: 2 * (a + focalDistance),
   };
 }
