@@ -56,10 +56,7 @@ export function beltRoundMany(wheels: readonly BeltWheel[], windings: 0 | 1 = 1)
     if ('overlap' in run) return { outcome: 'wheels-meet', wheel: index, overlap: run.overlap };
     runs.push(run);
   }
-  const wraps = wheels.map((wheel, index) => {
-    const into = runs.at(index - 1)?.direction ?? 0;
-    return wrapped(signOf(wheel) * ((runs[index]?.direction ?? 0) - into));
-  });
+  const wraps = wrapsOf(wheels, runs);
   const around = wheels.reduce((sum, wheel, index) => sum + signOf(wheel) * (wraps[index] ?? 0), 0);
   if (wheels.length > 2 && Math.abs(around - windings * turn) > turnTolerance) {
     const wheel = wraps.indexOf(Math.max(...wraps));
@@ -96,8 +93,23 @@ function runBetween(a: BeltWheel, b: BeltWheel): DirectedRun | { readonly overla
   };
 }
 
-function signOf({ side }: BeltWheel): number {
-  return side === 'right' ? -1 : 1;
+/** How far the belt turns on each wheel, from the run before it to the run after it. */
+function wrapsOf(wheels: readonly BeltWheel[], runs: readonly DirectedRun[]): readonly number[] {
+  const crossedPair = wheels.length === 2 && wheels.some(isOnRight) && !wheels.every(isOnRight);
+  return wheels.map((wheel, index) => {
+    const [into, out] = [runs.at(index - 1)?.direction ?? 0, runs[index]?.direction ?? 0];
+    const wrap = wrapped(signOf(wheel) * (out - into));
+    // Two wheels that touch inside a crossed belt are wrapped all round, which is not the same as none.
+    return crossedPair && wrap < Math.PI ? turn : wrap;
+  });
+}
+
+function isOnRight({ side }: BeltWheel): boolean {
+  return side === 'right';
+}
+
+function signOf(wheel: BeltWheel): number {
+  return isOnRight(wheel) ? -1 : 1;
 }
 
 function signedRadius(wheel: BeltWheel): number {

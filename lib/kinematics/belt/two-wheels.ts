@@ -33,7 +33,7 @@ export type CentresForLoop =
   | {
       readonly outcome: 'centres';
       readonly distance: number;
-      /** From the short formula; the same where it has no answer. */
+      /** From the short formula. */
       readonly shortDistance: number;
     }
   /** Even with the wheels touching the loop lacks `lacking`. */
@@ -89,7 +89,7 @@ export function centresForLoop(
   if (length < least) return { outcome: 'loop-too-short', lacking: least - length };
   const found = findRoot((distance) => lengthAt(distance) - length, R + r, R + r + length / 2);
   const distance = found.outcome === 'found' ? found.x : R + r;
-  return { outcome: 'centres', distance, shortDistance: shortCentres(belt, length) ?? distance };
+  return { outcome: 'centres', distance, shortDistance: shortCentres(belt, length) };
 }
 
 /**
@@ -124,11 +124,11 @@ export function bandsawBlade(wheelDiameter: number, centreDistance: number): num
   return Math.PI * wheelDiameter + 2 * centreDistance;
 }
 
-function shortCentres(belt: Omit<TwoWheels, 'centreDistance'>, length: number): number | null {
+/** The square is never negative for a loop that goes round touching wheels. */
+function shortCentres(belt: Omit<TwoWheels, 'centreDistance'>, length: number): number {
   const across = belt.lay === 'open' ? belt.first - belt.second : belt.first + belt.second;
   const left = 4 * length - 2 * Math.PI * (belt.first + belt.second);
-  const square = left * left - 32 * across * across;
-  return square < 0 ? null : (left + Math.sqrt(square)) / 16;
+  return (left + Math.sqrt(left * left - 32 * across * across)) / 16;
 }
 
 function radii(

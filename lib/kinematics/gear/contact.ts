@@ -31,7 +31,13 @@ export type ContactOutcome =
   | { readonly outcome: 'too-close'; readonly overlap: number };
 
 export type RingContactOutcome =
-  | { readonly outcome: 'contact'; readonly path: number; readonly contactRatio: number }
+  | {
+      readonly outcome: 'contact';
+      readonly path: number;
+      readonly contactRatio: number;
+      /** How far the ring's tips reach past the pinion's last point of involute; 0 if they do not. */
+      readonly interference: number;
+    }
   /** The ring's tips reach `inside` its base circle, where it has no involute. */
   | { readonly outcome: 'tip-inside-base-circle'; readonly inside: number };
 
@@ -109,9 +115,15 @@ export function ringContact(spec: PairSpec): RingContactOutcome {
   }
   const pinionTip = pair.module * (pair.firstTeeth / 2 + pair.addendum);
   const line = ((pair.module * difference) / 2) * Math.sin(pair.pressureAngle);
-  const path = tangent(pinionTip, pair.firstBase) - tangent(ringTip, pair.secondBase) + line;
+  const ringReach = tangent(ringTip, pair.secondBase);
+  const path = tangent(pinionTip, pair.firstBase) - ringReach + line;
   const basePitch = Math.PI * pair.module * Math.cos(pair.pressureAngle);
-  return { outcome: 'contact', path, contactRatio: path / basePitch };
+  return {
+    outcome: 'contact',
+    path,
+    contactRatio: path / basePitch,
+    interference: Math.max(0, line - ringReach),
+  };
 }
 
 /** Length of the tangent from a point at `radius` to the circle of radius `base`; 0 inside it. */

@@ -12,6 +12,8 @@ export interface LanternOutlineSpec extends LanternSpec {
   readonly steps?: number;
 }
 
+/** Fine enough to bracket where hollow and flank cross. */
+const searchSteps = 64;
 /** Height that is left above the last point of contact, in pitches (common practice). */
 const spareHeight = 0.04;
 
@@ -31,7 +33,7 @@ export function lanternWheelOutline(spec: LanternOutlineSpec): readonly Point[] 
   const steps = requireCount('lanternWheelOutline', 'steps', spec.steps ?? 12);
   const { wheelRadius, toothThickness } = lanternSizes(spec);
   requirePositive('lanternWheelOutline', 'tooth thickness', toothThickness);
-  const side = [...hollow(spec, wheelRadius, steps), ...flank(spec, steps)];
+  const side = sideOf(spec, wheelRadius, steps);
   const pitch = (2 * Math.PI) / spec.wheelTeeth;
   // The side runs up from the middle of the space at angle 0; the tooth's middle is at pitch/2.
   const tooth = [
@@ -44,22 +46,39 @@ export function lanternWheelOutline(spec: LanternOutlineSpec): readonly Point[] 
   return outline.flat();
 }
 
-/** A quarter of the hollow, from its bottom to the pitch circle. */
-function hollow(spec: LanternSpec, wheelRadius: number, steps: number): readonly Point[] {
+/** From the bottom of the hollow up one flank to the tip, the space's middle on +x. */
+function sideOf(spec: LanternOutlineSpec, wheelRadius: number, steps: number): readonly Point[] {
   const radius = (spec.pinDiameter + (spec.play ?? 0)) / 2;
-  return Array.from({ length: steps }, (_, step) => {
-    const angle = (Math.PI / 2) * (step / steps);
+  const play = (spec.play ?? 0) / (2 * wheelRadius);
+  const flankAt = (roll: number) => turned(lanternPoint(spec, roll).flank, play);
+  const outOfHollow = (roll: number): number => {
+    const { x, y } = flankAt(roll);
+    return Math.hypot(x - wheelRadius, y) - radius;
+  };
+  // At its very foot the flank turns back into the hollow; the side changes over where they cross.
+  const end = lastRoll(spec);
+  const start = firstAbove(outOfHollow, end);
+  const joint = flankAt(start);
+  const last = Math.atan2(joint.y, wheelRadius - joint.x);
+  const hollow = Array.from({ length: steps }, (_, step) => {
+    const angle = (last * step) / steps;
     return { x: wheelRadius - radius * Math.cos(angle), y: radius * Math.sin(angle) };
   });
+  const flank = Array.from({ length: steps + 1 }, (_, step) =>
+    flankAt(start + ((end - start) * step) / steps),
+  );
+  return [...hollow, ...flank];
 }
 
-function flank(spec: LanternOutlineSpec, steps: number): readonly Point[] {
-  const { wheelRadius } = lanternSizes(spec);
-  const play = (spec.play ?? 0) / (2 * wheelRadius);
-  const end = lastRoll(spec);
-  return Array.from({ length: steps + 1 }, (_, step) =>
-    turned(lanternPoint(spec, (end * step) / steps).flank, play),
-  );
+/** Where a function that starts at or below nought first rises above it, from 0 to `end`. */
+function firstAbove(f: (roll: number) => number, end: number): number {
+  for (let step = 1; step <= searchSteps; step += 1) {
+    const roll = (end * step) / searchSteps;
+    if (f(roll) <= 0) continue;
+    const found = findRoot(f, (end * Math.max(step - 1, 1e-3)) / searchSteps, roll);
+    return found.outcome === 'found' ? found.x : (end * (step - 1)) / searchSteps;
+  }
+  return end;
 }
 
 /** How far the lantern must roll for the flank to reach the tip. */
