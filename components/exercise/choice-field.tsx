@@ -13,10 +13,18 @@ interface ChoiceFieldProps {
   readonly chosen: readonly string[];
   readonly onChange: (chosen: readonly string[]) => void;
   readonly checked: boolean;
+  /** True once the choice stands and is only shown. */
+  readonly disabled?: boolean;
 }
 
 /** One or several of some options, each in words or as a live bench. */
-export function ChoiceField({ part, chosen, onChange, checked }: ChoiceFieldProps) {
+export function ChoiceField({
+  part,
+  chosen,
+  onChange,
+  checked,
+  disabled = false,
+}: ChoiceFieldProps) {
   const id = useId();
   const missing = checked && chosen.length === 0;
   const drawn = part.options.some((option) => option.figure !== undefined);
@@ -26,7 +34,11 @@ export function ChoiceField({ part, chosen, onChange, checked }: ChoiceFieldProp
     onChange(without.length === chosen.length ? [...chosen, option] : without);
   };
   return (
-    <fieldset className="w-full" aria-describedby={missing ? `${id}-missing` : undefined}>
+    <fieldset
+      disabled={disabled}
+      className="w-full min-w-0"
+      aria-describedby={missing ? `${id}-missing` : undefined}
+    >
       <legend className="mb-2 text-base font-semibold">{part.label}</legend>
       <div className={clsx('grid gap-2', drawn && 'gap-5 lg:grid-cols-2')}>
         {part.options.map((option) => (

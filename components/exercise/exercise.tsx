@@ -102,8 +102,7 @@ function SignedOut({
     <>
       {sample === null ? null : <Question round={sample} />}
       <p className="mt-4 max-w-measure text-pencil">
-        Read and drive whatever you like; answering needs an account, since every learner gets
-        numbers of their own.
+        These numbers are only to look at: answering needs an account, and draws you your own.
       </p>
       <ButtonLink href={signInHref} variant="secondary" className="mt-2">
         Sign in to answer

@@ -8,9 +8,12 @@ export function GivensTable({
 }) {
   if (givens.length === 0) return null;
   return (
-    <dl className="mt-4 grid grid-cols-[repeat(auto-fill,minmax(min(100%,11rem),1fr))] gap-px border border-rule bg-rule">
+    <dl className="mt-4 flex max-w-4xl flex-wrap overflow-hidden border-t border-l border-rule">
       {givens.map((given) => (
-        <div key={`${given.symbol} ${given.label}`} className="bg-paper px-3 py-2">
+        <div
+          key={`${given.symbol} ${given.label}`}
+          className="min-w-36 flex-1 basis-36 border-r border-b border-rule bg-paper px-3 py-2"
+        >
           <dt className="text-[0.9375rem] text-pencil">
             {given.label}
             {given.symbol === '' ? null : <i className="pl-1.5 font-mono">{given.symbol}</i>}

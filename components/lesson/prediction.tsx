@@ -157,15 +157,15 @@ function Guess({ round, done, busy = false, onGuess, children }: GuessProps) {
   return (
     <form onSubmit={commit}>
       <p className="mb-4 max-w-measure whitespace-pre-line">{round.prompt}</p>
-      <fieldset disabled={done} className="max-w-2xl">
-        <legend className="sr-only">Your guess</legend>
+      <div className="max-w-2xl">
         <ChoiceField
           part={part}
           chosen={chosen}
           onChange={(next) => change(part.key, [...next])}
           checked={checked}
+          disabled={done}
         />
-      </fieldset>
+      </div>
       {done ? null : (
         <div className="mt-4 flex flex-wrap gap-3">
           <Button type="submit" aria-disabled={busy || undefined}>

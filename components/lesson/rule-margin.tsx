@@ -40,7 +40,7 @@ export function RuleMargin({ sections }: RuleMarginProps) {
               href={`#${section.id}`}
               aria-current={index === place.index ? 'location' : undefined}
               className={clsx(
-                'group relative flex h-full min-h-6 items-start border-t border-ink pr-6 font-mono text-[0.875rem] leading-tight no-underline lg:pt-1',
+                'group relative flex h-full min-h-6 items-start font-mono text-[0.875rem] leading-tight no-underline before:absolute before:top-0 before:right-0 before:h-px before:w-full before:bg-ink lg:pt-1 lg:pr-8 lg:before:w-7',
                 index === place.index ? 'font-semibold text-ink' : 'text-pencil',
               )}
             >
@@ -53,14 +53,14 @@ export function RuleMargin({ sections }: RuleMarginProps) {
       </ol>
       <div
         aria-hidden="true"
-        className="pointer-events-none absolute -right-1.5 h-3.5 w-6 rounded border border-brass bg-brass-fill lg:w-11"
+        className="pointer-events-none absolute -right-1.5 h-3.5 w-6 rounded border border-brass bg-brass-fill lg:w-8"
         style={{ top: `calc(${(place.along * 100).toFixed(2)}% - 7px)` }}
       />
     </nav>
   );
 }
 
-/** Follows the reader; the eye is taken to be a third of the way down the window. */
+/** Follows the reader's eye down the page. */
 function useReaderPlace(sections: RuleMarginProps['sections']): Place {
   const [place, setPlace] = useState<Place>({ index: 0, along: 0 });
   useEffect(() => {
@@ -73,11 +73,14 @@ function useReaderPlace(sections: RuleMarginProps['sections']): Place {
           ? []
           : [{ id, top: element.getBoundingClientRect().top + window.scrollY }];
       });
-      const bottom = document.documentElement.scrollHeight - window.innerHeight;
-      const far = bottom > 0 ? window.scrollY / bottom : 0;
-      // At the very bottom the line reaches the end, however short the last part is.
-      const line = window.scrollY + window.innerHeight * (0.33 + 0.67 * Math.max(0, far * 5 - 4));
-      setPlace(readerPlace(tops, line, document.documentElement.scrollHeight));
+      const { scrollHeight } = document.documentElement;
+      const bottom = Math.max(1, scrollHeight - window.innerHeight);
+      // The eye starts at the top of the page, settles a third of the way down the window, and
+      // reaches the foot of the last part with it, however short that is.
+      const settled = Math.min(window.scrollY, window.innerHeight / 3);
+      const ending =
+        Math.max(0, (window.scrollY / bottom) * 5 - 4) * (window.innerHeight - settled);
+      setPlace(readerPlace(tops, window.scrollY + settled + ending, scrollHeight));
     };
     const follow = () => {
       if (frame === 0) frame = requestAnimationFrame(measure);

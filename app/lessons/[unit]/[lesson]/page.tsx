@@ -31,9 +31,9 @@ export default async function LessonPage({ params }: Props) {
   const signInHref = `/sign-in?from=${encodeURIComponent(lessonPath(lesson))}`;
   return (
     <Page>
-      <div className="grid grid-cols-[1.25rem_minmax(0,1fr)] gap-x-4 lg:grid-cols-[6.5rem_minmax(0,1fr)] lg:gap-x-7 print:block">
+      <div className="grid grid-cols-[1.25rem_minmax(0,1fr)] gap-x-4 lg:grid-cols-[7.25rem_minmax(0,1fr)] lg:gap-x-7 print:block">
         <RuleMargin sections={lesson.sections} />
-        <article>
+        <article className="[&_.katex-display]:pl-6 [&_.katex-display]:text-left [&_.katex-display>.katex]:text-left">
           <PageHeading eyebrow={`Unit ${lesson.unitNumber} · ${lesson.unitTitle}`}>
             {lesson.title}
           </PageHeading>
