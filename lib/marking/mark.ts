@@ -3,7 +3,14 @@ import { isCurrent } from './draw';
 import { markChoice } from './mark-choice';
 import { markNumber } from './mark-number';
 import { markSetting } from './mark-setting';
-import type { LearnersResponse, Marking, Refused, Verdict, WeighedPart } from './marking';
+import type {
+  LearnersResponse,
+  MarkedPart,
+  Marking,
+  Refused,
+  Verdict,
+  WeighedPart,
+} from './marking';
 import { trueValues } from './values';
 
 /**
@@ -77,7 +84,7 @@ function conclude(
     outcome: 'marked',
     verdict,
     score,
-    parts: parts.map(({ weight: _weight, skills: _skills, ...marked }) => marked),
+    parts: parts.map((part) => shown(part, prediction)),
     ...(prediction
       ? {
           message: 'Noted. Your answer is kept.',
@@ -90,6 +97,12 @@ function conclude(
       right: parts.every((part) => part.right || !part.skills.includes(skill)),
     })),
   };
+}
+
+/** A prediction is answered by the bench: the slip is noted, and its advice is not given. */
+function shown(part: WeighedPart, prediction: boolean): MarkedPart {
+  const { weight: _weight, skills: _skills, message, ...marked } = part;
+  return prediction || message === undefined ? marked : { ...marked, message };
 }
 
 function words(verdict: Verdict, parts: readonly WeighedPart[]) {

@@ -10,7 +10,7 @@ import { givenLength, givenNumber } from '../sizes';
 export function givenToothSize(size: number, units: UnitSystem): Given {
   return units === 'metric'
     ? givenLength('m', 'module', size, units)
-    : givenNumber('P', 'teeth per inch of diameter', size, '1/in');
+    : givenNumber('P', 'teeth per inch of diameter', size);
 }
 
 /** The module in the person's own unit: as given, or 1/P. */
