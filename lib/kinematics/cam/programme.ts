@@ -72,7 +72,7 @@ export function programmeOf(segments: readonly Segment[]): ProgrammeOutcome {
   const programme = {
     placed,
     remaining: remaining < angleTolerance ? 0 : remaining,
-    closingStep: -startHeight,
+    closingStep: 0 - startHeight,
     greatestLift,
   };
   return finiteResult('programmeOf', { outcome: 'complete', programme });

@@ -53,12 +53,12 @@ export function limitDeviations(nominal: number, designation: string): Deviation
   if (under !== undefined) {
     return isHole
       ? { outcome: 'limits', upper: under + width, lower: under }
-      : { outcome: 'limits', upper: -under, lower: -under - width };
+      : { outcome: 'limits', upper: 0 - under, lower: 0 - under - width };
   }
   const over = isHole ? holeAbove(name, grade, nominal) : shaftAbove(name, grade, nominal);
   if (over === undefined) return missing;
   return isHole
-    ? { outcome: 'limits', upper: -over, lower: -over - width }
+    ? { outcome: 'limits', upper: 0 - over, lower: 0 - over - width }
     : { outcome: 'limits', upper: over + width, lower: over };
 }
 

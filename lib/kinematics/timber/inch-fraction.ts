@@ -28,6 +28,9 @@ export function millimetresFromInches(length: InchFraction): number {
   return finiteResult('millimetresFromInches', negative ? -size : size);
 }
 
+/** A length midway between two marks may lie under it by its last digits. */
+const midwayTolerance = 1e-9;
+
 /** The nearest mark of a rule, and how far it lies beyond the length, in millimetres. */
 export interface NearestInchFraction extends InchFraction {
   readonly error: number;
@@ -48,7 +51,7 @@ export function nearestInchFraction(millimetres: number, finest: number): Neares
     throw new RangeError(`nearestInchFraction: finest is ${finest}; expected a power of two`);
   }
   const size = Math.abs(millimetres);
-  const marks = Math.round((size / INCH) * finest);
+  const marks = Math.floor((size / INCH) * finest + 0.5 + midwayTolerance);
   requireCount('nearestInchFraction', 'marks', marks, 0);
   const negative = millimetres < 0 && marks > 0;
   const nearest = (INCH * marks) / finest;

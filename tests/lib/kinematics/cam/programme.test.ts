@@ -21,7 +21,7 @@ describe('a programme of a turn', () => {
   it('leaves the remainder of the turn as a dwell', () => {
     const { remaining, closingStep, greatestLift } = programme();
     expect(remaining / degree).toBeCloseTo(120, 10);
-    expect(closingStep).toBe(-0);
+    expect(closingStep).toBe(0);
     expect(greatestLift).toBe(20);
   });
 
