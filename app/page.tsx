@@ -1,7 +1,9 @@
 import { ButtonLink } from '@/components/ui/button';
 import { Page } from '@/components/ui/page';
-import { TickedRule } from '@/components/ui/page-heading';
 import { lessonPath, listLessons } from '@/content/lessons/front-matter';
+import { LandingAnswer } from './_components/landing-answer';
+import { LandingHero } from './_components/landing-hero';
+import { LandingPegs } from './_components/landing-pegs';
 import { LandingSteps } from './_components/landing-steps';
 import { LessonCard } from './lessons/_components/lesson-card';
 
@@ -10,28 +12,10 @@ export default function LandingPage() {
   const first = lessons[0];
   return (
     <Page>
-      <div className="grid items-start gap-10">
-        <div>
-          <h1 className="mb-4 text-[clamp(2.5rem,1.5rem+4.5vw,3.75rem)] leading-[1.08]">
-            See it turn.
-            <br />
-            Then cut it.
-          </h1>
-          <TickedRule />
-          <p className="mt-7 mb-6 max-w-measure text-xl text-pencil">
-            Hornbeam teaches woodworkers the mechanisms behind moving things: toothed wheels, ovals,
-            copies drawn larger. Turn them by hand, work out the sizes, be told where an answer went
-            wrong, and go to the bench with a drawing that runs.
-          </p>
-          <div className="flex flex-wrap gap-3">
-            {first ? <ButtonLink href={lessonPath(first)}>Open the first lesson</ButtonLink> : null}
-            <ButtonLink href="/sign-in" variant="secondary">
-              Sign in
-            </ButtonLink>
-          </div>
-        </div>
-      </div>
+      <LandingHero firstLesson={first ? lessonPath(first) : '/lessons'} />
       <LandingSteps />
+      <LandingAnswer />
+      <LandingPegs />
       <section className="mt-20">
         <h2 className="mb-3">The first lessons</h2>
         <ul className="border-t border-ink">

@@ -3,6 +3,8 @@ import { Page } from '@/components/ui/page';
 import { PageHeading } from '@/components/ui/page-heading';
 import { Section } from '@/components/ui/panel';
 import { listLessons } from '@/content/lessons/front-matter';
+import { currentViewer } from '@/lib/auth/viewer';
+import { listPegs } from '@/lib/data/progress';
 import { LessonCard } from './_components/lesson-card';
 import { groupByUnit, unitsToCome } from './_components/units';
 
@@ -10,6 +12,8 @@ export const metadata: Metadata = { title: 'Lessons' };
 
 export default async function LessonsPage() {
   const lessons = listLessons();
+  const viewer = await currentViewer();
+  const pegs = viewer ? await listPegs(viewer) : [];
   return (
     <Page>
       <PageHeading>Lessons</PageHeading>
@@ -21,7 +25,11 @@ export default async function LessonsPage() {
         <Section key={unit.number} title={`${unit.number}. ${unit.title}`}>
           <ul className="border-t border-ink">
             {unit.lessons.map((lesson) => (
-              <LessonCard key={lesson.id} lesson={lesson} />
+              <LessonCard
+                key={lesson.id}
+                lesson={lesson}
+                pegs={pegs.filter((peg) => lesson.skills.includes(peg.skill))}
+              />
             ))}
           </ul>
         </Section>

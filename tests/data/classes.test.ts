@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { findOwnAddress } from '@/lib/data/account';
 import { createAssignment, listAssignments, withdrawAssignment } from '@/lib/data/assignments';
 import { createAttempt } from '@/lib/data/attempts';
 import { findClassProgress } from '@/lib/data/class-progress';
@@ -74,7 +75,7 @@ describe('classes', () => {
     const made = await createClass(workshop.administrator, { name: ' The slip ' });
     const id = made ?? '';
     const person = await makeViewer('Mia Member', []);
-    const { email } = (await findOwn(person)) ?? { email: '' };
+    const email = (await findOwnAddress(person)) ?? '';
     expect(await addMember(workshop.instructor, id, { email, role: 'learner' })).toBe(
       'not allowed',
     );
@@ -298,11 +299,6 @@ describe('answers and slips', () => {
     expect(findFreshKey(instructor, 'no-such-exercise')).toBeNull();
   });
 });
-
-async function findOwn(viewer: Viewer): Promise<{ email: string } | null> {
-  const { findAccount } = await import('@/lib/data/account');
-  return findAccount(viewer);
-}
 
 /** How many statements the work sends to the database. */
 async function queriesOf(work: () => Promise<unknown>): Promise<number> {

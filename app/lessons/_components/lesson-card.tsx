@@ -1,4 +1,6 @@
 import Link from 'next/link';
+import { BenchPicture } from '@/app/_components/bench-picture';
+import { pictureOf } from '@/app/_components/pictures';
 import { PegRail, type Peg } from '@/components/progress/peg-rail';
 import type { FrontMatter } from '@/content/lessons/front-matter-schema';
 import { lessonPath } from '@/content/lessons/front-matter';
@@ -12,7 +14,10 @@ interface LessonCardProps {
 /** A lesson in a list: its drawing, what it is about, and the pegs of its skills. */
 export function LessonCard({ lesson, pegs }: LessonCardProps) {
   return (
-    <li className="grid gap-4 border-b border-rule py-6">
+    <li className="grid gap-4 border-b border-rule py-6 sm:grid-cols-[15rem_1fr] sm:gap-8">
+      <div className="max-w-60 self-start border border-rule p-2">
+        <BenchPicture spec={pictureOf(lesson.bench)} />
+      </div>
       <div>
         <h3 className="mb-1">
           <Link href={lessonPath(lesson)} prefetch={false} className="link link-target">

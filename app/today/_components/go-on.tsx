@@ -17,7 +17,7 @@ export function GoOn({ today }: Readonly<{ today: Today }>) {
       <p className="mb-4">
         <PegRail pegs={pegs} words />
       </p>
-      <ButtonLink href={last ? `${place.path}#answer` : place.path}>
+      <ButtonLink href={last ? `${place.path}#${last.exerciseId}` : place.path}>
         {last ? 'Go on' : 'Open the lesson'}
       </ButtonLink>
     </Panel>

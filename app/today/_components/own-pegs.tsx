@@ -14,8 +14,9 @@ export function OwnPegs({ lessons }: Readonly<{ lessons: readonly LessonPegs[] }
             {lesson.title}
           </Link>
           <details>
-            <summary className="flex min-h-11 items-center">
+            <summary className="flex min-h-11 list-none flex-wrap items-center gap-x-4 [&::-webkit-details-marker]:hidden">
               <PegRail pegs={lesson.pegs} words />
+              <span className="link text-[0.9375rem]">skill by skill</span>
             </summary>
             <PegList pegs={lesson.pegs} />
           </details>

@@ -1,0 +1,32 @@
+import { Bench } from '@/components/bench/bench';
+import { ButtonLink } from '@/components/ui/button';
+import { TickedRule } from '@/components/ui/page-heading';
+import { landingTrain } from './pictures';
+
+/** The first look: what Hornbeam is for, one way in, and a mechanism to turn at once. */
+export function LandingHero({ firstLesson }: Readonly<{ firstLesson: string }>) {
+  return (
+    <div className="grid items-start gap-x-12 gap-y-4 lg:grid-cols-[1fr_32rem]">
+      <div>
+        <h1 className="mb-4 text-[clamp(2.5rem,1.5rem+4.5vw,3.75rem)] leading-[1.08]">
+          See it turn.
+          <br />
+          Then cut it.
+        </h1>
+        <TickedRule />
+        <p className="mt-7 mb-6 max-w-measure text-xl text-pencil">
+          Hornbeam teaches woodworkers the mechanisms behind moving things: toothed wheels, ovals,
+          copies drawn larger. Turn them by hand, work out the sizes, be told where an answer went
+          wrong, and go to the bench with a drawing that runs.
+        </p>
+        <div className="flex flex-wrap gap-3">
+          <ButtonLink href={firstLesson}>Open the first lesson</ButtonLink>
+          <ButtonLink href="/sign-in" variant="secondary">
+            Sign in
+          </ButtonLink>
+        </div>
+      </div>
+      <Bench spec={landingTrain} title="A train of toothed wheels" />
+    </div>
+  );
+}

@@ -1,0 +1,91 @@
+'use client';
+
+import { useEffect, useRef, useState, type ReactNode } from 'react';
+import { Button } from '@/components/ui/button';
+import type { BenchSpec } from '@/lib/scene/bench-spec';
+import { driveAfter, driveAfterStep } from './moving-drive';
+
+interface MovingPictureProps {
+  readonly spec: BenchSpec;
+  /** Says which drawing the buttons move. */
+  readonly name: string;
+  /** The drawing as the server made it; it stands until something moves. */
+  readonly children: ReactNode;
+}
+
+/** A small drawing that turns when asked, steps when asked, and rests while nobody sees it. */
+export function MovingPicture({ spec, name, children }: MovingPictureProps) {
+  const [picture, setPicture] = useState<string | null>(null);
+  const [running, setRunning] = useState(false);
+  const drive = useRef(spec.drive ?? 0);
+  const frame = useRef<HTMLDivElement>(null);
+
+  const draw = async (value: number) => {
+    const { staticPicture } = await import('@/lib/scene/static-picture');
+    drive.current = value;
+    setPicture(staticPicture({ ...spec, drive: value }));
+  };
+
+  useEffect(() => {
+    if (!running) return;
+    let asked = 0;
+    let stopped = false;
+    void import('@/lib/scene/static-picture').then(({ staticPicture }) => {
+      const from = drive.current;
+      let start: number | null = null;
+      const tick = (now: number) => {
+        start ??= now;
+        drive.current = driveAfter(spec, from, (now - start) / 1000);
+        setPicture(staticPicture({ ...spec, drive: drive.current }));
+        asked = requestAnimationFrame(tick);
+      };
+      if (!stopped) asked = requestAnimationFrame(tick);
+    });
+    const watcher = new IntersectionObserver(([entry]) => {
+      if (entry && !entry.isIntersecting) setRunning(false);
+    });
+    if (frame.current) watcher.observe(frame.current);
+    return () => {
+      stopped = true;
+      cancelAnimationFrame(asked);
+      watcher.disconnect();
+    };
+  }, [running, spec]);
+
+  return (
+    <div ref={frame}>
+      <div className="border border-rule p-2">
+        {picture === null ? (
+          children
+        ) : (
+          <div
+            aria-hidden="true"
+            className="[&>svg]:mx-auto [&>svg]:block [&>svg]:h-auto [&>svg]:max-h-72 [&>svg]:w-full"
+            // Our own drawing, made from numbers alone.
+            dangerouslySetInnerHTML={{ __html: picture }}
+          />
+        )}
+      </div>
+      <div className="mt-2 flex gap-2 print:hidden">
+        <Button
+          variant="quiet"
+          className="motion-reduce:hidden"
+          aria-label={`${running ? 'Stop' : 'Turn'}: ${name}`}
+          onClick={() => setRunning(!running)}
+        >
+          {running ? 'Stop' : 'Turn'}
+        </Button>
+        <Button
+          variant="quiet"
+          aria-label={`Step: ${name}`}
+          onClick={() => {
+            setRunning(false);
+            void draw(driveAfterStep(spec, drive.current));
+          }}
+        >
+          Step
+        </Button>
+      </div>
+    </div>
+  );
+}
