@@ -1,5 +1,7 @@
 import { requireFinite, requirePositive } from '@/lib/numeric/require';
 import { wrapAngle } from '@/lib/geometry/angle';
+import { fourBarLinkage } from '@/lib/kinematics/linkage/four-bar-linkage';
+import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
 
 /**
  * Two equal cranks joined crosswise by a bar as long as their pins are apart: the crossed
@@ -59,4 +61,13 @@ export function counterRatios(
   if (crank === ground) return { outcome: 'equal-sides' };
   const near = (ground + crank) / (crank - ground);
   return { outcome: 'runs', near, far: 1 / near };
+}
+
+/**
+ * The crossed parallelogram as data for the general solver, points as `fourBarLinkage`. It passes a
+ * change point every half turn: lead it on with `carryOnLinkage`.
+ */
+export function antiparallelogramLinkage({ crank, ground }: Antiparallelogram): Linkage {
+  const bars = { crank, coupler: ground, rocker: crank, frame: ground };
+  return fourBarLinkage(bars, { side: 'crossed' });
 }

@@ -1,5 +1,6 @@
 import { requireFinite, requirePositive } from '@/lib/numeric/require';
-import { add, polar, type Point } from '@/lib/geometry/point';
+import { add, ORIGIN, polar, type Point } from '@/lib/geometry/point';
+import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
 
 /**
  * Sylvester's skew pantograph: a parallelogram O–A–B–C about the fixed O, with a plate on bar A–B
@@ -84,4 +85,27 @@ export function plagiographFor(
   requirePositive('plagiographFor', 'scale', scale);
   requireFinite('plagiographFor', 'turn', turn);
   return { first, second, stylusArm: second / scale, plateAngle: 0 - turn };
+}
+
+/**
+ * A plagiograph as data for the general solver: points `O`, `A`, `B`, `C`, `P` (stylus), `Q` (pen);
+ * driven by leading the stylus along x and y.
+ */
+export function plagiographLinkage(plagiograph: Plagiograph): Linkage {
+  const { first, second, stylusArm, plateAngle } = plagiograph;
+  const { penArm } = plagiographCopy(plagiograph);
+  const { A, B, C, stylus, pen } = plagiographPose(plagiograph, 0.2, 1.6);
+  return {
+    points: { O: ORIGIN, A, B, C, P: stylus, Q: pen },
+    fixed: ['O'],
+    bars: [
+      { ends: ['O', 'A'], length: first },
+      { ends: ['O', 'C'], length: second },
+    ],
+    plates: [
+      { shape: { A: ORIGIN, B: { x: second, y: 0 }, P: polar(stylusArm, plateAngle) } },
+      { shape: { C: ORIGIN, B: { x: first, y: 0 }, Q: polar(penArm, -plateAngle) } },
+    ],
+    drivers: [{ kind: 'lead', point: 'P' }],
+  };
 }

@@ -5,6 +5,8 @@ import { radians } from '@/lib/geometry/angle';
 import type { Point } from '@/lib/geometry/point';
 import { couplerPoint } from '@/lib/kinematics/linkage/four-bar-motion';
 import type { CouplerPlace, FourBarLengths, FourBarSide } from '@/lib/kinematics/linkage/four-bar';
+import { fourBarLinkage } from '@/lib/kinematics/linkage/four-bar-linkage';
+import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
 import { straightness, type Straightness } from '@/lib/kinematics/linkage/straightness';
 
 /** A four-bar with the coupler point that draws a nearly straight line. */
@@ -147,6 +149,11 @@ export function hoekenStraightness(
 ): Straightness | undefined {
   const half = crankRange / 2;
   return straightness((angle) => pointOf(linkage, angle), Math.PI - half, Math.PI + half, 'x');
+}
+
+/** A straight-line four-bar as data for the general solver: points as `fourBarLinkage`, the pencil `P`. */
+export function straightLinkage({ bars, side, point }: StraightFourBar): Linkage {
+  return fourBarLinkage(bars, { side, point });
 }
 
 /** Where the pencil stands at a crank angle; undefined where the bars do not close. */

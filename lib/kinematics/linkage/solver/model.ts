@@ -86,11 +86,28 @@ export function modelOf(linkage: Linkage): Model {
 
 /** Every relation of a body, its first two points carrying the others. */
 export function relationsOf({ points, shape, driven }: Body): readonly Relation[] {
-  const [a = 0, b = 0, ...rest] = points;
+  const [a, b] = apartPair(shape, points) ?? [0, 0];
+  const rest = points.filter((p) => p !== a && p !== b);
   const turned: Relation[] = driven
     ? [{ kind: 'angle', a: driven.from, b: driven.to, shift: 0, drive: driven.drive }]
     : [];
   return [distanceOf(shape, a, b), ...rest.map((p) => rigidOf(shape, p, a, b)), ...turned];
+}
+
+/** The first of some points of a body, and the first that does not lie on it. */
+export function apartPair(
+  shape: ReadonlyMap<number, Point>,
+  points: readonly number[],
+): readonly [number, number] | undefined {
+  const [a] = points;
+  const b = points.find((p) => a !== undefined && !coincide(shape, a, p));
+  return a === undefined || b === undefined ? undefined : [a, b];
+}
+
+/** Whether two points of a body lie in one place. */
+export function coincide(shape: ReadonlyMap<number, Point>, p: number, q: number): boolean {
+  const [at, other] = [localOf(shape, p), localOf(shape, q)];
+  return at.x === other.x && at.y === other.y;
 }
 
 export function distanceOf(shape: ReadonlyMap<number, Point>, p: number, q: number): Relation {
@@ -131,14 +148,13 @@ function bodiesOf(linkage: Linkage, find: (name: string) => number): readonly Bo
   return [...bars, ...plates].map((shape) => {
     const entries = Object.entries(shape);
     const named = new Map(entries.map(([name, at]) => [find(name), at]));
-    const apart = entries.every(([, p], k) =>
-      entries
-        .slice(k + 1)
-        .every(([, q]) => requireFinite(CALLER, 'shape', Math.hypot(p.x - q.x, p.y - q.y)) > 0),
-    );
-    if (entries.length < 2 || !apart) {
+    for (const [name, { x, y }] of entries) {
+      requireFinite(CALLER, `${name}.x`, x);
+      requireFinite(CALLER, `${name}.y`, y);
+    }
+    if (!apartPair(named, [...named.keys()])) {
       throw new RangeError(
-        `${CALLER}: body is ${entries.map(([name]) => name).join(', ')}; expected two or more different points`,
+        `${CALLER}: body is ${entries.map(([name]) => name).join(', ')}; expected two points apart`,
       );
     }
     return { points: [...named.keys()], shape: named };

@@ -1,4 +1,10 @@
-import { distanceOf, localOf, rigidOf } from '@/lib/kinematics/linkage/solver/model';
+import {
+  apartPair,
+  coincide,
+  distanceOf,
+  localOf,
+  rigidOf,
+} from '@/lib/kinematics/linkage/solver/model';
 import { angleOf, lociOf, type Progress } from '@/lib/kinematics/linkage/solver/progress';
 
 /** A body about a known pivot, whose own groove must pass through a known point. */
@@ -28,7 +34,8 @@ export function aim({
       return { x: y * ux - x * uy, y: -(x * ux + y * uy) };
     };
     const points = body.points.filter((q) => q !== pivot);
-    const [end = pivot, ...rest] = points;
+    const [, end = pivot] = apartPair(body.shape, [pivot, ...points]) ?? [];
+    const rest = points.filter((q) => q !== end);
     const relations = [
       distanceOf(body.shape, pivot, end),
       ...rest.map((q) => rigidOf(body.shape, q, pivot, end)),
@@ -62,7 +69,8 @@ export function shift(progress: Progress): boolean {
         .slice(0, 1)
         .map((found) => ({ p, ...found })),
     );
-    const [one, two] = held;
+    const one = held[0];
+    const two = held.find(({ p }) => one && !coincide(body.shape, one.p, p));
     if (!one || !two) continue;
     const distance = distanceOf(body.shape, one.p, two.p);
     const angle = angleOf(body, one.p, two.p);

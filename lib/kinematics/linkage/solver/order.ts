@@ -1,5 +1,7 @@
 import type { Relation } from '@/lib/kinematics/linkage/solver/linkage';
 import {
+  apartPair,
+  coincide,
   distanceOf,
   relationsOf,
   rigidOf,
@@ -36,6 +38,7 @@ export function orderDyads(model: Model): Ordering {
     checks: [],
   };
   while (
+    copy(progress) ||
     carry(progress) ||
     turn(progress) ||
     run(progress) ||
@@ -81,7 +84,8 @@ function finish({
 /** A body with two known points carries the rest; what was known twice becomes a check. */
 function carry({ model, placed, joined, done, turned, steps, checks }: Progress): boolean {
   for (const body of model.bodies) {
-    const [a, b] = body.points.filter((p) => placed.has(p));
+    const known = body.points.filter((p) => placed.has(p));
+    const [a, b] = apartPair(body.shape, known) ?? [];
     if (done.has(body) || a === undefined || b === undefined) continue;
     if (!joined.has(body)) checks.push(distanceOf(body.shape, a, b));
     for (const p of body.points.filter((point) => point !== a && point !== b)) {
@@ -95,6 +99,22 @@ function carry({ model, placed, joined, done, turned, steps, checks }: Progress)
       checks.push(angleOf(body, body.driven.from, body.driven.to));
     done.add(body);
     return true;
+  }
+  return false;
+}
+
+/** A point of a body that lies on a known one. */
+function copy({ model, placed, done, steps }: Progress): boolean {
+  for (const body of model.bodies) {
+    if (done.has(body)) continue;
+    for (const p of body.points) {
+      const on = body.points.find((q) => placed.has(q) && coincide(body.shape, p, q));
+      if (placed.has(p) || on === undefined) continue;
+      const rigid = { kind: 'rigid' as const, p, a: on, b: on, along: 0, across: 0 };
+      steps.push({ method: { kind: 'carry', rigid }, points: [p], relations: [rigid] });
+      placed.add(p);
+      return true;
+    }
   }
   return false;
 }

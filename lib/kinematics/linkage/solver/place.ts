@@ -141,10 +141,12 @@ function checkAll(plan: Plan, drive: ArrayLike<number>, pose: Float64Array): num
 export function runRates(plan: Plan, order: 1 | 2, motion: Motion, out: Float64Array): number {
   const { model, steps } = plan;
   out.fill(0);
-  for (const { point, drive } of model.leads) {
-    const source = order === 1 ? motion.speeds : motion.accelerations;
-    out[2 * point] = at(source, drive);
-    out[2 * point + 1] = at(source, drive + 1);
+  const source = order === 1 ? motion.speeds : motion.accelerations;
+  for (let k = 0; k < model.leads.length; k += 1) {
+    const lead = model.leads[k];
+    if (!lead) continue;
+    out[2 * lead.point] = at(source, lead.drive);
+    out[2 * lead.point + 1] = at(source, lead.drive + 1);
   }
   let pivot = 1;
   for (let k = 0; k < steps.length; k += 1) {

@@ -56,6 +56,7 @@ export function planLinkage(linkage: Linkage): PlanOutcome {
       checkBlock: blockFor([], model.names.length, 2),
       scratch: new Float64Array(SCRATCH_LENGTH),
       expected: model.start.slice(),
+      choice: { branch: new Int8Array(0), expected: undefined },
       motion: {
         pose: nothing,
         drive: nothing,

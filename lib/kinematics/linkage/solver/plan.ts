@@ -69,6 +69,8 @@ export interface Plan {
   readonly scratch: Float64Array;
   /** Where the points would go if they kept their way. */
   readonly expected: Float64Array;
+  /** How the assembly of each step is chosen; set before each use. */
+  readonly choice: { branch: Int8Array; expected: Float64Array | undefined };
   /** For errors of position; its pose and drive are set before each use. */
   readonly motion: {
     pose: Float64Array;

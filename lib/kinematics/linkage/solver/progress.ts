@@ -1,5 +1,11 @@
 import type { Relation, SlideRelation } from '@/lib/kinematics/linkage/solver/linkage';
-import { distanceOf, localOf, type Body, type Model } from '@/lib/kinematics/linkage/solver/model';
+import {
+  apartPair,
+  distanceOf,
+  localOf,
+  type Body,
+  type Model,
+} from '@/lib/kinematics/linkage/solver/model';
 import type { Locus, Method } from '@/lib/kinematics/linkage/solver/plan';
 
 /** A method with the points that it settles and the equations that it uses up. */
@@ -30,7 +36,7 @@ export function lociOf({ model, placed, joined, done, usedSlides }: Progress, p:
     if (done.has(body) || !body.shape.has(p)) continue;
     const known = body.points.filter((q) => placed.has(q));
     const [q] = known;
-    if (q === undefined || known.length > 1) continue;
+    if (q === undefined || apartPair(body.shape, known)) continue;
     const locus = distanceOf(body.shape, p, q);
     if (locus.kind === 'distance') found.push({ locus, mark: () => joined.add(body) });
   }

@@ -58,7 +58,7 @@ export function placeLinkage(
   pose: Float64Array,
 ): number {
   requireDrive('placeLinkage', plan, drive);
-  const slack = runSteps(plan, drive, { branch, expected: undefined }, pose);
+  const slack = runSteps(plan, drive, chosen(plan, branch, undefined), pose);
   return slack < 0 ? -slack : 0;
 }
 
@@ -82,7 +82,7 @@ export function carryOnLinkage(
     pose[2 * p] = at(now, 2 * p);
     pose[2 * p + 1] = at(now, 2 * p + 1);
   }
-  const slack = runSteps(plan, drive, { branch, expected }, pose);
+  const slack = runSteps(plan, drive, chosen(plan, branch, expected), pose);
   return slack < 0 ? -slack : 0;
 }
 
@@ -169,6 +169,17 @@ export interface RatedPose {
 export function rateLinkage(plan: Plan, rated: RatedPose): number {
   const first = runRates(plan, 1, rated, rated.velocity);
   return Math.min(first, runRates(plan, 2, rated, rated.acceleration));
+}
+
+/** The plan's own choice, set anew so that a step of an animation allocates nothing. */
+function chosen(
+  { choice }: Plan,
+  branch: Int8Array,
+  expected: Float64Array | undefined,
+): Plan['choice'] {
+  choice.branch = branch;
+  choice.expected = expected;
+  return choice;
 }
 
 function named({ model }: Plan, values: ArrayLike<number>): NamedPoints {
