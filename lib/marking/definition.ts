@@ -129,7 +129,8 @@ export interface SettingSlip<G extends Givens = Givens> {
 export type Control =
   | {
       readonly name: string;
-      readonly kind: 'number';
+      /** A count takes whole numbers only. */
+      readonly kind: 'number' | 'count';
       readonly least: number;
       readonly most: number;
     }

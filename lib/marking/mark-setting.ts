@@ -56,6 +56,7 @@ function readControls(controls: readonly Control[], answer: Answer | undefined):
 
 function allowed(control: Control, value: number | string): boolean {
   if (control.kind === 'one-of') return control.values.includes(String(value));
+  if (control.kind === 'count' && !Number.isInteger(value)) return false;
   return typeof value === 'number' && value >= control.least && value <= control.most;
 }
 

@@ -127,7 +127,7 @@ export const copyAtThreeToTwo = defineExercise<Drawn>({
       drawing: { name: 'herring', height: toMillimetres(inUnits(units, 40, 1.5), units) },
       elbow: [radians(30), radians(150)],
       drive: 0,
-      hide: ['scale'],
+      hide: ['scale', 'copy'],
       controls: ['firstHole', 'secondHole'],
       units,
     };

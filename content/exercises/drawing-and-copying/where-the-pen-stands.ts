@@ -11,8 +11,13 @@ import { drawSize, givenLength, givenNumber, inUnits, plain, said } from '../siz
 
 type Drawn = { readonly a: number; readonly b: number; readonly turned: number };
 
-type Dot = 'pen' | 'bar-angle' | 'on-the-circle' | 'far-and-near-swapped';
-const dotNames: readonly Dot[] = ['pen', 'bar-angle', 'on-the-circle', 'far-and-near-swapped'];
+type Dot = 'at-the-pen' | 'bar-angle' | 'on-the-circle' | 'far-and-near-swapped';
+const dotNames: readonly Dot[] = [
+  'at-the-pen',
+  'bar-angle',
+  'on-the-circle',
+  'far-and-near-swapped',
+];
 
 /** Choice: the bar has been turned; on which of four dots does the pen stand? */
 export const whereThePenStands = defineExercise<Drawn>({
@@ -52,7 +57,7 @@ export const whereThePenStands = defineExercise<Drawn>({
         label: (_variant, letter) => `Dot ${letter}`,
         figure: (variant) => benchWith(option, variant),
       })),
-      answer: () => ['pen'],
+      answer: () => ['at-the-pen'],
       slips: [
         {
           id: 'bar-angle',
@@ -80,7 +85,7 @@ export const whereThePenStands = defineExercise<Drawn>({
     `Across: ${said(g.a, units)} × cos ${write(g.turned, '°')} = ${said(g.a, units)} × ${plain(Math.cos(radians(g.turned)))}.`,
   ],
   solution({ givens: g, units }) {
-    const pen = dotAt('pen', g);
+    const pen = dotAt('at-the-pen', g);
     return [
       `Across: ${said(g.a, units)} × cos ${write(g.turned, '°')} = ${said(pen.x, units)}.`,
       `Up: ${said(g.b, units)} × sin ${write(g.turned, '°')} = ${said(pen.y, units)}.`,
@@ -92,7 +97,7 @@ export const whereThePenStands = defineExercise<Drawn>({
 function dotAt(dot: Dot, { a, b, turned }: Drawn): Point {
   const t = radians(turned);
   switch (dot) {
-    case 'pen':
+    case 'at-the-pen':
       return trammelPose(trammelForOval(2 * a, 2 * b), t).pen;
     case 'bar-angle':
       return polar((a * b) / Math.hypot(b * Math.cos(t), a * Math.sin(t)), t);
@@ -106,7 +111,7 @@ function dotAt(dot: Dot, { a, b, turned }: Drawn): Point {
 function benchWith(option: string, variant: Variant<Drawn>): TrammelSpec {
   const { givens: g, units } = variant;
   const shown = variant.options.dot ?? [];
-  const dot = dotNames.find((name) => name === option) ?? 'pen';
+  const dot = dotNames.find((name) => name === option) ?? 'at-the-pen';
   const at = dotAt(dot, g);
   const inMillimetres = (value: number) => toMillimetres(value, units);
   const slider = inUnits(units, 40, 38.1);
@@ -128,6 +133,7 @@ function benchWith(option: string, variant: Variant<Drawn>): TrammelSpec {
       },
     ],
     drive: 0,
+    hide: ['pen'],
     controls: [],
     units,
   };

@@ -1,4 +1,5 @@
 import { defineExercise, type Variant } from '@/lib/marking/definition';
+import { letterOf } from '@/lib/marking/mark-choice';
 import { radians } from '@/lib/geometry/angle';
 import { pantographHoles } from '@/lib/kinematics/linkage/pantograph-making';
 import { toMillimetres } from '@/lib/quantities/units';
@@ -86,7 +87,7 @@ export const whichCopiesTrue = defineExercise<Drawn>({
     const place = (variant.options.bench ?? []).findIndex(({ option }) => option === 'same-share');
     return [
       `At ${scaleSaid(g.copy, g.drawing)} both holes cut off ${said(g.bar, units)} ÷ ${plain(scaleValue([g.copy, g.drawing]))} = ${said(holeOf(g), units)}, and the pen is the outer point.`,
-      `That is number ${place + 1} of those shown.`,
+      `That is pantograph ${letterOf(place)}.`,
     ];
   },
 });
@@ -112,7 +113,7 @@ function bench(option: string, { givens: g, units }: Variant<Drawn>): Pantograph
     drawing: { name: 'herring', height: inMillimetres(inUnits(units, 40, 1.5)) },
     elbow: [radians(30), radians(150)],
     drive: 0,
-    hide: ['scale'],
+    hide: ['scale', 'copy'],
     controls: [],
     units,
   };

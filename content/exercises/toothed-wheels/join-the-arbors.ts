@@ -65,9 +65,9 @@ export const joinTheArbors = defineExercise<Drawn>({
       skills: ['train.idler', 'train.centres', 'train.ratio', 'train.direction'],
       label: () => 'The train between the posts',
       controls: () => [
-        { name: 'lastTeeth', kind: 'number', least: 8, most: 96 },
-        { name: 'idlers', kind: 'number', least: 0, most: 4 },
-        { name: 'idlerTeeth', kind: 'number', least: 8, most: 96 },
+        { name: 'lastTeeth', kind: 'count', least: 8, most: 96 },
+        { name: 'idlers', kind: 'count', least: 0, most: 4 },
+        { name: 'idlerTeeth', kind: 'count', least: 8, most: 96 },
       ],
       criteria: [
         {
@@ -155,7 +155,7 @@ export const joinTheArbors = defineExercise<Drawn>({
     idlers: 0,
     idlerTeeth: 60,
     drive: 0,
-    hide: ['ratio'],
+    hide: ['ratio', 'turns'],
     controls: ['lastTeeth', 'idlers', 'idlerTeeth'],
     units,
   }),

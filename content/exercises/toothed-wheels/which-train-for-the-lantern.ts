@@ -1,4 +1,5 @@
 import { defineExercise, type Variant } from '@/lib/marking/definition';
+import { letterOf } from '@/lib/marking/mark-choice';
 import { simpleTrain, trainProduct } from '@/lib/kinematics/train/ratio';
 import type { FreeTrainSpec } from '@/lib/scene/bench-spec';
 import { givenNumber } from '../sizes';
@@ -45,7 +46,7 @@ export const whichTrainForTheLantern = defineExercise<Drawn>({
     return slow >= 4 && slow <= 16 && apart ? drawn : null;
   },
   prompt: (variant) =>
-    `The lantern is to make one turn for ${fractionOf(variant)} turns of the crank, the same way round. The crank is on the first arbor that is drawn in brass, the lantern on the arbor at the other end. Which of these trains does it?`,
+    `The lantern is to make one turn for ${fractionOf(variant)} turns of the crank, the same way round. The crank’s wheel is drawn in brass; the lantern turns with the wheel at the other end. Which of these trains does it?`,
   givens: (variant) => [
     givenNumber('i', 'turns of the crank for one of the lantern', fractionOf(variant)),
   ],
@@ -94,7 +95,7 @@ export const whichTrainForTheLantern = defineExercise<Drawn>({
     return [
       `Two pairs from the crank: (${g.z2} × ${g.z4}) ÷ (${g.z1} × ${g.z3}) = ${fractionOf(variant)}.`,
       'Two meshes keep the sense.',
-      `That is the train with ${g.z2} and ${g.z3} fast on the middle arbor and the crank on the wheel of ${g.z1}, number ${place + 1} of those shown.`,
+      `That is the train with ${g.z2} and ${g.z3} fast on the middle arbor and the crank on the wheel of ${g.z1}, train ${letterOf(place)}.`,
     ];
   },
 });

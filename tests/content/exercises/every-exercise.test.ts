@@ -5,6 +5,7 @@ import type { ExerciseDefinition, Part, Setting, Variant } from '@/lib/marking/d
 import { drawVariant } from '@/lib/marking/draw';
 import { markResponse } from '@/lib/marking/mark';
 import type { Answer } from '@/lib/marking/marking';
+import { createSource, type Source } from '@/lib/marking/source';
 import { closestPair, numberParts, slipValues, trueValues } from '@/lib/marking/values';
 import { roundView } from '@/lib/marking/view';
 import { unitSystems } from '@/lib/quantities/unit-system';
@@ -127,6 +128,18 @@ describe.each([...exercises.values()].map((definition) => [definition.id, defini
       }
     });
 
+    it('answers whatever is sent: nothing that can be read makes it stumble', () => {
+      const noise = createSource(20260301);
+      for (const variant of drawn.slice(0, 60)) {
+        const answers = Object.fromEntries(
+          definition.parts.map((part) => [part.key, anything(part, variant, noise)]),
+        );
+        const marking = markResponse(definition, variant, { answers });
+        expect(['marked', 'refused']).toContain(marking.outcome);
+        expect(JSON.stringify(marking)).not.toMatch(/NaN|Infinity|undefined/);
+      }
+    });
+
     it('never scores less for one part put right', () => {
       for (const variant of drawn.slice(0, 50)) {
         const right = rightAnswers(definition, variant);
@@ -224,6 +237,37 @@ describe.each([...exercises.values()].map((definition) => [definition.id, defini
     });
   },
 );
+
+/** Something that a browser might send, sensible or not. */
+function anything(part: Part, variant: Variant, noise: Source): Answer {
+  const number = () => noise.pick([0, 1, -1, 0.5, 7, 12, 30, 96, 100, 250, 900, -900, 1e9]);
+  switch (part.kind) {
+    case 'number':
+      return `${number()}`;
+    case 'choice':
+      return (variant.options[part.key] ?? []).slice(0, noise.whole(0, 2)).map(({ id }) => id);
+    case 'setting':
+      return Object.fromEntries(
+        part
+          .controls(variant.units)
+          .map((control) => [
+            control.name,
+            control.kind === 'one-of' ? noise.pick(control.values) : number(),
+          ]),
+      );
+    case 'design':
+      return Object.fromEntries(
+        part
+          .fields(variant)
+          .map((field) => [
+            field.key,
+            field.kind === 'stock'
+              ? noise.pick(field.choices.map(({ value }) => value))
+              : `${number()}`,
+          ]),
+      );
+  }
+}
 
 function slipsOf(part: Part, variant: Variant, truth: Record<string, number>): [string, Answer][] {
   if (part.kind === 'number') {
