@@ -50,9 +50,9 @@ export function BenchCanvas({ store, width, height, zoom, onPan, onReady }: Benc
     const paint = () => {
       const { model, frame, showing, ...state } = store.moment();
       const now = viewOf(frame, width, height, zoom);
-      painter.paint(model.scene(state, showing), now, ink);
+      painter.paint(model.scene(state, showing), now, width, ink);
       for (const { id, at } of model.handles(state.drive)) {
-        holdLayer.findOne(`#${CSS.escape(id)}`)?.position(pixelAt(now, at));
+        holdLayer.children.find((node) => node.id() === id)?.position(pixelAt(now, at));
       }
     };
     paint();

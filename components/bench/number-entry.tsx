@@ -55,6 +55,7 @@ export function NumberEntry(props: NumberEntryProps) {
       <input
         id={id}
         role="spinbutton"
+        aria-label={label}
         inputMode="text"
         autoComplete="off"
         className="min-h-11 w-24 rounded border border-pencil bg-paper px-2 text-center font-mono text-base aria-invalid:border-2 aria-invalid:border-madder"

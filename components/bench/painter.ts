@@ -23,7 +23,7 @@ interface Painted {
 
 /** Paints scenes on a layer, keeping its nodes from one frame to the next. */
 export interface Painter {
-  readonly paint: (scene: Scene, view: View, ink: Ink) => void;
+  readonly paint: (scene: Scene, view: View, width: number, ink: Ink) => void;
 }
 
 /**
@@ -36,23 +36,37 @@ export function createPainter(layer: Konva.Layer): Painter {
   let kept: Painted[] = [];
   let before: { readonly scale: number; readonly ink: Ink } | null = null;
   return {
-    paint: (scene, view, ink) => {
+    paint: (scene, view, width, ink) => {
       world.setAttrs({ x: view.x, y: view.y, scaleX: view.scale, scaleY: -view.scale });
       if (before?.scale !== view.scale || before.ink !== ink) {
         world.destroyChildren();
         kept = [];
         before = { scale: view.scale, ink };
       }
-      kept = paintAll(world, kept, scene.shapes, { scale: view.scale, ink });
+      const share = Math.min(1, width / fullSizeFrom);
+      kept = paintAll(world, kept, scene.shapes, {
+        scale: view.scale,
+        letters: Math.max(leastLetters, share),
+        lines: Math.max(leastLines, share),
+        ink,
+      });
       layer.batchDraw();
     },
   };
 }
 
+/** Pixels a mm, and how much of their full size letters, symbols and lines have here. */
 interface Brush {
   readonly scale: number;
+  readonly letters: number;
+  readonly lines: number;
   readonly ink: Ink;
 }
+
+/** From this width on, px, everything has its full size; narrower drawings are drawn finer. */
+const fullSizeFrom = 600;
+const leastLetters = 0.85;
+const leastLines = 0.65;
 
 function paintAll(
   parent: Konva.Group,
@@ -89,7 +103,7 @@ function refreshed(old: Painted, shape: Shape, brush: Brush): boolean {
     old.node.setAttrs(poseOf(shape));
   } else if (shape.kind === 'mark') {
     if ((old.shape as Mark).symbol !== shape.symbol) return false;
-    old.node.setAttrs(placeOf(shape, brush.scale));
+    old.node.setAttrs(placeOf(shape, brush));
   } else {
     old.node.setAttrs(attributesOf(shape, brush));
   }
@@ -105,8 +119,8 @@ function nodeOf(shape: Shape, brush: Brush): Node {
       return group;
     }
     case 'mark': {
-      const group = new Konva.Group(placeOf(shape, brush.scale));
-      symbols[shape.symbol].forEach((stroke) => group.add(symbolNode(stroke, brush.ink)));
+      const group = new Konva.Group(placeOf(shape, brush));
+      symbols[shape.symbol].forEach((stroke) => group.add(symbolNode(stroke, brush)));
       return group;
     }
     case 'label':
@@ -128,7 +142,7 @@ const quiet = {
 function attributesOf(shape: Exclude<Shape, Body | Mark>, brush: Brush): object {
   if (shape.kind === 'label') return labelAttributes(shape, brush);
   const paint = {
-    ...paintAttributes(appearance[shape.role], brush.ink),
+    ...paintAttributes(appearance[shape.role], brush),
     opacity: strength(shape.age ?? 0),
   };
   if (shape.kind === 'circle') {
@@ -138,13 +152,13 @@ function attributesOf(shape: Exclude<Shape, Body | Mark>, brush: Brush): object 
   return { ...paint, points, closed: shape.kind === 'outline' && shape.closed, lineJoin: 'round' };
 }
 
-function paintAttributes(paint: Paint, ink: Ink): object {
+function paintAttributes(paint: Paint, { ink, lines }: Brush): object {
   const face = paint.fill === undefined ? undefined : ink.colour(paint.fill);
   return {
     fill: paint.fillOpacity === undefined || !face ? face : translucent(face, paint.fillOpacity),
     stroke: paint.stroke === undefined ? undefined : ink.colour(paint.stroke),
-    strokeWidth: paint.width,
-    dash: paint.dash,
+    strokeWidth: paint.width * lines,
+    dash: paint.dash?.map((length) => length * lines),
   };
 }
 
@@ -156,8 +170,8 @@ function translucent(colour: string, opacity: number): string {
     .padStart(2, '0')}`;
 }
 
-function symbolNode(stroke: SymbolStroke, ink: Ink): Konva.Shape {
-  const paint = { ...quiet, ...paintAttributes(stroke, ink) };
+function symbolNode(stroke: SymbolStroke, brush: Brush): Konva.Shape {
+  const paint = { ...quiet, ...paintAttributes(stroke, brush) };
   if ('circle' in stroke) {
     const [x, y, radius] = stroke.circle;
     return new Circle({ ...paint, x, y, radius });
@@ -165,15 +179,15 @@ function symbolNode(stroke: SymbolStroke, ink: Ink): Konva.Shape {
   return new Line({ ...paint, points: [...stroke.points], closed: stroke.closed });
 }
 
-function labelAttributes(label: Label, { scale, ink }: Brush): object {
+function labelAttributes(label: Label, { scale, letters, ink }: Brush): object {
   const { x, y } = label.nudge ?? { x: 0, y: 0 };
   const width = 400;
   const inset = { start: 0, middle: width / 2, end: width }[label.anchor];
   return {
     x: label.at.x,
     y: label.at.y,
-    scaleX: 1 / scale,
-    scaleY: -1 / scale,
+    scaleX: letters / scale,
+    scaleY: -letters / scale,
     rotation: degrees(label.angle ?? 0),
     offsetX: inset - x,
     offsetY: labelSize / 2 + y,
@@ -194,8 +208,9 @@ function poseOf({ pose }: Body) {
   return { x: pose.x, y: pose.y, rotation: degrees(pose.angle) };
 }
 
-function placeOf({ at, angle }: Mark, scale: number) {
-  return { x: at.x, y: at.y, scaleX: 1 / scale, scaleY: 1 / scale, rotation: degrees(angle ?? 0) };
+function placeOf({ at, angle }: Mark, { scale, lines }: Brush) {
+  const size = lines / scale;
+  return { x: at.x, y: at.y, scaleX: size, scaleY: size, rotation: degrees(angle ?? 0) };
 }
 
 /** An arc as a run of short lines. */

@@ -21,14 +21,16 @@ export function SettingsPanel({ store }: SettingsPanelProps) {
   const set = (key: string, value: number | string) =>
     store.setting(model.set(key, value), `set ${key}`);
   return (
-    <fieldset className="border-t border-ink px-4 py-3">
-      <legend className="sr-only">Set the mechanism</legend>
-      <div className="grid items-start gap-x-6 gap-y-3 @xl:grid-cols-2 @4xl:grid-cols-3">
+    <details open className="border-t border-ink px-4 pb-1 print:hidden">
+      <summary className="inline-flex min-h-11 items-center text-base font-semibold">
+        Set the mechanism
+      </summary>
+      <div className="grid items-start gap-x-6 gap-y-3 pb-3 @xl:grid-cols-2 @4xl:grid-cols-3">
         {model.controls.map((control) => (
           <Setting key={control.key} control={control} onSet={set} />
         ))}
       </div>
-    </fieldset>
+    </details>
   );
 }
 

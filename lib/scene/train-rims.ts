@@ -3,7 +3,7 @@ import { label, line } from './strokes';
 import type { SetWheel, TrainSetup } from './train-setup';
 
 /** Height of one row of the unrolled rims, as a share of the drawing's width. */
-const rowShare = 0.03;
+const rowShare = 0.036;
 const leftShare = 0.12;
 const spanShare = 0.82;
 

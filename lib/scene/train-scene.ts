@@ -204,16 +204,17 @@ function senseArrows(setup: TrainSetup): readonly Shape[] {
   });
 }
 
-/** Distances between arbors, under the train. */
+/** Distances between arbors: under the whole train, or beside a pair that is bent out of line. */
 function centres(setup: TrainSetup): readonly Shape[] {
+  const lowest = Math.min(...setup.wheels.map(({ centre, tipRadius }) => centre.y - tipRadius));
   return setup.pairs
     .filter(({ inTrain }) => inTrain)
     .flatMap(({ first, second, distance }) => {
-      const below = Math.max(first.tipRadius, second.tipRadius) + 3 * setup.spec.module;
-      const text = ruleText(distance, setup.spec.units);
-      return first.centre.x <= second.centre.x
-        ? dimension(first.centre, second.centre, -below, text)
-        : dimension(second.centre, first.centre, -below, text);
+      const [left, right] = first.centre.x <= second.centre.x ? [first, second] : [second, first];
+      const level = Math.abs(left.centre.y - right.centre.y) < 1e-6;
+      const clear = level ? left.centre.y - lowest : Math.max(first.tipRadius, second.tipRadius);
+      const below = clear + 3 * setup.spec.module;
+      return dimension(left.centre, right.centre, -below, ruleText(distance, setup.spec.units));
     });
 }
 
@@ -284,7 +285,7 @@ function trainBounds(setup: TrainSetup, reach: number): Bounds {
     { x: x - radius, y: y - radius },
     { x: x + radius, y: y + radius },
   ]);
-  const wheels = grown(boundsOf(corners), 2 * module);
+  const wheels = grown(boundsOf(corners), 2.5 * module);
   const width = wheels.right - wheels.left;
   const hidden = setup.spec.hide?.includes('teeth') ?? false;
   const below = hidden ? 0 : width * rowsHeight(setup.wheels.length);

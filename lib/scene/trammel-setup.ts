@@ -36,7 +36,7 @@ export interface TrammelSetup {
 
 const pathSteps = 180;
 
-/** The trammel that a spec describes, on the general solver unless its pins are one crank. */
+/** The trammel that a spec describes, on the general solver unless two of its points are one. */
 export function setUpTrammel(spec: TrammelSpec): TrammelSetup {
   const { farPin, nearPin, farRunsIn, skew, slider, groove } = spec;
   const farUpright = farRunsIn === 'north-south';
@@ -71,7 +71,9 @@ export function sliderWidth({ slider }: TrammelSpec): number {
 
 function posing(trammel: Trammel, turned: number): (drive: number) => TrammelPose {
   const crank = (drive: number) => trammelPose(trammel, drive + turned);
-  if (pinsApart(trammel) < 1e-9) return crank;
+  const { uprightPin, levelPin } = trammel;
+  const together = Math.min(pinsApart(trammel), Math.abs(uprightPin), Math.abs(levelPin));
+  if (together < 1e-9) return crank;
   const planned = planLinkage(trammelLinkage(trammel));
   if (planned.outcome !== 'planned') return crank;
   return (drive) => {
