@@ -10,11 +10,13 @@ interface PredictionOutcomeProps {
 /** What follows a guess: the bench is open, something to look for, and how the guess compares. */
 export function PredictionOutcome({ attempt, children }: PredictionOutcomeProps) {
   const messages = attempt === null ? [] : attempt.parts.flatMap((part) => part.message ?? []);
+  const guess = attempt?.parts.map((part) => part.echo).join('; ') ?? '';
   return (
     <div className="mt-5 max-w-2xl rounded border border-l-[6px] border-brass px-4 py-3">
       <p className="font-semibold text-brass">
         {attempt === null ? 'The bench is open.' : 'Your guess is kept, and the bench is open.'}
       </p>
+      {guess === '' ? null : <p>You guessed: {guess}.</p>}
       <div>{children}</div>
       {attempt === null ? null : (
         <details className="mt-2">

@@ -33,7 +33,7 @@ export default async function LessonPage({ params }: Props) {
     <Page>
       <div className="grid grid-cols-[1.25rem_minmax(0,1fr)] gap-x-4 lg:grid-cols-[7.25rem_minmax(0,1fr)] lg:gap-x-7 print:block">
         <RuleMargin sections={lesson.sections} />
-        <article className="[&_.katex-display]:pl-6 [&_.katex-display]:text-left [&_.katex-display>.katex]:text-left">
+        <article className="[&_.katex-display]:pl-6 [&_.katex-display>.katex]:text-left!">
           <PageHeading eyebrow={`Unit ${lesson.unitNumber} · ${lesson.unitTitle}`}>
             {lesson.title}
           </PageHeading>
