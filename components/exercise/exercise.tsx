@@ -72,7 +72,12 @@ function SignedIn({ entry, personId, units, signInHref }: ExerciseProps & { pers
         The numbers are drawn for you, in {units === 'metric' ? 'millimetres' : 'inches'}, and stay
         yours until you have them right. Rounds you have open in the other units are kept.
       </p>
-      <Button className="mt-3" onClick={page.open} aria-disabled={page.busy || undefined}>
+      <Button
+        variant="secondary"
+        className="mt-3"
+        onClick={page.open}
+        aria-disabled={page.busy || undefined}
+      >
         {page.busy ? 'Drawing your numbers …' : 'Start'}
       </Button>
       <div role="status">

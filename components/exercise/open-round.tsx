@@ -53,7 +53,12 @@ export function OpenRound({ personId, signInHref, page, round }: OpenRoundProps)
       />
       {round.solution === undefined ? null : <Solution lines={round.solution} />}
       {round.closed ? (
-        <Button className="mt-5" onClick={page.open} aria-disabled={page.busy || undefined}>
+        <Button
+          variant="secondary"
+          className="mt-5"
+          onClick={page.open}
+          aria-disabled={page.busy || undefined}
+        >
           New numbers
         </Button>
       ) : null}
