@@ -1,5 +1,6 @@
-import { StaticPicture } from '@/components/bench/static-picture';
+import '@/components/bench/drawing.css';
 import type { BenchSpec } from '@/lib/scene/bench-spec';
+import { thumbnail } from '@/lib/scene/thumbnail';
 
 /**
  * A bench as it stands at its start, for a list in which the words beside it say what it is: hidden
@@ -7,8 +8,10 @@ import type { BenchSpec } from '@/lib/scene/bench-spec';
  */
 export function BenchPicture({ spec }: Readonly<{ spec: BenchSpec }>) {
   return (
-    <div aria-hidden="true" className="max-h-72 overflow-hidden">
-      <StaticPicture spec={spec} />
-    </div>
+    <div
+      className="drawing-box"
+      // Our own drawing, made from numbers alone.
+      dangerouslySetInnerHTML={{ __html: thumbnail(spec) }}
+    />
   );
 }

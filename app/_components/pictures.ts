@@ -1,6 +1,7 @@
+import { lessonBench } from '@/content/lessons/benches';
 import { centreDistance } from '@/lib/kinematics/gear/mesh';
 import type { DriverAndDriven } from '@/lib/kinematics/train/ratio';
-import type { Arbor, BenchName, BenchSpec, FreeTrainSpec } from '@/lib/scene/bench-spec';
+import type { Arbor, BenchSpec, FreeTrainSpec } from '@/lib/scene/bench-spec';
 
 const MODULE = 4;
 
@@ -38,56 +39,27 @@ export const landingPairs: readonly DriverAndDriven[] = [
   [14, 28],
 ];
 
-/** The train on the front page. */
-export const landingTrain = trainOfPairs(landingPairs);
+/** The train on the front page: to be turned, not yet to be changed. */
+export const landingTrain: BenchSpec = { ...trainOfPairs(landingPairs), controls: [] };
 
 /** The same train in words: "12 on 36, and beside that 14 on 28". */
 export const landingWords = landingPairs
   .map(([driver, driven]) => `${driver} teeth on ${driven}`)
   .join(', and fast beside that ');
 
-const trammel: BenchSpec = {
-  bench: 'trammel',
-  farPin: 250,
-  nearPin: 150,
-  farRunsIn: 'north-south',
-  slider: 36,
-  groove: 260,
-  skew: 0,
-  held: 'board',
-  drive: Math.PI / 5,
-};
-
-const pantograph: BenchSpec = {
-  bench: 'pantograph',
-  first: 400,
-  second: 400,
-  firstHole: 200,
-  secondHole: 200,
-  holeStep: 25,
-  setUp: 'middle-to-end',
-  drawing: { name: 'herring', height: 90 },
-  elbow: [Math.PI / 9, (5 * Math.PI) / 6],
-};
-
-const byBench: Readonly<Record<BenchName, BenchSpec>> = {
-  train: landingTrain,
-  trammel,
-  pantograph,
-};
-
-/** The bench that stands for a lesson in lists. */
-export function pictureOf(bench: BenchName): BenchSpec {
-  return byBench[bench];
-}
-
+/** The trains that show one motion each. */
 const byWay: Readonly<Record<string, BenchSpec>> = {
   slower: trainOf([12], [36]),
   faster: trainOf([36], [12]),
   'other-way': trainOf([20], [20]),
 };
 
-/** The bench that shows one motion, as the lesson with this bench makes it. */
-export function pictureOfWay(way: string, bench: BenchName): BenchSpec {
-  return byWay[way] ?? byBench[bench];
+/** The bench that stands for a lesson in lists. */
+export function pictureOf(lessonId: string): BenchSpec {
+  return lessonBench(lessonId, 'metric');
+}
+
+/** The bench that shows one motion, as the lesson makes it. */
+export function pictureOfWay(way: string, lessonId: string): BenchSpec {
+  return byWay[way] ?? pictureOf(lessonId);
 }

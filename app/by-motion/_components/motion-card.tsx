@@ -13,7 +13,7 @@ interface MotionCardProps {
 /** One mechanism for one motion: a drawing to turn, how it works, where it ends. */
 export function MotionCard({ way, entry }: MotionCardProps) {
   const { lesson, by } = entry;
-  const spec = pictureOfWay(way, lesson.bench);
+  const spec = pictureOfWay(way, lesson.id);
   return (
     <article className="grid gap-5 border-t border-rule py-5 md:grid-cols-[18rem_1fr]">
       <MovingPicture spec={spec} name={by}>

@@ -21,22 +21,22 @@ export function MovingPicture({ spec, name, children }: MovingPictureProps) {
   const frame = useRef<HTMLDivElement>(null);
 
   const draw = async (value: number) => {
-    const { staticPicture } = await import('@/lib/scene/static-picture');
+    const { thumbnail } = await import('@/lib/scene/thumbnail');
     drive.current = value;
-    setPicture(staticPicture({ ...spec, drive: value }));
+    setPicture(thumbnail(spec, value));
   };
 
   useEffect(() => {
     if (!running) return;
     let asked = 0;
     let stopped = false;
-    void import('@/lib/scene/static-picture').then(({ staticPicture }) => {
+    void import('@/lib/scene/thumbnail').then(({ thumbnail }) => {
       const from = drive.current;
       let start: number | null = null;
       const tick = (now: number) => {
         start ??= now;
         drive.current = driveAfter(spec, from, (now - start) / 1000);
-        setPicture(staticPicture({ ...spec, drive: drive.current }));
+        setPicture(thumbnail(spec, drive.current));
         asked = requestAnimationFrame(tick);
       };
       if (!stopped) asked = requestAnimationFrame(tick);
@@ -59,8 +59,7 @@ export function MovingPicture({ spec, name, children }: MovingPictureProps) {
           children
         ) : (
           <div
-            aria-hidden="true"
-            className="[&>svg]:mx-auto [&>svg]:block [&>svg]:h-auto [&>svg]:max-h-72 [&>svg]:w-full"
+            className="drawing-box"
             // Our own drawing, made from numbers alone.
             dangerouslySetInnerHTML={{ __html: picture }}
           />

@@ -16,7 +16,7 @@ export function LessonCard({ lesson, pegs }: LessonCardProps) {
   return (
     <li className="grid gap-4 border-b border-rule py-6 sm:grid-cols-[15rem_1fr] sm:gap-8">
       <div className="max-w-60 self-start border border-rule p-2">
-        <BenchPicture spec={pictureOf(lesson.bench)} />
+        <BenchPicture spec={pictureOf(lesson.id)} />
       </div>
       <div>
         <h3 className="mb-1">

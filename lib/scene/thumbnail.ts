@@ -1,0 +1,19 @@
+import type { BenchSpec } from './bench-spec';
+import { modelOf } from './model-of';
+import { toSvg } from './to-svg';
+
+/**
+ * A bench as a small picture beside words that say what it is: no dimensions, which could not be
+ * read, and nothing for screen readers. A train leaves its unrolled rims out as well; the trammel
+ * and the pantograph draw what they have drawn since `from`.
+ *
+ * @param drive where the driver stands, radians or mm; its start when left out
+ * @example thumbnail(spec) // '<svg … aria-hidden="true" …>'
+ */
+export function thumbnail(spec: BenchSpec, drive?: number): string {
+  const model = modelOf(spec);
+  const from = model.admit(spec.drive ?? model.drive.start);
+  const to = model.admit(drive ?? from);
+  const showing = { tracing: spec.bench !== 'train', dimensions: false };
+  return toSvg(model.scene({ drive: to, swept: { from, to } }, showing));
+}
