@@ -69,11 +69,15 @@ export type ContactOutcome =
 export function contactAt(cam: Cam, angle: number): ContactOutcome {
   requirePositive('contactAt', 'baseRadius', cam.baseRadius);
   requireFinite('contactAt', 'angle', angle);
-  return finiteResult('contactAt', contactOf(cam, programmeMotion(cam.programme, angle)));
+  return contactForMotion(cam, programmeMotion(cam.programme, angle));
 }
 
 /** The same for a follower whose motion, by the cam's angle, is already known. */
-export function contactOf({ follower, baseRadius }: Cam, motion: Motion): ContactOutcome {
+export function contactForMotion(cam: Cam, motion: Motion): ContactOutcome {
+  return finiteResult('contactAt', contactOfKind(cam, motion));
+}
+
+function contactOfKind({ follower, baseRadius }: Cam, motion: Motion): ContactOutcome {
   switch (follower.kind) {
     case 'knife-edge':
       return slidingRoller(baseRadius, 0, follower.offset, motion);

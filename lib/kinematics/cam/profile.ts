@@ -1,7 +1,7 @@
 import { type Point, rotate } from '@/lib/geometry/point';
 import { finiteResult } from '@/lib/numeric/finite-result';
 import { requireCount, requirePositive, requireWithin } from '@/lib/numeric/require';
-import { type Cam, type Contact, type ContactOutcome, contactOf } from './contact';
+import { type Cam, type Contact, type ContactOutcome, contactForMotion } from './contact';
 import { type Programme, programmeCorners, programmeMotion } from './programme';
 
 /** One place of a profile, in the cam's own frame (the follower above it at angle 0). */
@@ -35,8 +35,8 @@ export function camProfile(cam: Cam, steps = 360): ProfileOutcome {
   requirePositive('camProfile', 'baseRadius', cam.baseRadius);
   const points: ProfilePoint[] = [];
   for (const angle of profileAngles(cam.programme, steps)) {
-    const outcome = contactOf(cam, programmeMotion(cam.programme, angle));
-    if (outcome.outcome !== 'touches') return { ...outcome, angle };
+    const outcome = contactForMotion(cam, programmeMotion(cam.programme, angle));
+    if (outcome.outcome !== 'touches') return finiteResult('camProfile', { ...outcome, angle });
     const { contact } = outcome;
     const rim = rotate(contact.point, -angle);
     points.push({ angle, rim, path: rotate(contact.centre, -angle), contact });
@@ -78,11 +78,11 @@ export function surveyProfile(points: readonly ProfilePoint[]): ProfileSurvey {
   requireCount('surveyProfile', 'points.length', points.length, 1);
   const leans = points.map(({ contact }) => contact.pressureAngle);
   const sides = points.map(({ contact }) => contact.point.x);
-  return {
+  return finiteResult('surveyProfile', {
     leastPressureAngle: leans.reduce((a, b) => Math.min(a, b)),
     greatestPressureAngle: leans.reduce((a, b) => Math.max(a, b)),
     reach: points.reduce((far, { rim }) => Math.max(far, Math.hypot(rim.x, rim.y)), 0),
     contactLeft: sides.reduce((a, b) => Math.min(a, b)),
     contactRight: sides.reduce((a, b) => Math.max(a, b)),
-  };
+  });
 }

@@ -88,6 +88,10 @@ export function programmeOf(segments: readonly Segment[]): ProgrammeOutcome {
  */
 export function programmeMotion(programme: Programme, angle: number, speed = 1): Motion {
   requireFinite('programmeMotion', 'angle', angle);
+  return finiteResult('programmeMotion', motionAt(programme, angle, speed));
+}
+
+function motionAt(programme: Programme, angle: number, speed: number): Motion {
   const into = wrapped(angle);
   const at = programme.placed.findLast((p) => p.startAngle <= into + angleTolerance / 1e3);
   if (at === undefined) return still(0);
@@ -114,8 +118,10 @@ export function programmeCorners(programme: Programme): number[] {
       ? [startAngle, startAngle + segment.angle / 2, startAngle + segment.angle]
       : [startAngle],
   );
-  return [...new Set([0, ...corners.filter((corner) => corner < turn), turn])].sort(
-    (a, b) => a - b,
+  const places = [...new Set([0, ...corners.filter((corner) => corner < turn), turn])];
+  return finiteResult(
+    'programmeCorners',
+    places.sort((a, b) => a - b),
   );
 }
 

@@ -1,4 +1,5 @@
 import type { Point } from '@/lib/geometry/point';
+import { finiteResult } from '@/lib/numeric/finite-result';
 
 /** What a point of a follower draws on the turning cam, seen where cam and follower stand. */
 export interface RolledCurve {
@@ -28,8 +29,8 @@ export function rolledCurve(place: Point, first: Point, second: Point): RolledCu
   if (length <= standstill * Math.hypot(place.x, place.y)) return null;
   const sx = second.x + 2 * first.y - place.x;
   const sy = second.y - 2 * first.x - place.y;
-  return {
+  return finiteResult('rolledCurve', {
     normal: { x: -ty / length, y: tx / length },
     curvature: ((ty / length) * (sx / length) - (tx / length) * (sy / length)) / length,
-  };
+  });
 }

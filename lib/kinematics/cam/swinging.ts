@@ -1,4 +1,5 @@
 import type { Point } from '@/lib/geometry/point';
+import { finiteResult } from '@/lib/numeric/finite-result';
 import { requireFinite, requirePositive } from '@/lib/numeric/require';
 import type { ContactOutcome } from './contact';
 import type { Motion } from './motion-law';
@@ -43,7 +44,7 @@ export function swingingRollerPlace(
   requirePositive('contactAt', 'arm', arm);
   const prime = baseRadius + radius;
   const gap = Math.max(prime - arm - distance, Math.abs(arm - distance) - prime);
-  if (gap > 0) return { outcome: 'out-of-reach', gap };
+  if (gap > 0) return finiteResult('contactAt', { outcome: 'out-of-reach', gap });
   // ψ₀ by half angles, which lose no digits when the triangle is flat
   const folded = Math.max(0, (prime - (arm - distance)) * (prime + (arm - distance)));
   const open = Math.max(0, (arm + distance - prime) * (arm + distance + prime));
@@ -52,7 +53,7 @@ export function swingingRollerPlace(
   const [sine, cosine] = [Math.sin(swing), Math.cos(swing)];
   const way = { x: side * sine, y: cosine };
   const bend = { x: side * cosine, y: -sine };
-  return {
+  return finiteResult('contactAt', {
     outcome: 'reaches',
     place: { x: side * (distance - arm * cosine), y: arm * sine },
     first: { x: arm * velocity * way.x, y: arm * velocity * way.y },
@@ -61,7 +62,7 @@ export function swingingRollerPlace(
       y: arm * (acceleration * way.y + velocity ** 2 * bend.y),
     },
     way,
-  };
+  });
 }
 
 /**
@@ -80,10 +81,10 @@ export function swingingFaceContact(
   const distance = requireDistance(pivotDistance);
   requireFinite('contactAt', 'faceOffset', faceOffset);
   const gap = Math.abs(baseRadius - faceOffset) - distance;
-  if (gap > 0) return { outcome: 'out-of-reach', gap };
+  if (gap > 0) return finiteResult('contactAt', { outcome: 'out-of-reach', gap });
   const side = Math.sign(pivotDistance);
   const pace = 1 + side * velocity;
-  if (pace <= 0) return { outcome: 'face-outruns-cam', by: -pace };
+  if (pace <= 0) return finiteResult('contactAt', { outcome: 'face-outruns-cam', by: 0 - pace });
   const swing = Math.asin((baseRadius - faceOffset) / distance) + position;
   const [sine, cosine] = [Math.sin(swing), Math.cos(swing)];
   const along = (distance * cosine) / pace;
@@ -97,7 +98,7 @@ export function swingingFaceContact(
     distance * (sine - (sine * velocity ** 2) / pace ** 2 + (cosine * acceleration) / pace ** 3);
   const pressureAngle = Math.atan2(side * faceOffset, along);
   const contact = { point, normal, centre: point, pressureAngle, rimRadius, pathRadius: rimRadius };
-  return { outcome: 'touches', contact };
+  return finiteResult('contactAt', { outcome: 'touches', contact });
 }
 
 function requireDistance(pivotDistance: number): number {
