@@ -84,10 +84,10 @@ function conclude(
     outcome: 'marked',
     verdict,
     score,
-    parts: parts.map((part) => shown(part, prediction)),
+    parts: parts.map(({ weight: _weight, skills: _skills, ...marked }) => marked),
     ...(prediction
       ? {
-          message: 'Noted. Your answer is kept.',
+          message: allRight ? 'You guessed right.' : 'It comes out otherwise.',
           nextStep: definition.afterwards?.(variant) ?? 'Now drive the bench and see.',
         }
       : words(verdict, parts)),
@@ -97,12 +97,6 @@ function conclude(
       right: parts.every((part) => part.right || !part.skills.includes(skill)),
     })),
   };
-}
-
-/** A prediction is answered by the bench: the slip is noted, and its advice is not given. */
-function shown(part: WeighedPart, prediction: boolean): MarkedPart {
-  const { weight: _weight, skills: _skills, message, ...marked } = part;
-  return prediction || message === undefined ? marked : { ...marked, message };
 }
 
 function words(verdict: Verdict, parts: readonly WeighedPart[]) {

@@ -53,7 +53,7 @@ export const signForTheBoard = defineExercise<Drawn>({
     return answered.some((layout) => layout !== null) && answered.includes(null) ? drawn : null;
   },
   prompt: ({ units }) =>
-    `The harbour sign is to be enlarged on to a board. Choose two equal long bars from the stock; the hole, counted from the fixed pin (holes every ${said(inUnits(units, 25, 1), units)}, and the same number from the elbow on the second bar); and how far from the fixed point the near edge of the copy lies. Drawing and copy lie centred on one line through the fixed point, the stylus is in the middle, and the elbow may work from 30° to 150°.`,
+    `The harbour sign is to be enlarged on to a board. Choose two equal long bars from the stock; the hole, counted from the fixed pin (holes every ${said(inUnits(units, 25, 1), units)}, and the same number from the elbow on the second bar); and how far from the fixed point the near edge of the copy lies. Drawing and copy lie centred on one line through the fixed point, ${said(inUnits(units, 20, 3 / 4), units)} apart at least. The stylus is in the middle, and the elbow may work from 30° to 150°.`,
   givens: ({ givens: g, units }) => [
     givenLength('w', 'sign, wide', g.signWidth, units),
     givenLength('h', 'sign, high', g.signHeight, units),

@@ -1,4 +1,4 @@
-import { describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import { exercises, lessons, skills } from '@/content/exercises/registry';
 import { answerKey } from '@/lib/marking/answer-key';
 import type { ExerciseDefinition, Part, Setting, Variant } from '@/lib/marking/definition';
@@ -12,6 +12,9 @@ import { unitSystems } from '@/lib/quantities/unit-system';
 import { roundViewSchema } from '@/lib/schemas/round';
 
 const seeds = Number(process.env.HORNBEAM_SEEDS ?? 500);
+/** Ten thousand seeds take minutes; a few hundred take seconds. */
+vi.setConfig({ testTimeout: 60_000 + 60 * seeds, hookTimeout: 60_000 + 60 * seeds });
+
 const facts = { roundId: 'r', hintsTaken: 0, solutionSeen: false, closed: false, attempts: [] };
 
 /** What a learner would send to give this part a value, a set of options or a setting. */
@@ -67,9 +70,17 @@ function marked(definition: ExerciseDefinition, variant: Variant, answers: Recor
 describe.each([...exercises.values()].map((definition) => [definition.id, definition] as const))(
   '%s',
   (_id, definition) => {
-    const drawn = Array.from({ length: seeds }, (_, seed) => seed + 1).flatMap((seed) =>
-      unitSystems.map((units) => drawVariant(definition, seed, units)),
-    );
+    let drawn: readonly Variant[] = [];
+
+    beforeAll(() => {
+      drawn = Array.from({ length: seeds }, (_, seed) => seed + 1).flatMap((seed) =>
+        unitSystems.map((units) => drawVariant(definition, seed, units)),
+      );
+    });
+
+    afterAll(() => {
+      drawn = [];
+    });
 
     it('is drawn alike from the same seed, and is plain JSON', () => {
       for (const variant of drawn.slice(0, 6)) {
@@ -121,8 +132,7 @@ describe.each([...exercises.values()].map((definition) => [definition.id, defini
               answer,
               id,
             ]);
-            if (definition.kind === 'prediction') expect(found?.message).toBeUndefined();
-            else expect(found?.message?.length).toBeGreaterThan(20);
+            expect(found?.message?.length).toBeGreaterThan(20);
           }
         }
       }

@@ -240,12 +240,12 @@ describe('a prediction', () => {
   const variant = drawVariant(definition, 1, 'metric');
   const wrong = (variant.options.lantern ?? []).find(({ option }) => option === 'third-right');
 
-  it('closes its round whatever it was, notes the slip and leaves the telling to the bench', () => {
+  it('closes its round whatever it was, notes the slip and sends the learner to the bench', () => {
     const marking = markResponse(definition, variant, { answers: { lantern: [wrong?.id ?? ''] } });
     expect(marking).toMatchObject({ verdict: 'wrong', closesRound: true, skills: [] });
     if (marking.outcome === 'marked') {
       expect(marking.parts[0]).toMatchObject({ slip: 'idler-counted' });
-      expect(marking.parts[0]?.message).toBeUndefined();
+      expect(marking.message).toBe('It comes out otherwise.');
       expect(marking.nextStep).toContain('turn the crank');
     }
   });
