@@ -3,14 +3,7 @@ import { isCurrent } from './draw';
 import { markChoice } from './mark-choice';
 import { markNumber } from './mark-number';
 import { markSetting } from './mark-setting';
-import type {
-  LearnersResponse,
-  MarkedPart,
-  Marking,
-  Refused,
-  Verdict,
-  WeighedPart,
-} from './marking';
+import type { LearnersResponse, Marking, Refused, Verdict, WeighedPart } from './marking';
 import { trueValues } from './values';
 
 /**
