@@ -1,8 +1,64 @@
 import 'server-only';
 import type { Transaction } from 'sequelize';
 import { row } from '@/lib/db/query';
-import type { SkillRound } from './pegs';
-import type { KeptMarking } from './round-record';
+import type { AttemptReply } from '@/lib/schemas/round';
+import {
+  lastRoundsOf,
+  skillRounds,
+  skillsByExercise,
+  type LastRoundRow,
+  type SkillRound,
+} from './pegs';
+import { roundColumns, type KeptMarking, type RoundRecord } from './round-record';
+
+/** What must be known before a response can be marked. */
+export interface BeforeAttempt {
+  /** What was answered before under the same key, if anything was. */
+  readonly earlier: { readonly bodyHash: string; readonly reply: AttemptReply } | null;
+  /** The learner's round, if it is theirs. */
+  readonly record: RoundRecord | null;
+  /** The last closed rounds of each skill of the lesson to which the round belongs. */
+  readonly rounds: readonly SkillRound[];
+}
+
+/** Looks all of it up at once: sending an answer is what the server does most. */
+export async function findBeforeAttempt(
+  learnerId: string,
+  roundId: string,
+  key: string,
+  transaction?: Transaction,
+): Promise<BeforeAttempt> {
+  const found = await row<BeforeRow>(
+    beforeSql,
+    [learnerId, roundId, key, JSON.stringify(skillsByExercise)],
+    transaction,
+  );
+  if (found === null) return { earlier: null, record: null, rounds: [] };
+  const { earlier, rounds, roundId: own, ...record } = found;
+  return {
+    earlier,
+    record: own === null ? null : { ...record, roundId: own },
+    rounds: skillRounds(rounds),
+  };
+}
+
+interface BeforeRow extends Omit<RoundRecord, 'roundId'> {
+  readonly roundId: string | null;
+  readonly earlier: BeforeAttempt['earlier'];
+  readonly rounds: readonly LastRoundRow[];
+}
+
+const beforeSql = `
+  select ${roundColumns},
+    (select json_build_object('bodyHash', k.body_hash, 'reply', k.answer)
+      from request_keys k where k.learner_id = l.id and k.key = $3) as earlier,
+    coalesce((
+      select json_agg(last) from (${lastRoundsOf(
+        'l.id',
+        "jsonb_array_elements_text(coalesce($4::jsonb -> r.exercise_id, '[]'))",
+      )}) last), '[]') as rounds
+  from learners l left join rounds r on r.id = $2 and r.learner_id = l.id
+  where l.id = $1`;
 
 /** Everything that one attempt writes. */
 export interface AttemptRecord {
@@ -76,9 +132,9 @@ const insertAttemptSql = `
     returning rounds.id
   ), facts as (
     insert into skill_facts (round_id, learner_id, closed_at, skill, was_right, unaided, attempts)
-    select kept.round_id, kept.learner_id, $12, f.skill, f."right", f.unaided, f.attempts
-    from kept, jsonb_to_recordset($16::jsonb) as f (
-      skill text, "right" boolean, unaided boolean, attempts integer)
+    select kept.round_id, kept.learner_id, $12, f.skill, f."right", f.unaided,
+      (select count(*) + 1 from attempts before where before.round_id = $2)
+    from kept, jsonb_to_recordset($16::jsonb) as f (skill text, "right" boolean, unaided boolean)
     returning skill
   ), counted as (
     insert into counted_attempts (item_id, learner_id, n, attempt_id, late)

@@ -3,24 +3,17 @@ import { createHash, randomUUID } from 'node:crypto';
 import { UniqueConstraintError, type Transaction } from 'sequelize';
 import { exercises } from '@/content/exercises/registry';
 import { now as presentTime } from '@/lib/clock';
-import { row, rows, transact } from '@/lib/db/query';
+import { rows, transact } from '@/lib/db/query';
 import type { ExerciseDefinition } from '@/lib/marking/definition';
 import { isCurrent } from '@/lib/marking/draw';
 import { markResponse } from '@/lib/marking/mark';
 import { isUnaided } from '@/lib/marking/view';
 import type { Viewer } from '@/lib/policy/viewer';
 import type { AttemptReply, AttemptRequest } from '@/lib/schemas/round';
-import { insertAttempt, type AttemptRecord } from './attempt-record';
+import { findBeforeAttempt, insertAttempt, type AttemptRecord } from './attempt-record';
+import { pegViews, skillsOfLesson, type SkillRound } from './pegs';
 import {
-  lastRoundsSql,
-  pegViews,
-  skillRounds,
-  skillsOfLesson,
-  type LastRoundRow,
-  type SkillRound,
-} from './pegs';
-import {
-  findRoundRecord,
+  attemptsShown,
   viewAttempt,
   viewRound,
   type KeptMarking,
@@ -89,10 +82,10 @@ async function tryAttempt(
   transaction?: Transaction,
 ): Promise<AttemptOutcome> {
   const bodyHash = hashBody(request);
-  const earlier = await row<{ bodyHash: string; reply: AttemptReply }>(
-    `select body_hash as "bodyHash", answer as reply from request_keys
-     where learner_id = $1 and key = $2`,
-    [viewer.learnerId, key],
+  const { earlier, record, rounds } = await findBeforeAttempt(
+    viewer.learnerId,
+    request.roundId,
+    key,
     transaction,
   );
   if (earlier !== null) {
@@ -100,20 +93,12 @@ async function tryAttempt(
       ? { outcome: 'kept', reply: earlier.reply, repeated: true }
       : { outcome: 'key used for another answer' };
   }
-  const record = await findRoundRecord(viewer.learnerId, request.roundId, transaction);
   const definition = record === null ? undefined : exercises.get(record.exerciseId);
   if (record === null || definition === undefined) return { outcome: 'no such round' };
   if (record.closed || !isCurrent(definition, record.variant)) return { outcome: 'round closed' };
   const marking = markResponse(definition, record.variant, request.response);
   if (marking.outcome === 'refused') return marking;
   const { outcome: _marked, ...kept } = marking;
-  const rounds = skillRounds(
-    await rows<LastRoundRow>(
-      lastRoundsSql,
-      [viewer.learnerId, skillsOfLesson(definition.lesson)],
-      transaction,
-    ),
-  );
   const made = compose(viewer, definition, record, kept, rounds, now);
   const inserted = await insertAttempt(
     {
@@ -153,10 +138,10 @@ function compose(
   const after: RoundRecord = {
     ...record,
     closed: marking.closesRound,
-    attempts: [...record.attempts, { attemptId, createdAt, marking }],
+    attempts: [...record.attempts, { attemptId, createdAt, marking }].slice(-attemptsShown),
   };
   const unaided = isUnaided(record);
-  const facts = marking.closesRound ? factsOf(definition, after, marking, unaided, now) : [];
+  const facts = marking.closesRound ? factsOf(definition, marking, unaided, now) : [];
   return {
     attemptId,
     unaided,

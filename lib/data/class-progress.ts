@@ -1,7 +1,7 @@
 import 'server-only';
 import { lessons } from '@/content/exercises/registry';
 import { now as presentTime } from '@/lib/clock';
-import { row, rows } from '@/lib/db/query';
+import { row } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
 import { pegFromCounts } from '@/lib/retention/peg';
 import type { ClassProgress, Mark } from '@/lib/schemas/class-progress';
@@ -11,7 +11,7 @@ import { skillName, skillsOfLesson } from './pegs';
 
 /**
  * The progress of a class, for its instructors and the administrator; null for anybody else. One
- * column a lesson of which something is set, one row a learner enrolled now. Three queries, whatever
+ * column a lesson of which something is set, one row a learner enrolled now. Two queries, whatever
  * the size of the class.
  */
 export async function findClassProgress(
@@ -25,12 +25,9 @@ export async function findClassProgress(
   if (found === null) return null;
   const columns = columnsOf(found.items);
   const skillIds = columns.flatMap(({ lessonId }) => skillsOfLesson(lessonId));
-  const [pegs, marks] = await Promise.all([
-    rows<PegRow>(pegSql, [...values, skillIds]),
-    rows<MarkRow>(markSql, values),
-  ]);
-  const pegState = new Map(pegs.map((one) => [`${one.learnerId} ${one.skill}`, stateOf(one, now)]));
-  const markOf = new Map(marks.map((one) => [`${one.learnerId} ${one.exerciseId}`, one]));
+  const standing = await row<StandingRow>(standingSql, [...values, skillIds]);
+  const pegState = new Map(standing?.pegs.map((one) => [one[0] + one[1], stateOf(one, now)]));
+  const markOf = new Map(standing?.marks.map((one) => [one[0] + one[1], one]));
   return {
     classId,
     name: found.name,
@@ -44,10 +41,10 @@ export async function findClassProgress(
         pegs: skillsOfLesson(lessonId).map((skill) => ({
           skill,
           name: skillName(skill),
-          state: pegState.get(`${learnerId} ${skill}`) ?? 'open',
+          state: pegState.get(learnerId + skill) ?? 'open',
         })),
         exercises: exercises.map(({ exerciseId }) =>
-          cellOf(exerciseId, markOf.get(`${learnerId} ${exerciseId}`)),
+          cellOf(exerciseId, markOf.get(learnerId + exerciseId)),
         ),
       })),
     })),
@@ -78,7 +75,7 @@ function latest(moments: readonly string[]): string | null {
   return [...moments].sort().at(-1) ?? null;
 }
 
-function stateOf({ looked, good, dates }: PegRow, now: Date) {
+function stateOf([, , looked, good, dates]: PegRow, now: Date) {
   return pegFromCounts({ looked, good, dates, due: null, now: now.toISOString() }).state;
 }
 
@@ -89,7 +86,7 @@ function cellOf(
   if (found === undefined) {
     return { exerciseId, mark: 'none', attempts: 0, attemptId: null, late: false };
   }
-  const { mark, attempts, attemptId, late } = found;
+  const [, , mark, attemptId, late, attempts] = found;
   return { exerciseId, mark, attempts, attemptId, late };
 }
 
@@ -128,20 +125,22 @@ const enrolled = `
   join learners l on l.person_id = p.id
   where ${staffOfClass}`;
 
-interface PegRow {
-  readonly learnerId: string;
-  readonly skill: string;
-  readonly looked: number;
-  readonly good: number;
-  readonly dates: number;
+/** Learner, skill; closed rounds looked at, right unaided among them, on so many dates. */
+type PegRow = readonly [string, string, number, number, number];
+
+/** Learner, exercise; the best attempt's verdict and id, whether it was late, and how many. */
+type MarkRow = readonly [string, string, Mark, string, boolean, number];
+
+/** Both as JSON, which costs the server a tenth of as many rows. */
+interface StandingRow {
+  readonly pegs: readonly PegRow[];
+  readonly marks: readonly MarkRow[];
 }
 
 /** The last four closed rounds of each learner and skill, counted as the peg rule asks. */
 const pegSql = `
-  select e.id as "learnerId", wanted.skill, count(*)::int as looked,
-    (count(*) filter (where f.good))::int as good,
-    (count(distinct (f.closed_at at time zone e.time_zone)::date) filter (where f.good))::int
-      as dates
+  select json_build_array(e.id, wanted.skill, count(*), count(*) filter (where f.good),
+    count(distinct (f.closed_at at time zone e.time_zone)::date) filter (where f.good)) as peg
   from (${enrolled}) e
   cross join unnest($4::text[]) as wanted (skill)
   cross join lateral (
@@ -150,24 +149,14 @@ const pegSql = `
     order by s.closed_at desc limit 4) f
   group by e.id, wanted.skill`;
 
-interface MarkRow {
-  readonly learnerId: string;
-  readonly exerciseId: string;
-  readonly mark: Mark;
-  readonly attempts: number;
-  readonly attemptId: string;
-  readonly late: boolean;
-}
-
 /**
  * The best counted attempt of each learner and exercise: right before partly before wrong, then the
  * latest. An attempt that counts for two assignments is one attempt, late when it was for both.
  */
 const markSql = `
   select distinct on (t.learner_id, a.exercise_id)
-    t.learner_id as "learnerId", a.exercise_id as "exerciseId", a.verdict as mark,
-    a.id as "attemptId", t.late,
-    (count(*) over (partition by t.learner_id, a.exercise_id))::int as attempts
+    json_build_array(t.learner_id, a.exercise_id, a.verdict, a.id, t.late,
+      count(*) over (partition by t.learner_id, a.exercise_id)) as mark
   from (
     select c.learner_id, c.attempt_id, bool_and(c.late) as late
     from (${enrolled}) e
@@ -178,3 +167,7 @@ const markSql = `
   join attempts a on a.id = t.attempt_id
   order by t.learner_id, a.exercise_id,
     array_position(array['right', 'partly', 'wrong'], a.verdict), a.created_at desc`;
+
+const standingSql = `
+  select coalesce((select json_agg(peg) from (${pegSql}) p), '[]') as pegs,
+    coalesce((select json_agg(mark) from (${markSql}) m), '[]') as marks`;

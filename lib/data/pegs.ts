@@ -1,5 +1,5 @@
 import 'server-only';
-import { lessons, skills } from '@/content/exercises/registry';
+import { exercises, lessons, skills } from '@/content/exercises/registry';
 import { pegOf, type ClosedRound, type Peg } from '@/lib/retention/peg';
 import type { PegView } from '@/lib/schemas/round';
 
@@ -8,19 +8,27 @@ export interface SkillRound extends ClosedRound {
   readonly skill: string;
 }
 
-/** The closed rounds of each of a learner's skills that a peg looks at: the last four. */
-export const lastRoundsSql = `
-  select f.skill, f.closed_at as "closedAt", f.was_right as right, f.unaided, f.attempts
-  from unnest($2::text[]) wanted (skill)
-  cross join lateral (
-    select * from skill_facts s
-    where s.learner_id = $1 and s.skill = wanted.skill
-    order by s.closed_at desc limit 4) f`;
+/**
+ * The closed rounds of each of a learner's skills that a peg looks at, which are the last four;
+ * `learner` and `wanted` are SQL, for the learner and for the set of skills.
+ */
+export function lastRoundsOf(learner: string, wanted: string): string {
+  return `
+    select f.skill, f.closed_at as "closedAt", f.was_right as right, f.unaided, f.attempts
+    from ${wanted} wanted (skill)
+    cross join lateral (
+      select * from skill_facts s
+      where s.learner_id = ${learner} and s.skill = wanted.skill
+      order by s.closed_at desc limit 4) f`;
+}
 
-/** A row of `lastRoundsSql`. */
+/** The same for the learner `$1` and the skills `$2`. */
+export const lastRoundsSql = lastRoundsOf('$1', 'unnest($2::text[])');
+
+/** A row of these, as the driver or as JSON gives it. */
 export interface LastRoundRow {
   readonly skill: string;
-  readonly closedAt: Date;
+  readonly closedAt: Date | string;
   readonly right: boolean;
   readonly unaided: boolean;
   readonly attempts: number;
@@ -28,8 +36,13 @@ export interface LastRoundRow {
 
 /** The rows as the peg rule reads them. */
 export function skillRounds(found: readonly LastRoundRow[]): SkillRound[] {
-  return found.map((one) => ({ ...one, closedAt: one.closedAt.toISOString() }));
+  return found.map((one) => ({ ...one, closedAt: new Date(one.closedAt).toISOString() }));
 }
+
+/** For each exercise the skills of its lesson, in their order. */
+export const skillsByExercise: Readonly<Record<string, readonly string[]>> = Object.fromEntries(
+  [...exercises.values()].map(({ id, lesson }) => [id, skillsOfLesson(lesson)]),
+);
 
 /** The pegs of these skills, in their order. */
 export function pegViews(

@@ -9,7 +9,10 @@ import type { AttemptView, RoundView } from '@/lib/schemas/round';
 /** A marking as it is kept with its attempt. */
 export type KeptMarking = Omit<Marking, 'outcome'>;
 
-/** A round as the record has it, with its attempts from the first to the last. */
+/** How many attempts of a round travel with it; what went before is in the record. */
+export const attemptsShown = 10;
+
+/** A round as the record has it, with its latest attempts, the last one last. */
 export interface RoundRecord {
   readonly roundId: string;
   readonly exerciseId: string;
@@ -24,13 +27,16 @@ export interface RoundRecord {
   }[];
 }
 
-const columns = `
+/** The columns of a `RoundRecord`, from `r` (rounds). */
+export const roundColumns = `
   r.id as "roundId", r.exercise_id as "exerciseId", r.variant, r.hints_taken as "hintsTaken",
   r.solution_seen_at is not null as "solutionSeen", r.closed_at is not null as closed,
   coalesce((
     select json_agg(json_build_object(
       'attemptId', a.id, 'createdAt', a.created_at, 'marking', a.marking) order by a.created_at)
-    from attempts a where a.round_id = r.id), '[]') as attempts`;
+    from (
+      select id, created_at, marking from attempts
+      where round_id = r.id order by created_at desc limit ${attemptsShown}) a), '[]') as attempts`;
 
 /** The learner's own round by its id, or null. */
 export function findRoundRecord(
@@ -39,7 +45,7 @@ export function findRoundRecord(
   transaction?: Transaction,
 ): Promise<RoundRecord | null> {
   return row<RoundRecord>(
-    `select ${columns} from rounds r where r.id = $1 and r.learner_id = $2`,
+    `select ${roundColumns} from rounds r where r.id = $1 and r.learner_id = $2`,
     [roundId, learnerId],
     transaction,
   );
@@ -57,7 +63,7 @@ export function findLatestRecord(
   transaction?: Transaction,
 ): Promise<RoundRecord | null> {
   return row<RoundRecord>(
-    `select ${columns} from rounds r
+    `select ${roundColumns} from rounds r
      where r.learner_id = $1 and r.exercise_id = $2 and r.definition_version = $3
        and ($4::text is null or r.units = $4)
      order by r.closed_at is null desc, r.opened_at desc limit 1`,
@@ -79,7 +85,7 @@ export function listLatestRecords(
   wanted: readonly RecordWanted[],
 ): Promise<RoundRecord[]> {
   return rows<RoundRecord>(
-    `select distinct on (r.exercise_id) ${columns}
+    `select distinct on (r.exercise_id) ${roundColumns}
      from unnest($2::text[], $3::int[], $4::text[]) wanted (exercise_id, version, units)
      join rounds r on r.learner_id = $1 and r.exercise_id = wanted.exercise_id
        and r.definition_version = wanted.version

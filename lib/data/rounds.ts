@@ -133,7 +133,7 @@ export async function showSolution(
     const record = await findRoundRecord(viewer.learnerId, roundId, transaction);
     if (record?.exerciseId !== exerciseId) return null;
     if (closed.length > 0) {
-      const facts = factsOf(definition, record, record.attempts.at(-1)?.marking, false, now);
+      const facts = factsOf(definition, record.attempts.at(-1)?.marking, false, now);
       await rows(
         insertFactsSql,
         [roundId, viewer.learnerId, now, JSON.stringify(facts)],

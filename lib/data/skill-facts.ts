@@ -1,7 +1,7 @@
 import 'server-only';
 import type { ExerciseDefinition } from '@/lib/marking/definition';
 import type { SkillRound } from './pegs';
-import type { KeptMarking, RoundRecord } from './round-record';
+import type { KeptMarking } from './round-record';
 
 /**
  * What a round shows of each skill when it closes: right when all the parts that show the skill
@@ -9,7 +9,6 @@ import type { KeptMarking, RoundRecord } from './round-record';
  */
 export function factsOf(
   definition: ExerciseDefinition,
-  record: Pick<RoundRecord, 'attempts'>,
   last: KeptMarking | undefined,
   unaided: boolean,
   now: Date,
@@ -20,14 +19,16 @@ export function factsOf(
     closedAt: now.toISOString(),
     right: last?.skills.some((one) => one.skill === skill && one.right) ?? false,
     unaided,
-    attempts: record.attempts.length,
   }));
 }
 
-/** Writes facts down: `$1` the round, `$2` the learner, `$3` the time, `$4` the facts as JSON. */
+/**
+ * Writes facts down with the number of attempts that the round took: `$1` the round, `$2` the
+ * learner, `$3` the time, `$4` the facts as JSON.
+ */
 export const insertFactsSql = `
   insert into skill_facts (round_id, learner_id, closed_at, skill, was_right, unaided, attempts)
-  select $1, $2, $3, f.skill, f."right", f.unaided, f.attempts
-  from jsonb_to_recordset($4::jsonb) as f (
-    skill text, "right" boolean, unaided boolean, attempts integer)
+  select $1, $2, $3, f.skill, f."right", f.unaided,
+    (select count(*) from attempts a where a.round_id = $1)
+  from jsonb_to_recordset($4::jsonb) as f (skill text, "right" boolean, unaided boolean)
   returning skill`;

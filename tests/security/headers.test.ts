@@ -1,6 +1,11 @@
+import { pathToFileURL } from 'node:url';
+import type { NextConfig } from 'next';
 import { NextRequest } from 'next/server';
 import { describe, expect, it } from 'vitest';
 import { config, contentSecurityPolicy, proxy } from '@/proxy';
+
+/** Plain JavaScript, which the compiler does not look into. */
+const nextConfigFile = pathToFileURL('next.config.mjs').href;
 
 function directives(policy: string): Map<string, string> {
   return new Map(
@@ -43,5 +48,19 @@ describe('the policy of a document', () => {
     expect(matches('/lessons/toothed-wheels/train-of-toothed-wheels')).toBe(true);
     expect(matches('/api/attempts')).toBe(false);
     expect(matches('/_next/static/chunks/main.js')).toBe(false);
+  });
+});
+
+describe('every answer', () => {
+  it('carries the usual headers', async () => {
+    const { default: nextConfig } = (await import(nextConfigFile)) as { default: NextConfig };
+    const [everywhere] = (await nextConfig.headers?.()) ?? [];
+    const headers = new Map(everywhere?.headers.map(({ key, value }) => [key, value]));
+    expect(everywhere?.source).toBe('/:path*');
+    expect(headers.get('X-Content-Type-Options')).toBe('nosniff');
+    expect(headers.get('X-Frame-Options')).toBe('DENY');
+    expect(headers.get('Referrer-Policy')).toBe('same-origin');
+    expect(headers.get('Strict-Transport-Security')).toMatch(/max-age=31536000/);
+    expect(nextConfig.poweredByHeader).toBe(false);
   });
 });

@@ -1,4 +1,9 @@
-import { demoAddress, demoAdministrator, demoClasses, demoPassword } from '../../scripts/demo/people.data';
+import {
+  demoAddress,
+  demoAdministrator,
+  demoClasses,
+  demoPassword,
+} from '../../scripts/demo/people.data';
 
 /** Who the end-to-end tests sign in as: people of the demo workshop. */
 const [tuesday] = demoClasses;
