@@ -50,7 +50,7 @@ export function fourBarLinkage(
     O2: { x: 0, y: 0 },
     O4: { x: frame, y: 0 },
     A: { x: 0, y: crank },
-    B: { x: frame, y: up * rocker + crank },
+    B: { x: frame / 2 + up * crank, y: crank / 2 + up * frame },
   };
   if (point) start.P = start.A ?? { x: 0, y: 0 };
   return {

@@ -1,10 +1,10 @@
 import { requirePositive, requireWithin } from '@/lib/numeric/require';
-import { polar } from '@/lib/geometry/point';
+import type { Point } from '@/lib/geometry/point';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
 
 /**
  * Hart's inversor: a crossed parallelogram A–B–C–D of long bars A–B, C–D and short ones A–D, B–C,
- * with O on A–B, P on A–D and Q on B–C in one line, at the share `share` from A (Q from C). Any
+ * with O on A–B, P on A–D and Q on B–C in one line (P and Q on either side of O), at the share `share` from A (Q from C). Any
  * one unit.
  */
 export interface HartInversor {
@@ -30,24 +30,30 @@ export function hartPower({ long, short, share }: HartInversor): number {
 
 /**
  * Hart's inversor as data: O fixed at the origin, P led by a crank as long as its pin `E` is far
- * from O, so that Q draws a straight line square to O–E, at power/(2·crank).
+ * from O, so that Q draws a straight line square to O–E, beyond O by power/(2·crank).
  */
 export function hartLinkage({ long, short, share }: HartInversor, crank: number): Linkage {
   requirePositive('hartLinkage', 'crank', crank);
   hartPower({ long, short, share });
   const [ao, ap] = [share * long, share * short];
-  const fold = 0.6;
-  const A = polar(ao, Math.PI - fold);
+  const power = (long - short) * (long + short);
+  const top = (Math.sqrt(short * short + 4 * power) - short) / 2;
+  const bottom = top + short;
+  const height = short * Math.sqrt(0.75);
+  const place = (x: number, y: number): Point => ({
+    x: share * ((bottom + top) / 2) - x,
+    y: share * height - y,
+  });
   return {
     points: {
       O: { x: 0, y: 0 },
       E: { x: crank, y: 0 },
-      A,
-      B: polar(long - ao, -fold),
-      D: polar(short, -fold + 0.9, A),
-      C: { x: long, y: short },
-      P: polar(ap, -fold + 0.9, A),
-      Q: { x: long, y: 0 },
+      A: place(0, 0),
+      B: place((bottom + top) / 2, height),
+      C: place(bottom, 0),
+      D: place((bottom - top) / 2, height),
+      P: { x: share * top, y: 0 },
+      Q: { x: (share - 1) * bottom, y: 0 },
     },
     fixed: ['O', 'E'],
     bars: [
