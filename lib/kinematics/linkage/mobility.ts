@@ -86,7 +86,10 @@ export interface KnownParadox extends CountCorrection {
   readonly reason: string;
 }
 
-/** Mechanisms that the count misjudges, and why. Their true freedom is tested by rank or by screws. */
+/**
+ * Mechanisms that the count misjudges, and why, looked up by name. Parallel cranks and Sarrus are
+ * also found by `freedomOf` and `ringFreedom` in the tests; the others are textbook facts, from memory.
+ */
 export const KNOWN_PARADOXES: readonly KnownParadox[] = [
   paradox(
     ['parallel', 'crank'],
