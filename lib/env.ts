@@ -57,15 +57,6 @@ export interface SiteEnvironment {
   readonly mail: { readonly url: string; readonly from: string };
 }
 
-/** Where photographs and files are kept. */
-export interface StorageEnvironment {
-  readonly endpoint: string;
-  readonly region: string;
-  readonly bucket: string;
-  readonly accessKeyId: string;
-  readonly secretAccessKey: string;
-}
-
 /** Says what is missing or malformed in the environment. */
 export class EnvironmentError extends Error {
   override name = 'EnvironmentError';
@@ -134,18 +125,6 @@ export function readSiteEnvironment(source: Source): SiteEnvironment {
     secret: read.NEXTAUTH_SECRET,
     trustedProxies: read.TRUSTED_PROXIES,
     mail: { url: read.SMTP_URL, from: read.MAIL_FROM },
-  };
-}
-
-/** Reads where files are kept from `source`. Throws `EnvironmentError`. */
-export function readStorageEnvironment(source: Source): StorageEnvironment {
-  const read = parse(storageSchema, source);
-  return {
-    endpoint: read.S3_ENDPOINT,
-    region: read.S3_REGION,
-    bucket: read.S3_BUCKET,
-    accessKeyId: read.S3_ACCESS_KEY_ID,
-    secretAccessKey: read.S3_SECRET_ACCESS_KEY,
   };
 }
 

@@ -34,8 +34,3 @@ export function isInstructor(viewer: Viewer): boolean {
 export function isStaff(viewer: Viewer): boolean {
   return viewer.isAdministrator || isInstructor(viewer);
 }
-
-/** The classes in which the viewer has `role`. */
-export function classesAs(viewer: Viewer, role: Role): string[] {
-  return viewer.memberships.flatMap((one) => (one.role === role ? [one.classId] : []));
-}
