@@ -1,7 +1,7 @@
 'use client';
 
 import clsx from 'clsx';
-import Link from 'next/link';
+import Link, { useLinkStatus } from 'next/link';
 import { usePathname } from 'next/navigation';
 import { isCurrent, type NavigationLink } from './navigation';
 
@@ -31,7 +31,7 @@ export function NavLinks({ links, label, className }: NavLinksProps) {
                   current ? 'border-brass' : 'border-transparent',
                 )}
               >
-                {text}
+                <LinkText text={text} />
               </Link>
             </li>
           );
@@ -39,4 +39,10 @@ export function NavLinks({ links, label, className }: NavLinksProps) {
       </ul>
     </nav>
   );
+}
+
+/** The text of a link, dimmed while its page is on the way. */
+function LinkText({ text }: Readonly<{ text: string }>) {
+  const { pending } = useLinkStatus();
+  return <span className={clsx(pending && 'text-pencil italic')}>{text}</span>;
 }

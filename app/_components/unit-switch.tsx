@@ -11,8 +11,8 @@ const choices: readonly {
   readonly short: string;
   readonly full: string;
 }[] = [
-  { units: 'metric', short: 'mm', full: 'Millimetres' },
-  { units: 'inch', short: 'in', full: 'Inches' },
+  { units: 'metric', short: 'mm', full: 'millimetres' },
+  { units: 'inch', short: 'in', full: 'inches' },
 ];
 
 /** Millimetres or inches, for everything that follows; each has its own open rounds. */
@@ -32,7 +32,6 @@ export function UnitSwitch({ units }: Readonly<{ units: UnitSystem }>) {
         <button
           key={choice.units}
           type="button"
-          aria-label={choice.full}
           aria-pressed={choice.units === units}
           onClick={() => choose(choice.units)}
           className={clsx(
@@ -43,6 +42,7 @@ export function UnitSwitch({ units }: Readonly<{ units: UnitSystem }>) {
           )}
         >
           {choice.short}
+          <span className="sr-only"> ({choice.full})</span>
         </button>
       ))}
     </div>

@@ -18,7 +18,7 @@ export default async function TodayPage() {
     <Page>
       <PageHeading>Today</PageHeading>
       <div className="grid gap-x-11 lg:grid-cols-[1.55fr_1fr]">
-        <div>
+        <div className="min-w-0">
           <Section title={today.last ? 'Go on where you were' : 'Begin here'}>
             <GoOn today={today} />
           </Section>
@@ -26,7 +26,7 @@ export default async function TodayPage() {
             <SetForYou set={today.set} />
           </Section>
         </div>
-        <div>
+        <div className="min-w-0">
           <Lifting lessons={today.lessons} />
           <Section title="Your pegs">
             <OwnPegs lessons={today.lessons} />

@@ -4,7 +4,20 @@
  * @example sayDue('2026-12-08T18:30:00Z', 'Europe/London') // 'due Tue 8 Dec, 18:30'
  */
 export function sayDue(dueAt: string | null, timeZone: string): string {
-  return dueAt === null ? 'no date' : `due ${sayWhen(dueAt, timeZone)}`;
+  return dueAt === null ? 'no date' : `due ${sayDeadline(dueAt, timeZone)}`;
+}
+
+/**
+ * The moment until which something can be done. Midnight is the end of a day, not the beginning of
+ * the next.
+ *
+ * @example sayDeadline('2026-12-09T00:00:00Z', 'Europe/London') // 'Tue 8 Dec, midnight'
+ */
+export function sayDeadline(moment: string, timeZone: string): string {
+  const said = sayWhen(moment, timeZone);
+  if (!said.endsWith(', 00:00')) return said;
+  const before = new Date(new Date(moment).getTime() - 1).toISOString();
+  return `${sayWhen(before, timeZone).split(',')[0] ?? ''}, midnight`;
 }
 
 /**

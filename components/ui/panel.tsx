@@ -24,7 +24,7 @@ interface SectionProps {
 /** A part of a page under a heading of its own. */
 export function Section({ title, children, className }: SectionProps) {
   return (
-    <section className={clsx('mb-10', className)}>
+    <section className={clsx('mb-10 min-w-0', className)}>
       <h2 className="mb-3">{title}</h2>
       {children}
     </section>

@@ -18,6 +18,7 @@ export function MovingPicture({ spec, name, children }: MovingPictureProps) {
   const [picture, setPicture] = useState<string | null>(null);
   const [running, setRunning] = useState(false);
   const drive = useRef(spec.drive ?? 0);
+  const verb = spec.bench === 'pantograph' ? 'Lead' : 'Turn';
   const frame = useRef<HTMLDivElement>(null);
 
   const draw = async (value: number) => {
@@ -69,10 +70,10 @@ export function MovingPicture({ spec, name, children }: MovingPictureProps) {
         <Button
           variant="quiet"
           className="motion-reduce:hidden"
-          aria-label={`${running ? 'Stop' : 'Turn'}: ${name}`}
+          aria-label={`${running ? 'Stop' : verb}: ${name}`}
           onClick={() => setRunning(!running)}
         >
-          {running ? 'Stop' : 'Turn'}
+          {running ? 'Stop' : verb}
         </Button>
         <Button
           variant="quiet"

@@ -27,7 +27,7 @@ export default async function ClassPage({ params }: ClassPageProps) {
     listAssignments(viewer, id),
   ]);
   if (found === null) notFound();
-  const learners = found.members.filter((member) => member.role === 'learner').length;
+  const learners = found.members.filter(({ role }) => role === 'learner').length;
   const mayChange = can(viewer, 'change who is in a class', id);
   return (
     <Page>
@@ -38,20 +38,24 @@ export default async function ClassPage({ params }: ClassPageProps) {
         <ClassProgress classId={id} />
       </Section>
       <div className="grid gap-x-11 lg:grid-cols-[1.55fr_1fr]">
-        <Section title="What is set">
-          <Assignments classId={id} timeZone={found.timeZone} assignments={assignments} />
-        </Section>
-        <Section title="Set a lesson">
-          <SetLesson classId={id} timeZone={found.timeZone} />
-        </Section>
-        <Section title="Who is in the class">
-          <Members classId={id} members={found.members} mayRemove={mayChange} />
-        </Section>
-        {mayChange ? (
-          <Section title="Put somebody into it">
-            <AddMember classId={id} viewer={viewer} members={found.members} />
+        <div className="min-w-0">
+          <Section title="What is set">
+            <Assignments classId={id} timeZone={found.timeZone} assignments={assignments} />
           </Section>
-        ) : null}
+          <Section title="Who is in the class">
+            <Members classId={id} members={found.members} mayRemove={mayChange} />
+          </Section>
+        </div>
+        <div className="min-w-0">
+          <Section title="Set a lesson">
+            <SetLesson classId={id} timeZone={found.timeZone} />
+          </Section>
+          {mayChange ? (
+            <Section title="Put somebody into it">
+              <AddMember classId={id} viewer={viewer} members={found.members} />
+            </Section>
+          ) : null}
+        </div>
       </div>
     </Page>
   );

@@ -1,5 +1,5 @@
 import Link from 'next/link';
-import { sayWhen } from '@/components/progress/say-due';
+import { sayDeadline } from '@/components/progress/say-due';
 import { Empty } from '@/components/ui/panel';
 import { Cell, ColumnName, HeadRow, Row, RowName, Table } from '@/components/ui/table';
 import type { SetWork } from '@/lib/data/today';
@@ -47,9 +47,9 @@ function SetRow({ work }: Readonly<{ work: SetWork }>) {
       </RowName>
       <Cell className="whitespace-nowrap">
         {work.overdue && left > 0 ? (
-          <strong className="text-madder">{sayWhen(work.dueAt, work.timeZone)}, late</strong>
+          <strong className="text-madder">{sayDeadline(work.dueAt, work.timeZone)}, late</strong>
         ) : (
-          sayWhen(work.dueAt, work.timeZone)
+          sayDeadline(work.dueAt, work.timeZone)
         )}
       </Cell>
       <Cell>{left === 0 ? <Done /> : `${left} ${left === 1 ? 'exercise' : 'exercises'}`}</Cell>

@@ -1,4 +1,4 @@
-import { sayWhen } from '@/components/progress/say-due';
+import { sayDeadline } from '@/components/progress/say-due';
 import { ActionForm } from '@/components/ui/action-form';
 import { Empty } from '@/components/ui/panel';
 import { Cell, ColumnName, HeadRow, Row, RowName, Table } from '@/components/ui/table';
@@ -39,7 +39,7 @@ export function Assignments({ classId, timeZone, assignments }: AssignmentsProps
                 <span className="block text-[0.9375rem] text-pencil">{work.note}</span>
               ) : null}
             </RowName>
-            <Cell className="whitespace-nowrap">{sayWhen(work.dueAt, timeZone)}</Cell>
+            <Cell className="whitespace-nowrap">{sayDeadline(work.dueAt, timeZone)}</Cell>
             <Cell className="whitespace-nowrap">
               {work.done} of {work.learners}
             </Cell>

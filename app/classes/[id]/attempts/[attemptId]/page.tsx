@@ -43,7 +43,7 @@ export default async function AttemptPage({ params }: AttemptPageProps) {
         {found.title}
       </PageHeading>
       <div className="grid gap-x-11 lg:grid-cols-[1.55fr_1fr]">
-        <div>
+        <div className="min-w-0">
           <Section title="What was asked">
             <p className="mb-4 max-w-measure">{found.prompt}</p>
             <Givens givens={found.givens} />

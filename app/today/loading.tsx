@@ -1,0 +1,5 @@
+import { LoadingPage } from '@/components/ui/loading';
+
+export default function Loading() {
+  return <LoadingPage />;
+}
