@@ -1,4 +1,5 @@
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** Two sprockets and a roller chain. */
 export interface ChainSpec {
@@ -33,7 +34,7 @@ const wholeTolerance = 1e-9;
  * @example sprocketDiameter(12.7, 17) // → 69.1158276272
  */
 export function sprocketDiameter(pitch: number, teeth: number): number {
-  requirePositive('sprocketDiameter', 'pitch', pitch);
+  requireSize('sprocketDiameter', 'pitch', pitch);
   return pitch / Math.sin(Math.PI / requireCount('sprocketDiameter', 'teeth', teeth, 3));
 }
 
@@ -46,7 +47,7 @@ export function sprocketDiameter(pitch: number, teeth: number): number {
  */
 export function chainLength(chain: ChainSpec, centreDistance: number): ChainLength {
   const { pitch, half, spread } = complete('chainLength', chain);
-  const distance = requirePositive('chainLength', 'centreDistance', centreDistance);
+  const distance = requireSize('chainLength', 'centreDistance', centreDistance);
   const pitches = (2 * distance) / pitch + half + (spread * pitch) / distance;
   const links = 2 * Math.ceil(pitches / 2 - wholeTolerance);
   const fitting = centresForLinks(chain, links);
@@ -83,7 +84,7 @@ export function centresForLinks(chain: ChainSpec, links: number): CentresForLink
  * @example toothedPulleyDiameter(5, 40) // → 63.6619772368
  */
 export function toothedPulleyDiameter(pitch: number, teeth: number): number {
-  requirePositive('toothedPulleyDiameter', 'pitch', pitch);
+  requireSize('toothedPulleyDiameter', 'pitch', pitch);
   return (pitch * requireCount('toothedPulleyDiameter', 'teeth', teeth, 3)) / Math.PI;
 }
 
@@ -91,7 +92,7 @@ function complete(caller: string, chain: ChainSpec) {
   const first = requireCount(caller, 'firstTeeth', chain.firstTeeth, 3);
   const second = requireCount(caller, 'secondTeeth', chain.secondTeeth, 3);
   return {
-    pitch: requirePositive(caller, 'pitch', chain.pitch),
+    pitch: requireSize(caller, 'pitch', chain.pitch),
     half: (first + second) / 2,
     spread: ((second - first) / (2 * Math.PI)) ** 2,
   };

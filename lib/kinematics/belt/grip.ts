@@ -1,5 +1,6 @@
 import { finiteResult } from '@/lib/numeric/finite-result';
-import { requireNonNegative, requirePositive, requireWithin } from '@/lib/numeric/require';
+import { requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 
 /** Whether a belt carries a pull without sliding. */
 export type GripOutcome =
@@ -26,7 +27,7 @@ export interface Grip {
  * @example gripOf({ friction: 0.3 }, Math.PI) // → 2.566332
  */
 export function gripOf(grip: Grip, wrap: number): number {
-  requireNonNegative('gripOf', 'wrap', wrap);
+  requireSizeOrNought('gripOf', 'wrap', wrap);
   return finiteResult('gripOf', Math.exp(effectiveFriction('gripOf', grip) * wrap));
 }
 
@@ -37,9 +38,9 @@ export function gripOf(grip: Grip, wrap: number): number {
  * @example wrapForGrip({ friction: 0.3 }, Math.E) // → 3.33333333
  */
 export function wrapForGrip(grip: Grip, pullRatio: number): number {
-  requireNonNegative('wrapForGrip', 'pullRatio over 1', pullRatio - 1);
+  requireSizeOrNought('wrapForGrip', 'pullRatio over 1', pullRatio - 1);
   const friction = effectiveFriction('wrapForGrip', grip);
-  return Math.log(pullRatio) / requirePositive('wrapForGrip', 'friction', friction);
+  return Math.log(pullRatio) / requireSize('wrapForGrip', 'friction', friction);
 }
 
 /**
@@ -49,8 +50,8 @@ export function wrapForGrip(grip: Grip, pullRatio: number): number {
  * @example gripOnWheels({ friction: 0.3 }, [3.7, 2.5], 2.5).outcome // → 'slides'
  */
 export function gripOnWheels(grip: Grip, wraps: readonly number[], pullRatio: number): GripOutcome {
-  requirePositive('gripOnWheels', 'number of wheels', wraps.length);
-  requirePositive('gripOnWheels', 'pullRatio', pullRatio);
+  requireSize('gripOnWheels', 'number of wheels', wraps.length);
+  requireSize('gripOnWheels', 'pullRatio', pullRatio);
   const least = Math.min(...wraps);
   const most = gripOf(grip, least);
   return pullRatio <= most
@@ -59,7 +60,7 @@ export function gripOnWheels(grip: Grip, wraps: readonly number[], pullRatio: nu
 }
 
 function effectiveFriction(caller: string, { friction, grooveHalfAngle }: Grip): number {
-  requireNonNegative(caller, 'friction', friction);
+  requireSizeOrNought(caller, 'friction', friction);
   const half = requireWithin(
     caller,
     'grooveHalfAngle',

@@ -1,5 +1,7 @@
+import { itemAt } from '@/lib/numeric/item-at';
 import type { Point } from '@/lib/geometry/point';
-import { requireCount, requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** A wheel that a belt passes. */
 export interface BeltWheel {
@@ -51,18 +53,21 @@ export function beltRoundMany(wheels: readonly BeltWheel[], windings: 0 | 1 = 1)
   requireCount('beltRoundMany', 'number of wheels', wheels.length, 2);
   const runs: DirectedRun[] = [];
   for (const [index, wheel] of wheels.entries()) {
-    const next = wheels[(index + 1) % wheels.length] ?? wheel;
+    const next = itemAt(wheels, (index + 1) % wheels.length);
     const run = runBetween(wheel, next);
     if ('overlap' in run) return { outcome: 'wheels-meet', wheel: index, overlap: run.overlap };
     runs.push(run);
   }
   const wraps = wrapsOf(wheels, runs);
-  const around = wheels.reduce((sum, wheel, index) => sum + signOf(wheel) * (wraps[index] ?? 0), 0);
+  const around = wheels.reduce(
+    (sum, wheel, index) => sum + signOf(wheel) * itemAt(wraps, index),
+    0,
+  );
   if (wheels.length > 2 && Math.abs(around - windings * turn) > turnTolerance) {
     const wheel = wraps.indexOf(Math.max(...wraps));
-    return { outcome: 'misses', wheel, angle: turn - (wraps[wheel] ?? 0) };
+    return { outcome: 'misses', wheel, angle: turn - itemAt(wraps, wheel) };
   }
-  const arcs = wheels.reduce((sum, { radius }, index) => sum + radius * (wraps[index] ?? 0), 0);
+  const arcs = wheels.reduce((sum, { radius }, index) => sum + radius * itemAt(wraps, index), 0);
   return {
     outcome: 'belt',
     length: runs.reduce((sum, run) => sum + run.length, arcs),
@@ -79,7 +84,7 @@ interface DirectedRun extends BeltRun {
 function runBetween(a: BeltWheel, b: BeltWheel): DirectedRun | { readonly overlap: number } {
   const [first, second] = [signedRadius(a), signedRadius(b)];
   const [dx, dy] = [b.centre.x - a.centre.x, b.centre.y - a.centre.y];
-  const distance = requireFinite('beltRoundMany', 'distance', Math.hypot(dx, dy));
+  const distance = requireMeasure('beltRoundMany', 'distance', Math.hypot(dx, dy));
   const across = second - first;
   const least = a.radius + b.radius;
   if (distance < least) return { overlap: least - distance };
@@ -97,7 +102,7 @@ function runBetween(a: BeltWheel, b: BeltWheel): DirectedRun | { readonly overla
 function wrapsOf(wheels: readonly BeltWheel[], runs: readonly DirectedRun[]): readonly number[] {
   const crossedPair = wheels.length === 2 && wheels.some(isOnRight) && !wheels.every(isOnRight);
   return wheels.map((wheel, index) => {
-    const [into, out] = [runs.at(index - 1)?.direction ?? 0, runs[index]?.direction ?? 0];
+    const [into, out] = [itemAt(runs, index - 1).direction, itemAt(runs, index).direction];
     const wrap = wrapped(signOf(wheel) * (out - into));
     // Two wheels that touch inside a crossed belt are wrapped all round, which is not the same as none.
     return crossedPair && wrap < Math.PI ? turn : wrap;
@@ -113,7 +118,7 @@ function signOf(wheel: BeltWheel): number {
 }
 
 function signedRadius(wheel: BeltWheel): number {
-  return signOf(wheel) * requirePositive('beltRoundMany', 'radius', wheel.radius);
+  return signOf(wheel) * requireSize('beltRoundMany', 'radius', wheel.radius);
 }
 
 /** An angle from 0 to a whole turn; rounding below nought is nought. */

@@ -1,9 +1,5 @@
-import {
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-  requireWithin,
-} from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 
 /** A driving wheel and the wheel that its belt drives, by diameter; `crossed` turns the sense. */
 export interface BeltStage {
@@ -30,12 +26,12 @@ export interface BeltLosses {
  * @example beltTurns([{ driver: 750, driven: 450 }, { driver: 900, driven: 150 }]) // → 10
  */
 export function beltTurns(stages: readonly BeltStage[], losses: BeltLosses = {}): number {
-  requirePositive('beltTurns', 'number of belts', stages.length);
-  const thickness = requireNonNegative('beltTurns', 'thickness', losses.thickness ?? 0);
+  requireSize('beltTurns', 'number of belts', stages.length);
+  const thickness = requireSizeOrNought('beltTurns', 'thickness', losses.thickness ?? 0);
   const kept = 1 - requireWithin('beltTurns', 'slip', losses.slip ?? 0, 0, 1);
   return stages.reduce((turns, { driver, driven, lay }) => {
-    const from = requirePositive('beltTurns', 'driver', driver) + thickness;
-    const to = requirePositive('beltTurns', 'driven', driven) + thickness;
+    const from = requireSize('beltTurns', 'driver', driver) + thickness;
+    const to = requireSize('beltTurns', 'driven', driven) + thickness;
     return turns * (from / to) * kept * (lay === 'crossed' ? -1 : 1);
   }, 1);
 }
@@ -56,11 +52,11 @@ export function drivenDiameter(
 ):
   | { readonly outcome: 'diameter'; readonly diameter: number }
   | { readonly outcome: 'none'; readonly fastest: number } {
-  const size = Math.abs(requireFinite('drivenDiameter', 'turns', turns));
-  requirePositive('drivenDiameter', 'turns', size);
-  const thickness = requireNonNegative('drivenDiameter', 'thickness', losses.thickness ?? 0);
+  const size = Math.abs(requireMeasure('drivenDiameter', 'turns', turns));
+  requireSize('drivenDiameter', 'turns', size);
+  const thickness = requireSizeOrNought('drivenDiameter', 'thickness', losses.thickness ?? 0);
   const kept = 1 - requireWithin('drivenDiameter', 'slip', losses.slip ?? 0, 0, 1);
-  const from = (requirePositive('drivenDiameter', 'driver', driver) + thickness) * kept;
+  const from = (requireSize('drivenDiameter', 'driver', driver) + thickness) * kept;
   const diameter = from / size - thickness;
   return diameter > 0
     ? { outcome: 'diameter', diameter }
@@ -75,8 +71,8 @@ export function drivenDiameter(
  * @example beltSpeed(150, 30 * Math.PI) // → 7068.58347
  */
 export function beltSpeed(diameter: number, angularSpeed: number, thickness = 0): number {
-  requirePositive('beltSpeed', 'diameter', diameter);
-  requireFinite('beltSpeed', 'angularSpeed', angularSpeed);
-  requireNonNegative('beltSpeed', 'thickness', thickness);
+  requireSize('beltSpeed', 'diameter', diameter);
+  requireMeasure('beltSpeed', 'angularSpeed', angularSpeed);
+  requireSizeOrNought('beltSpeed', 'thickness', thickness);
   return (Math.abs(angularSpeed) * (diameter + thickness)) / 2;
 }

@@ -1,7 +1,8 @@
 import { beltLoop } from '@/lib/kinematics/belt/two-wheels';
 import type { Lay } from '@/lib/kinematics/belt/two-wheels';
-import { requireCount, requirePositive } from '@/lib/numeric/require';
-import { findRoot } from '@/lib/numeric/root';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
+import { rootBetween } from '@/lib/numeric/root-between';
 
 /** One step of a pair of cones, by diameter. */
 export interface ConeStep {
@@ -41,9 +42,9 @@ export function steppedCones(cones: {
   readonly lay: Lay;
 }): SteppedCones {
   const { centreDistance, lay } = cones;
-  const driver = requirePositive('steppedCones', 'firstDriver', cones.firstDriver);
+  const driver = requireSize('steppedCones', 'firstDriver', cones.firstDriver);
   const [firstRatio, ...others] = cones.ratios;
-  const driven = driver * requirePositive('steppedCones', 'first ratio', firstRatio ?? Number.NaN);
+  const driven = driver * requireSize('steppedCones', 'first ratio', firstRatio ?? Number.NaN);
   const loop = beltLoop({ first: driven, second: driver, centreDistance, lay });
   if (loop.outcome === 'wheels-meet') return loop;
   const steps: ConeStep[] = [{ driver, driven }];
@@ -70,9 +71,9 @@ export function stepForLoop(wanted: {
   readonly ratio: number;
   readonly lay: Lay;
 }): StepForLoop {
-  const distance = requirePositive('stepForLoop', 'centreDistance', wanted.centreDistance);
-  const length = requirePositive('stepForLoop', 'length', wanted.length);
-  const ratio = requirePositive('stepForLoop', 'ratio', wanted.ratio);
+  const distance = requireSize('stepForLoop', 'centreDistance', wanted.centreDistance);
+  const length = requireSize('stepForLoop', 'length', wanted.length);
+  const ratio = requireSize('stepForLoop', 'ratio', wanted.ratio);
   if (length <= 2 * distance) return { outcome: 'loop-too-short', lacking: 2 * distance - length };
   const over = (driver: number): number => {
     const loop = beltLoop({
@@ -86,8 +87,7 @@ export function stepForLoop(wanted: {
   const largest = ((2 * distance) / (1 + ratio)) * (1 - Number.EPSILON * 4);
   const atLargest = over(largest);
   if (atLargest < 0) return { outcome: 'loop-too-long', slack: -atLargest };
-  const found = findRoot(over, largest * Number.EPSILON, largest);
-  const driver = found.outcome === 'found' ? found.x : largest;
+  const driver = rootBetween('stepForLoop', over, largest * Number.EPSILON, largest);
   return { outcome: 'step', driver, driven: ratio * driver };
 }
 
@@ -102,7 +102,7 @@ export function slackOnStep(
   step: ConeStep,
   belt: { readonly centreDistance: number; readonly lay: Lay; readonly length: number },
 ): number | null {
-  const length = requirePositive('slackOnStep', 'length', belt.length);
+  const length = requireSize('slackOnStep', 'length', belt.length);
   const loop = beltLoop({
     first: step.driver,
     second: step.driven,
@@ -120,8 +120,8 @@ export function slackOnStep(
  * @example evenPaces(10, 40, 3) // → [10, 20, 40]
  */
 export function evenPaces(slowest: number, fastest: number, count: number): readonly number[] {
-  const slow = requirePositive('evenPaces', 'slowest', slowest);
-  const fast = requirePositive('evenPaces', 'fastest', fastest);
+  const slow = requireSize('evenPaces', 'slowest', slowest);
+  const fast = requireSize('evenPaces', 'fastest', fastest);
   requireCount('evenPaces', 'count', count, 2);
   return Array.from({ length: count }, (_, index) =>
     index === count - 1 ? fast : slow * (fast / slow) ** (index / (count - 1)),
@@ -136,7 +136,6 @@ export function evenPaces(slowest: number, fastest: number, count: number): read
  */
 export function speedRange(largest: number, smallest: number): number {
   const end =
-    requirePositive('speedRange', 'largest', largest) /
-    requirePositive('speedRange', 'smallest', smallest);
+    requireSize('speedRange', 'largest', largest) / requireSize('speedRange', 'smallest', smallest);
   return end * end;
 }

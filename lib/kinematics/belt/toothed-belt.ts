@@ -1,6 +1,7 @@
 import { toothedPulleyDiameter } from '@/lib/kinematics/belt/chain';
 import { beltLoop, centresForLoop } from '@/lib/kinematics/belt/two-wheels';
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** Two pulleys and a toothed belt. */
 export interface ToothedBeltSpec {
@@ -33,7 +34,7 @@ export type ToothedBeltLength =
  * @example toothedBelt({ pitch: 5, firstTeeth: 20, secondTeeth: 40 }, 100).outcome // → 'belt'
  */
 export function toothedBelt(spec: ToothedBeltSpec, centreDistance: number): ToothedBeltLength {
-  const pitch = requirePositive('toothedBelt', 'pitch', spec.pitch);
+  const pitch = requireSize('toothedBelt', 'pitch', spec.pitch);
   requireCount('toothedBelt', 'firstTeeth', spec.firstTeeth, 3);
   requireCount('toothedBelt', 'secondTeeth', spec.secondTeeth, 3);
   const wheels = {

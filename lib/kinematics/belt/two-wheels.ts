@@ -1,5 +1,5 @@
-import { requireNonNegative, requirePositive } from '@/lib/numeric/require';
-import { findRoot } from '@/lib/numeric/root';
+import { requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { rootBetween } from '@/lib/numeric/root-between';
 
 /** How a belt lies: open, both wheels turning alike, or crossed, so that they turn against. */
 export type Lay = 'open' | 'crossed';
@@ -49,7 +49,7 @@ export type CentresForLoop =
  * @example beltLoop({ first: 300, second: 150, centreDistance: 800, lay: 'open' }).outcome // → 'loop'
  */
 export function beltLoop(belt: TwoWheels): BeltLoop {
-  const distance = requirePositive('beltLoop', 'centreDistance', belt.centreDistance);
+  const distance = requireSize('beltLoop', 'centreDistance', belt.centreDistance);
   const [R, r] = radii('beltLoop', belt);
   if (distance < R + r) return { outcome: 'wheels-meet', overlap: R + r - distance };
   const across = belt.lay === 'open' ? R - r : R + r;
@@ -79,7 +79,7 @@ export function centresForLoop(
   belt: Omit<TwoWheels, 'centreDistance'>,
   length: number,
 ): CentresForLoop {
-  requirePositive('centresForLoop', 'length', length);
+  requireSize('centresForLoop', 'length', length);
   const [R, r] = radii('centresForLoop', belt);
   const lengthAt = (centreDistance: number): number => {
     const loop = beltLoop({ ...belt, centreDistance });
@@ -87,8 +87,8 @@ export function centresForLoop(
   };
   const least = lengthAt(R + r);
   if (length < least) return { outcome: 'loop-too-short', lacking: least - length };
-  const found = findRoot((distance) => lengthAt(distance) - length, R + r, R + r + length / 2);
-  const distance = found.outcome === 'found' ? found.x : R + r;
+  const over = (centreDistance: number) => lengthAt(centreDistance) - length;
+  const distance = rootBetween('centresForLoop', over, R + r, R + r + length / 2);
   return { outcome: 'centres', distance, shortDistance: shortCentres(belt, length) };
 }
 
@@ -104,10 +104,10 @@ export function centresForLoop(
  */
 export function centresForWrap(first: number, second: number, wrap: number): number {
   const [R, r] = radii('centresForWrap', { first, second });
-  requirePositive('centresForWrap', 'wrap', wrap);
-  requireNonNegative('centresForWrap', 'half a turn over wrap', Math.PI - wrap);
+  requireSize('centresForWrap', 'wrap', wrap);
+  requireSizeOrNought('centresForWrap', 'half a turn over wrap', Math.PI - wrap);
   if (R === r) return R + r;
-  const sine = requirePositive('centresForWrap', 'slope', Math.sin((Math.PI - wrap) / 2));
+  const sine = requireSize('centresForWrap', 'slope', Math.sin((Math.PI - wrap) / 2));
   return Math.max(R + r, Math.abs(R - r) / sine);
 }
 
@@ -119,8 +119,8 @@ export function centresForWrap(first: number, second: number, wrap: number): num
  * @example bandsawBlade(350, 760) // → 2619.55742876
  */
 export function bandsawBlade(wheelDiameter: number, centreDistance: number): number {
-  requirePositive('bandsawBlade', 'wheelDiameter', wheelDiameter);
-  requireNonNegative('bandsawBlade', 'room between the wheels', centreDistance - wheelDiameter);
+  requireSize('bandsawBlade', 'wheelDiameter', wheelDiameter);
+  requireSizeOrNought('bandsawBlade', 'room between the wheels', centreDistance - wheelDiameter);
   return Math.PI * wheelDiameter + 2 * centreDistance;
 }
 
@@ -135,8 +135,5 @@ function radii(
   caller: string,
   { first, second }: { readonly first: number; readonly second: number },
 ): readonly [number, number] {
-  return [
-    requirePositive(caller, 'first', first) / 2,
-    requirePositive(caller, 'second', second) / 2,
-  ];
+  return [requireSize(caller, 'first', first) / 2, requireSize(caller, 'second', second) / 2];
 }

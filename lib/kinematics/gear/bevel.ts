@@ -1,4 +1,5 @@
-import { requireCount, requirePositive, requireWithin } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount, requireWithin } from '@/lib/numeric/require';
 
 /** Two bevel wheels on shafts that cross. */
 export interface BevelSpec {
@@ -68,7 +69,7 @@ export function bevelWheel(
   wheel: { readonly module: number; readonly teeth: number },
   cone: number,
 ): BevelWheel {
-  const size = requirePositive('bevelWheel', 'module', wheel.module);
+  const size = requireSize('bevelWheel', 'module', wheel.module);
   const teeth = requireCount('bevelWheel', 'teeth', wheel.teeth);
   requireWithin('bevelWheel', 'cone', cone, 1e-9, Math.PI / 2 - flatTolerance);
   const pitchDiameter = size * teeth;

@@ -1,7 +1,7 @@
 import { involute, involuteInverse } from '@/lib/kinematics/gear/involute';
 import { completePair } from '@/lib/kinematics/gear/pair';
 import type { PairSpec } from '@/lib/kinematics/gear/pair';
-import { requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
 
 /** What a pair without shift does when its arbors do not stand on standard centres. */
 export type CentresOutcome =
@@ -56,7 +56,7 @@ const standardTolerance = 1e-12;
  */
 export function centresChanged(spec: PairSpec, distance: number): CentresOutcome {
   const pair = completePair('centresChanged', spec);
-  requirePositive('centresChanged', 'distance', distance);
+  requireSize('centresChanged', 'distance', distance);
   const bases = pair.firstBase + pair.secondBase;
   if (distance < bases) return { outcome: 'too-close', overlap: bases - distance };
   const operatingAngle = anglesOn(bases, distance);
@@ -86,7 +86,7 @@ export function centresChanged(spec: PairSpec, distance: number): CentresOutcome
 export function openingForBacklash(spec: PairSpec, backlash: number): number {
   const pair = completePair('openingForBacklash', spec);
   if (backlash === 0) return 0;
-  requirePositive('openingForBacklash', 'backlash', backlash);
+  requireSize('openingForBacklash', 'backlash', backlash);
   const bases = pair.firstBase + pair.secondBase;
   // In t = tan α′ the play is 2·bases·√(1+t²)·(t − atan t − inv α), which is convex and rises.
   let t = Math.tan(involuteInverse(involute(pair.pressureAngle) + backlash / (2 * bases)));
@@ -147,7 +147,7 @@ export function shiftedPair(spec: PairSpec): ShiftedPair {
  */
 export function shiftSumForCentres(spec: PairSpec, distance: number): ShiftSum {
   const pair = completePair('shiftSumForCentres', spec);
-  requirePositive('shiftSumForCentres', 'distance', distance);
+  requireSize('shiftSumForCentres', 'distance', distance);
   const bases = pair.firstBase + pair.secondBase;
   if (distance < bases) return { outcome: 'too-close', overlap: bases - distance };
   const more = involute(anglesOn(bases, distance)) - involute(pair.pressureAngle);

@@ -1,4 +1,5 @@
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** A wheel set out by the spacing of its teeth. */
 export interface PitchedWheel {
@@ -36,7 +37,7 @@ const fitTolerance = 1e-9;
  * @example wheelFromPitch(25, 18).chord // → 24.8732692511
  */
 export function wheelFromPitch(pitch: number, teeth: number): PitchedWheel {
-  const p = requirePositive('wheelFromPitch', 'pitch', pitch);
+  const p = requireSize('wheelFromPitch', 'pitch', pitch);
   const z = requireCount('wheelFromPitch', 'teeth', teeth, 3);
   const pitchDiameter = (p * z) / Math.PI;
   return { pitchDiameter, module: p / Math.PI, chord: pitchDiameter * Math.sin(Math.PI / z) };
@@ -52,8 +53,8 @@ export function wheelFromPitch(pitch: number, teeth: number): PitchedWheel {
  * @example wholeTeethRound(200, 20).outcome // → 'teeth'
  */
 export function wholeTeethRound(diameter: number, wantedPitch: number): WholeTeeth {
-  const d = requirePositive('wholeTeethRound', 'diameter', diameter);
-  const p = requirePositive('wholeTeethRound', 'wantedPitch', wantedPitch);
+  const d = requireSize('wholeTeethRound', 'diameter', diameter);
+  const p = requireSize('wholeTeethRound', 'wantedPitch', wantedPitch);
   const exact = (Math.PI * d) / p;
   const teeth = Math.floor(exact + fitTolerance * exact);
   if (teeth < 3) return { outcome: 'too-small', lacking: (3 * p) / Math.PI - d };

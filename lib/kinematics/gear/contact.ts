@@ -2,7 +2,7 @@ import { completePair } from '@/lib/kinematics/gear/pair';
 import type { PairSpec } from '@/lib/kinematics/gear/pair';
 import { gearProportions } from '@/lib/kinematics/gear/proportions';
 import type { GearSpec } from '@/lib/kinematics/gear/proportions';
-import { requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
 
 /** Where two teeth touch along the line of action, and how many pairs share the load. */
 export interface Contact {
@@ -53,7 +53,7 @@ export type RingContactOutcome =
  */
 export function contactOf(spec: PairSpec, centreDistance?: number): ContactOutcome {
   const pair = completePair('contactOf', spec);
-  const distance = requirePositive(
+  const distance = requireSize(
     'contactOf',
     'centreDistance',
     centreDistance ?? pair.standardDistance,
@@ -108,7 +108,7 @@ export function rackContactRatio(spec: GearSpec): number {
 export function ringContact(spec: PairSpec): RingContactOutcome {
   const pair = completePair('ringContact', spec);
   const difference = pair.secondTeeth - pair.firstTeeth;
-  requirePositive('ringContact', 'ring teeth over pinion teeth', difference);
+  requireSize('ringContact', 'ring teeth over pinion teeth', difference);
   const ringTip = pair.module * (pair.secondTeeth / 2 - pair.addendum);
   if (ringTip < pair.secondBase) {
     return { outcome: 'tip-inside-base-circle', inside: pair.secondBase - ringTip };

@@ -1,5 +1,6 @@
 import { requirePressureAngle } from '@/lib/kinematics/gear/proportions';
-import { requireCount, requirePositive, requireWithin } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount, requireWithin } from '@/lib/numeric/require';
 
 /** A limit on a tooth count: where exactly it lies, and the whole count next to it. */
 export interface TeethLimit {
@@ -89,7 +90,7 @@ export function leastShift(tooth: ToothProportion, teeth: number): number {
 function complete(caller: string, tooth: ToothProportion): { k: number; square: number } {
   const angle = requirePressureAngle(caller, tooth.pressureAngle);
   return {
-    k: requirePositive(caller, 'addendum', tooth.addendum ?? 1),
+    k: requireSize(caller, 'addendum', tooth.addendum ?? 1),
     square: Math.sin(angle) ** 2,
   };
 }

@@ -1,10 +1,6 @@
 import type { Point } from '@/lib/geometry/point';
-import {
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-  requireWithin,
-} from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 
 /** Below this the difference tan a − a loses digits, and its series is exact to rounding. */
 const seriesBelow = 0.1;
@@ -50,7 +46,7 @@ export function involute(angle: number): number {
  * @example involuteInverse(0.0343) // → 0.45526404
  */
 export function involuteInverse(value: number): number {
-  requireNonNegative('involuteInverse', 'value', value);
+  requireSizeOrNought('involuteInverse', 'value', value);
   if (value === 0) return 0;
   let tangent = Math.min(Math.cbrt(3 * value), value + Math.PI / 2);
   for (let step = 0; step < maximumSteps; step += 1) {
@@ -73,8 +69,8 @@ export function involuteInverse(value: number): number {
  * @example unwindCord(30, 1).cord // → 30
  */
 export function unwindCord(baseRadius: number, unwound: number): UnwoundCord {
-  requirePositive('unwindCord', 'baseRadius', baseRadius);
-  requireFinite('unwindCord', 'unwound', unwound);
+  requireSize('unwindCord', 'baseRadius', baseRadius);
+  requireMeasure('unwindCord', 'unwound', unwound);
   const cosine = Math.cos(unwound);
   const sine = Math.sin(unwound);
   return {
@@ -96,8 +92,8 @@ export function unwindCord(baseRadius: number, unwound: number): UnwoundCord {
  * @example pressureAngleAt(50, 100) // → 1.04719755
  */
 export function pressureAngleAt(baseRadius: number, radius: number): number {
-  requirePositive('pressureAngleAt', 'baseRadius', baseRadius);
-  requirePositive('pressureAngleAt', 'radius', radius);
+  requireSize('pressureAngleAt', 'baseRadius', baseRadius);
+  requireSize('pressureAngleAt', 'radius', radius);
   if (radius <= baseRadius) return 0;
   return Math.atan2(Math.sqrt((radius - baseRadius) * (radius + baseRadius)), baseRadius);
 }

@@ -1,8 +1,10 @@
 import type { Point } from '@/lib/geometry/point';
+import { requireDrawable } from '@/lib/kinematics/gear/proportions';
 import { lanternCarrying, lanternPoint, lanternSizes } from '@/lib/kinematics/gear/lantern';
 import type { LanternSpec } from '@/lib/kinematics/gear/lantern';
-import { requireCount, requirePositive } from '@/lib/numeric/require';
-import { findRoot } from '@/lib/numeric/root';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
+import { rootBetween } from '@/lib/numeric/root-between';
 
 /** A lantern's wheel to be drawn. */
 export interface LanternOutlineSpec extends LanternSpec {
@@ -30,9 +32,10 @@ const spareHeight = 0.04;
  * @example lanternWheelOutline({ pitch: 25, wheelTeeth: 36, pins: 8, pinDiameter: 11, play: 1 }).length // → 1764
  */
 export function lanternWheelOutline(spec: LanternOutlineSpec): readonly Point[] {
+  requireDrawable('lanternWheelOutline', spec.wheelTeeth);
   const steps = requireCount('lanternWheelOutline', 'steps', spec.steps ?? 12);
   const { wheelRadius, toothThickness } = lanternSizes(spec);
-  requirePositive('lanternWheelOutline', 'tooth thickness', toothThickness);
+  requireSize('lanternWheelOutline', 'tooth thickness', toothThickness);
   const side = sideOf(spec, wheelRadius, steps);
   const pitch = (2 * Math.PI) / spec.wheelTeeth;
   // The side runs up from the middle of the space at angle 0; the tooth's middle is at pitch/2.
@@ -75,8 +78,8 @@ function firstAbove(f: (roll: number) => number, end: number): number {
   for (let step = 1; step <= searchSteps; step += 1) {
     const roll = (end * step) / searchSteps;
     if (f(roll) <= 0) continue;
-    const found = findRoot(f, (end * Math.max(step - 1, 1e-3)) / searchSteps, roll);
-    return found.outcome === 'found' ? found.x : (end * (step - 1)) / searchSteps;
+    const before = (end * Math.max(step - 1, 1e-3)) / searchSteps;
+    return f(before) < 0 ? rootBetween('lanternWheelOutline', f, before, roll) : before;
   }
   return end;
 }
@@ -91,8 +94,7 @@ function lastRoll(spec: LanternOutlineSpec): number {
     const point = lanternPoint(spec, roll).flank;
     return Math.hypot(point.x, point.y) - tip;
   };
-  const found = findRoot(over, 0, (Math.PI * spec.pins) / spec.wheelTeeth);
-  return found.outcome === 'found' ? found.x : 0;
+  return rootBetween('lanternWheelOutline', over, 0, (Math.PI * spec.pins) / spec.wheelTeeth);
 }
 
 function turned({ x, y }: Point, angle: number): Point {

@@ -1,11 +1,7 @@
 import type { Point } from '@/lib/geometry/point';
-import {
-  requireCount,
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-} from '@/lib/numeric/require';
-import { findRoot } from '@/lib/numeric/root';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
+import { rootBetween } from '@/lib/numeric/root-between';
 
 /** A wheel whose teeth drive the pins of a lantern. */
 export interface LanternSpec {
@@ -87,7 +83,7 @@ export function lanternSizes(spec: LanternSpec): LanternSizes {
  */
 export function lanternPoint(spec: LanternSpec, roll: number): LanternPoint {
   const { wheelRadius, pinCircleRadius } = circles('lanternPoint', spec);
-  requireFinite('lanternPoint', 'roll', roll);
+  requireMeasure('lanternPoint', 'roll', roll);
   const together = wheelRadius + pinCircleRadius;
   const turned = (together / pinCircleRadius) * roll;
   const pinCentre = {
@@ -112,7 +108,7 @@ export function lanternPoint(spec: LanternSpec, roll: number): LanternPoint {
  */
 export function lanternPointedRadius(spec: LanternSpec): number {
   const { toothThickness, wheelRadius } = lanternSizes(spec);
-  requirePositive('lanternPointedRadius', 'tooth thickness', toothThickness);
+  requireSize('lanternPointedRadius', 'tooth thickness', toothThickness);
   const middle = Math.PI / spec.wheelTeeth - (spec.play ?? 0) / (2 * wheelRadius);
   const beyond = (roll: number): number => {
     const { flank } = lanternPoint(spec, roll);
@@ -123,8 +119,7 @@ export function lanternPointedRadius(spec: LanternSpec): number {
   for (let step = 1; step <= pointedSteps; step += 1) {
     const [from, to] = [(end * (step - 1)) / pointedSteps, (end * step) / pointedSteps];
     if (beyond(to) < 0) continue;
-    const found = findRoot(beyond, from, to);
-    const { flank } = lanternPoint(spec, found.outcome === 'found' ? found.x : to);
+    const { flank } = lanternPoint(spec, rootBetween('lanternPointedRadius', beyond, from, to));
     return Math.hypot(flank.x, flank.y);
   }
   const { flank } = lanternPoint(spec, end);
@@ -151,11 +146,11 @@ export function lanternCarrying(spec: LanternSpec): LanternCarrying {
 }
 
 function circles(caller: string, spec: LanternSpec) {
-  const pitch = requirePositive(caller, 'pitch', spec.pitch);
+  const pitch = requireSize(caller, 'pitch', spec.pitch);
   const teeth = requireCount(caller, 'wheelTeeth', spec.wheelTeeth, 3);
   const pins = requireCount(caller, 'pins', spec.pins, 3);
-  requirePositive(caller, 'pinDiameter', spec.pinDiameter);
-  requireNonNegative(caller, 'play', spec.play ?? 0);
+  requireSize(caller, 'pinDiameter', spec.pinDiameter);
+  requireSizeOrNought(caller, 'play', spec.play ?? 0);
   return {
     wheelRadius: (pitch * teeth) / (2 * Math.PI),
     pinCircleRadius: (pitch * pins) / (2 * Math.PI),

@@ -5,7 +5,8 @@ import {
   requirePressureAngle,
 } from '@/lib/kinematics/gear/proportions';
 import type { GearSpec } from '@/lib/kinematics/gear/proportions';
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** A calliper over several teeth. */
 export interface Span {
@@ -66,7 +67,7 @@ export function teethToSpan(spec: GearSpec): number {
  * @example shiftFromSpan({ module: 3, teeth: 24, pressureAngle: Math.PI / 9 }, 3, 23.9702329464) // → 0.4
  */
 export function shiftFromSpan(spec: GearSpec, spanned: number, measured: number): number {
-  requirePositive('shiftFromSpan', 'measured', measured);
+  requireSize('shiftFromSpan', 'measured', measured);
   const { span } = spanMeasurement({ ...spec, shift: 0 }, spanned);
   return (measured - span) / (2 * spec.module * Math.sin(spec.pressureAngle));
 }
@@ -82,7 +83,7 @@ export function shiftFromSpan(spec: GearSpec, spanned: number, measured: number)
  * @example overPins({ module: 1, teeth: 32, pressureAngle: Math.PI / 9 }, 1.728) // → { outcome: 'reading', reading: 34.4129778952, pinCircle: 32.6849778952 }
  */
 export function overPins(spec: GearSpec, pin: number): PinReading {
-  requirePositive('overPins', 'pin', pin);
+  requireSize('overPins', 'pin', pin);
   const { baseDiameter } = gearProportions(spec);
   const rolled = pin / baseDiameter - spaceAtBase(spec);
   if (rolled < 0) return { outcome: 'pin-too-thin', lacking: -rolled * baseDiameter };
@@ -100,7 +101,7 @@ export function overPins(spec: GearSpec, pin: number): PinReading {
  * @example betweenPins({ module: 3, teeth: 60, pressureAngle: Math.PI / 9 }, 4.32) // → { outcome: 'reading', reading: 175.994288687, pinCircle: 180.314288687 }
  */
 export function betweenPins(spec: GearSpec, pin: number): PinReading {
-  requirePositive('betweenPins', 'pin', pin);
+  requireSize('betweenPins', 'pin', pin);
   const { baseDiameter, thickness, pitchDiameter } = gearProportions(spec);
   const rolled = thickness / pitchDiameter + involute(spec.pressureAngle) - pin / baseDiameter;
   if (rolled < 0) return { outcome: 'pin-too-thick', excess: -rolled * baseDiameter };
@@ -120,9 +121,9 @@ export function rackOverPin(
   rack: { readonly module: number; readonly pressureAngle: number },
   pin: number,
 ): number {
-  const size = requirePositive('rackOverPin', 'module', rack.module);
+  const size = requireSize('rackOverPin', 'module', rack.module);
   const angle = requirePressureAngle('rackOverPin', rack.pressureAngle);
-  requirePositive('rackOverPin', 'pin', pin);
+  requireSize('rackOverPin', 'pin', pin);
   const centre = (pin / (2 * Math.cos(angle)) - (Math.PI * size) / 4) / Math.tan(angle);
   return centre + pin / 2;
 }

@@ -1,4 +1,5 @@
-import { requireCount, requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** Two wheels of one module. */
 export interface MeshSpec {
@@ -42,7 +43,7 @@ const placingTolerance = 1e-9;
  * @example centreDistance({ module: 4, firstTeeth: 12, secondTeeth: 36 }) // → 96
  */
 export function centreDistance(mesh: MeshSpec): number {
-  requirePositive('centreDistance', 'module', mesh.module);
+  requireSize('centreDistance', 'module', mesh.module);
   const first = requireCount('centreDistance', 'firstTeeth', mesh.firstTeeth);
   const second = requireCount('centreDistance', 'secondTeeth', mesh.secondTeeth);
   if (!mesh.ring) return (mesh.module * (first + second)) / 2;
@@ -78,9 +79,9 @@ export function pitchLineSpeed(
   wheel: { readonly module: number; readonly teeth: number },
   angularSpeed: number,
 ): number {
-  requirePositive('pitchLineSpeed', 'module', wheel.module);
+  requireSize('pitchLineSpeed', 'module', wheel.module);
   requireCount('pitchLineSpeed', 'teeth', wheel.teeth);
-  requireFinite('pitchLineSpeed', 'angularSpeed', angularSpeed);
+  requireMeasure('pitchLineSpeed', 'angularSpeed', angularSpeed);
   return (Math.abs(angularSpeed) * wheel.module * wheel.teeth) / 2;
 }
 
@@ -94,7 +95,7 @@ export function pitchLineSpeed(
  * @example meshState({ module: 4, firstTeeth: 12, secondTeeth: 36 }, 99).outcome // → 'apart'
  */
 export function meshState(mesh: MeshSpec, distance: number, tolerance?: number): MeshState {
-  requirePositive('meshState', 'distance', distance);
+  requireSize('meshState', 'distance', distance);
   const standard = centreDistance(mesh);
   const gap = mesh.ring ? standard - distance : distance - standard;
   const gapInModules = gap / mesh.module;
@@ -124,8 +125,8 @@ export function meshPhase(
 ): number {
   const first = requireCount('meshPhase', 'firstTeeth', mesh.firstTeeth);
   const second = requireCount('meshPhase', 'secondTeeth', mesh.secondTeeth);
-  requireFinite('meshPhase', 'firstAngle', firstAngle);
-  requireFinite('meshPhase', 'lineOfCentres', lineOfCentres);
+  requireMeasure('meshPhase', 'firstAngle', firstAngle);
+  requireMeasure('meshPhase', 'lineOfCentres', lineOfCentres);
   const fromFirst = mesh.ring === 'second' ? lineOfCentres + Math.PI : lineOfCentres;
   const fromSecond = mesh.ring === 'first' ? lineOfCentres : lineOfCentres + Math.PI;
   const rolled = ((fromFirst - firstAngle) * first) / second;

@@ -1,9 +1,11 @@
 import type { Point } from '@/lib/geometry/point';
-import { completeGear } from '@/lib/kinematics/gear/proportions';
+import { completeGear, requireDrawable } from '@/lib/kinematics/gear/proportions';
 import type { GearSpec } from '@/lib/kinematics/gear/proportions';
 import { toothSide } from '@/lib/kinematics/gear/tooth-profile';
 import type { ToothPoint, ToothSide } from '@/lib/kinematics/gear/tooth-profile';
-import { requireCount, requireFinite } from '@/lib/numeric/require';
+import { itemAt } from '@/lib/numeric/item-at';
+import { requireMeasure } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** A wheel to be drawn. */
 export interface OutlineSpec extends GearSpec {
@@ -43,6 +45,7 @@ const arcStep = Math.PI / 90;
  * @example involuteOutline({ module: 3, teeth: 24, pressureAngle: Math.PI / 9 }).length // → 960
  */
 export function involuteOutline(spec: OutlineSpec): readonly Point[] {
+  requireDrawable('involuteOutline', spec.teeth);
   const side = sideOf('involuteOutline', spec);
   const pitch = (2 * Math.PI) / spec.teeth;
   const half = [...side.fillet, ...side.flank.slice(1)];
@@ -71,7 +74,7 @@ export function toothLimits(spec: OutlineSpec): ToothLimits {
 
 function sideOf(caller: string, spec: OutlineSpec): ToothSide {
   const gear = completeGear(caller, spec);
-  const backlash = requireFinite(caller, 'backlash', spec.backlash ?? 0);
+  const backlash = requireMeasure(caller, 'backlash', spec.backlash ?? 0);
   const flankSteps = requireCount(caller, 'flankSteps', spec.flankSteps ?? 10);
   const filletSteps = requireCount(caller, 'filletSteps', spec.filletSteps ?? 8);
   return toothSide(gear, backlash, flankSteps, filletSteps);
@@ -79,14 +82,13 @@ function sideOf(caller: string, spec: OutlineSpec): ToothSide {
 
 /** The inner points of the root circle's arc, from the middle of the tooth space's angles. */
 function rootArc(side: ToothSide, pitch: number): readonly ToothPoint[] {
-  const start = side.fillet[0];
-  if (!start) return [];
+  const start = itemAt(side.fillet, 0);
   return arc(start.radius, pitch / 2 - start.angle);
 }
 
 function tipArc(side: ToothSide): readonly ToothPoint[] {
-  const last = side.flank.at(-1) ?? side.fillet.at(-1);
-  return last ? arc(last.radius, last.angle) : [];
+  const last = itemAt([...side.fillet, ...side.flank], -1);
+  return arc(last.radius, last.angle);
 }
 
 /** The points strictly between −halfAngle and halfAngle. */
@@ -106,7 +108,7 @@ function aroundTheOrigin(tooth: readonly ToothPoint[], teeth: number): readonly 
     const cosine = Math.cos((2 * Math.PI * turn) / teeth);
     const sine = Math.sin((2 * Math.PI * turn) / teeth);
     xs.forEach((x, index) => {
-      const y = ys[index] ?? 0;
+      const y = itemAt(ys, index);
       outline.push({ x: x * cosine - y * sine, y: x * sine + y * cosine });
     });
   }

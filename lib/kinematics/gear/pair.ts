@@ -1,5 +1,6 @@
 import { requirePressureAngle } from '@/lib/kinematics/gear/proportions';
-import { requireCount, requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** Two outside wheels of one module that are to run together. */
 export interface PairSpec {
@@ -30,15 +31,15 @@ export interface CompletePair extends Required<PairSpec> {
  * @example completePair('pair', { module: 3, firstTeeth: 20, secondTeeth: 40, pressureAngle: 0.35 }).standardDistance // → 90
  */
 export function completePair(caller: string, spec: PairSpec): CompletePair {
-  const size = requirePositive(caller, 'module', spec.module);
+  const size = requireSize(caller, 'module', spec.module);
   const first = requireCount(caller, 'firstTeeth', spec.firstTeeth, 3);
   const second = requireCount(caller, 'secondTeeth', spec.secondTeeth, 3);
   const cosine = Math.cos(requirePressureAngle(caller, spec.pressureAngle));
   return {
     ...spec,
-    firstShift: requireFinite(caller, 'firstShift', spec.firstShift ?? 0),
-    secondShift: requireFinite(caller, 'secondShift', spec.secondShift ?? 0),
-    addendum: requirePositive(caller, 'addendum', spec.addendum ?? 1),
+    firstShift: requireMeasure(caller, 'firstShift', spec.firstShift ?? 0),
+    secondShift: requireMeasure(caller, 'secondShift', spec.secondShift ?? 0),
+    addendum: requireSize(caller, 'addendum', spec.addendum ?? 1),
     standardDistance: (size * (first + second)) / 2,
     firstBase: (size * first * cosine) / 2,
     secondBase: (size * second * cosine) / 2,

@@ -1,10 +1,5 @@
-import {
-  requireCount,
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-  requireWithin,
-} from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireCount, requireWithin } from '@/lib/numeric/require';
 
 /** What fixes one involute spur wheel; only the first three must be given. */
 export interface GearSpec {
@@ -42,6 +37,8 @@ export interface GearProportions {
 }
 
 const degree = Math.PI / 180;
+/** More teeth than anyone draws; a bound, so that a slip of the finger does not fill the memory. */
+const mostDrawn = 10_000;
 
 /**
  * The sizes of an involute spur wheel.
@@ -77,15 +74,15 @@ export function gearProportions(spec: GearSpec): GearProportions {
  */
 export function completeGear(caller: string, spec: GearSpec): CompleteGearSpec {
   const gear = {
-    module: requirePositive(caller, 'module', spec.module),
+    module: requireSize(caller, 'module', spec.module),
     teeth: requireCount(caller, 'teeth', spec.teeth, 3),
     pressureAngle: requirePressureAngle(caller, spec.pressureAngle),
-    shift: requireFinite(caller, 'shift', spec.shift ?? 0),
-    addendum: requirePositive(caller, 'addendum', spec.addendum ?? 1),
-    clearance: requireNonNegative(caller, 'clearance', spec.clearance ?? 0.25),
+    shift: requireMeasure(caller, 'shift', spec.shift ?? 0),
+    addendum: requireSize(caller, 'addendum', spec.addendum ?? 1),
+    clearance: requireSizeOrNought(caller, 'clearance', spec.clearance ?? 0.25),
   };
   const root = gear.teeth / 2 - gear.addendum - gear.clearance + gear.shift;
-  requirePositive(caller, 'root radius in modules', root);
+  requireSize(caller, 'root radius in modules', root);
   return gear;
 }
 
@@ -97,4 +94,14 @@ export function completeGear(caller: string, spec: GearSpec): CompleteGearSpec {
  */
 export function requirePressureAngle(caller: string, angle: number): number {
   return requireWithin(caller, 'pressureAngle', angle, degree, Math.PI / 4);
+}
+
+/**
+ * `teeth`, if they are few enough to be drawn one by one: at most ten thousand.
+ *
+ * @throws RangeError otherwise.
+ * @example requireDrawable('wheel', 60) // → 60
+ */
+export function requireDrawable(caller: string, teeth: number): number {
+  return requireWithin(caller, 'teeth', requireCount(caller, 'teeth', teeth), 1, mostDrawn);
 }

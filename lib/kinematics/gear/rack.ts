@@ -1,11 +1,7 @@
 import type { Point } from '@/lib/geometry/point';
-import { requirePressureAngle } from '@/lib/kinematics/gear/proportions';
-import {
-  requireCount,
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-} from '@/lib/numeric/require';
+import { requireDrawable, requirePressureAngle } from '@/lib/kinematics/gear/proportions';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** A toothed bar. */
 export interface RackSpec {
@@ -35,9 +31,9 @@ export function rackTravel(
   pinion: { readonly module: number; readonly teeth: number },
   angle: number,
 ): number {
-  requirePositive('rackTravel', 'module', pinion.module);
+  requireSize('rackTravel', 'module', pinion.module);
   requireCount('rackTravel', 'teeth', pinion.teeth);
-  return (pinion.module * pinion.teeth * requireFinite('rackTravel', 'angle', angle)) / 2;
+  return (pinion.module * pinion.teeth * requireMeasure('rackTravel', 'angle', angle)) / 2;
 }
 
 /**
@@ -64,8 +60,8 @@ export function rackPlace(
  * @example rackTeethForTravel({ module: 3 }, 188.4) // → 22
  */
 export function rackTeethForTravel(rack: { readonly module: number }, travel: number): number {
-  const pitch = Math.PI * requirePositive('rackTeethForTravel', 'module', rack.module);
-  const exact = requireNonNegative('rackTeethForTravel', 'travel', travel) / pitch;
+  const pitch = Math.PI * requireSize('rackTeethForTravel', 'module', rack.module);
+  const exact = requireSizeOrNought('rackTeethForTravel', 'travel', travel) / pitch;
   return Math.ceil(exact * (1 - Number.EPSILON * 4)) + 2;
 }
 
@@ -81,18 +77,18 @@ export function rackTeethForTravel(rack: { readonly module: number }, travel: nu
  */
 export function rackOutline(spec: RackSpec): readonly Point[] {
   const caller = 'rackOutline';
-  const size = requirePositive(caller, 'module', spec.module);
-  const teeth = requireCount(caller, 'teeth', spec.teeth);
+  const size = requireSize(caller, 'module', spec.module);
+  const teeth = requireDrawable(caller, spec.teeth);
   const slope = Math.tan(requirePressureAngle(caller, spec.pressureAngle));
-  const top = size * requirePositive(caller, 'addendum', spec.addendum ?? 1);
-  const root = top + size * requireNonNegative(caller, 'clearance', spec.clearance ?? 0.25);
-  const thinned = requireFinite(caller, 'backlash', spec.backlash ?? 0) / 2;
-  const bottom = -root - requireNonNegative(caller, 'back', spec.back ?? 2 * size);
+  const top = size * requireSize(caller, 'addendum', spec.addendum ?? 1);
+  const root = top + size * requireSizeOrNought(caller, 'clearance', spec.clearance ?? 0.25);
+  const thinned = requireMeasure(caller, 'backlash', spec.backlash ?? 0) / 2;
+  const bottom = -root - requireSizeOrNought(caller, 'back', spec.back ?? 2 * size);
   const pitch = Math.PI * size;
   const half = pitch / 4 - thinned;
-  const atTop = requirePositive(caller, 'half width of the tip', half - top * slope);
+  const atTop = requireSize(caller, 'half width of the tip', half - top * slope);
   const atRoot = half + root * slope;
-  requirePositive(caller, 'half width of the space at the root', pitch / 2 - atRoot);
+  requireSize(caller, 'half width of the space at the root', pitch / 2 - atRoot);
   const upper = Array.from({ length: teeth }, (_, tooth) => [
     { x: tooth * pitch - atRoot, y: -root },
     { x: tooth * pitch - atTop, y: top },

@@ -1,8 +1,10 @@
+import { itemAt } from '@/lib/numeric/item-at';
 import type { Point } from '@/lib/geometry/point';
 import { involute, pressureAngleAt } from '@/lib/kinematics/gear/involute';
-import { completeGear, gearProportions } from '@/lib/kinematics/gear/proportions';
+import { completeGear, gearProportions, requireDrawable } from '@/lib/kinematics/gear/proportions';
 import type { CompleteGearSpec, GearSpec } from '@/lib/kinematics/gear/proportions';
-import { requireCount, requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** Sizes of a ring with teeth inside. */
 export interface RingProportions {
@@ -40,7 +42,7 @@ export function ringProportions(spec: GearSpec): RingProportions {
   return {
     pitchDiameter: size * teeth,
     tipDiameter:
-      size * 2 * requirePositive('ringProportions', 'tip radius', teeth / 2 - addendum + shift),
+      size * 2 * requireSize('ringProportions', 'tip radius', teeth / 2 - addendum + shift),
     rootDiameter: size * (teeth + 2 * (addendum + clearance + shift)),
   };
 }
@@ -57,8 +59,9 @@ export function ringProportions(spec: GearSpec): RingProportions {
  * @example ringOutline({ module: 3, teeth: 60, pressureAngle: Math.PI / 9, flankSteps: 10 }).length // → 1560
  */
 export function ringOutline(spec: RingOutlineSpec): readonly Point[] {
+  requireDrawable('ringOutline', spec.teeth);
   const gear = completeGear('ringOutline', spec);
-  const backlash = requireFinite('ringOutline', 'backlash', spec.backlash ?? 0);
+  const backlash = requireMeasure('ringOutline', 'backlash', spec.backlash ?? 0);
   const count = requireCount('ringOutline', 'flankSteps', spec.flankSteps ?? 10);
   const { tipDiameter, rootDiameter } = ringProportions(spec);
   const baseRadius = gearProportions(spec).baseDiameter / 2;
@@ -68,10 +71,10 @@ export function ringOutline(spec: RingOutlineSpec): readonly Point[] {
     const radius = from + ((rootDiameter / 2 - from) * step) / count;
     return { radius, angle: angleAt(radius) };
   });
-  requirePositive('ringOutline', 'tooth at the tip', side[0]?.angle ?? 0);
+  requireSize('ringOutline', 'tooth at the tip', itemAt(side, 0).angle);
   const pitch = (2 * Math.PI) / gear.teeth;
-  const rootAngle = side.at(-1)?.angle ?? 0;
-  requirePositive('ringOutline', 'space at the root', pitch / 2 - rootAngle);
+  const rootAngle = itemAt(side, -1).angle;
+  requireSize('ringOutline', 'space at the root', pitch / 2 - rootAngle);
   const tooth = [
     { radius: rootDiameter / 2, angle: -(rootAngle + pitch / 2) / 2 },
     ...side.toReversed().map(({ radius, angle }) => ({ radius, angle: -angle })),
@@ -102,7 +105,7 @@ export function ringOutline(spec: RingOutlineSpec): readonly Point[] {
 export function ringPassage(ring: GearSpec, pinionTeeth: number): RingPassage {
   const own = gearProportions({ ...ring, teeth: pinionTeeth, shift: 0 });
   const { tipDiameter, pitchDiameter } = ringProportions({ ...ring, shift: 0 });
-  const distance = requirePositive(
+  const distance = requireSize(
     'ringPassage',
     'ring teeth over pinion teeth',
     (pitchDiameter - own.pitchDiameter) / 2,

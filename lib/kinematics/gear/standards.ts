@@ -1,4 +1,5 @@
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** The four basic racks of ISO 53, by the depth and roundness of their roots. */
 export type BasicRackType = 'A' | 'B' | 'C' | 'D';
@@ -52,7 +53,7 @@ const finePitch = 20;
  * @example basicRack(4, 'A').filletRadius // → 1.52
  */
 export function basicRack(module: number, type: BasicRackType): BasicRack {
-  const size = requirePositive('basicRack', 'module', module);
+  const size = requireSize('basicRack', 'module', module);
   const { clearance, fillet } = basicRacks[type];
   return {
     addendum: size,
@@ -71,7 +72,7 @@ export function basicRack(module: number, type: BasicRackType): BasicRack {
  * @example moduleSeries(1.75) // → 2
  */
 export function moduleSeries(module: number): 0 | 1 | 2 {
-  const size = requirePositive('moduleSeries', 'module', module);
+  const size = requireSize('moduleSeries', 'module', module);
   if (firstSeries.some((listed) => listed === size)) return 1;
   return secondSeries.some((listed) => listed === size) ? 2 : 0;
 }
@@ -83,7 +84,7 @@ export function moduleSeries(module: number): 0 | 1 | 2 {
  * @example nearestModule(2.94) // → 3
  */
 export function nearestModule(measured: number): number {
-  const size = requirePositive('nearestModule', 'measured', measured);
+  const size = requireSize('nearestModule', 'measured', measured);
   const off = (listed: number) => Math.abs(Math.log(listed / size));
   return [...firstSeries, ...secondSeries].reduce((best, listed) =>
     off(listed) < off(best) ? listed : best,
@@ -97,7 +98,7 @@ export function nearestModule(measured: number): number {
  * @example moduleOfFoundWheel(78, 24) // → 3
  */
 export function moduleOfFoundWheel(tipDiameter: number, teeth: number): number {
-  requirePositive('moduleOfFoundWheel', 'tipDiameter', tipDiameter);
+  requireSize('moduleOfFoundWheel', 'tipDiameter', tipDiameter);
   return tipDiameter / (requireCount('moduleOfFoundWheel', 'teeth', teeth) + 2);
 }
 
@@ -108,7 +109,7 @@ export function moduleOfFoundWheel(tipDiameter: number, teeth: number): number {
  * @example moduleFromDiametralPitch(12.7) // → 2
  */
 export function moduleFromDiametralPitch(pitch: number): number {
-  return inch / requirePositive('moduleFromDiametralPitch', 'pitch', pitch);
+  return inch / requireSize('moduleFromDiametralPitch', 'pitch', pitch);
 }
 
 /**
@@ -119,7 +120,7 @@ export function moduleFromDiametralPitch(pitch: number): number {
  * @example diametralSizes(12, 36).outsideDiameter // → 3.16666666667
  */
 export function diametralSizes(pitch: number, teeth: number): DiametralSizes {
-  const p = requirePositive('diametralSizes', 'pitch', pitch);
+  const p = requireSize('diametralSizes', 'pitch', pitch);
   const z = requireCount('diametralSizes', 'teeth', teeth, 3);
   const clearance = p < finePitch ? 0.25 / p : 0.2 / p + 0.002;
   return {

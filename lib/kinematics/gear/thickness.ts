@@ -1,7 +1,7 @@
 import { involute, involuteInverse, pressureAngleAt } from '@/lib/kinematics/gear/involute';
 import { completeGear, gearProportions } from '@/lib/kinematics/gear/proportions';
 import type { GearSpec } from '@/lib/kinematics/gear/proportions';
-import { requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
 
 /** The thickness of a tooth at a radius, or why there is none. */
 export type ToothThickness =
@@ -32,7 +32,7 @@ export interface ChordalTooth {
  */
 export function toothThickness(spec: GearSpec, radius: number): ToothThickness {
   const baseRadius = gearProportions(spec).baseDiameter / 2;
-  requirePositive('toothThickness', 'radius', radius);
+  requireSize('toothThickness', 'radius', radius);
   if (radius < baseRadius) return { outcome: 'inside-base-circle', inside: baseRadius - radius };
   const pointed = pointedRadius(spec);
   if (radius > pointed) return { outcome: 'beyond-the-point', beyond: radius - pointed };
@@ -82,5 +82,5 @@ export function chordalTooth(spec: GearSpec): ChordalTooth {
 function halfAngleAtBase(spec: GearSpec): number {
   const { thickness, pitchDiameter } = gearProportions(spec);
   const half = thickness / pitchDiameter + involute(spec.pressureAngle);
-  return requirePositive('toothThickness', 'tooth thickness at the base circle', half);
+  return requireSize('toothThickness', 'tooth thickness at the base circle', half);
 }

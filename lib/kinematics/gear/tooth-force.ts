@@ -1,4 +1,5 @@
-import { requireFinite, requirePositive, requireWithin } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 
 /** What the teeth of a wheel push with. */
 export interface ToothForce {
@@ -25,8 +26,8 @@ export function toothForce(
   rollingDiameter: number,
   operatingAngle: number,
 ): ToothForce {
-  requireFinite('toothForce', 'torque', torque);
-  requirePositive('toothForce', 'rollingDiameter', rollingDiameter);
+  requireMeasure('toothForce', 'torque', torque);
+  requireSize('toothForce', 'rollingDiameter', rollingDiameter);
   requireWithin('toothForce', 'operatingAngle', operatingAngle, 0, Math.PI / 2 - 1e-9);
   const along = (2 * torque) / rollingDiameter;
   return {

@@ -2,8 +2,8 @@ import { involute, involuteInverse, pressureAngleAt } from '@/lib/kinematics/gea
 import type { CompleteGearSpec } from '@/lib/kinematics/gear/proportions';
 import { cuttingRack, filletPoint, undercutDepth } from '@/lib/kinematics/gear/root-fillet';
 import type { CuttingRack } from '@/lib/kinematics/gear/root-fillet';
-import { requirePositive } from '@/lib/numeric/require';
-import { findRoot } from '@/lib/numeric/root';
+import { requireSize } from '@/lib/numeric/moderate';
+import { rootBetween } from '@/lib/numeric/root-between';
 
 /** A point of a tooth: its radius, and its angle from the middle of the tooth. */
 export interface ToothPoint {
@@ -49,7 +49,7 @@ export function toothSide(
 ): ToothSide {
   const curve = involuteSide(gear, backlash);
   const rack = cuttingRack(gear, backlash);
-  requirePositive('toothSide', 'corner of the cutting rack', rack.corner);
+  requireSize('toothSide', 'corner of the cutting rack', rack.corner);
   const fillet = (normal: number): ToothPoint => {
     const { radius, angle } = filletPoint(rack, normal);
     return { radius, angle: Math.PI / gear.teeth - angle };
@@ -82,7 +82,7 @@ function involuteSide(gear: CompleteGearSpec, backlash: number): InvoluteSide {
   const baseRadius = ((module * teeth) / 2) * Math.cos(pressureAngle);
   const thickness = Math.PI / 2 + 2 * gear.shift * Math.tan(pressureAngle) - backlash / module;
   const atBase = thickness / teeth + involute(pressureAngle);
-  requirePositive('toothSide', 'tooth thickness at the base circle', atBase);
+  requireSize('toothSide', 'tooth thickness at the base circle', atBase);
   return {
     baseRadius,
     pointedRadius: baseRadius / Math.cos(involuteInverse(atBase)),
@@ -105,8 +105,7 @@ function crossing(
     const below = (rack.lastNormal * step) / crossingSteps;
     if (fillet(below).radius < curve.baseRadius) break;
     if (outside(below) < 0) {
-      const found = findRoot(outside, below, above);
-      return found.outcome === 'found' ? found.x : below;
+      return rootBetween('toothSide', outside, below, above);
     }
     above = below;
   }
@@ -126,8 +125,7 @@ function lastNormal(
   for (let step = 1; step <= crossingSteps; step += 1) {
     const normal = (joint * step) / crossingSteps;
     if (room(normal) < 0) {
-      const found = findRoot(room, (joint * (step - 1)) / crossingSteps, normal);
-      return found.outcome === 'found' ? found.x : 0;
+      return rootBetween('toothSide', room, (joint * (step - 1)) / crossingSteps, normal);
     }
   }
   return joint;

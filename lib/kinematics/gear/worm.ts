@@ -1,9 +1,5 @@
-import {
-  requireCount,
-  requireNonNegative,
-  requirePositive,
-  requireWithin,
-} from '@/lib/numeric/require';
+import { requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireCount, requireWithin } from '@/lib/numeric/require';
 
 /** A worm and its wheel. */
 export interface WormSpec {
@@ -57,8 +53,8 @@ export function wormRatio(starts: number, wheelTeeth: number): number {
  */
 export function wormDrive(spec: WormSpec): WormDrive {
   const ratio = wormRatio(spec.starts, spec.wheelTeeth);
-  const size = requirePositive('wormDrive', 'module', spec.module);
-  const diameter = requirePositive('wormDrive', 'wormDiameter', spec.wormDiameter);
+  const size = requireSize('wormDrive', 'module', spec.module);
+  const diameter = requireSize('wormDrive', 'wormDiameter', spec.wormDiameter);
   return {
     ratio,
     lead: spec.starts * Math.PI * size,
@@ -107,6 +103,6 @@ export function wormEfficiency(leadAngle: number, friction: number, faceAngle = 
 }
 
 function effectiveFriction(caller: string, friction: number, faceAngle: number): number {
-  requireNonNegative(caller, 'friction', friction);
+  requireSizeOrNought(caller, 'friction', friction);
   return friction / Math.cos(requireWithin(caller, 'faceAngle', faceAngle, 0, Math.PI / 3));
 }

@@ -1,5 +1,6 @@
 import { ringTeeth } from '@/lib/kinematics/train/epicyclic';
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** Planets between a sun and its ring. */
 export interface PlanetsSpec {
@@ -36,7 +37,7 @@ export function planetsAssembly(spec: PlanetsSpec): PlanetsAssembly {
   const sun = requireCount(caller, 'sunTeeth', spec.sunTeeth, 3);
   const planet = requireCount(caller, 'planetTeeth', spec.planetTeeth, 3);
   const planets = requireCount(caller, 'planets', spec.planets);
-  const size = requirePositive(caller, 'module', spec.module);
+  const size = requireSize(caller, 'module', spec.module);
   const ring = ringTeeth(sun, planet);
   const together = sun + ring;
   const across = planets === 1 ? 2 : Math.sin(Math.PI / planets);

@@ -1,6 +1,6 @@
 import { decimalFraction, divide, multiply } from '@/lib/numeric/fraction';
 import type { Fraction } from '@/lib/numeric/fraction';
-import { requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
 
 /**
  * Turns of a lead screw for one turn of the spindle, to cut a metric pitch on an inch screw.
@@ -13,7 +13,7 @@ import { requirePositive } from '@/lib/numeric/require';
  * @example changeWheelRatio(8, 1.5) // → { numerator: 60n, denominator: 127n }
  */
 export function changeWheelRatio(leadThreads: number, pitch: number): Fraction {
-  const threads = requirePositive('changeWheelRatio', 'leadThreads', leadThreads);
-  const wanted = requirePositive('changeWheelRatio', 'pitch', pitch);
+  const threads = requireSize('changeWheelRatio', 'leadThreads', leadThreads);
+  const wanted = requireSize('changeWheelRatio', 'pitch', pitch);
   return divide(multiply(decimalFraction(wanted), decimalFraction(threads)), decimalFraction(25.4));
 }

@@ -2,7 +2,8 @@ import { trainProduct } from '@/lib/kinematics/train/ratio';
 import type { DriverAndDriven } from '@/lib/kinematics/train/ratio';
 import { fraction, multiply, toNumber } from '@/lib/numeric/fraction';
 import type { Fraction } from '@/lib/numeric/fraction';
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** The beat of a clock and the pendulum that keeps it. */
 export interface ClockBeats {
@@ -43,7 +44,7 @@ export function clockBeats(pairs: readonly DriverAndDriven[], escapeTeeth: numbe
  * @example pendulumForBeat(1) // → 993.621385566
  */
 export function pendulumForBeat(beat: number): number {
-  return standardFall * (requirePositive('pendulumForBeat', 'beat', beat) / Math.PI) ** 2;
+  return standardFall * (requireSize('pendulumForBeat', 'beat', beat) / Math.PI) ** 2;
 }
 
 /**
@@ -53,5 +54,5 @@ export function pendulumForBeat(beat: number): number {
  * @example beatOfPendulum(993.621385566) // → 1
  */
 export function beatOfPendulum(length: number): number {
-  return Math.PI * Math.sqrt(requirePositive('beatOfPendulum', 'length', length) / standardFall);
+  return Math.PI * Math.sqrt(requireSize('beatOfPendulum', 'length', length) / standardFall);
 }

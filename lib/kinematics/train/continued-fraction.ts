@@ -7,7 +7,8 @@ import {
   decimalFraction,
 } from '@/lib/numeric/fraction';
 import type { Fraction } from '@/lib/numeric/fraction';
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** The whole parts of a ratio, and the fraction at each rung. */
 export interface ContinuedFraction {
@@ -53,8 +54,8 @@ export function continuedFraction(value: Fraction, terms: number): ContinuedFrac
  * @example rungWithin(2.66666666667, 1e-9) // → { numerator: 8n, denominator: 3n }
  */
 export function rungWithin(value: number, tolerance: number): Fraction {
-  requirePositive('rungWithin', 'value', value);
-  requirePositive('rungWithin', 'tolerance', tolerance);
+  requireSize('rungWithin', 'value', value);
+  requireSize('rungWithin', 'tolerance', tolerance);
   const exact = decimalFraction(value);
   const { rungs } = continuedFraction(exact, 10_000);
   return rungs.find((rung) => Math.abs(toNumber(rung) / value - 1) <= tolerance) ?? exact;
@@ -70,8 +71,9 @@ export function rungWithin(value: number, tolerance: number): Fraction {
  * @example driftOf(59 / 57, 1.03505, 1440) // → 0.0524765
  */
 export function driftOf(reached: number, wanted: number, time: number): number {
-  requirePositive('driftOf', 'reached', reached);
-  requirePositive('driftOf', 'wanted', wanted);
+  requireSize('driftOf', 'reached', reached);
+  requireSize('driftOf', 'wanted', wanted);
+  requireMeasure('driftOf', 'time', time);
   return time * ((reached - wanted) / wanted);
 }
 

@@ -1,5 +1,6 @@
 import { add, divide, fraction, isZero, multiply, subtract } from '@/lib/numeric/fraction';
 import type { Fraction } from '@/lib/numeric/fraction';
+import { itemAt } from '@/lib/numeric/item-at';
 import { requireCount } from '@/lib/numeric/require';
 
 /** Two wheels in mesh, each named by the body that it is fast on. */
@@ -73,7 +74,7 @@ export function analyseTrain(train: Train): TrainAnalysis {
   const free: string[] = [];
   bodies.forEach((body, column) => {
     const row = reduced.find(
-      ({ cells }) => !isZero(cells[column] ?? nought) && settles(cells, column),
+      ({ cells }) => !isZero(itemAt(cells, column)) && settles(cells, column),
     );
     if (row) shares.set(body, row.drives);
     else free.push(body);
@@ -145,15 +146,14 @@ function reduce(rows: readonly Row[], columns: number): readonly Row[] {
   let done = 0;
   for (let column = 0; column < columns; column += 1) {
     const found = work.findIndex(
-      ({ cells }, index) => index >= done && !isZero(cells[column] ?? nought),
+      ({ cells }, index) => index >= done && !isZero(itemAt(cells, column)),
     );
-    const pivotRow = work[found];
-    const displaced = work[done];
-    if (!pivotRow || !displaced) continue;
-    work[found] = displaced;
-    const pivot = scaled(pivotRow, divide(one, pivotRow.cells[column] ?? one));
+    if (found < 0) continue;
+    const pivotRow = itemAt(work, found);
+    work[found] = itemAt(work, done);
+    const pivot = scaled(pivotRow, divide(one, itemAt(pivotRow.cells, column)));
     work.forEach((row, index) => {
-      const factor = row.cells[column] ?? nought;
+      const factor = itemAt(row.cells, column);
       if (index !== done && !isZero(factor)) work[index] = less(row, scaled(pivot, factor));
     });
     work[done] = pivot;
@@ -171,7 +171,7 @@ function scaled(row: Row, factor: Fraction): Row {
 
 function less(row: Row, other: Row): Row {
   return {
-    cells: row.cells.map((cell, index) => subtract(cell, other.cells[index] ?? nought)),
-    drives: row.drives.map((cell, index) => subtract(cell, other.drives[index] ?? nought)),
+    cells: row.cells.map((cell, index) => subtract(cell, itemAt(other.cells, index))),
+    drives: row.drives.map((cell, index) => subtract(cell, itemAt(other.drives, index))),
   };
 }

@@ -2,7 +2,9 @@ import type { Point } from '@/lib/geometry/point';
 import { meshState } from '@/lib/kinematics/gear/mesh';
 import type { MeshState } from '@/lib/kinematics/gear/mesh';
 import type { Train, TrainMesh } from '@/lib/kinematics/train/graph';
-import { requireFinite } from '@/lib/numeric/require';
+import { itemAt } from '@/lib/numeric/item-at';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** A wheel on an arbor. */
 export interface ArborWheel {
@@ -42,8 +44,8 @@ export interface WheelPair {
  * @example bodyOf([{ x: 0, y: 0, wheels: [{ module: 4, teeth: 20 }] }], { arbor: 0, wheel: 0 }) // → 'arbor 1'
  */
 export function bodyOf(arbors: readonly Arbor[], place: WheelPlace): string {
-  const arbor = arbors[place.arbor];
-  const alone = (arbor?.fast ?? true) || (arbor?.wheels.length ?? 0) < 2;
+  const { fast, wheels } = itemAt(arbors, place.arbor);
+  const alone = (fast ?? true) || wheels.length < 2;
   const name = `arbor ${place.arbor + 1}`;
   return alone ? name : `${name}, wheel ${place.wheel + 1}`;
 }
@@ -81,9 +83,9 @@ export function trainOfLayout(arbors: readonly Arbor[], tolerance?: number): Tra
     .filter(({ state }) => state.outcome === 'meshes')
     .map(({ first, second }): TrainMesh => ({
       first: bodyOf(arbors, first),
-      firstTeeth: wheelAt(arbors, first)?.teeth ?? 0,
+      firstTeeth: wheelAt(arbors, first).teeth,
       second: bodyOf(arbors, second),
-      secondTeeth: wheelAt(arbors, second)?.teeth ?? 0,
+      secondTeeth: wheelAt(arbors, second).teeth,
     }));
   return {
     meshes,
@@ -96,8 +98,8 @@ function placesOf(arbors: readonly Arbor[]): readonly WheelPlace[] {
   return arbors.flatMap(({ wheels }, arbor) => wheels.map((_, wheel) => ({ arbor, wheel })));
 }
 
-function wheelAt(arbors: readonly Arbor[], place: WheelPlace): ArborWheel | undefined {
-  return arbors[place.arbor]?.wheels[place.wheel];
+function wheelAt(arbors: readonly Arbor[], place: WheelPlace): ArborWheel {
+  return itemAt(itemAt(arbors, place.arbor).wheels, place.wheel);
 }
 
 function pairState(
@@ -107,22 +109,17 @@ function pairState(
   tolerance?: number,
 ): PairState | null {
   const [a, b] = [wheelAt(arbors, first), wheelAt(arbors, second)];
-  const [from, to] = [arbors[first.arbor], arbors[second.arbor]];
-  if (!a || !b || !from || !to || (a.layer ?? 0) !== (b.layer ?? 0)) return null;
-  const distance = requireFinite(
-    'wheelPairs',
-    'distance',
-    Math.hypot(to.x - from.x, to.y - from.y),
-  );
+  const [from, to] = [itemAt(arbors, first.arbor), itemAt(arbors, second.arbor)];
+  if ((a.layer ?? 0) !== (b.layer ?? 0)) return null;
+  const distance = requireSize('wheelPairs', 'distance', Math.hypot(to.x - from.x, to.y - from.y));
   if (a.module !== b.module) {
-    return {
-      outcome: 'unlike-modules',
-      gap: distance - (a.module * a.teeth + b.module * b.teeth) / 2,
-    };
+    return { outcome: 'unlike-modules', gap: distance - pitchRadius(a) - pitchRadius(b) };
   }
-  return meshState(
-    { module: a.module, firstTeeth: a.teeth, secondTeeth: b.teeth },
-    distance,
-    tolerance,
-  );
+  const mesh = { module: a.module, firstTeeth: a.teeth, secondTeeth: b.teeth };
+  return meshState(mesh, distance, tolerance);
+}
+
+function pitchRadius({ module: size, teeth }: ArborWheel): number {
+  requireSize('wheelPairs', 'module', size);
+  return (size * requireCount('wheelPairs', 'teeth', teeth)) / 2;
 }

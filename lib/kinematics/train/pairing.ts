@@ -1,3 +1,4 @@
+import { itemAt } from '@/lib/numeric/item-at';
 import type { DriverAndDriven } from '@/lib/kinematics/train/ratio';
 
 /**
@@ -16,6 +17,6 @@ export function pairedWithin(
 ): readonly DriverAndDriven[] | null {
   const falling = drivers.toSorted((a, b) => b - a);
   const rising = driven.toSorted((a, b) => a - b);
-  const pairs = falling.map((driver, index): DriverAndDriven => [driver, rising[index] ?? driver]);
+  const pairs = falling.map((driver, index): DriverAndDriven => [driver, itemAt(rising, index)]);
   return pairs.every(([driver, other]) => driver + other <= mostTeeth) ? pairs : null;
 }

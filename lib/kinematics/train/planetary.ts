@@ -1,13 +1,9 @@
+import { itemAt } from '@/lib/numeric/item-at';
 import { planetaryMeshes, ringTeeth } from '@/lib/kinematics/train/epicyclic';
 import { analyseTrain } from '@/lib/kinematics/train/graph';
-import { fraction } from '@/lib/numeric/fraction';
 import type { Fraction } from '@/lib/numeric/fraction';
-import {
-  requireCount,
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-} from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** The three members of a planetary train that can be held, driven or taken from. */
 export type PlanetaryMember = 'sun' | 'ring' | 'carrier';
@@ -29,7 +25,6 @@ export interface PlanetaryTorques {
 }
 
 const members: readonly PlanetaryMember[] = ['sun', 'ring', 'carrier'];
-const nought = fraction(0);
 
 /**
  * What a planetary train does with one member held and another driven, in exact fractions.
@@ -57,7 +52,7 @@ export function planetaryDrive(train: {
     held: [train.held],
     driven: [train.driven],
   });
-  const turnsOf = (body: string): Fraction => shares.get(body)?.[0] ?? nought;
+  const turnsOf = (body: string): Fraction => itemAt(shares.get(body) ?? [], 0);
   return {
     ringTeeth: ringTeeth(sun, planet),
     output,
@@ -86,7 +81,7 @@ export function planetaryTorques(
 ): PlanetaryTorques {
   const sun = requireCount('planetaryTorques', 'sunTeeth', sunTeeth);
   const planet = requireCount('planetaryTorques', 'planetTeeth', planetTeeth);
-  const torque = requireFinite('planetaryTorques', 'sunTorque', sunTorque);
+  const torque = requireMeasure('planetaryTorques', 'sunTorque', sunTorque);
   const ring = (torque * ringTeeth(sun, planet)) / sun;
   return { sun: torque, ring, carrier: -torque - ring };
 }
@@ -105,7 +100,7 @@ export function planetaryFor(
   sunTeeth: number,
 ): { readonly ring: number; readonly planet: number; readonly whole: boolean } {
   const sun = requireCount('planetaryFor', 'sunTeeth', sunTeeth);
-  requirePositive('planetaryFor', 'reduction over 2', reduction - 2);
+  requireSize('planetaryFor', 'reduction over 2', reduction - 2);
   const [ring, planet] = [sun * (reduction - 1), (sun * (reduction - 2)) / 2];
   return { ring, planet, whole: Number.isInteger(ring) && Number.isInteger(planet) };
 }
@@ -123,8 +118,8 @@ export function ovalOfPen(
   wheelRadius: number,
   penRadius: number,
 ): { readonly long: number; readonly short: number } {
-  const r = requirePositive('ovalOfPen', 'wheelRadius', wheelRadius);
-  const q = requireNonNegative('ovalOfPen', 'penRadius', penRadius);
+  const r = requireSize('ovalOfPen', 'wheelRadius', wheelRadius);
+  const q = requireSizeOrNought('ovalOfPen', 'penRadius', penRadius);
   return { long: r + q, short: Math.abs(r - q) };
 }
 
@@ -143,9 +138,9 @@ export function cartWheels(
   track: number,
   curveRadius: number,
 ): { readonly outer: number; readonly inner: number } {
-  requireFinite('cartWheels', 'turns', turns);
-  const half = requirePositive('cartWheels', 'track', track) / 2;
-  requireNonNegative('cartWheels', 'curveRadius over half the track', curveRadius - half);
+  requireMeasure('cartWheels', 'turns', turns);
+  const half = requireSize('cartWheels', 'track', track) / 2;
+  requireSizeOrNought('cartWheels', 'curveRadius over half the track', curveRadius - half);
   const share = half / curveRadius;
   return { outer: turns * (1 + share), inner: turns * (1 - share) };
 }

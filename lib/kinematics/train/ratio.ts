@@ -1,6 +1,8 @@
+import { itemAt } from '@/lib/numeric/item-at';
 import { fraction, multiply, toNumber } from '@/lib/numeric/fraction';
 import type { Fraction } from '@/lib/numeric/fraction';
-import { requireCount, requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** A wheel that drives and the wheel that it drives, by their tooth counts. */
 export type DriverAndDriven = readonly [driver: number, driven: number];
@@ -43,7 +45,7 @@ export function simpleTrain(teeth: readonly number[]): TrainRatio {
   requireCount('simpleTrain', 'number of wheels', teeth.length, 2);
   return compoundRatio(
     'simpleTrain',
-    teeth.slice(1).map((driven, index) => [teeth[index] ?? driven, driven] as const),
+    teeth.slice(1).map((driven, index) => [itemAt(teeth, index), driven] as const),
   );
 }
 
@@ -74,7 +76,7 @@ export function trainProduct(pairs: readonly DriverAndDriven[]): Fraction {
  * @example arborTurns([[12, 36], [10, 40]], 12) // → [12, -4, 1]
  */
 export function arborTurns(pairs: readonly DriverAndDriven[], turns: number): readonly number[] {
-  requireFinite('arborTurns', 'turns', turns);
+  requireMeasure('arborTurns', 'turns', turns);
   return [
     turns,
     ...pairs.map(
@@ -98,10 +100,10 @@ export function idlerBetween(row: {
   readonly distance: number;
 }): Idler {
   const caller = 'idlerBetween';
-  const size = requirePositive(caller, 'module', row.module);
+  const size = requireSize(caller, 'module', row.module);
   const ends =
     (requireCount(caller, 'first', row.first) + requireCount(caller, 'last', row.last)) / 2;
-  const exact = requirePositive(caller, 'distance', row.distance) / size - ends;
+  const exact = requireSize(caller, 'distance', row.distance) / size - ends;
   if (exact <= 0) return { outcome: 'no-room', overlap: -exact * size };
   const teeth = Math.round(exact);
   if (teeth > 0 && Math.abs(exact - teeth) <= wholeTolerance) {

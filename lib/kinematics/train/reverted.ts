@@ -1,7 +1,8 @@
 import { rungWithin } from '@/lib/kinematics/train/continued-fraction';
 import { fraction, greatestCommonDivisor, multiply } from '@/lib/numeric/fraction';
 import type { Fraction } from '@/lib/numeric/fraction';
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** Two pairs whose first and last arbor stand in one line. */
 export interface RevertedTeeth {
@@ -53,12 +54,9 @@ export function revertedTeeth(
   secondStage: number,
   fewest: number,
 ): RevertedTeeth {
-  const first = rungWithin(
-    requirePositive('revertedTeeth', 'firstStage', firstStage),
-    ratioTolerance,
-  );
+  const first = rungWithin(requireSize('revertedTeeth', 'firstStage', firstStage), ratioTolerance);
   const second = rungWithin(
-    requirePositive('revertedTeeth', 'secondStage', secondStage),
+    requireSize('revertedTeeth', 'secondStage', secondStage),
     ratioTolerance,
   );
   const least = BigInt(requireCount('revertedTeeth', 'fewest', fewest));
@@ -94,8 +92,8 @@ export function closingWheel(train: {
   readonly secondPinion: number;
 }): ClosingWheel {
   const caller = 'closingWheel';
-  const firstModule = requirePositive(caller, 'firstModule', train.firstModule);
-  const secondModule = requirePositive(caller, 'secondModule', train.secondModule);
+  const firstModule = requireSize(caller, 'firstModule', train.firstModule);
+  const secondModule = requireSize(caller, 'secondModule', train.secondModule);
   const first = requireCount(caller, 'firstPinion', train.firstPinion);
   const second = requireCount(caller, 'firstWheel', train.firstWheel);
   const third = requireCount(caller, 'secondPinion', train.secondPinion);

@@ -1,10 +1,12 @@
+import { itemAt } from '@/lib/numeric/item-at';
 import { trainProduct } from '@/lib/kinematics/train/ratio';
 import type { DriverAndDriven } from '@/lib/kinematics/train/ratio';
 import { pairedWithin } from '@/lib/kinematics/train/pairing';
 import { areApart, firstFrom, gatherWheelSets } from '@/lib/kinematics/train/wheel-sets';
 import type { WheelSet } from '@/lib/kinematics/train/wheel-sets';
 import type { Fraction } from '@/lib/numeric/fraction';
-import { requireCount, requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireCount } from '@/lib/numeric/require';
 
 /** What is wanted of a train, and what there is to make it of. */
 export interface WheelSearch {
@@ -46,6 +48,8 @@ export interface SearchProgress {
 
 /** Denominators tried between two pauses of a search that can be resumed: a few milliseconds. */
 const portion = 400;
+/** Wider than any board. */
+const anyWidth = 1e60;
 
 /**
  * The train of one, two or three stages that comes nearest to a ratio.
@@ -85,9 +89,8 @@ export function* searchInPortions(
   }
   const sets = gathered.value;
   let best: Candidate | null = null;
-  for (let index = 0; index < sets.length; index += 1) {
-    const driven = sets[index];
-    if (driven) best = nearer(wanted, sets, driven, best);
+  for (const [index, driven] of sets.entries()) {
+    best = nearer(wanted, sets, driven, best);
     if (index % portion === portion - 1) yield { done: (index + 1) / sets.length };
   }
   return best ? found(wanted, best) : { outcome: 'all-too-wide' };
@@ -114,13 +117,13 @@ interface Candidate {
 
 function complete(search: WheelSearch): Required<WheelSearch> {
   return {
-    ratio: requirePositive('nearestTrain', 'ratio', search.ratio),
+    ratio: requireSize('nearestTrain', 'ratio', search.ratio),
     wheels: search.wheels
       .map((teeth) => requireCount('nearestTrain', 'wheels', teeth))
       .toSorted((a, b) => a - b),
     reuse: search.reuse ?? false,
-    module: requirePositive('nearestTrain', 'module', search.module ?? 1),
-    widest: requirePositive('nearestTrain', 'widest', search.widest ?? Number.MAX_VALUE),
+    module: requireSize('nearestTrain', 'module', search.module ?? 1),
+    widest: requireSize('nearestTrain', 'widest', search.widest ?? anyWidth),
   };
 }
 
@@ -155,11 +158,11 @@ function nearer(
 
 function fits(search: Required<WheelSearch>, drivers: WheelSet, driven: WheelSet): boolean {
   if (!search.reuse && !areApart(drivers, driven)) return false;
-  return search.widest === Number.MAX_VALUE || pairing(search, drivers, driven) !== null;
+  return search.widest === anyWidth || pairing(search, drivers, driven) !== null;
 }
 
 function pairing(search: Required<WheelSearch>, drivers: WheelSet, driven: WheelSet) {
-  const counts = (set: WheelSet) => set.places.map((place) => search.wheels[place] ?? 1);
+  const counts = (set: WheelSet) => set.places.map((place) => itemAt(search.wheels, place));
   return pairedWithin(counts(drivers), counts(driven), (2 * search.widest) / search.module);
 }
 

@@ -1,7 +1,9 @@
 import { analyseTrain } from '@/lib/kinematics/train/graph';
 import type { Shares, Train, TrainAnalysis, TrainMesh } from '@/lib/kinematics/train/graph';
+import { finiteResult } from '@/lib/numeric/finite-result';
 import { isZero, toNumber } from '@/lib/numeric/fraction';
-import { requireFinite } from '@/lib/numeric/require';
+import { itemAt } from '@/lib/numeric/item-at';
+import { requireMeasure } from '@/lib/numeric/moderate';
 
 /** What becomes of a train when its drives are turned. */
 export type TrainTurns =
@@ -35,7 +37,7 @@ const driveTolerance = 1e-12;
  */
 export function turnsOfTrain(train: Train, drives: Readonly<Record<string, number>>): TrainTurns {
   const values = train.driven.map((body) =>
-    requireFinite('turnsOfTrain', `drive of ${body}`, drives[body] ?? Number.NaN),
+    requireMeasure('turnsOfTrain', `drive of ${body}`, drives[body] ?? Number.NaN),
   );
   return turnsOfAnalysis(analyseTrain(train), values);
 }
@@ -63,7 +65,7 @@ export function turnsOfMeshes(
  * @example turnsOfAnalysis({ bodies: [], shares: new Map(), free: [], freedom: 0, demands: [] }, []).outcome // → 'turns'
  */
 export function turnsOfAnalysis(analysis: TrainAnalysis, values: readonly number[]): TrainTurns {
-  values.forEach((value) => requireFinite('turnsOfAnalysis', 'value', value));
+  values.forEach((value) => requireMeasure('turnsOfAnalysis', 'value', value));
   const excess = Math.max(0, ...analysis.demands.map((demand) => excessOf(demand, values)));
   if (excess > 0) return { outcome: 'locked', excess };
   const turns = new Map<string, number>();
@@ -73,15 +75,17 @@ export function turnsOfAnalysis(analysis: TrainAnalysis, values: readonly number
 }
 
 function weighted(shares: Shares, values: readonly number[]): number {
-  return shares.reduce(
-    (sum, share, drive) => (isZero(share) ? sum : sum + toNumber(share) * (values[drive] ?? 0)),
+  const sum = shares.reduce(
+    (turns, share, drive) =>
+      isZero(share) ? turns : turns + toNumber(share) * itemAt(values, drive),
     0,
   );
+  return finiteResult('turnsOfTrain', sum);
 }
 
 function excessOf(demand: Shares, values: readonly number[]): number {
   const size = demand.reduce(
-    (sum, share, drive) => sum + Math.abs(toNumber(share) * (values[drive] ?? 0)),
+    (sum, share, drive) => sum + Math.abs(toNumber(share) * itemAt(values, drive)),
     0,
   );
   const excess = Math.abs(weighted(demand, values));

@@ -1,3 +1,5 @@
+import { itemAt } from '@/lib/numeric/item-at';
+
 /** One or more wheels of a stock taken together, and their counts multiplied. */
 export interface WheelSet {
   readonly product: number;
@@ -42,14 +44,14 @@ export function* gatherWheelSets(
   let places: readonly number[] | null = Array.from({ length: size }, (_, k) => (reuse ? 0 : k));
   for (let gathered = 1; places; gathered += 1) {
     const set = setOf(stock, places);
-    const drawer = drawers.get(set.product);
-    if (drawer) drawer.push(set);
-    else drawers.set(set.product, [set]);
+    const drawer = drawers.get(set.product) ?? [];
+    drawers.set(set.product, drawer);
+    drawer.push(set);
     places = following(places, stock.length, reuse);
     if (gathered % portion === 0) yield gathered;
   }
-  const products = Float64Array.from(drawers.keys()).sort();
-  return Array.from(products, (product) => drawers.get(product) ?? []).flat();
+  const order = Float64Array.from(drawers.keys()).sort();
+  return Array.from(order).flatMap((product) => drawers.get(product) ?? []);
 }
 
 /**
@@ -61,7 +63,7 @@ export function firstFrom(sets: readonly WheelSet[], product: number): number {
   let [low, high] = [0, sets.length];
   while (low < high) {
     const middle = (low + high) >>> 1;
-    if ((sets[middle]?.product ?? 0) < product) low = middle + 1;
+    if (itemAt(sets, middle).product < product) low = middle + 1;
     else high = middle;
   }
   return low;
@@ -79,8 +81,8 @@ export function areApart(a: WheelSet, b: WheelSet): boolean {
 function setOf(stock: readonly number[], places: readonly number[]): WheelSet {
   let [product, teeth] = [1, 0];
   for (const place of places) {
-    product *= stock[place] ?? 1;
-    teeth += stock[place] ?? 0;
+    product *= itemAt(stock, place);
+    teeth += itemAt(stock, place);
   }
   return { product, places, teeth };
 }
@@ -93,7 +95,7 @@ function following(
 ): readonly number[] | null {
   const step = reuse ? 0 : 1;
   for (let k = places.length - 1; k >= 0; k -= 1) {
-    const next = (places[k] ?? 0) + 1;
+    const next = itemAt(places, k) + 1;
     if (next + (places.length - 1 - k) * step < stock) {
       return places.map((place, index) => (index < k ? place : next + (index - k) * step));
     }
