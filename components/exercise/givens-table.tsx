@@ -12,7 +12,7 @@ export function GivensTable({
       {givens.map((given) => (
         <div
           key={`${given.symbol} ${given.label}`}
-          className="min-w-36 flex-1 basis-36 border-r border-b border-rule bg-paper px-3 py-2"
+          className="min-w-32 flex-1 basis-32 border-r border-b border-rule bg-paper px-3 py-2"
         >
           <dt className="text-[0.9375rem] text-pencil">
             {given.label}
