@@ -1,6 +1,14 @@
 import { LENGTH_TOLERANCE } from '@/lib/numeric/tolerance';
 import { requireNonNegative } from '@/lib/numeric/require';
-import { cross, distance, dot, perpendicular, subtract, type Point } from '@/lib/geometry/point';
+import {
+  add,
+  cross,
+  distance,
+  dot,
+  perpendicular,
+  subtract,
+  type Point,
+} from '@/lib/geometry/point';
 
 export interface Circle {
   readonly centre: Point;
@@ -42,12 +50,10 @@ export function intersectCircles(first: Circle, second: Circle): CirclesOutcome 
   const squared = (r1 + r2 - d) * (d - (r1 - r2)) * (d + (r1 - r2)) * (r1 + r2 + d);
   const along = subtract(second.centre, first.centre);
   const up = Math.sqrt(Math.max(squared, 0)) / (2 * d * d);
-  const at = (side: number): Point => ({
-    x: first.centre.x + share * along.x - side * up * along.y,
-    y: first.centre.y + share * along.y + side * up * along.x,
-  });
-  if (squared <= 0) return { outcome: 'touch', at: at(0) };
-  return { outcome: 'meet', left: at(1), right: at(-1) };
+  const foot = { x: first.centre.x + share * along.x, y: first.centre.y + share * along.y };
+  if (squared <= 0) return { outcome: 'touch', at: foot };
+  const across = { x: -up * along.y, y: up * along.x };
+  return { outcome: 'meet', left: add(foot, across), right: subtract(foot, across) };
 }
 
 /** How a line and a circle meet. */

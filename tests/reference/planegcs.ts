@@ -46,7 +46,11 @@ export function oraclePoints(
   );
 }
 
-function conditions(linkage: Linkage, drive: readonly number[]): readonly SketchPrimitive[] {
+/** What holds a linkage, as the oracle's constraints; a drive may be the name of a parameter. */
+export function conditions(
+  linkage: Linkage,
+  drive: readonly (number | string)[],
+): readonly SketchPrimitive[] {
   const found: SketchPrimitive[] = [];
   const name = () => `condition ${found.length}`;
   const apart = (p: string, q: string, distance: number) =>

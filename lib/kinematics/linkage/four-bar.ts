@@ -43,24 +43,31 @@ export function fourBarPosition(bars: FourBarLengths, crankAngle: number): FourB
   const A = polar(crank, crankAngle);
   const O4 = { x: frame, y: 0 };
   const found = intersectCircles({ centre: A, radius: coupler }, { centre: O4, radius: rocker });
-  const pose = (B: Point): FourBarPose => ({
-    A,
-    B,
-    couplerAngle: direction(subtract(B, A)),
-    rockerAngle: direction(subtract(B, O4)),
-  });
   switch (found.outcome) {
     case 'meet':
-      return { outcome: 'closes', open: pose(found.left), crossed: pose(found.right) };
+      return {
+        outcome: 'closes',
+        open: poseOf(A, found.left, O4),
+        crossed: poseOf(A, found.right, O4),
+      };
     case 'touch':
-      return { outcome: 'closes', open: pose(found.at), crossed: pose(found.at) };
+      return { outcome: 'closes', open: poseOf(A, found.at, O4), crossed: poseOf(A, found.at, O4) };
     case 'same': {
-      const folded = pose(polar(rocker, crankAngle, O4));
+      const folded = poseOf(A, polar(rocker, crankAngle, O4), O4);
       return { outcome: 'closes', open: folded, crossed: folded };
     }
     default:
       return { outcome: 'does-not-close', by: found.gap };
   }
+}
+
+function poseOf(A: Point, B: Point, O4: Point): FourBarPose {
+  return {
+    A,
+    B,
+    couplerAngle: direction(subtract(B, A)),
+    rockerAngle: direction(subtract(B, O4)),
+  };
 }
 
 export type AssemblyOutcome =

@@ -24,7 +24,7 @@ function side(method: Method, pose: Float64Array): number {
     method.kind === 'shift' && method.first.kind === 'slide' && method.second.kind === 'distance';
   const [dx, dy] = method.kind === 'shift' ? way(pose, method.q, method.p) : [0, 0];
   const q = method.kind === 'shift' ? method.q : method.p;
-  layLocus(method.first, method.p, pose, scratch, swapped ? 4 : 0, 0, 0);
+  layLocus(method.first, method.p, pose, scratch, swapped ? 4 : 0);
   layLocus(method.second, q, pose, scratch, swapped ? 0 : 4, dx, dy);
   const circles = method.first.kind === 'distance' && method.second.kind === 'distance';
   const x = at(pose, 2 * method.p) - at(scratch, 0);

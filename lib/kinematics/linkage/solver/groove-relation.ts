@@ -1,4 +1,5 @@
 import { at } from '@/lib/numeric/at';
+import { lengthOf } from '@/lib/numeric/length';
 import {
   addRight,
   gap,
@@ -21,7 +22,7 @@ export function writeGroove(
   const { pose, velocity } = motion;
   const gx = gap(pose, 0, from, to);
   const gy = gap(pose, 1, from, to);
-  const long = Math.hypot(gx, gy);
+  const long = lengthOf(gx, gy);
   const ux = long > 0 ? gx / long : 1;
   const uy = long > 0 ? gy / long : 0;
   const x = gap(pose, 0, through, p);

@@ -1,6 +1,6 @@
 import { at } from '@/lib/numeric/at';
 import { TURN } from '@/lib/geometry/angle';
-import { runSteps } from '@/lib/kinematics/linkage/solver/place';
+import { runSteps, slackOf } from '@/lib/kinematics/linkage/solver/place';
 import type { Plan } from '@/lib/kinematics/linkage/solver/plan';
 import { driveOf } from '@/lib/kinematics/linkage/solver/rank';
 import { branchOf } from '@/lib/kinematics/linkage/solver/solver';
@@ -42,7 +42,8 @@ export function driveLimits(
   const pose = plan.model.start.slice();
   const slack = (value: number) => {
     numbers[moved] = value;
-    return runSteps(plan, numbers, { branch, expected: undefined }, pose);
+    runSteps(plan, numbers, { branch, expected: undefined }, pose);
+    return slackOf(plan);
   };
   const here = slack(start);
   if (here < 0) return { outcome: 'does-not-close', by: -here };

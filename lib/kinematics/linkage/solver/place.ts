@@ -3,7 +3,7 @@ import { solveLinear } from '@/lib/numeric/linear';
 import type { Plan, Step } from '@/lib/kinematics/linkage/solver/plan';
 import type { Motion } from '@/lib/kinematics/linkage/solver/block';
 import { writeRelation } from '@/lib/kinematics/linkage/solver/relations';
-import { takeStep, type Choice } from '@/lib/kinematics/linkage/solver/steps';
+import { SLACK, takeStep, type Choice } from '@/lib/kinematics/linkage/solver/steps';
 
 /**
  * Share of the linkage's size by which a dyad may fail to meet and still count as meeting: what
@@ -17,9 +17,9 @@ const STEP_TOLERANCE = 1e-14;
 const NEWTON_TURNS = 40;
 
 /**
- * Settle every point in `pose` for a drive. Gives the least slack of all steps: how far the
- * tightest dyad is from its limit, negative by as much as it does not close. `report`, if given,
- * takes the number of the step that failed first, or −1.
+ * Settle every point in `pose` for a drive. `slackOf` then tells the least slack of all steps: how
+ * far the tightest dyad is from its limit, negative by as much as it does not close. `report`, if
+ * given, takes the number of the step that failed first, or −1.
  */
 export function runSteps(
   plan: Plan,
@@ -27,7 +27,7 @@ export function runSteps(
   choice: Choice,
   pose: Float64Array,
   report?: Int32Array,
-): number {
+): void {
   const { model, steps, scratch } = plan;
   for (let k = 0; k < model.leads.length; k += 1) {
     const lead = model.leads[k];
@@ -42,10 +42,9 @@ export function runSteps(
     const step = steps[k];
     if (!step) continue;
     const { method } = step;
-    const slack =
-      method.kind === 'solve'
-        ? solveStep(plan, step, drive, pose)
-        : takeStep(method, k, pose, drive, choice, scratch);
+    if (method.kind === 'solve') solveStep(plan, step, drive, pose);
+    else takeStep(method, k, pose, drive, choice, scratch);
+    const slack = at(scratch, SLACK);
     if (failed < 0 && slack < least) least = slack;
     if (failed < 0 && slack < touch) failed = k;
   }
@@ -57,17 +56,25 @@ export function runSteps(
     }
   }
   if (report) report[0] = failed;
-  return failed < 0 && least < 0 ? 0 : least;
+  scratch[SLACK] = failed < 0 && least < 0 ? 0 : least;
+}
+
+/** The slack that the last `runSteps` of a plan left. */
+export function slackOf({ scratch }: Plan): number {
+  return at(scratch, SLACK);
 }
 
 /** Newton's iteration, with halved steps, on the relations of one step from the pose as it stands. */
-function solveStep(plan: Plan, step: Step, drive: ArrayLike<number>, pose: Float64Array): number {
+function solveStep(plan: Plan, step: Step, drive: ArrayLike<number>, pose: Float64Array): void {
   const { points, relations, block } = step;
+  const tolerance = CHECK_TOLERANCE * plan.model.size;
   const motion = still(plan, pose, drive);
   let error = writeAll(step, motion);
   for (let turn = 0; turn < NEWTON_TURNS; turn += 1) {
-    if (solveLinear(block.matrix, block.right, 2 * points.length) === 0)
-      return -Math.max(error, plan.model.size * CHECK_TOLERANCE);
+    if (solveLinear(block.matrix, block.right, 2 * points.length) === 0) {
+      plan.scratch[SLACK] = -Math.max(error, tolerance);
+      return;
+    }
     const moved = movePoints(step, pose, 1);
     let share = 1;
     let next = writeError(plan, step, motion);
@@ -80,9 +87,7 @@ function solveStep(plan: Plan, step: Step, drive: ArrayLike<number>, pose: Float
     if (moved <= STEP_TOLERANCE * plan.model.size || error === 0) break;
     error = writeAll(step, motion);
   }
-  return error <= CHECK_TOLERANCE * plan.model.size && relations.length > 0
-    ? Number.MAX_VALUE
-    : -error;
+  plan.scratch[SLACK] = error <= tolerance && relations.length > 0 ? Number.MAX_VALUE : -error;
 }
 
 /** Fill the step's block for Newton; gives the largest error. */

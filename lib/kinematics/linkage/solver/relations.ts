@@ -1,4 +1,5 @@
 import { at } from '@/lib/numeric/at';
+import { lengthOf } from '@/lib/numeric/length';
 import {
   addRight,
   gap,
@@ -51,7 +52,7 @@ function writeDistance(
 ): number {
   const x = gap(motion.pose, 0, q, p);
   const y = gap(motion.pose, 1, q, p);
-  const long = Math.hypot(x, y);
+  const long = lengthOf(x, y);
   const ux = long > 0 ? x / long : 1;
   const uy = long > 0 ? y / long : 0;
   put(block, motion, order, row, p, ux, uy);

@@ -2,7 +2,7 @@ import { at } from '@/lib/numeric/at';
 import { requireFinite } from '@/lib/numeric/require';
 import type { Point } from '@/lib/geometry/point';
 import { branchIn } from '@/lib/kinematics/linkage/solver/branch';
-import { runRates, runSteps } from '@/lib/kinematics/linkage/solver/place';
+import { runRates, runSteps, slackOf } from '@/lib/kinematics/linkage/solver/place';
 import type { Plan } from '@/lib/kinematics/linkage/solver/plan';
 
 export type { Bar, Driver, Linkage, Plate, Slide } from '@/lib/kinematics/linkage/solver/linkage';
@@ -58,8 +58,8 @@ export function placeLinkage(
   pose: Float64Array,
 ): number {
   requireDrive('placeLinkage', plan, drive);
-  const slack = runSteps(plan, drive, chosen(plan, branch, undefined), pose);
-  return slack < 0 ? -slack : 0;
+  runSteps(plan, drive, chosen(plan, branch, undefined), pose);
+  return Math.max(-slackOf(plan), 0);
 }
 
 /**
@@ -76,14 +76,13 @@ export function carryOnLinkage(
 ): number {
   requireDrive('carryOnLinkage', plan, drive);
   for (let k = 0; k < pose.length; k += 1) pose[k] = 2 * at(now, k) - at(before, k);
-  const expected = plan.expected;
-  expected.set(pose);
+  plan.expected.set(pose);
   for (const p of plan.model.fixed) {
     pose[2 * p] = at(now, 2 * p);
     pose[2 * p + 1] = at(now, 2 * p + 1);
   }
-  const slack = runSteps(plan, drive, chosen(plan, branch, expected), pose);
-  return slack < 0 ? -slack : 0;
+  runSteps(plan, drive, chosen(plan, branch, plan.expected), pose);
+  return Math.max(-slackOf(plan), 0);
 }
 
 /**
@@ -100,7 +99,8 @@ export function solveLinkage(
   requireDrive('solveLinkage', plan, drive);
   const pose = Float64Array.from(from);
   const report = new Int32Array(1);
-  const slack = runSteps(plan, drive, { branch, expected: undefined }, pose, report);
+  runSteps(plan, drive, { branch, expected: undefined }, pose, report);
+  const slack = slackOf(plan);
   const points = named(plan, pose);
   if (slack >= 0) return { outcome: 'closes', points, slack };
   const step = plan.steps[at(report, 0)];
@@ -194,5 +194,7 @@ function requireDrive(caller: string, { model }: Plan, drive: ArrayLike<number>)
       `${caller}: drive has ${drive.length} numbers; expected ${model.driveLength}`,
     );
   }
-  for (let k = 0; k < drive.length; k += 1) requireFinite(caller, 'drive', at(drive, k));
+  for (let k = 0; k < drive.length; k += 1) {
+    if (!Number.isFinite(at(drive, k))) requireFinite(caller, 'drive', at(drive, k));
+  }
 }

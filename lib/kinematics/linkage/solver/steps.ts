@@ -1,4 +1,5 @@
 import { at } from '@/lib/numeric/at';
+import { lengthOf } from '@/lib/numeric/length';
 import {
   layLocus,
   meetCircles,
@@ -7,11 +8,13 @@ import {
 } from '@/lib/kinematics/linkage/solver/loci';
 import type { Locus, Method } from '@/lib/kinematics/linkage/solver/plan';
 
-/** Where the parts of the scratch array lie: two loci and two meeting points. */
+/** Where the parts of the scratch array lie: two loci, two meeting points and the slack. */
 const FIRST = 0;
 const SECOND = 4;
 const FOUND = 8;
-export const SCRATCH_LENGTH = 12;
+/** Where a step leaves its slack: returned numbers would be allocated. */
+export const SLACK = FOUND + 4;
+export const SCRATCH_LENGTH = SLACK + 1;
 
 /** How one of two assemblies is chosen: the sign of step `k`, or what lies nearest to `expected`. */
 export interface Choice {
@@ -20,8 +23,9 @@ export interface Choice {
 }
 
 /**
- * Settle the points of one step in `pose`; gives its slack, negative by as much as it does not
- * close, and the largest number where nothing can fail. Branch 1 is left or ahead, −1 right or behind.
+ * Settle the points of one step in `pose`; `scratch[SLACK]` takes its slack, negative by as much as
+ * it does not close, the largest number where nothing can fail. Branch 1 is left or ahead, −1 right
+ * or behind.
  */
 export function takeStep(
   method: Exclude<Method, { kind: 'solve' }>,
@@ -30,7 +34,8 @@ export function takeStep(
   drive: ArrayLike<number>,
   choice: Choice,
   scratch: Float64Array,
-): number {
+): void {
+  scratch[SLACK] = Number.MAX_VALUE;
   switch (method.kind) {
     case 'meet':
       return takeMeet(method, k, pose, choice, scratch);
@@ -41,18 +46,18 @@ export function takeStep(
       const direction = at(drive, angle.drive) + angle.shift;
       pose[2 * p] = at(pose, 2 * angle.a) + distance.length * Math.cos(direction);
       pose[2 * p + 1] = at(pose, 2 * angle.a + 1) + distance.length * Math.sin(direction);
-      return Number.MAX_VALUE;
+      return;
     }
     case 'run': {
       const { slide, reach } = method;
-      layLocus(slide, slide.p, pose, scratch, FIRST, 0, 0);
+      layLocus(slide, slide.p, pose, scratch, FIRST);
       const along = at(drive, reach.drive);
       pose[2 * slide.p] = at(scratch, FIRST) + along * at(scratch, FIRST + 2);
       pose[2 * slide.p + 1] = at(scratch, FIRST + 1) + along * at(scratch, FIRST + 3);
-      return Number.MAX_VALUE;
+      return;
     }
     case 'aim':
-      return takeAim(method, k, pose, choice);
+      return takeAim(method, k, pose, choice, scratch);
     case 'shift':
       return takeShift(method, k, pose, drive, choice, scratch);
   }
@@ -64,13 +69,13 @@ function takeMeet(
   pose: Float64Array,
   choice: Choice,
   scratch: Float64Array,
-): number {
-  layLocus(first, p, pose, scratch, FIRST, 0, 0);
-  layLocus(second, p, pose, scratch, SECOND, 0, 0);
-  return settle(first, second, p, k, pose, choice, scratch);
+): void {
+  layLocus(first, p, pose, scratch, FIRST);
+  layLocus(second, p, pose, scratch, SECOND);
+  settle(first, second, p, k, pose, choice, scratch);
 }
 
-function takeCarry({ rigid }: Extract<Method, { kind: 'carry' }>, pose: Float64Array): number {
+function takeCarry({ rigid }: Extract<Method, { kind: 'carry' }>, pose: Float64Array): void {
   const { p, a, b, along, across } = rigid;
   const x = at(pose, 2 * a);
   const y = at(pose, 2 * a + 1);
@@ -78,7 +83,6 @@ function takeCarry({ rigid }: Extract<Method, { kind: 'carry' }>, pose: Float64A
   const uy = at(pose, 2 * b + 1) - y;
   pose[2 * p] = x + along * ux - across * uy;
   pose[2 * p + 1] = y + along * uy + across * ux;
-  return Number.MAX_VALUE;
 }
 
 function takeAim(
@@ -86,28 +90,23 @@ function takeAim(
   k: number,
   pose: Float64Array,
   { branch, expected }: Choice,
-): number {
+  scratch: Float64Array,
+): void {
   const x = at(pose, 2 * pivot);
   const y = at(pose, 2 * pivot + 1);
   const dx = at(pose, 2 * target) - x;
   const dy = at(pose, 2 * target + 1) - y;
-  const away = Math.hypot(dx, dy);
+  const away = lengthOf(dx, dy);
   const swing = away > 0 ? Math.acos(Math.min(Math.max(off / away, -1), 1)) : 0;
   const towards = Math.atan2(dy, dx);
   const lead = members[0];
   if (expected && lead) {
-    const far = (side: number) =>
-      Math.hypot(
-        x +
-          lead.x * Math.cos(towards + side * swing) -
-          lead.y * Math.sin(towards + side * swing) -
-          at(expected, 2 * lead.p),
-        y +
-          lead.x * Math.sin(towards + side * swing) +
-          lead.y * Math.cos(towards + side * swing) -
-          at(expected, 2 * lead.p + 1),
-      );
-    branch[k] = far(1) <= far(-1) ? 1 : -1;
+    // The lead turned to the target, and on which side of that it is expected.
+    const ahead = lead.x * Math.cos(towards) - lead.y * Math.sin(towards);
+    const aside = lead.x * Math.sin(towards) + lead.y * Math.cos(towards);
+    const left =
+      ahead * (at(expected, 2 * lead.p + 1) - y) - aside * (at(expected, 2 * lead.p) - x);
+    branch[k] = left >= 0 ? 1 : -1;
   }
   const normal = towards + (at(branch, k) < 0 ? -swing : swing);
   const cosine = Math.cos(normal);
@@ -118,7 +117,7 @@ function takeAim(
     pose[2 * member.p] = x + member.x * cosine - member.y * sine;
     pose[2 * member.p + 1] = y + member.x * sine + member.y * cosine;
   }
-  return away - Math.abs(off);
+  scratch[SLACK] = away - Math.abs(off);
 }
 
 function takeShift(
@@ -128,20 +127,21 @@ function takeShift(
   drive: ArrayLike<number>,
   choice: Choice,
   scratch: Float64Array,
-): number {
+): void {
   const direction = at(drive, angle.drive) + angle.shift;
   const dx = distance.length * Math.cos(direction);
   const dy = distance.length * Math.sin(direction);
   const circleSecond = first.kind === 'slide' && second.kind === 'distance';
   const own = circleSecond ? SECOND : FIRST;
-  layLocus(first, p, pose, scratch, own, 0, 0);
-  layLocus(second, q, pose, scratch, circleSecond ? FIRST : SECOND, -dx, -dy);
-  const slack = circleSecond
-    ? settle(second, first, p, k, pose, choice, scratch)
-    : settle(first, second, p, k, pose, choice, scratch);
+  const others = circleSecond ? FIRST : SECOND;
+  layLocus(first, p, pose, scratch, own);
+  layLocus(second, q, pose, scratch, others);
+  scratch[others] = at(scratch, others) - dx;
+  scratch[others + 1] = at(scratch, others + 1) - dy;
+  if (circleSecond) settle(second, first, p, k, pose, choice, scratch);
+  else settle(first, second, p, k, pose, choice, scratch);
   pose[2 * q] = at(pose, 2 * p) + dx;
   pose[2 * q + 1] = at(pose, 2 * p + 1) + dy;
-  return slack;
 }
 
 /** Put `p` on one of the meeting points of the two loci laid out in `scratch`. */
@@ -153,24 +153,20 @@ function settle(
   pose: Float64Array,
   { branch, expected }: Choice,
   scratch: Float64Array,
-): number {
+): void {
   scratch[FOUND] = scratch[FOUND + 2] = at(pose, 2 * p);
   scratch[FOUND + 1] = scratch[FOUND + 3] = at(pose, 2 * p + 1);
-  const slack =
-    second.kind === 'distance'
-      ? meetCircles(scratch, FIRST, SECOND, FOUND)
-      : first.kind === 'distance'
-        ? meetGroove(scratch, FIRST, SECOND, FOUND)
-        : meetGrooves(scratch, FIRST, SECOND, FOUND);
+  if (second.kind === 'distance') meetCircles(scratch, FIRST, SECOND, FOUND);
+  else if (first.kind === 'distance') meetGroove(scratch, FIRST, SECOND, FOUND);
+  else meetGrooves(scratch, FIRST, SECOND, FOUND);
   if (expected) {
     const ex = at(expected, 2 * p);
     const ey = at(expected, 2 * p + 1);
-    const left = Math.hypot(at(scratch, FOUND) - ex, at(scratch, FOUND + 1) - ey);
-    const right = Math.hypot(at(scratch, FOUND + 2) - ex, at(scratch, FOUND + 3) - ey);
+    const left = lengthOf(at(scratch, FOUND) - ex, at(scratch, FOUND + 1) - ey);
+    const right = lengthOf(at(scratch, FOUND + 2) - ex, at(scratch, FOUND + 3) - ey);
     branch[k] = left <= right ? 1 : -1;
   }
   const from = at(branch, k) < 0 ? FOUND + 2 : FOUND;
   pose[2 * p] = at(scratch, from);
   pose[2 * p + 1] = at(scratch, from + 1);
-  return slack;
 }
