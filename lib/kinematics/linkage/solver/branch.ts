@@ -25,7 +25,10 @@ function side(method: Method, pose: Float64Array): number {
   const [dx, dy] = method.kind === 'shift' ? way(pose, method.q, method.p) : [0, 0];
   const q = method.kind === 'shift' ? method.q : method.p;
   layLocus(method.first, method.p, pose, scratch, swapped ? 4 : 0);
-  layLocus(method.second, q, pose, scratch, swapped ? 0 : 4, dx, dy);
+  const second = swapped ? 0 : 4;
+  layLocus(method.second, q, pose, scratch, second);
+  scratch[second] = at(scratch, second) + dx;
+  scratch[second + 1] = at(scratch, second + 1) + dy;
   const circles = method.first.kind === 'distance' && method.second.kind === 'distance';
   const x = at(pose, 2 * method.p) - at(scratch, 0);
   const y = at(pose, 2 * method.p + 1) - at(scratch, 1);
