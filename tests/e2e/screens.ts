@@ -20,9 +20,9 @@ const lessons = [
 
 /** Opens the first link of the page whose address matches, as somebody looking for it would. */
 const follow = (pattern: RegExp) => async (page: Page) => {
-  const hrefs = await page.locator('main a[href]').evaluateAll((links) =>
-    links.map((link) => link.getAttribute('href') ?? ''),
-  );
+  const hrefs = await page
+    .locator('main a[href]')
+    .evaluateAll((links) => links.map((link) => link.getAttribute('href') ?? ''));
   const href = hrefs.find((candidate) => pattern.test(candidate));
   if (!href) throw new Error(`${page.url()} has no link that matches ${pattern}.`);
   await page.goto(href, { waitUntil: 'networkidle' });

@@ -1,0 +1,105 @@
+import type { Locator, Page } from 'playwright-core';
+import { exercises, lessons } from '@/content/exercises/registry';
+import { shownOptions } from '@/lib/marking/mark-choice';
+import type { DesignPart, Part, Setting, SettingPart, Variant } from '@/lib/marking/definition';
+import { trueValues } from '@/lib/marking/values';
+import { write } from '@/lib/quantities/write';
+import type { BenchSpec } from '@/lib/scene/bench-spec';
+import { modelOf } from '@/lib/scene/model-of';
+import { openVariant } from './records';
+
+/** How the fields are filled: typed, by keys alone, or by clicks wherever a click can do it. */
+export type Manner = 'typing' | 'keys';
+
+export function lessonPath(lessonId: string): string {
+  const lesson = lessons.find(({ id }) => id === lessonId);
+  if (!lesson) throw new Error(`There is no lesson ${lessonId}.`);
+  return `/lessons/${lesson.unit}/${lesson.id}`;
+}
+
+/** Makes sure that a round is open and gives its section of the page. */
+export async function openExercise(page: Page, exerciseId: string): Promise<Locator> {
+  const section = page.locator(`section#${exerciseId}`);
+  const begin = section.getByRole('button', { name: /^(Start|New numbers)$/ });
+  if ((await begin.count()) > 0) {
+    await begin.first().click();
+    await section.getByRole('button', { name: /^Check/ }).waitFor();
+  }
+  return section;
+}
+
+/** Answers the open round rightly, part by part, through the page. */
+export async function answerRightly(section: Locator, email: string, exerciseId: string) {
+  const variant = await openVariant(email, exerciseId);
+  const definition = exercises.get(exerciseId);
+  if (!definition) throw new Error(`There is no exercise ${exerciseId}.`);
+  const earlier = trueValues(definition, variant);
+  for (const part of definition.parts) {
+    await answerPart(section, part, variant, (key) => {
+      const value = earlier[key];
+      if (value === undefined) throw new Error(`${exerciseId} has no value for ${key}.`);
+      return value;
+    });
+  }
+  await section.getByRole('button', { name: /^Check/ }).click();
+}
+
+async function answerPart(
+  section: Locator,
+  part: Part,
+  variant: Variant,
+  valueOf: (key: string) => number,
+): Promise<void> {
+  switch (part.kind) {
+    case 'number': {
+      const { unit, places } = part.field(variant.units);
+      const typed = write(valueOf(part.key), unit, Math.max(places ?? 0, 4));
+      await section.getByLabel(part.label(variant), { exact: true }).fill(typed);
+      return;
+    }
+    case 'choice': {
+      const wanted = part.answer(variant);
+      for (const option of shownOptions(part, variant)) {
+        if (!wanted.includes(option.option)) continue;
+        await section
+          .getByRole(part.multiple ? 'checkbox' : 'radio', { name: option.label, exact: true })
+          .check();
+      }
+      return;
+    }
+    case 'setting':
+      return setBench(section, part, variant);
+    case 'design':
+      return fillDesign(section, part, variant);
+  }
+}
+
+/** Sets the bench's own controls, one after the other, by what their fields show. */
+async function setBench(section: Locator, part: SettingPart, variant: Variant): Promise<void> {
+  const definition = exercises.get(variant.exerciseId);
+  let spec = definition?.figure?.(variant) as BenchSpec | undefined;
+  if (!spec) throw new Error(`${variant.exerciseId} has no bench.`);
+  for (const [key, value] of Object.entries(part.answer(variant))) {
+    const control = modelOf(spec).controls.find((candidate) => candidate.key === key);
+    if (!control) throw new Error(`The bench of ${variant.exerciseId} has no control ${key}.`);
+    spec = { ...spec, [key]: value } as BenchSpec;
+    const after = modelOf(spec).controls.find((candidate) => candidate.key === key);
+    if (control.kind === 'choice') {
+      await section.getByLabel(control.label, { exact: true }).selectOption(String(value));
+    } else if (after?.kind === 'number') {
+      const field = section.getByRole('spinbutton', { name: control.label, exact: true });
+      await field.fill(after.text);
+      await field.press('Enter');
+    }
+  }
+}
+
+async function fillDesign(section: Locator, part: DesignPart, variant: Variant): Promise<void> {
+  const answer: Setting = part.answer(variant);
+  for (const field of part.fields(variant)) {
+    const value = answer[field.key];
+    const control = section.getByLabel(field.label, { exact: true });
+    if (field.kind === 'stock') await control.selectOption(String(value));
+    else await control.fill(write(Number(value), field.field.unit, 4));
+  }
+}
