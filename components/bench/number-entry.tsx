@@ -33,7 +33,11 @@ export function NumberEntry(props: NumberEntryProps) {
     if (refused === null || typed?.trim() === '') setTyped(null);
   };
   const onKeyDown = (event: KeyboardEvent) => {
-    if (event.key === 'Enter') commit();
+    if (event.key === 'Enter') {
+      // Setting a bench is not sending an answer: the form around it stays where it is.
+      event.preventDefault();
+      commit();
+    }
     if (event.key === 'Escape') setTyped(null);
     const next = steppedBy(event.key, value, step, least, most);
     if (next === null) return;

@@ -33,7 +33,7 @@ describe('from an account to a marked answer that the instructor sees', () => {
     const link = await page.getByText(/\/set-password\//).innerText();
     await page.goto('/classes', { waitUntil: 'networkidle' });
     await page.getByRole('link', { name: demo.className }).first().click();
-    await page.getByLabel('Who').selectOption(email);
+    await page.getByLabel('Who', { exact: true }).selectOption(email);
     await page.getByRole('button', { name: 'Put into the class' }).click();
     await page.getByText('Wilma Brandt').first().waitFor();
     await administrator.close();
@@ -59,6 +59,7 @@ describe('from an account to a marked answer that the instructor sees', () => {
     await page.locator('#guess').getByRole('radio').first().check();
     await page.getByRole('button', { name: 'That is my guess' }).click();
     await turn.waitFor();
+    await page.getByRole('status').filter({ hasText: /./ }).first().waitFor();
     const stored = await records(
       `select 1 from attempts a join learners l on l.id = a.learner_id join people p on p.id = l.person_id
        where p.email = $1 and a.exercise_id = 'move-the-pen-out'`,

@@ -3,6 +3,7 @@ import { exercises, lessons } from '@/content/exercises/registry';
 import { shownOptions } from '@/lib/marking/mark-choice';
 import type { DesignPart, Part, Setting, SettingPart, Variant } from '@/lib/marking/definition';
 import { trueValues } from '@/lib/marking/values';
+import { convert } from '@/lib/quantities/units';
 import { write } from '@/lib/quantities/write';
 import type { BenchSpec } from '@/lib/scene/bench-spec';
 import { modelOf } from '@/lib/scene/model-of';
@@ -80,16 +81,20 @@ async function setBench(section: Locator, part: SettingPart, variant: Variant): 
   let spec = definition?.figure?.(variant) as BenchSpec | undefined;
   if (!spec) throw new Error(`${variant.exerciseId} has no bench.`);
   for (const [key, value] of Object.entries(part.answer(variant))) {
-    const control = modelOf(spec).controls.find((candidate) => candidate.key === key);
-    if (!control) throw new Error(`The bench of ${variant.exerciseId} has no control ${key}.`);
-    spec = { ...spec, [key]: value } as BenchSpec;
-    const after = modelOf(spec).controls.find((candidate) => candidate.key === key);
-    if (control.kind === 'choice') {
+    const model = modelOf(spec);
+    const control = model.controls.find((candidate) => candidate.key === key);
+    if (control?.kind === 'choice') {
       await section.getByLabel(control.label, { exact: true }).selectOption(String(value));
-    } else if (after?.kind === 'number') {
+      spec = model.set(key, value);
+    } else if (control?.kind === 'number') {
+      const { unit, dimension } = control.field;
+      const shown = dimension === 'length' ? convert(Number(value), 'mm', unit) : Number(value);
       const field = section.getByRole('spinbutton', { name: control.label, exact: true });
-      await field.fill(after.text);
+      await field.fill(dimension === 'length' ? write(shown, unit, 4) : String(shown));
       await field.press('Enter');
+      spec = model.set(key, shown);
+    } else {
+      throw new Error(`The bench of ${variant.exerciseId} has no control ${key}.`);
     }
   }
 }

@@ -2,6 +2,7 @@ import {
   demoAddress,
   demoAdministrator,
   demoClasses,
+  demoInstructors,
   demoPassword,
 } from '../../scripts/demo/people.data';
 
