@@ -14,7 +14,7 @@ export function ExercisesTable({ progress, lesson }: ExercisesTableProps) {
   return (
     <Table caption={`Learners by exercise of ${lesson.title}`}>
       <HeadRow>
-        <ColumnName>Learner</ColumnName>
+        <ColumnName className="sticky left-0 bg-board">Learner</ColumnName>
         {lesson.exercises.map((exercise) => (
           <ColumnName key={exercise.exerciseId} className="min-w-32 align-bottom leading-tight">
             {exercise.title}
@@ -26,7 +26,7 @@ export function ExercisesTable({ progress, lesson }: ExercisesTableProps) {
           const cell = learner.lessons.find((one) => one.lessonId === lesson.lessonId);
           return (
             <Row key={learner.learnerId}>
-              <RowName>
+              <RowName className="sticky left-0 bg-paper">
                 <LearnerLink classId={progress.classId} learner={learner} />
               </RowName>
               {lesson.exercises.map((exercise) => (

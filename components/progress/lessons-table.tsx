@@ -15,7 +15,7 @@ export function LessonsTable({ progress, onOpen }: LessonsTableProps) {
   return (
     <Table caption="Learners by lesson">
       <HeadRow>
-        <ColumnName>Learner</ColumnName>
+        <ColumnName className="sticky left-0 bg-board">Learner</ColumnName>
         {progress.lessons.map((lesson) => (
           <ColumnName key={lesson.lessonId} className="min-w-48 align-top">
             <button
@@ -35,7 +35,7 @@ export function LessonsTable({ progress, onOpen }: LessonsTableProps) {
       <tbody>
         {progress.learners.map((learner) => (
           <Row key={learner.learnerId}>
-            <RowName>
+            <RowName className="sticky left-0 bg-paper">
               <LearnerLink classId={progress.classId} learner={learner} />
             </RowName>
             {progress.lessons.map((lesson) => (

@@ -22,7 +22,7 @@ export function PeopleTable({ people, timeZone }: PeopleTableProps) {
       <tbody>
         {people.map((person) => (
           <Row key={person.personId}>
-            <RowName>
+            <RowName className="min-w-60">
               <Link
                 href={`/people/${person.personId}`}
                 prefetch={false}
@@ -30,7 +30,7 @@ export function PeopleTable({ people, timeZone }: PeopleTableProps) {
               >
                 {person.name}
               </Link>
-              <span className="block text-[0.9375rem] break-all text-pencil">{person.email}</span>
+              <span className="block text-[0.9375rem] text-pencil">{person.email}</span>
             </RowName>
             <Cell>
               {person.classes

@@ -33,7 +33,7 @@ export function Assignments({ classId, timeZone, assignments }: AssignmentsProps
       <tbody>
         {assignments.map((work) => (
           <Row key={work.assignmentId}>
-            <RowName>
+            <RowName className="min-w-52">
               {[...work.lessons, ...work.exercises].map(({ title }) => title).join(', ')}
               {work.note ? (
                 <span className="block text-[0.9375rem] text-pencil">{work.note}</span>
