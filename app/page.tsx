@@ -1,19 +1,22 @@
 import { ButtonLink } from '@/components/ui/button';
 import { Page } from '@/components/ui/page';
 import { lessonPath, listLessons } from '@/content/lessons/front-matter';
+import { currentViewer } from '@/lib/auth/viewer';
 import { LandingAnswer } from './_components/landing-answer';
 import { LandingHero } from './_components/landing-hero';
 import { LandingPegs } from './_components/landing-pegs';
-import { LandingSteps } from './_components/landing-steps';
 import { LessonCard } from './lessons/_components/lesson-card';
 
-export default function LandingPage() {
+export default async function LandingPage() {
+  const viewer = await currentViewer();
   const lessons = listLessons();
   const first = lessons[0];
   return (
     <Page>
-      <LandingHero firstLesson={first ? lessonPath(first) : '/lessons'} />
-      <LandingSteps />
+      <LandingHero
+        firstLesson={first ? lessonPath(first) : '/lessons'}
+        signedIn={viewer !== null}
+      />
       <LandingAnswer />
       <LandingPegs />
       <section className="mt-20">

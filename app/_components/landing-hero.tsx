@@ -1,12 +1,19 @@
 import { Bench } from '@/components/bench/bench';
 import { ButtonLink } from '@/components/ui/button';
 import { TickedRule } from '@/components/ui/page-heading';
+import { LandingSteps } from './landing-steps';
 import { landingTrain } from './pictures';
 
-/** The first look: what Hornbeam is for, one way in, and a mechanism to turn at once. */
-export function LandingHero({ firstLesson }: Readonly<{ firstLesson: string }>) {
+interface LandingHeroProps {
+  /** Where the first lesson is read. */
+  readonly firstLesson: string;
+  readonly signedIn: boolean;
+}
+
+/** The first look: what Hornbeam is for, one way in, a mechanism to turn at once, and how it goes. */
+export function LandingHero({ firstLesson, signedIn }: LandingHeroProps) {
   return (
-    <div className="grid items-start gap-x-12 gap-y-4 lg:grid-cols-[1fr_32rem]">
+    <div className="grid items-start gap-x-12 gap-y-6 lg:grid-cols-[1fr_32rem] lg:grid-rows-[auto_1fr]">
       <div>
         <h1 className="mb-4 text-[clamp(2.5rem,1.5rem+4.5vw,3.75rem)] leading-[1.08]">
           See it turn.
@@ -21,12 +28,15 @@ export function LandingHero({ firstLesson }: Readonly<{ firstLesson: string }>) 
         </p>
         <div className="flex flex-wrap gap-3">
           <ButtonLink href={firstLesson}>Open the first lesson</ButtonLink>
-          <ButtonLink href="/sign-in" variant="secondary">
-            Sign in
+          <ButtonLink href={signedIn ? '/home' : '/sign-in'} variant="secondary">
+            {signedIn ? 'Go to your own page' : 'Sign in'}
           </ButtonLink>
         </div>
       </div>
-      <Bench spec={landingTrain} title="A train of toothed wheels" />
+      <div className="min-w-0 lg:col-start-2 lg:row-span-2 lg:row-start-1">
+        <Bench spec={landingTrain} title="A train of toothed wheels" />
+      </div>
+      <LandingSteps />
     </div>
   );
 }

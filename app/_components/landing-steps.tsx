@@ -21,9 +21,9 @@ function Step({ number, title, children }: StepProps) {
 /** How a lesson goes, in four steps. */
 export function LandingSteps() {
   return (
-    <section className="mt-20">
+    <section>
       <h2 className="mb-5">How it goes</h2>
-      <ol className="grid gap-x-8 gap-y-7 sm:grid-cols-2 lg:grid-cols-4">
+      <ol className="grid gap-x-8 gap-y-7 sm:grid-cols-2">
         <Step number={1} title="Guess">
           Say what you think will happen. A guess you have written down is one you learn from.
         </Step>

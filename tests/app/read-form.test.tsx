@@ -12,8 +12,6 @@ function form(fields: Readonly<Record<string, string>>): FormData {
 const person = {
   name: ' Marit Vik ',
   email: 'Marit@Example.org',
-  timeZone: 'Europe/Oslo',
-  units: 'metric',
   isAdministrator: 'no',
 };
 
@@ -56,21 +54,24 @@ describe('reading a form', () => {
   });
 
   it.each([
-    ['a lesson by another name', { lessonId: '../x', dueOn: '2026-12-08', dueTime: '18:30' }],
+    [
+      'a lesson by another name',
+      { lessonId: '../x', dueOn: '2026-12-08', dueTime: '18:30', note: '' },
+    ],
     [
       'a day that does not exist',
-      { lessonId: 'pantograph', dueOn: '2026-02-30', dueTime: '18:30' },
+      { lessonId: 'pantograph', dueOn: '2026-02-30', dueTime: '18:30', note: '' },
     ],
     [
       'an hour that does not exist',
-      { lessonId: 'pantograph', dueOn: '2026-12-08', dueTime: '25:00' },
+      { lessonId: 'pantograph', dueOn: '2026-12-08', dueTime: '25:00', note: '' },
     ],
   ])('refuses %s', (_, fields) => {
     expect(readForm(form(fields), newAssignmentSchema).ok).toBe(false);
   });
 
   it('takes a lesson with a day and a time', () => {
-    const fields = { lessonId: 'pantograph', dueOn: '2026-12-08', dueTime: '18:30' };
+    const fields = { lessonId: 'pantograph', dueOn: '2026-12-08', dueTime: '18:30', note: '' };
     expect(readForm(form(fields), newAssignmentSchema)).toMatchObject({ ok: true, data: fields });
   });
 });
