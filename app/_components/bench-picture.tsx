@@ -9,7 +9,7 @@ import { thumbnail } from '@/lib/scene/thumbnail';
 export function BenchPicture({ spec }: Readonly<{ spec: BenchSpec }>) {
   return (
     <div
-      className="drawing-box"
+      className="drawing-box [&_.drawing]:overflow-visible"
       // Our own drawing, made from numbers alone.
       dangerouslySetInnerHTML={{ __html: thumbnail(spec) }}
     />

@@ -55,12 +55,12 @@ export function MovingPicture({ spec, name, children }: MovingPictureProps) {
 
   return (
     <div ref={frame}>
-      <div className="border border-rule p-2">
+      <div className="border border-rule px-3 py-4">
         {picture === null ? (
           children
         ) : (
           <div
-            className="drawing-box"
+            className="drawing-box [&_.drawing]:overflow-visible"
             // Our own drawing, made from numbers alone.
             dangerouslySetInnerHTML={{ __html: picture }}
           />

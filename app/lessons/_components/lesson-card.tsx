@@ -15,7 +15,7 @@ interface LessonCardProps {
 export function LessonCard({ lesson, pegs }: LessonCardProps) {
   return (
     <li className="grid gap-4 border-b border-rule py-6 sm:grid-cols-[15rem_1fr] sm:gap-8">
-      <div className="max-w-60 self-start border border-rule p-2">
+      <div className="max-w-60 self-start border border-rule px-3 py-4">
         <BenchPicture spec={pictureOf(lesson.id)} />
       </div>
       <div>
