@@ -8,7 +8,7 @@ import type { BenchStore } from './bench-store';
 import { onThemeChange, readInk } from './colours';
 import { createPainter } from './painter';
 import { takeHold } from './take-hold';
-import { useShown } from './use-bench';
+import { useChosen } from './use-bench';
 import { pixelAt, viewOf, type Zoom } from './view';
 
 /** A fingertip on the page, px. */
@@ -24,16 +24,17 @@ interface BenchCanvasProps {
 }
 
 /**
- * The drawing on a canvas. Every frame goes from the store to the canvas without React; React only
- * knows where the handles are when the mechanism itself is changed.
+ * The drawing on a canvas. Every frame goes from the store to the canvas without React, which hears
+ * only of another mechanism; the places to take hold of follow at a reading pace.
  */
 export function BenchCanvas({ store, width, height, zoom, onPan, onReady }: BenchCanvasProps) {
-  const shown = useShown(store);
+  const model = useChosen(store, (moment) => moment.model);
+  const frame = useChosen(store, (moment) => moment.frame);
   const drawing = useRef<Konva.Layer>(null);
   const holds = useRef<Konva.Layer>(null);
   const [themes, setThemes] = useState(0);
-  const view = viewOf(shown.frame, width, height, zoom);
-  const handles = shown.model.handles(shown.drive);
+  const view = viewOf(frame, width, height, zoom);
+  const handles = model.handles(store.moment().drive);
 
   useEffect(() => onThemeChange(() => setThemes((count) => count + 1)), []);
   useEffect(() => {
@@ -48,16 +49,23 @@ export function BenchCanvas({ store, width, height, zoom, onPan, onReady }: Benc
     const painter = createPainter(layer);
     const ink = readInk(container);
     const paint = () => {
-      const { model, frame, showing, ...state } = store.moment();
-      const now = viewOf(frame, width, height, zoom);
-      painter.paint(model.scene(state, showing), now, width, ink);
-      for (const { id, at } of model.handles(state.drive)) {
-        holdLayer.children.find((node) => node.id() === id)?.position(pixelAt(now, at));
+      const { showing, ...moment } = store.moment();
+      const now = viewOf(moment.frame, width, height, zoom);
+      painter.paint(moment.model.scene(moment, showing), now, width, ink);
+    };
+    const place = () => {
+      const { model: at, drive, frame: seen } = store.moment();
+      const now = viewOf(seen, width, height, zoom);
+      for (const handle of at.handles(drive)) {
+        const hold = holdLayer.children.find((node) => node.id() === handle.id);
+        hold?.position(pixelAt(now, handle.at));
       }
     };
     paint();
+    place();
     onReady();
-    return store.onFrame(paint);
+    const stops = [store.onFrame(paint), store.onShown(place)];
+    return () => stops.forEach((stop) => stop());
   }, [store, width, height, zoom, themes, onReady]);
 
   return (

@@ -1,9 +1,10 @@
 'use client';
 
+import { useState } from 'react';
 import type { BenchTable } from '@/lib/scene/bench-model';
 import { BenchPlot } from './bench-plot';
-import type { BenchStore } from './bench-store';
-import { useSettled, useShown } from './use-bench';
+import type { BenchMoment, BenchStore } from './bench-store';
+import { useChosen, useSettled } from './use-bench';
 
 interface BenchWordsProps {
   readonly store: BenchStore;
@@ -13,7 +14,8 @@ interface BenchWordsProps {
 
 /** The bench in words, said again when it has come to rest, and its numbers. */
 export function BenchWords({ store, id, printing }: BenchWordsProps) {
-  const { model, drive } = useSettled(store);
+  const settled = useSettled(store);
+  const { model, drive } = settled;
   const limits = model.limits(drive);
   return (
     <div className="border-t border-rule px-4 py-3">
@@ -26,16 +28,27 @@ export function BenchWords({ store, id, printing }: BenchWordsProps) {
         ))}
         <p className="text-base">{model.describe(drive)}</p>
       </div>
-      <Numbers store={store} printing={printing} />
+      <Numbers store={store} settled={settled} printing={printing} />
     </div>
   );
 }
 
-function Numbers({ store, printing }: Pick<BenchWordsProps, 'store' | 'printing'>) {
-  const { model, drive, pace } = useShown(store);
+interface NumbersProps extends Pick<BenchWordsProps, 'store' | 'printing'> {
+  readonly settled: BenchMoment;
+}
+
+/** Plot and tables; they follow the drive only while somebody can see them. */
+function Numbers({ store, settled, printing }: NumbersProps) {
+  const [open, setOpen] = useState(false);
+  const live = useChosen(store, (moment) => (open || printing ? moment : null));
+  const { model, drive, pace } = live ?? settled;
   const { plot } = model;
   return (
-    <details className="mt-2" open={printing || undefined}>
+    <details
+      className="mt-2"
+      open={open || printing}
+      onToggle={(event) => setOpen(event.currentTarget.open)}
+    >
       <summary className="inline-flex min-h-11 items-center text-base font-semibold text-chalk">
         {plot ? 'Plot and numbers' : 'Numbers'}
       </summary>

@@ -9,7 +9,7 @@ import { DrawingBox } from './drawing-box';
 import { DriveRail } from './drive-rail';
 import { SettingsPanel } from './settings-panel';
 import { TitleStrip } from './title-strip';
-import { useBenchStore, useOnScreen, useRunning, useShown } from './use-bench';
+import { useBenchStore, useChosen, useOnScreen, useRunning } from './use-bench';
 import { ViewRail } from './view-rail';
 import { fitted, panned, zoomedBy } from './view';
 
@@ -43,14 +43,14 @@ function BenchFrame({ spec, title, locked = false, lockedNotice, onSettingChange
   const [width, setWidth] = useState(nominalWidth);
   const [zoom, setZoom] = useState(fitted);
   const printing = usePrinting();
-  const shown = useShown(store);
+  const model = useChosen(store, (moment) => moment.model);
+  const { left, right } = useChosen(store, (moment) => moment.frame);
   useRunning(store, useOnScreen(frame));
-  useTelling(shown.model.values, onSettingChange);
+  useTelling(model.values, onSettingChange);
   const onPan = useCallback(
     (x: number, y: number) => setZoom((old) => panned(old, store.moment().frame, x, y)),
     [store],
   );
-  const { left, right } = shown.frame;
   return (
     <section
       ref={setFrame}
@@ -73,7 +73,7 @@ function BenchFrame({ spec, title, locked = false, lockedNotice, onSettingChange
       {locked ? (
         <div className="border-t border-ink bg-board px-4 py-3">
           <p id={`${id}-words`} className="max-w-measure">
-            {shown.model.describe(shown.drive)}
+            {model.describe(store.moment().drive)}
           </p>
           {lockedNotice}
         </div>

@@ -5,7 +5,7 @@ import type { ChoiceControl, NumberControl, SettingControl } from '@/lib/scene/b
 import type { BenchStore } from './bench-store';
 import { NumberEntry } from './number-entry';
 import { railButton } from './rail-button';
-import { useShown } from './use-bench';
+import { useChosen } from './use-bench';
 
 /** More notches than this are easier to slide over than to count. */
 const manyNotches = 50;
@@ -16,7 +16,7 @@ interface SettingsPanelProps {
 
 /** What the learner may change about the mechanism itself, a control each. */
 export function SettingsPanel({ store }: SettingsPanelProps) {
-  const { model } = useShown(store);
+  const model = useChosen(store, (moment) => moment.model);
   if (model.controls.length === 0) return null;
   const set = (key: string, value: number | string) =>
     store.setting(model.set(key, value), `set ${key}`);

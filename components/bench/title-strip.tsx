@@ -22,7 +22,7 @@ export function TitleStrip({ store, id, title, scale, locked }: TitleStripProps)
       <p id={id} className="flex-1 px-4 py-3 font-heading text-lg leading-tight font-semibold">
         {title}
       </p>
-      <dl className="grid auto-cols-auto grid-cols-[repeat(auto-fit,minmax(8.5rem,1fr))] @2xl:flex">
+      <dl className="grid auto-cols-auto grid-cols-[repeat(auto-fit,minmax(8rem,1fr))] @2xl:flex">
         {readouts.map(({ key, label, value }) => (
           <Cell key={key} label={label} value={value} />
         ))}
@@ -34,9 +34,9 @@ export function TitleStrip({ store, id, title, scale, locked }: TitleStripProps)
 
 function Cell({ label, value }: { readonly label: string; readonly value: string }) {
   return (
-    <div className="border-t border-l border-rule px-3 py-2 @2xl:min-w-32 @2xl:border-t-0">
+    <div className="border-t border-l border-rule px-2.5 py-2 @2xl:min-w-32 @2xl:border-t-0">
       <dt className="text-[0.8125rem] leading-tight text-pencil">{label}</dt>
-      <dd className="font-mono text-[0.9375rem] leading-snug whitespace-nowrap tabular-nums">
+      <dd className="font-mono text-[0.875rem] leading-snug tabular-nums @2xl:text-[0.9375rem] @2xl:whitespace-nowrap">
         {value}
       </dd>
     </div>

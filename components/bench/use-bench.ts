@@ -13,17 +13,32 @@ export function useShown(store: BenchStore): BenchMoment {
   return useSyncExternalStore(store.onShown, store.shown, store.shown);
 }
 
+/**
+ * One part of the moment, as words and controls show it; what uses it is rendered anew only when
+ * that part has changed. `choose` must give the same value for the same moment.
+ */
+export function useChosen<T>(store: BenchStore, choose: (moment: BenchMoment) => T): T {
+  const read = () => choose(store.shown());
+  return useSyncExternalStore(store.onShown, read, read);
+}
+
 const settledAfter = 600;
 
 /** The moment that was last left alone for a while: what is worth saying aloud. */
 export function useSettled(store: BenchStore): BenchMoment {
-  const shown = useShown(store);
-  const [settled, setSettled] = useState(shown);
+  const [settled, setSettled] = useState(store.shown);
   useEffect(() => {
-    if (shown.running || shown === settled) return;
-    const timer = setTimeout(() => setSettled(shown), settledAfter);
-    return () => clearTimeout(timer);
-  }, [shown, settled]);
+    let timer: ReturnType<typeof setTimeout> | undefined;
+    const stop = store.onShown(() => {
+      clearTimeout(timer);
+      if (store.shown().running) return;
+      timer = setTimeout(() => setSettled(store.shown()), settledAfter);
+    });
+    return () => {
+      clearTimeout(timer);
+      stop();
+    };
+  }, [store]);
   return settled;
 }
 
@@ -67,7 +82,9 @@ const stepEvery = 0.7;
  * time since it began. With less motion asked for it goes in steps.
  */
 export function useRunning(store: BenchStore, onScreen: boolean): void {
-  const { running, pace, model } = useShown(store);
+  const running = useChosen(store, (moment) => moment.running);
+  const pace = useChosen(store, (moment) => moment.pace);
+  const model = useChosen(store, (moment) => moment.model);
   const stepped = useReducedMotion();
   const { fromShown, toShown, step, pace: control } = model.drive;
   useEffect(() => {

@@ -3,7 +3,7 @@
 import { useId } from 'react';
 import type { BenchStore } from './bench-store';
 import { railButton } from './rail-button';
-import { useShown } from './use-bench';
+import { useChosen } from './use-bench';
 import { mostZoom, type Zoom } from './view';
 
 interface ViewRailProps {
@@ -23,7 +23,8 @@ const ways = [
 
 /** What is shown and how near: tracing, dimensions, undo, zoom. */
 export function ViewRail({ store, zoom, onZoom, onPan, onFit }: ViewRailProps) {
-  const { canUndo, showing } = useShown(store);
+  const canUndo = useChosen(store, (moment) => moment.canUndo);
+  const showing = useChosen(store, (moment) => moment.showing);
   return (
     <div className="flex flex-wrap items-center gap-2">
       <Check

@@ -24,6 +24,7 @@ import { trail } from './trail';
 /** Bars this wide are what the shop uses, mm. */
 const barWidth = 20;
 const holeRadius = 2;
+const faint = 0.6;
 /** A pen this near to the line, mm, is in it. */
 export const inLine = 0.05;
 
@@ -32,6 +33,8 @@ export interface PantographDrawing {
   readonly setup: PantographSetup;
   readonly bounds: Bounds;
   readonly paper: readonly Shape[];
+  /** The whole copy, faint; the chalk behind the pen is fresher. */
+  readonly copy: readonly Shape[];
   readonly bars: Readonly<Record<'works' | 'binds', Bars>>;
 }
 
@@ -48,6 +51,7 @@ export function drawPantograph(setup: PantographSetup): PantographDrawing {
     setup,
     bounds: pantographBounds(setup),
     paper: paper(setup),
+    copy: wholeCopy(setup),
     bars: { works: barsOf(setup, 'timber'), binds: barsOf(setup, 'clash') },
   };
 }
@@ -65,14 +69,14 @@ export function pantographScene(
   const bars = drawing.bars[elbowWorks(setup, pose.elbow) ? 'works' : 'binds'];
   const hidden = new Set(spec.hide ?? []);
   const traced =
-    showing.tracing && !hidden.has('copy')
-      ? trail(state, way.length, (drive) => penBetween(setup, drive))
+    showing.tracing && !hidden.has('path')
+      ? [...drawing.copy, ...trail(state, way.length / 3, (drive) => penBetween(setup, drive))]
       : [];
   return {
     bounds: drawing.bounds,
     shapes: [
       ...drawing.paper,
-      ...(hidden.has('copy') ? [] : overlapShown(setup)),
+      ...(hidden.has('path') ? [] : overlapShown(setup)),
       ...traced,
       barBody(B, M, bars.stylus),
       barBody(D, M, bars.other),
@@ -115,7 +119,7 @@ function barBody(from: Point, to: Point, shapes: readonly Shape[]): Body {
 }
 
 /** The drawing, dashed where it lies beyond the working reach. */
-function paper({ way, reach, spec, drawingBox }: PantographSetup): readonly Shape[] {
+function paper({ way, reach }: PantographSetup): readonly Shape[] {
   const parts = 160;
   const within = (at: Point) =>
     norm(at) <= reach.stylus.most + 1e-9 && norm(at) >= reach.stylus.least - 1e-9;
@@ -127,11 +131,21 @@ function paper({ way, reach, spec, drawingBox }: PantographSetup): readonly Shap
     run?.points.push(at);
     if (run?.inside !== inside) runs.push({ inside, points: [at] });
   }
-  const foot = { x: (drawingBox.left + drawingBox.right) / 2, y: drawingBox.bottom };
   return [
     ...runs.map(({ inside, points }) => outline(inside ? 'outline' : 'hidden', points, false)),
-    label(spec.drawing.name, foot, { face: 'name', role: 'pencil', nudge: { x: 0, y: -14 } }),
   ];
+}
+
+/** What the pen draws while the stylus goes once round, as far as it reaches. */
+function wholeCopy(setup: PantographSetup): readonly Shape[] {
+  const steps = 2 * (setup.samples.length - 1);
+  const runs: Point[][] = [[]];
+  for (let i = 0; i <= steps; i += 1) {
+    const pen = penBetween(setup, (setup.way.length * i) / steps);
+    if (pen) runs.at(-1)?.push(pen);
+    else runs.push([]);
+  }
+  return runs.filter((run) => run.length > 1).map((run) => outline('tracing', run, false, faint));
 }
 
 function overlapShown(setup: PantographSetup): readonly Shape[] {

@@ -127,7 +127,7 @@ export function pantographLimits(setup: PantographSetup, drive: number): readonl
       `Part of the drawing, dashed, lies up to ${size(beyond)} beyond the working reach.`,
     );
   }
-  const overlap = hidden.has('copy') || hidden.has('scale') ? 0 : overlapOf(setup);
+  const overlap = hidden.has('path') ? 0 : overlapOf(setup);
   if (overlap > 0)
     limits.push(`Drawing and copy overlap: move the fixed pin ${size(overlap)} farther off.`);
   return limits;

@@ -15,6 +15,7 @@ const outcomes = [
   'teeth',
   'size',
   'oval',
+  'path',
   'pen',
   'copy',
   'scale',

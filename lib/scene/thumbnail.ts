@@ -11,9 +11,17 @@ import { toSvg } from './to-svg';
  * @example thumbnail(spec) // '<svg … aria-hidden="true" …>'
  */
 export function thumbnail(spec: BenchSpec, drive?: number): string {
+  return thumbnailAt(spec)(drive);
+}
+
+/** The same for any place of the drive: worked out once, to be asked for many times a second. */
+export function thumbnailAt(spec: BenchSpec): (drive?: number) => string {
   const model = modelOf(spec);
   const from = model.admit(spec.drive ?? model.drive.start);
-  const to = model.admit(drive ?? from);
   const showing = { tracing: spec.bench !== 'train', dimensions: false };
-  return toSvg(model.scene({ drive: to, swept: { from, to } }, showing));
+  return (drive) => {
+    const to = model.admit(drive ?? from);
+    const swept = { from: Math.min(from, to), to: Math.max(from, to) };
+    return toSvg(model.scene({ drive: to, swept }, showing));
+  };
 }

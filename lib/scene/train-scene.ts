@@ -12,9 +12,10 @@ import {
   type Scene,
   type Shape,
 } from './scene';
-import { dimension, hatch, label, lath, line, outline } from './strokes';
+import { dimension, label, lath, line, outline } from './strokes';
 import { rimsUnrolled, rowsHeight } from './train-rims';
-import type { SetPair, SetWheel, TrainSetup } from './train-setup';
+import type { SetWheel, TrainSetup } from './train-setup';
+import { troubles } from './train-troubles';
 
 /** Drawn with a little air between the flanks, in modules. */
 const drawnBacklash = 0.04;
@@ -28,7 +29,10 @@ export interface TrainDrawing {
   readonly bounds: Bounds;
   readonly wheels: readonly { readonly wheel: SetWheel; readonly shapes: readonly Shape[] }[];
   readonly lever: readonly Shape[];
-  readonly fixed: readonly Shape[];
+  /** Under the crank, over it, and the distances. */
+  readonly under: readonly Shape[];
+  readonly over: readonly Shape[];
+  readonly centres: readonly Shape[];
 }
 
 /** Cuts the wheels of a train once; `trainScene` then only turns them. */
@@ -36,13 +40,21 @@ export function drawTrain(setup: TrainSetup): TrainDrawing {
   const seen = fromTheFront(setup.wheels);
   const wheels = seen.map((wheel) => ({ wheel, shapes: wheelShapes(setup, wheel) }));
   const reach = leverReach(setup);
+  const hidden = new Set(setup.spec.hide ?? []);
   const lever = [lath('driver', { x: 0, y: 0 }, { x: reach, y: 0 }, 2.4 * setup.spec.module)];
   return {
     setup,
     bounds: trainBounds(setup, reach),
     wheels,
     lever,
-    fixed: [...hiddenEdges(seen), ...circlesAndCentres(setup), ...troubles(setup)],
+    under: [
+      ...hiddenEdges(seen),
+      ...circlesAndCentres(setup),
+      ...troubles(setup),
+      ...(hidden.has('sense') ? [] : senseArrows(setup)),
+    ],
+    over: [...pivots(setup), ...counts(setup)],
+    centres: hidden.has('centres') ? [] : centres(setup),
   };
 }
 
@@ -71,25 +83,21 @@ export function trainScene(drawing: TrainDrawing, { drive }: DriveState, showing
     return { kind: 'body', pose: { ...wheel.centre, angle }, shapes };
   });
   const crank = setup.arbors[setup.crank] ?? { x: 0, y: 0 };
-  const hidden = new Set(setup.spec.hide ?? []);
+  const unrolled = showing.tracing && !setup.spec.hide?.includes('teeth');
   return {
     bounds: drawing.bounds,
     shapes: [
       ...wheels,
-      ...drawing.fixed,
-      ...(hidden.has('sense') ? [] : senseArrows(setup)),
+      ...drawing.under,
       {
         kind: 'body',
         pose: { x: crank.x, y: crank.y, angle: drive + leverRest },
         shapes: drawing.lever,
       },
       { kind: 'mark', role: 'driver', symbol: 'handle', at: leverEnd(setup, drive) },
-      ...pivots(setup),
-      ...counts(setup),
-      ...(showing.dimensions && !hidden.has('centres') ? centres(setup) : []),
-      ...(showing.tracing && !hidden.has('teeth')
-        ? rimsUnrolled(setup, drive, drawing.bounds)
-        : []),
+      ...drawing.over,
+      ...(showing.dimensions ? drawing.centres : []),
+      ...(unrolled ? rimsUnrolled(setup, drive, drawing.bounds) : []),
     ],
   };
 }
@@ -216,63 +224,6 @@ function centres(setup: TrainSetup): readonly Shape[] {
       const below = clear + 3 * setup.spec.module;
       return dimension(left.centre, right.centre, -below, ruleText(distance, setup.spec.units));
     });
-}
-
-/** What does not fit, drawn in madder: open gaps, and teeth that run into each other. */
-function troubles(setup: TrainSetup): readonly Shape[] {
-  return setup.pairs.flatMap((pair): readonly Shape[] => {
-    if (pair.state.outcome === 'apart') return gap(pair, setup);
-    return pair.state.outcome === 'too-close' ? overlap(pair, setup) : [];
-  });
-}
-
-function gap({ first, second, state }: SetPair, setup: TrainSetup): readonly Shape[] {
-  const angle = Math.atan2(second.centre.y - first.centre.y, second.centre.x - first.centre.x);
-  const [c, s] = [Math.cos(angle), Math.sin(angle)];
-  const rim = ({ centre, pitchRadius }: SetWheel, way: number): Point => ({
-    x: centre.x + way * pitchRadius * c,
-    y: centre.y + way * pitchRadius * s,
-  });
-  const [from, to] = [rim(first, 1), rim(second, -1)];
-  return [
-    ...[first, second].map(({ centre, pitchRadius }): Shape => ({
-      kind: 'circle',
-      role: 'limit',
-      centre,
-      radius: pitchRadius,
-    })),
-    line('limit', from, to),
-    label(ruleText(state.gap, setup.spec.units), to, { role: 'madder', nudge: { x: 0, y: -14 } }),
-  ];
-}
-
-function overlap({ first, second, distance, state }: SetPair, setup: TrainSetup): readonly Shape[] {
-  const lens = lensOf(first, second, distance);
-  const points = lens.flatMap(({ x, y }) => [x, y]);
-  const middle = lens[0] ?? first.centre;
-  return [
-    outline('clash', lens, true),
-    ...hatch(points, setup.spec.module),
-    label(ruleText(-state.gap, setup.spec.units), middle, {
-      role: 'madder',
-      nudge: { x: 0, y: 12 },
-    }),
-  ];
-}
-
-/** The region common to two tip circles. */
-function lensOf(first: SetWheel, second: SetWheel, distance: number): readonly Point[] {
-  const side = (of: SetWheel, other: SetWheel): Point[] => {
-    const [r, q] = [of.tipRadius, other.tipRadius];
-    const cosine = (r * r + distance * distance - q * q) / (2 * r * distance);
-    const half = Math.acos(Math.min(1, Math.max(-1, cosine)));
-    const towards = Math.atan2(other.centre.y - of.centre.y, other.centre.x - of.centre.x);
-    return Array.from({ length: 13 }, (_, i) => {
-      const angle = towards - half + (half * i) / 6;
-      return { x: of.centre.x + r * Math.cos(angle), y: of.centre.y + r * Math.sin(angle) };
-    });
-  };
-  return [...side(first, second), ...side(second, first)];
 }
 
 function trainBounds(setup: TrainSetup, reach: number): Bounds {

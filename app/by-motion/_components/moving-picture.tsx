@@ -31,13 +31,14 @@ export function MovingPicture({ spec, name, children }: MovingPictureProps) {
     if (!running) return;
     let asked = 0;
     let stopped = false;
-    void import('@/lib/scene/thumbnail').then(({ thumbnail }) => {
+    void import('@/lib/scene/thumbnail').then(({ thumbnailAt }) => {
+      const picture = thumbnailAt(spec);
       const from = drive.current;
       let start: number | null = null;
       const tick = (now: number) => {
         start ??= now;
         drive.current = driveAfter(spec, from, (now - start) / 1000);
-        setPicture(thumbnail(spec, drive.current));
+        setPicture(picture(drive.current));
         asked = requestAnimationFrame(tick);
       };
       if (!stopped) asked = requestAnimationFrame(tick);

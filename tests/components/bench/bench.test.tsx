@@ -39,7 +39,7 @@ function strip(label: string): string {
   return screen.getByText(label, { selector: 'dt' }).nextElementSibling?.textContent ?? '';
 }
 
-describe('a bench', () => {
+describe('a bench', { timeout: 60_000 }, () => {
   it('shows its still picture from the first paint, named and described', () => {
     const { container } = render(<Bench spec={row} title="Row of three" />);
     const drawing = screen.getByRole('img', { name: 'Row of three' });
@@ -140,7 +140,7 @@ describe('a bench', () => {
   });
 });
 
-describe('running', () => {
+describe('running', { timeout: 60_000 }, () => {
   it('makes the position a function of the time, and stops drawing when paused', async () => {
     const frames = dispatchFrames();
     render(<Bench spec={row} title="Row" />);
