@@ -81,8 +81,14 @@ function NumbersTable({ table }: { readonly table: BenchTable }) {
         <tbody>
           {table.rows.map((row, index) => (
             <tr key={index} className="border-b border-rule">
-              {row.map((cell, column) => (
-                <td key={table.head[column]} className="px-2 py-1 font-mono tabular-nums">
+              <th scope="row" className="px-2 py-1 font-normal">
+                {row[0]}
+              </th>
+              {row.slice(1).map((cell, column) => (
+                <td
+                  key={table.head[column + 1]}
+                  className="px-2 py-1 font-mono whitespace-nowrap tabular-nums"
+                >
                   {cell}
                 </td>
               ))}

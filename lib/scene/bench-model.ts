@@ -144,8 +144,6 @@ export interface PlotLine {
 /** A mechanism set up for drawing: everything a bench shows, as functions of the drive alone. */
 export interface BenchModel {
   readonly spec: BenchSpec;
-  /** What the mechanism is called. */
-  readonly name: string;
   readonly bounds: Bounds;
   readonly drive: DriveControl;
   /** The nearest drive the mechanism lets the driver stand at. */

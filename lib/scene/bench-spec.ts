@@ -13,7 +13,11 @@ export type BenchName = BenchSpec['bench'];
 export interface BenchSettings {
   /** Where the drive starts: an angle in radians, or for the pantograph a length in mm. */
   readonly drive?: number;
-  /** Keys of the readouts that are kept from the learner, in words, numbers, plot and table. */
+  /**
+   * Keys of the readouts that are kept from the learner, in strip, words, tables and plot. Train:
+   * `turns`, `ratio`, `sense`, `teeth`, `centres`; trammel: `length`, `width`, `pen`; pantograph:
+   * `scale`, `copy`, `line`. `oval` and `path` also take the drawn oval and copy away.
+   */
   readonly hide?: readonly string[];
   /** Keys of the settings the learner may change; all of them when left out, none when empty. */
   readonly controls?: readonly string[];

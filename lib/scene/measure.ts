@@ -69,9 +69,13 @@ export function boxText(mm: number, units: Units): string {
   return writeParts(shown, lengthUnit(units)).value;
 }
 
+/** What is nearer to a line than this, mm, lies on it. */
+const seen = 0.05;
+
 /** Where a point lies, in words of the compass: `120.0 mm east, 40.0 mm north`. */
 export function compassText({ x, y }: Point, units: Units): string {
-  const across = `${lengthText(Math.abs(x), units)} ${x < 0 ? 'west' : 'east'}`;
-  const up = `${lengthText(Math.abs(y), units)} ${y < 0 ? 'south' : 'north'}`;
-  return `${across}, ${up}`;
+  const part = (mm: number, plus: string, minus: string) =>
+    Math.abs(mm) < seen ? [] : [`${lengthText(Math.abs(mm), units)} ${mm < 0 ? minus : plus}`];
+  const parts = [...part(x, 'east', 'west'), ...part(y, 'north', 'south')];
+  return parts.length > 0 ? parts.join(', ') : 'the middle';
 }

@@ -40,7 +40,6 @@ export function pantographModel(spec: PantographSpec): BenchModel {
   const drawing = drawPantograph(setup);
   return {
     spec,
-    name: 'Pantograph',
     bounds: drawing.bounds,
     drive: stylusControl(setup),
     admit: (drive) => drive,

@@ -16,7 +16,6 @@ export function trainModel(spec: TrainSpec): BenchModel {
   const start = spec.drive ?? 0;
   return {
     spec,
-    name: 'Train of toothed wheels',
     bounds: drawing.bounds,
     drive: crankControl(setup, start),
     admit: (drive) => (setup.stuck ? start : drive),

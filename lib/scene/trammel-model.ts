@@ -37,7 +37,6 @@ export function trammelModel(spec: TrammelSpec): BenchModel {
   const drawing = drawTrammel(setup);
   return {
     spec,
-    name: 'Elliptic trammel',
     bounds: drawing.bounds,
     drive: barControl(spec.drive ?? radians(38)),
     admit: (drive) => admitted(setup, drive),

@@ -68,7 +68,7 @@ export function describeTrammel(setup: TrammelSetup, drive: number): string {
     );
   }
   for (const dot of spec.dots ?? []) {
-    parts.push(`Dot ${dot.label} is ${compassText(dot, spec.units)} of the middle.`);
+    parts.push(`Dot ${dot.label}: ${compassText(dot, spec.units)}, from the middle.`);
   }
   const fit = fitOf(setup);
   if (fit.outcome === 'enough') {
