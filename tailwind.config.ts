@@ -22,6 +22,7 @@ const config: Config = {
       chalk: colour('chalk'),
       brass: colour('brass'),
       'brass-fill': colour('brass-fill'),
+      'on-brass': colour('on-brass'),
       timber: colour('timber'),
       leaf: colour('leaf'),
       madder: colour('madder'),
