@@ -1,3 +1,4 @@
+import { finiteResult } from '@/lib/numeric/finite-result';
 import type { CompleteGearSpec } from '@/lib/kinematics/gear/proportions';
 
 /**
@@ -42,13 +43,13 @@ export function cuttingRack(gear: CompleteGearSpec, backlash: number): CuttingRa
   const filling = (module * gear.clearance) / (1 - sine);
   const fullRound = (halfTip * cosine) / (1 - sine);
   const corner = Math.min(filling, fullRound);
-  return {
+  return finiteResult('cuttingRack', {
     pitchRadius: (module * gear.teeth) / 2,
     corner,
     depth: whole - corner - module * gear.shift,
     offset: Math.max(0, halfTip - (corner * (1 - sine)) / cosine),
     lastNormal: Math.PI / 2 - pressureAngle,
-  };
+  });
 }
 
 /**
@@ -64,10 +65,10 @@ export function filletPoint(rack: CuttingRack, normal: number): FilletPoint {
   const below = rack.depth + rack.corner * Math.cos(normal);
   const ahead = rack.depth * Math.tan(normal) + rack.corner * Math.sin(normal);
   const rolled = rack.depth * Math.tan(normal) - rack.offset;
-  return {
+  return finiteResult('filletPoint', {
     radius: Math.hypot(rack.pitchRadius - below, ahead),
     angle: Math.atan2(ahead, rack.pitchRadius - below) - rolled / rack.pitchRadius,
-  };
+  });
 }
 
 /**
@@ -78,5 +79,6 @@ export function filletPoint(rack: CuttingRack, normal: number): FilletPoint {
  */
 export function undercutDepth(rack: CuttingRack): number {
   const cosine = Math.cos(rack.lastNormal);
-  return rack.depth + rack.corner * cosine - rack.pitchRadius * cosine * cosine;
+  const depth = rack.depth + rack.corner * cosine - rack.pitchRadius * cosine * cosine;
+  return finiteResult('undercutDepth', depth);
 }

@@ -2,6 +2,7 @@ import { involute, involuteInverse, pressureAngleAt } from '@/lib/kinematics/gea
 import type { CompleteGearSpec } from '@/lib/kinematics/gear/proportions';
 import { cuttingRack, filletPoint, undercutDepth } from '@/lib/kinematics/gear/root-fillet';
 import type { CuttingRack } from '@/lib/kinematics/gear/root-fillet';
+import { finiteResult } from '@/lib/numeric/finite-result';
 import { requireSize } from '@/lib/numeric/moderate';
 import { rootBetween } from '@/lib/numeric/root-between';
 
@@ -61,14 +62,14 @@ export function toothSide(
   const end = lastNormal(fillet, joint, tipCircle);
   const formRadius = fillet(end).radius;
   const tipRadius = end < joint ? formRadius : Math.min(tipCircle, curve.pointedRadius);
-  return {
+  return finiteResult('toothSide', {
     fillet: steps(filletSteps).map((share) => fillet(end * share)),
     flank: flankPoints(curve, formRadius, tipRadius, flankSteps),
     formRadius,
     tipRadius,
     pointedBy: Math.max(0, tipCircle - tipRadius),
     undercutBy: isUndercut ? undercut : 0,
-  };
+  });
 }
 
 interface InvoluteSide {

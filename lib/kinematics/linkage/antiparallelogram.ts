@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import { wrapAngle } from '@/lib/geometry/angle';
 import { fourBarLinkage } from '@/lib/kinematics/linkage/four-bar-linkage';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
@@ -33,9 +33,9 @@ export type CounterOutcome =
  * @example counterCrank({ crank: 40, ground: 100 }, radians(70)) // → { outcome: 'runs', angle: -2.043108, ratio: -0.947671 }
  */
 export function counterCrank(linkage: Antiparallelogram, crankAngle: number): CounterOutcome {
-  const crank = requirePositive('counterCrank', 'crank', linkage.crank);
-  const ground = requirePositive('counterCrank', 'ground', linkage.ground);
-  requireFinite('counterCrank', 'crankAngle', crankAngle);
+  const crank = requireSize('counterCrank', 'crank', linkage.crank);
+  const ground = requireSize('counterCrank', 'ground', linkage.ground);
+  requireMeasure('counterCrank', 'crankAngle', crankAngle);
   const [sum, difference] = [ground + crank, ground - crank];
   if (difference === 0) return { outcome: 'equal-sides' };
   const [sine, cosine] = [Math.sin(crankAngle / 2), Math.cos(crankAngle / 2)];
@@ -56,8 +56,8 @@ export function counterRatios(
 ):
   | { readonly outcome: 'runs'; readonly near: number; readonly far: number }
   | { readonly outcome: 'equal-sides' } {
-  const crank = requirePositive('counterRatios', 'crank', linkage.crank);
-  const ground = requirePositive('counterRatios', 'ground', linkage.ground);
+  const crank = requireSize('counterRatios', 'crank', linkage.crank);
+  const ground = requireSize('counterRatios', 'ground', linkage.ground);
   if (crank === ground) return { outcome: 'equal-sides' };
   const near = (ground + crank) / (crank - ground);
   return { outcome: 'runs', near, far: 1 / near };

@@ -1,5 +1,5 @@
 import { findRoot } from '@/lib/numeric/root';
-import { requireFinite, requireNonNegative, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
 import type { Point } from '@/lib/geometry/point';
 
 /**
@@ -12,9 +12,9 @@ import type { Point } from '@/lib/geometry/point';
  * @example oarPlay(100, 3, radians(40)) // → 0.683693
  */
 export function oarPlay(arm: number, excess: number, swing: number): number {
-  requirePositive('oarPlay', 'arm', arm);
-  requireNonNegative('oarPlay', 'excess', excess);
-  requireFinite('oarPlay', 'swing', swing);
+  requireSize('oarPlay', 'arm', arm);
+  requireSizeOrNought('oarPlay', 'excess', excess);
+  requireMeasure('oarPlay', 'swing', swing);
   const half = Math.sin(swing / 2);
   const odd = Math.sqrt((arm + excess) ** 2 - 4 * arm * excess * half * half);
   return (4 * arm * excess * half * half) / (arm + excess + odd);
@@ -29,8 +29,8 @@ export function oarPlay(arm: number, excess: number, swing: number): number {
  * @example twistAtFlat(50, [{ x: 0, y: 0 }, { x: 70, y: 0 }, { x: 140, y: 0 }], 0) // → 0
  */
 export function twistAtFlat(arm: number, pins: readonly Point[], play: number): number {
-  requirePositive('twistAtFlat', 'arm', arm);
-  requireNonNegative('twistAtFlat', 'play', play);
+  requireSize('twistAtFlat', 'arm', arm);
+  requireSizeOrNought('twistAtFlat', 'play', play);
   if (pins.length < 3) {
     throw new RangeError(`twistAtFlat: pins are ${pins.length}; expected three or more`);
   }

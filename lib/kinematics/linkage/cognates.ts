@@ -1,4 +1,4 @@
-import { requirePositive } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
 import { direction, distance, polar, type Point } from '@/lib/geometry/point';
 import {
   requireFourBar,
@@ -34,8 +34,8 @@ export interface Cognates {
 export function cognates(bars: FourBarLengths, place: CouplerPlace): Cognates {
   const { crank, coupler, rocker, frame } = requireFourBar('cognates', bars);
   const P = polar(place.distance, place.angle);
-  const AP = requirePositive('cognates', 'distance A–P', Math.abs(place.distance));
-  const BP = requirePositive('cognates', 'distance B–P', distance(P, { x: coupler, y: 0 }));
+  const AP = requireSize('cognates', 'distance A–P', Math.abs(place.distance));
+  const BP = requireSize('cognates', 'distance B–P', distance(P, { x: coupler, y: 0 }));
   const atA = direction(P);
   const atB = Math.PI - direction({ x: P.x - coupler, y: P.y });
   const [left, right] = [AP / coupler, BP / coupler];

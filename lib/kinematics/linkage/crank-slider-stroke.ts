@@ -1,4 +1,4 @@
-import { requireFinite } from '@/lib/numeric/require';
+import { requireMeasure } from '@/lib/numeric/moderate';
 import { findRoot } from '@/lib/numeric/root';
 import { LENGTH_TOLERANCE, sqrtClamped } from '@/lib/numeric/tolerance';
 import { TURN, wrapTurn } from '@/lib/geometry/angle';
@@ -135,7 +135,7 @@ export function fastestSlider(mechanism: Omit<CrankSlider, 'offset'>): FastestOu
  * @example sidePush(radians(20)) // → 0.363970
  */
 export function sidePush(lean: number): number {
-  requireFinite('sidePush', 'lean', lean);
+  requireMeasure('sidePush', 'lean', lean);
   if (Math.abs(lean) >= TURN / 4) {
     throw new RangeError(`sidePush: lean is ${lean}; expected less than a quarter turn`);
   }

@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import { LENGTH_TOLERANCE, sqrtClamped } from '@/lib/numeric/tolerance';
 import type { CrankMotion } from '@/lib/kinematics/linkage/four-bar-motion';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
@@ -42,7 +42,7 @@ export function crankSliderPosition(
   crankAngle: number,
 ): CrankSliderOutcome {
   const { crank, rod, offset } = requireSlider('crankSliderPosition', mechanism);
-  requireFinite('crankSliderPosition', 'crankAngle', crankAngle);
+  requireMeasure('crankSliderPosition', 'crankAngle', crankAngle);
   const rise = crank * Math.sin(crankAngle) - offset;
   const by = Math.abs(rise) - rod;
   if (by > LENGTH_TOLERANCE * (rod + crank)) return { outcome: 'does-not-close', by };
@@ -82,8 +82,8 @@ export function crankSliderMotion(
   side: SliderSide,
   { angle, speed, acceleration = 0 }: CrankMotion,
 ): CrankSliderMotionOutcome {
-  requireFinite('crankSliderMotion', 'speed', speed);
-  requireFinite('crankSliderMotion', 'acceleration', acceleration);
+  requireMeasure('crankSliderMotion', 'speed', speed);
+  requireMeasure('crankSliderMotion', 'acceleration', acceleration);
   const found = crankSliderPosition(mechanism, angle);
   if (found.outcome === 'does-not-close') return found;
   const pose = found[side];
@@ -145,8 +145,8 @@ export function crankSliderLinkage(
 export function requireSlider(caller: string, mechanism: CrankSlider): Required<CrankSlider> {
   const { crank, rod, offset = 0 } = mechanism;
   return {
-    crank: requirePositive(caller, 'crank', crank),
-    rod: requirePositive(caller, 'rod', rod),
-    offset: requireFinite(caller, 'offset', offset),
+    crank: requireSize(caller, 'crank', crank),
+    rod: requireSize(caller, 'rod', rod),
+    offset: requireMeasure(caller, 'offset', offset),
   };
 }

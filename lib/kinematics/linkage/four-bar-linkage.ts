@@ -1,5 +1,5 @@
 import { polar, type Point } from '@/lib/geometry/point';
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import type { Linkage, Plate } from '@/lib/kinematics/linkage/solver/linkage';
 
 /** Bars of a four-bar, any one unit: crank O2–A, coupler A–B, rocker O4–B, frame O2–O4. */
@@ -18,10 +18,10 @@ export interface CouplerPlace {
 
 /** Throws `RangeError` unless all four lengths are positive; gives them back. */
 export function requireFourBar(caller: string, bars: FourBarLengths): FourBarLengths {
-  requirePositive(caller, 'crank', bars.crank);
-  requirePositive(caller, 'coupler', bars.coupler);
-  requirePositive(caller, 'rocker', bars.rocker);
-  requirePositive(caller, 'frame', bars.frame);
+  requireSize(caller, 'crank', bars.crank);
+  requireSize(caller, 'coupler', bars.coupler);
+  requireSize(caller, 'rocker', bars.rocker);
+  requireSize(caller, 'frame', bars.frame);
   return bars;
 }
 
@@ -41,8 +41,8 @@ export function fourBarLinkage(
   const up = side === 'open' ? 1 : -1;
   const shape: Record<string, Point> = { A: { x: 0, y: 0 }, B: { x: coupler, y: 0 } };
   if (point) {
-    requireFinite('fourBarLinkage', 'point.distance', point.distance);
-    requireFinite('fourBarLinkage', 'point.angle', point.angle);
+    requireMeasure('fourBarLinkage', 'point.distance', point.distance);
+    requireMeasure('fourBarLinkage', 'point.angle', point.angle);
     shape.P = polar(point.distance, point.angle);
   }
   const plates: readonly Plate[] = [{ shape }];

@@ -1,4 +1,5 @@
-import { requireFinite } from '@/lib/numeric/require';
+import { finiteResult } from '@/lib/numeric/finite-result';
+import { requireMeasure } from '@/lib/numeric/moderate';
 import {
   add,
   cross,
@@ -54,8 +55,8 @@ export function fourBarMotion(
   side: FourBarSide,
   { angle, speed, acceleration = 0 }: CrankMotion,
 ): FourBarMotionOutcome {
-  requireFinite('fourBarMotion', 'speed', speed);
-  requireFinite('fourBarMotion', 'acceleration', acceleration);
+  requireMeasure('fourBarMotion', 'speed', speed);
+  requireMeasure('fourBarMotion', 'acceleration', acceleration);
   const found = fourBarPosition(bars, angle);
   if (found.outcome === 'does-not-close') return found;
   const pose = found[side];
@@ -84,9 +85,9 @@ export function fourBarMotion(
 
 /** Position of a coupler point. Frame as `fourBarPosition`; the angle is laid off from A–B, CCW. */
 export function couplerPointOf({ A, couplerAngle }: FourBarPose, place: CouplerPlace): Point {
-  requireFinite('couplerPointOf', 'place.distance', place.distance);
-  requireFinite('couplerPointOf', 'place.angle', place.angle);
-  return polar(place.distance, couplerAngle + place.angle, A);
+  requireMeasure('couplerPointOf', 'place.distance', place.distance);
+  requireMeasure('couplerPointOf', 'place.angle', place.angle);
+  return finiteResult('couplerPointOf', polar(place.distance, couplerAngle + place.angle, A));
 }
 
 /**
@@ -164,9 +165,9 @@ export function couplerPointMotion(
  * @example speedFromDots(10, radians(10), 3) // → 171.887339
  */
 export function speedFromDots(gap: number, dotTurn: number, crankSpeed: number): number {
-  requireFinite('speedFromDots', 'gap', gap);
-  requireFinite('speedFromDots', 'crankSpeed', crankSpeed);
-  return requireFinite('speedFromDots', 'gap·speed/turn', (gap * crankSpeed) / dotTurn);
+  requireMeasure('speedFromDots', 'gap', gap);
+  requireMeasure('speedFromDots', 'crankSpeed', crankSpeed);
+  return requireMeasure('speedFromDots', 'gap·speed/turn', (gap * crankSpeed) / dotTurn);
 }
 
 /** Solve w + p·along⊥ = q·arm⊥ for p and q. */

@@ -1,4 +1,4 @@
-import { requireFinite } from '@/lib/numeric/require';
+import { requireMeasure } from '@/lib/numeric/moderate';
 import { wrapTurn } from '@/lib/geometry/angle';
 import { fourBarAssembly, type FourBarSide } from '@/lib/kinematics/linkage/four-bar';
 import { grashofCount } from '@/lib/kinematics/linkage/four-bar-class';
@@ -78,7 +78,7 @@ export type TransmissionOutcome =
  * @example transmissionAngle({ crank: 40, coupler: 120, rocker: 80, frame: 100 }, radians(40)).angle // → 0.646243
  */
 export function transmissionAngle(bars: FourBarLengths, crankAngle: number): TransmissionOutcome {
-  requireFinite('transmissionAngle', 'crankAngle', crankAngle);
+  requireMeasure('transmissionAngle', 'crankAngle', crankAngle);
   const found = fourBarAssembly(bars, crankAngle);
   if (found.outcome === 'does-not-close') return { outcome: 'does-not-close', by: found.by };
   const angle = angleOpposite(found.diagonal, bars.coupler, bars.rocker);

@@ -1,4 +1,4 @@
-import { requireFinite } from '@/lib/numeric/require';
+import { requireMeasure } from '@/lib/numeric/moderate';
 import { LENGTH_TOLERANCE } from '@/lib/numeric/tolerance';
 import { intersectCircles } from '@/lib/geometry/circle';
 import { direction, distance, polar, subtract, type Point } from '@/lib/geometry/point';
@@ -39,7 +39,7 @@ export type FourBarOutcome =
  */
 export function fourBarPosition(bars: FourBarLengths, crankAngle: number): FourBarOutcome {
   const { crank, coupler, rocker, frame } = requireFourBar('fourBarPosition', bars);
-  requireFinite('fourBarPosition', 'crankAngle', crankAngle);
+  requireMeasure('fourBarPosition', 'crankAngle', crankAngle);
   const A = polar(crank, crankAngle);
   const O4 = { x: frame, y: 0 };
   const found = intersectCircles({ centre: A, radius: coupler }, { centre: O4, radius: rocker });
@@ -83,7 +83,7 @@ export type AssemblyOutcome =
  */
 export function fourBarAssembly(bars: FourBarLengths, crankAngle: number): AssemblyOutcome {
   const { crank, coupler, rocker, frame } = requireFourBar('fourBarAssembly', bars);
-  requireFinite('fourBarAssembly', 'crankAngle', crankAngle);
+  requireMeasure('fourBarAssembly', 'crankAngle', crankAngle);
   const diagonal = distance(polar(crank, crankAngle), { x: frame, y: 0 });
   const slack = Math.min(coupler + rocker - diagonal, diagonal - Math.abs(coupler - rocker));
   return slack >= -LENGTH_TOLERANCE * (crank + frame)

@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import { solveLinear } from '@/lib/numeric/linear';
 import type { FourBarLengths } from '@/lib/kinematics/linkage/four-bar-linkage';
 
@@ -36,12 +36,12 @@ export function fourBarThroughPairs(
   frame: number,
   pairs: readonly [AnglePair, AnglePair, AnglePair],
 ): SynthesisOutcome {
-  requirePositive('fourBarThroughPairs', 'frame', frame);
+  requireSize('fourBarThroughPairs', 'frame', frame);
   const matrix = new Float64Array(9);
   const right = new Float64Array(3);
   pairs.forEach(({ crank, rocker }, k) => {
-    requireFinite('fourBarThroughPairs', 'crank', crank);
-    requireFinite('fourBarThroughPairs', 'rocker', rocker);
+    requireMeasure('fourBarThroughPairs', 'crank', crank);
+    requireMeasure('fourBarThroughPairs', 'rocker', rocker);
     matrix.set([Math.cos(rocker), -Math.cos(crank), 1], 3 * k);
     right[k] = Math.cos(crank - rocker);
   });

@@ -1,4 +1,5 @@
-import { requirePositive, requireWithin } from '@/lib/numeric/require';
+import { requireSize } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 import type { Point } from '@/lib/geometry/point';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
 
@@ -22,8 +23,8 @@ export interface HartInversor {
  * @example hartPower({ long: 160, short: 80, share: 0.5 }) // → 4800
  */
 export function hartPower({ long, short, share }: HartInversor): number {
-  requirePositive('hartPower', 'long', long);
-  requirePositive('hartPower', 'short', short);
+  requireSize('hartPower', 'long', long);
+  requireSize('hartPower', 'short', short);
   requireWithin('hartPower', 'share', share, 0, 1);
   return share * (1 - share) * (long - short) * (long + short);
 }
@@ -31,10 +32,13 @@ export function hartPower({ long, short, share }: HartInversor): number {
 /**
  * Hart's inversor as data: O fixed at the origin, P led by a crank as long as its pin `E` is far
  * from O, so that Q draws a straight line square to O–E, beyond O by power/(2·crank).
+ *
+ * Throws `RangeError` as `hartPower`, and unless the long bars are the longer ones.
  */
 export function hartLinkage({ long, short, share }: HartInversor, crank: number): Linkage {
-  requirePositive('hartLinkage', 'crank', crank);
+  requireSize('hartLinkage', 'crank', crank);
   hartPower({ long, short, share });
+  requireSize('hartLinkage', 'long − short', long - short);
   const [ao, ap] = [share * long, share * short];
   const power = (long - short) * (long + short);
   const top = (Math.sqrt(short * short + 4 * power) - short) / 2;

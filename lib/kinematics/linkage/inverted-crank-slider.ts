@@ -1,9 +1,5 @@
-import {
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-  requireWithin,
-} from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 import { acosClamped } from '@/lib/numeric/tolerance';
 import { wrapAngle } from '@/lib/geometry/angle';
 import { direction, norm, polar, subtract } from '@/lib/geometry/point';
@@ -47,7 +43,7 @@ export function invertedPosition(
   crankAngle: number,
 ): InvertedOutcome {
   const { crank, frame, arm, grooveAngle } = requireInverted('invertedPosition', mechanism);
-  requireFinite('invertedPosition', 'crankAngle', crankAngle);
+  requireMeasure('invertedPosition', 'crankAngle', crankAngle);
   const toPin = subtract(polar(crank, crankAngle), { x: frame, y: 0 });
   const away = norm(toPin);
   const off = arm * Math.sin(grooveAngle);
@@ -78,7 +74,7 @@ export function invertedLinkage(
   { side = 'left' }: { readonly side?: 'left' | 'right' } = {},
 ): Linkage {
   const { crank, frame, arm, grooveAngle } = requireInverted('invertedLinkage', mechanism);
-  requirePositive('invertedLinkage', 'arm', arm);
+  requireSize('invertedLinkage', 'arm', arm);
   const turn = side === 'left' ? -grooveAngle : grooveAngle;
   const end = polar(crank + frame, turn, { x: arm, y: 0 });
   const found = [0.3, 1.2, 2.4, 3.1].map((angle) => ({
@@ -107,9 +103,9 @@ export function invertedLinkage(
 
 /** A slotted lever, driven by its crank, as data: points `O2`, `A`, `O4` (the lever's pivot) and `E`, its end. */
 export function slottedLeverLinkage(crank: number, centreDistance: number, lever: number): Linkage {
-  requirePositive('slottedLeverLinkage', 'crank', crank);
-  requirePositive('slottedLeverLinkage', 'centreDistance', centreDistance);
-  requirePositive('slottedLeverLinkage', 'lever', lever);
+  requireSize('slottedLeverLinkage', 'crank', crank);
+  requireSize('slottedLeverLinkage', 'centreDistance', centreDistance);
+  requireSize('slottedLeverLinkage', 'lever', lever);
   return {
     points: {
       O2: { x: 0, y: 0 },
@@ -132,9 +128,9 @@ function requireInverted(
   { crank, frame, arm, grooveAngle = Math.PI / 2 }: InvertedCrankSlider,
 ): Required<InvertedCrankSlider> {
   return {
-    crank: requirePositive(caller, 'crank', crank),
-    frame: requirePositive(caller, 'frame', frame),
-    arm: requireNonNegative(caller, 'arm', arm),
+    crank: requireSize(caller, 'crank', crank),
+    frame: requireSize(caller, 'frame', frame),
+    arm: requireSizeOrNought(caller, 'arm', arm),
     grooveAngle: requireWithin(caller, 'grooveAngle', grooveAngle, 0, Math.PI),
   };
 }

@@ -1,10 +1,5 @@
-import {
-  requireCount,
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-  requireWithin,
-} from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireCount, requireWithin } from '@/lib/numeric/require';
 import type { Point } from '@/lib/geometry/point';
 import type { Linkage, Plate } from '@/lib/kinematics/linkage/solver/linkage';
 
@@ -63,7 +58,7 @@ export function tongsTravel(
 export function tongsCurl(tongs: LazyTongs, angle: number, off: number): number {
   const { stages, bar } = requireTongs('tongsCurl', tongs);
   requireWithin('tongsCurl', 'angle', angle, 1e-9, Math.PI / 2);
-  requireFinite('tongsCurl', 'off', off);
+  requireMeasure('tongsCurl', 'off', off);
   return 2 * stages * Math.atan2(2 * off * Math.cos(angle), bar * Math.sin(angle));
 }
 
@@ -79,7 +74,7 @@ export function tongsClearance(
   | { readonly outcome: 'clear'; readonly least: number; readonly most: number }
   | { readonly outcome: 'too-wide'; readonly by: number } {
   const { bar } = requireTongs('tongsClearance', tongs);
-  requireNonNegative('tongsClearance', 'width', width);
+  requireSizeOrNought('tongsClearance', 'width', width);
   if (2 * width > bar) return { outcome: 'too-wide', by: width - bar / 2 };
   const least = Math.asin((2 * width) / bar) / 2;
   return { outcome: 'clear', least, most: Math.PI / 2 - least };
@@ -105,7 +100,7 @@ export interface ScissorLift {
 export function scissorLift(tongs: LazyTongs, angle: number, load: number): ScissorLift {
   const { stages, bar } = requireTongs('scissorLift', tongs);
   requireWithin('scissorLift', 'angle', angle, 1e-9, Math.PI / 2);
-  requireFinite('scissorLift', 'load', load);
+  requireMeasure('scissorLift', 'load', load);
   const rate = (stages * Math.cos(angle)) / Math.sin(angle);
   return { height: stages * bar * Math.sin(angle), rate, force: load * rate };
 }
@@ -152,6 +147,6 @@ export function tongsLinkage(tongs: LazyTongs, off = 0): Linkage {
 function requireTongs(caller: string, { stages, bar }: LazyTongs): LazyTongs {
   return {
     stages: requireCount(caller, 'stages', stages),
-    bar: requirePositive(caller, 'bar', bar),
+    bar: requireSize(caller, 'bar', bar),
   };
 }

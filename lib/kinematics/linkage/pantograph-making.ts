@@ -1,9 +1,5 @@
-import {
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-  requireWithin,
-} from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 import {
   PANTOGRAPH_ROLES,
   type Pantograph,
@@ -43,10 +39,10 @@ export function pantographHoles(
   scale: number,
   setUp: PantographSetUp,
 ): HolesOutcome {
-  requirePositive('pantographHoles', 'first', first);
-  requirePositive('pantographHoles', 'second', second);
+  requireSize('pantographHoles', 'first', first);
+  requireSize('pantographHoles', 'second', second);
   const turned = PANTOGRAPH_ROLES[setUp].fixed === 'M';
-  const size = requirePositive('pantographHoles', 'scale', turned ? Math.abs(scale) : scale);
+  const size = requireSize('pantographHoles', 'scale', turned ? Math.abs(scale) : scale);
   if (setUp === 'middle-to-end' && size < 1) return { outcome: 'scale-too-small', least: 1 };
   if (setUp === 'end-to-middle' && size > 1) return { outcome: 'scale-too-large', most: 1 };
   const divisor = turned ? 1 + size : setUp === 'middle-to-end' ? size : 1 / size;
@@ -66,8 +62,8 @@ export function pantographHoles(
  * @example truePantograph(350, 280, 140).secondHole // → 112
  */
 export function truePantograph(first: number, second: number, firstHole: number): Pantograph {
-  requirePositive('truePantograph', 'first', first);
-  requirePositive('truePantograph', 'second', second);
+  requireSize('truePantograph', 'first', first);
+  requireSize('truePantograph', 'second', second);
   requireWithin('truePantograph', 'firstHole', firstHole, 0, first);
   return { first, second, firstHole, secondHole: (second * firstHole) / first };
 }
@@ -77,8 +73,8 @@ export function truePantograph(first: number, second: number, firstHole: number)
  * @example strayAtPen(2.5, 0.4) // → 1
  */
 export function strayAtPen(scale: number, stray: number): number {
-  requireFinite('strayAtPen', 'scale', scale);
-  return Math.abs(scale) * requireNonNegative('strayAtPen', 'stray', stray);
+  requireMeasure('strayAtPen', 'scale', scale);
+  return Math.abs(scale) * requireSizeOrNought('strayAtPen', 'stray', stray);
 }
 
 /**
@@ -86,6 +82,6 @@ export function strayAtPen(scale: number, stray: number): number {
  * @example shiftAtPen(3, 1) // → 2
  */
 export function shiftAtPen(scale: number, shift: number): number {
-  requireFinite('shiftAtPen', 'scale', scale);
-  return Math.abs(scale - 1) * requireNonNegative('shiftAtPen', 'shift', shift);
+  requireMeasure('shiftAtPen', 'scale', scale);
+  return Math.abs(scale - 1) * requireSizeOrNought('shiftAtPen', 'shift', shift);
 }

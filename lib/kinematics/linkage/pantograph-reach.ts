@@ -1,4 +1,6 @@
-import { requireFinite, requirePositive, requireWithin } from '@/lib/numeric/require';
+import { finiteResult } from '@/lib/numeric/finite-result';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 import { acosClamped } from '@/lib/numeric/tolerance';
 import { cross, direction, dot, norm, subtract, type Point } from '@/lib/geometry/point';
 import {
@@ -82,9 +84,9 @@ export function leadPantograph(
   requireElbow('leadPantograph', elbow);
   const lead = subtract(stylus, fixed);
   const away = norm(lead);
-  requireFinite('leadPantograph', 'stylus − fixed', away);
+  requireMeasure('leadPantograph', 'stylus − fixed', away);
   const { first, second } = seen.stylus;
-  requirePositive('leadPantograph', 'stylus from the fixed pin', first * second);
+  requireSize('leadPantograph', 'stylus from the fixed pin', first * second);
   const { least, most } = reach(seen.stylus, elbow);
   const rounding = 1e-12 * most;
   if (away > most + rounding) return { outcome: 'too-far', by: away - most };
@@ -110,11 +112,11 @@ export function stylusForPen(
   { fixed, scale }: { readonly fixed: Point; readonly scale: number },
   wanted: Point,
 ): Point {
-  requirePositive('stylusForPen', '|scale|', Math.abs(scale));
-  return {
+  requireSize('stylusForPen', '|scale|', Math.abs(scale));
+  return finiteResult('stylusForPen', {
     x: fixed.x + (wanted.x - fixed.x) / scale,
     y: fixed.y + (wanted.y - fixed.y) / scale,
-  };
+  });
 }
 
 function pointsFrom(

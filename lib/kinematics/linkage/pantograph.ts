@@ -1,4 +1,5 @@
-import { requireFinite, requireNonNegative, requirePositive } from '@/lib/numeric/require';
+import { finiteResult } from '@/lib/numeric/finite-result';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
 import { nearlyEqual } from '@/lib/numeric/tolerance';
 import { polar, add, subtract, type Point } from '@/lib/geometry/point';
 
@@ -80,9 +81,9 @@ export function copyStretch(
   elbow: number,
 ): { readonly most: number; readonly least: number } {
   const { stylus, pen } = reachesOf('copyStretch', pantograph, setUp);
-  const sine = requirePositive('copyStretch', 'sin(elbow)', Math.sin(elbow));
-  const k1 = requireFinite('copyStretch', 'scale', pen.first / stylus.first);
-  const k2 = requireFinite('copyStretch', 'scale', pen.second / stylus.second);
+  const sine = requireSize('copyStretch', 'sin(elbow)', Math.sin(elbow));
+  const k1 = requireMeasure('copyStretch', 'scale', pen.first / stylus.first);
+  const k2 = requireMeasure('copyStretch', 'scale', pen.second / stylus.second);
   const tilt = ((k2 - k1) * Math.cos(elbow)) / sine;
   const [sum, difference] = [Math.hypot(k1 + k2, tilt), Math.hypot(k1 - k2, tilt)];
   return { most: (sum + difference) / 2, least: Math.abs(sum - difference) / 2 };
@@ -101,18 +102,18 @@ export function pantographPoints(
   firstAngle: number,
   secondAngle: number,
 ): PantographPoints {
-  requireFinite('pantographPoints', 'firstAngle', firstAngle);
-  requireFinite('pantographPoints', 'secondAngle', secondAngle);
+  requireMeasure('pantographPoints', 'firstAngle', firstAngle);
+  requireMeasure('pantographPoints', 'secondAngle', secondAngle);
   const C = polar(first, firstAngle);
   const B = polar(firstHole, firstAngle);
-  return {
+  return finiteResult('pantographPoints', {
     O: { x: 0, y: 0 },
     B,
     C,
     D: polar(secondHole, secondAngle, C),
     M: polar(secondHole, secondAngle, B),
     P: polar(second, secondAngle, C),
-  };
+  });
 }
 
 /**
@@ -128,7 +129,10 @@ export function pantographDisplacement(
 ): { readonly M: Point; readonly P: Point } {
   const from = pantographPoints(pantograph, angles.first, angles.second);
   const to = pantographPoints(pantograph, angles.first + turns.first, angles.second + turns.second);
-  return { M: subtract(to.M, from.M), P: subtract(to.P, from.P) };
+  return finiteResult('pantographDisplacement', {
+    M: subtract(to.M, from.M),
+    P: subtract(to.P, from.P),
+  });
 }
 
 /** A point seen from the fixed one, as so much along the first bar and so much along the second. */
@@ -152,12 +156,12 @@ export function reachesOf(
   const corners: Readonly<Record<PantographCorner, Point>> = {
     O: { x: 0, y: 0 },
     M: {
-      x: requireNonNegative(caller, 'firstHole', pantograph.firstHole),
-      y: requireNonNegative(caller, 'secondHole', pantograph.secondHole),
+      x: requireSizeOrNought(caller, 'firstHole', pantograph.firstHole),
+      y: requireSizeOrNought(caller, 'secondHole', pantograph.secondHole),
     },
     P: {
-      x: requirePositive(caller, 'first', pantograph.first),
-      y: requirePositive(caller, 'second', pantograph.second),
+      x: requireSize(caller, 'first', pantograph.first),
+      y: requireSize(caller, 'second', pantograph.second),
     },
   };
   const seen = (corner: PantographCorner): BarCoordinates => {
@@ -174,5 +178,5 @@ export function fromBars(
   secondAngle: number,
   from: Point,
 ): Point {
-  return add(polar(first, firstAngle, from), polar(second, secondAngle));
+  return finiteResult('fromBars', add(polar(first, firstAngle, from), polar(second, secondAngle)));
 }

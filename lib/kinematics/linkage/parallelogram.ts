@@ -1,4 +1,4 @@
-import { requireFinite, requireNonNegative, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
 import type { Point } from '@/lib/geometry/point';
 import { fourBarLinkage } from '@/lib/kinematics/linkage/four-bar-linkage';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
@@ -31,9 +31,9 @@ export function boardPoint(
   readonly turn: number;
 } {
   const { arm } = requireArms('boardPoint', parallelogram);
-  requireFinite('boardPoint', 'armAngle', armAngle);
-  requireFinite('boardPoint', 'along', along);
-  requireFinite('boardPoint', 'above', above);
+  requireMeasure('boardPoint', 'armAngle', armAngle);
+  requireMeasure('boardPoint', 'along', along);
+  requireMeasure('boardPoint', 'above', above);
   return {
     position: { x: arm * Math.cos(armAngle) + along, y: arm * Math.sin(armAngle) + above },
     centre: { x: along, y: above },
@@ -51,7 +51,7 @@ export function parallelGaps(
   armAngle: number,
 ): { readonly pinLines: number; readonly arms: number } {
   const { arm, ground } = requireArms('parallelGaps', parallelogram);
-  const sine = Math.abs(Math.sin(requireFinite('parallelGaps', 'armAngle', armAngle)));
+  const sine = Math.abs(Math.sin(requireMeasure('parallelGaps', 'armAngle', armAngle)));
   return { pinLines: arm * sine, arms: ground * sine };
 }
 
@@ -66,8 +66,8 @@ export function ruleOpening(
 ):
   | { readonly outcome: 'opens'; readonly angle: number; readonly slide: number }
   | { readonly outcome: 'too-wide'; readonly by: number } {
-  requirePositive('ruleOpening', 'arm', arm);
-  requireNonNegative('ruleOpening', 'gap', gap);
+  requireSize('ruleOpening', 'arm', arm);
+  requireSizeOrNought('ruleOpening', 'gap', gap);
   if (gap > arm) return { outcome: 'too-wide', by: gap - arm };
   return {
     outcome: 'opens',
@@ -89,7 +89,7 @@ export function armsTouchAt(
   | { readonly outcome: 'touch'; readonly angle: number }
   | { readonly outcome: 'always-touch'; readonly by: number } {
   const { ground } = requireArms('armsTouchAt', parallelogram);
-  requireNonNegative('armsTouchAt', 'width', width);
+  requireSizeOrNought('armsTouchAt', 'width', width);
   if (width > ground) return { outcome: 'always-touch', by: width - ground };
   return { outcome: 'touch', angle: Math.asin(width / ground) };
 }
@@ -105,8 +105,8 @@ export function boardTilt(
   { arm = 0, board = 0 }: { readonly arm?: number; readonly board?: number },
 ): number {
   const { ground } = requireArms('boardTilt', parallelogram);
-  requireFinite('boardTilt', 'arm error', arm);
-  requireFinite('boardTilt', 'board error', board);
+  requireMeasure('boardTilt', 'arm error', arm);
+  requireMeasure('boardTilt', 'board error', board);
   const sine = Math.sin(armAngle);
   if (!(Math.abs(sine) > 1e-9)) {
     throw new RangeError(`boardTilt: armAngle is ${armAngle}; expected arms off the frame line`);
@@ -123,9 +123,9 @@ export function boardSwing(
   from: number,
   to: number,
 ): { readonly out: number; readonly down: number } {
-  requirePositive('boardSwing', 'arm', arm);
-  requireFinite('boardSwing', 'from', from);
-  requireFinite('boardSwing', 'to', to);
+  requireSize('boardSwing', 'arm', arm);
+  requireMeasure('boardSwing', 'from', from);
+  requireMeasure('boardSwing', 'to', to);
   const [middle, half] = [(from + to) / 2, (from - to) / 2];
   const chord = 2 * arm * Math.sin(half);
   return { out: chord * Math.sin(middle), down: chord * Math.cos(middle) };
@@ -139,7 +139,7 @@ export function parallelogramLinkage(parallelogram: Parallelogram): Linkage {
 
 function requireArms(caller: string, { arm, ground }: Parallelogram): Parallelogram {
   return {
-    arm: requirePositive(caller, 'arm', arm),
-    ground: requirePositive(caller, 'ground', ground),
+    arm: requireSize(caller, 'arm', arm),
+    ground: requireSize(caller, 'ground', ground),
   };
 }

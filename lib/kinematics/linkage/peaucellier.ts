@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import { acosClamped, nearlyEqual } from '@/lib/numeric/tolerance';
 import { distance, polar, scale, type Point } from '@/lib/geometry/point';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
@@ -24,8 +24,8 @@ export interface PeaucellierCell {
  * @example inversionPower({ long: 120, short: 50 }) // → 11900
  */
 export function inversionPower({ long, short }: Pick<PeaucellierCell, 'long' | 'short'>): number {
-  requirePositive('inversionPower', 'long', long);
-  requirePositive('inversionPower', 'short', short);
+  requireSize('inversionPower', 'long', long);
+  requireSize('inversionPower', 'short', short);
   return (long - short) * (long + short);
 }
 
@@ -91,7 +91,7 @@ export type CellPoint =
  */
 export function peaucellierPoint(cell: PeaucellierCell, crankAngle: number): CellPoint {
   const { long, short, crank, centreDistance } = requireCell('peaucellierPoint', cell);
-  requireFinite('peaucellierPoint', 'crankAngle', crankAngle);
+  requireMeasure('peaucellierPoint', 'crankAngle', crankAngle);
   const near = polar(crank, crankAngle, { x: centreDistance, y: 0 });
   const away = distance(near, { x: 0, y: 0 });
   const by = Math.max(Math.abs(long - short) - away, away - (long + short));
@@ -126,9 +126,9 @@ export function peaucellierLinkage(cell: PeaucellierCell): Linkage {
 }
 
 function requireCell(caller: string, cell: PeaucellierCell): PeaucellierCell {
-  requirePositive(caller, 'long', cell.long);
-  requirePositive(caller, 'short', cell.short);
-  requirePositive(caller, 'crank', cell.crank);
-  requirePositive(caller, 'centreDistance', cell.centreDistance);
+  requireSize(caller, 'long', cell.long);
+  requireSize(caller, 'short', cell.short);
+  requireSize(caller, 'crank', cell.crank);
+  requireSize(caller, 'centreDistance', cell.centreDistance);
   return cell;
 }

@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import { add, ORIGIN, polar, type Point } from '@/lib/geometry/point';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
 
@@ -37,10 +37,10 @@ export function plagiographCopy({ first, second, stylusArm, plateAngle }: Plagio
   readonly turn: number;
   readonly penArm: number;
 } {
-  requirePositive('plagiographCopy', 'first', first);
-  requirePositive('plagiographCopy', 'second', second);
-  requirePositive('plagiographCopy', 'stylusArm', stylusArm);
-  requireFinite('plagiographCopy', 'plateAngle', plateAngle);
+  requireSize('plagiographCopy', 'first', first);
+  requireSize('plagiographCopy', 'second', second);
+  requireSize('plagiographCopy', 'stylusArm', stylusArm);
+  requireMeasure('plagiographCopy', 'plateAngle', plateAngle);
   const scale = second / stylusArm;
   return { scale, turn: 0 - plateAngle, penArm: first * scale };
 }
@@ -55,8 +55,8 @@ export function plagiographPose(
   secondAngle: number,
 ): PlagiographPose {
   const { penArm } = plagiographCopy(plagiograph);
-  requireFinite('plagiographPose', 'firstAngle', firstAngle);
-  requireFinite('plagiographPose', 'secondAngle', secondAngle);
+  requireMeasure('plagiographPose', 'firstAngle', firstAngle);
+  requireMeasure('plagiographPose', 'secondAngle', secondAngle);
   const { first, second, stylusArm, plateAngle } = plagiograph;
   const A = polar(first, firstAngle);
   const C = polar(second, secondAngle);
@@ -80,10 +80,10 @@ export function plagiographFor(
   scale: number,
   turn: number,
 ): Plagiograph {
-  requirePositive('plagiographFor', 'first', first);
-  requirePositive('plagiographFor', 'second', second);
-  requirePositive('plagiographFor', 'scale', scale);
-  requireFinite('plagiographFor', 'turn', turn);
+  requireSize('plagiographFor', 'first', first);
+  requireSize('plagiographFor', 'second', second);
+  requireSize('plagiographFor', 'scale', scale);
+  requireMeasure('plagiographFor', 'turn', turn);
   return { first, second, stylusArm: second / scale, plateAngle: 0 - turn };
 }
 

@@ -1,4 +1,4 @@
-import { requireFinite, requireNonNegative, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
 import { acosClamped, asinClamped } from '@/lib/numeric/tolerance';
 import { direction, distance, type Point } from '@/lib/geometry/point';
 import type { CrankMotion } from '@/lib/kinematics/linkage/four-bar-motion';
@@ -51,8 +51,8 @@ export function shaperStrokes(lever: SlottedLever): ShaperOutcome {
  * @example shaperStroke(450, radians(30)) // → 450
  */
 export function shaperStroke(length: number, halfSwing: number): number {
-  requireFinite('shaperStroke', 'halfSwing', halfSwing);
-  return 2 * requirePositive('shaperStroke', 'length', length) * Math.sin(halfSwing);
+  requireMeasure('shaperStroke', 'halfSwing', halfSwing);
+  return 2 * requireSize('shaperStroke', 'length', length) * Math.sin(halfSwing);
 }
 
 /**
@@ -61,8 +61,8 @@ export function shaperStroke(length: number, halfSwing: number): number {
  * @example shaperCrank(240, 2) // → 120
  */
 export function shaperCrank(centreDistance: number, timeRatio: number): number {
-  requirePositive('shaperCrank', 'centreDistance', centreDistance);
-  const over = requireNonNegative('shaperCrank', 'timeRatio − 1', timeRatio - 1);
+  requireSize('shaperCrank', 'centreDistance', centreDistance);
+  const over = requireSizeOrNought('shaperCrank', 'timeRatio − 1', timeRatio - 1);
   return centreDistance * Math.sin(((Math.PI / 2) * over) / (timeRatio + 1));
 }
 
@@ -117,9 +117,9 @@ export function leverMotion(
   { angle, speed, acceleration = 0 }: CrankMotion,
 ): LeverOutcome {
   const { crank, centreDistance } = requireLever('leverMotion', lever);
-  requireFinite('leverMotion', 'angle', angle);
-  requireFinite('leverMotion', 'speed', speed);
-  requireFinite('leverMotion', 'acceleration', acceleration);
+  requireMeasure('leverMotion', 'angle', angle);
+  requireMeasure('leverMotion', 'speed', speed);
+  requireMeasure('leverMotion', 'acceleration', acceleration);
   const at: Point = {
     x: crank * Math.cos(angle),
     y: crank * Math.sin(angle) + centreDistance,
@@ -150,7 +150,7 @@ export function slotRange(lever: SlottedLever): { readonly least: number; readon
 
 function requireLever(caller: string, { crank, centreDistance }: SlottedLever): SlottedLever {
   return {
-    crank: requirePositive(caller, 'crank', crank),
-    centreDistance: requirePositive(caller, 'centreDistance', centreDistance),
+    crank: requireSize(caller, 'crank', crank),
+    centreDistance: requireSize(caller, 'centreDistance', centreDistance),
   };
 }

@@ -1,9 +1,5 @@
-import {
-  requireFinite,
-  requireNonNegative,
-  requirePositive,
-  requireWithin,
-} from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 import { acosClamped } from '@/lib/numeric/tolerance';
 import type { CrankMotion } from '@/lib/kinematics/linkage/four-bar-motion';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
@@ -37,9 +33,9 @@ export function yokeMotion(
   { angle, speed, acceleration = 0 }: CrankMotion,
 ): YokeMotion {
   const { crank, slant } = requireYoke('yokeMotion', yoke);
-  requireFinite('yokeMotion', 'angle', angle);
-  requireFinite('yokeMotion', 'speed', speed);
-  requireFinite('yokeMotion', 'acceleration', acceleration);
+  requireMeasure('yokeMotion', 'angle', angle);
+  requireMeasure('yokeMotion', 'speed', speed);
+  requireMeasure('yokeMotion', 'acceleration', acceleration);
   const reach = crank / Math.cos(slant);
   const [cosine, sine] = [Math.cos(angle - slant), Math.sin(angle - slant)];
   return {
@@ -63,8 +59,8 @@ export function yokeStroke(yoke: ScotchYoke): number {
  * @example slotLength({ crank: 35 }, 8, 1) // → 80
  */
 export function slotLength(yoke: ScotchYoke, pin: number, air: number): number {
-  requireNonNegative('slotLength', 'pin', pin);
-  return yokeStroke(yoke) + pin + 2 * requireNonNegative('slotLength', 'air', air);
+  requireSizeOrNought('slotLength', 'pin', pin);
+  return yokeStroke(yoke) + pin + 2 * requireSizeOrNought('slotLength', 'air', air);
 }
 
 /**
@@ -100,8 +96,8 @@ export function yokeLinkage(yoke: ScotchYoke): Linkage {
 }
 
 function requireYoke(caller: string, { crank, slant = 0 }: ScotchYoke): Required<ScotchYoke> {
-  requirePositive(caller, 'crank', crank);
-  requireFinite(caller, 'slant', slant);
+  requireSize(caller, 'crank', crank);
+  requireMeasure(caller, 'slant', slant);
   if (Math.abs(slant) >= Math.PI / 2 - 1e-9) {
     throw new RangeError(`${caller}: slant is ${slant}; expected less than a quarter turn`);
   }

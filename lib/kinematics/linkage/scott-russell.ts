@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import { sqrtClamped } from '@/lib/numeric/tolerance';
 import type { Point } from '@/lib/geometry/point';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
@@ -21,8 +21,8 @@ export interface ScottRussell {
  * @example scottRussellBeyond({ crank: 50, rod: 80 }) // → 128
  */
 export function scottRussellBeyond({ crank, rod }: ScottRussell): number {
-  requirePositive('scottRussellBeyond', 'crank', crank);
-  return (requirePositive('scottRussellBeyond', 'rod', rod) * rod) / crank;
+  requireSize('scottRussellBeyond', 'crank', crank);
+  return (requireSize('scottRussellBeyond', 'rod', rod) * rod) / crank;
 }
 
 export type ScottRussellOutcome =
@@ -38,10 +38,10 @@ export type ScottRussellOutcome =
  */
 export function scottRussellPoint(linkage: ScottRussell, crankAngle: number): ScottRussellOutcome {
   const beyond = linkage.beyond ?? scottRussellBeyond(linkage);
-  const crank = requirePositive('scottRussellPoint', 'crank', linkage.crank);
-  const rod = requirePositive('scottRussellPoint', 'rod', linkage.rod);
-  requireFinite('scottRussellPoint', 'beyond', beyond);
-  requireFinite('scottRussellPoint', 'crankAngle', crankAngle);
+  const crank = requireSize('scottRussellPoint', 'crank', linkage.crank);
+  const rod = requireSize('scottRussellPoint', 'rod', linkage.rod);
+  requireMeasure('scottRussellPoint', 'beyond', beyond);
+  requireMeasure('scottRussellPoint', 'crankAngle', crankAngle);
   const B = { x: crank * Math.cos(crankAngle), y: crank * Math.sin(crankAngle) };
   const by = Math.abs(B.y) - rod;
   if (by > 1e-12 * (crank + rod)) return { outcome: 'does-not-close', by };

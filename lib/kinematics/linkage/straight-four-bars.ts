@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import { findRoot } from '@/lib/numeric/root';
 import { acosClamped } from '@/lib/numeric/tolerance';
 import { radians } from '@/lib/geometry/angle';
@@ -42,7 +42,7 @@ export function chebyshev(arms: EqualArms): StraightFourBar {
  * @example chebyshevForStroke(225) // → { ground: 225, arm: 281.25, link: 112.5 }
  */
 export function chebyshevForStroke(stroke: number): EqualArms {
-  requirePositive('chebyshevForStroke', 'stroke', stroke);
+  requireSize('chebyshevForStroke', 'stroke', stroke);
   return { ground: stroke, arm: (5 / 4) * stroke, link: stroke / 2 };
 }
 
@@ -75,7 +75,7 @@ export function chebyshevLevel(
  */
 export function roberts(arms: EqualArms): StraightFourBar {
   const { ground, arm, link } = requireArms('roberts', arms);
-  requirePositive('roberts', '2·arm − link', 2 * arm - link);
+  requireSize('roberts', '2·arm − link', 2 * arm - link);
   return {
     bars: { crank: arm, coupler: link, rocker: arm, frame: ground },
     side: 'open',
@@ -127,11 +127,11 @@ export function hoeken({
   /** From the rocker's pin B on to the pencil. */
   readonly beyond?: number;
 }): StraightFourBar {
-  requirePositive('hoeken', 'crank', crank);
-  requirePositive('hoeken', 'ground', ground);
-  requirePositive('hoeken', 'coupler', coupler);
-  requirePositive('hoeken', 'rocker', rocker);
-  requireFinite('hoeken', 'beyond', beyond);
+  requireSize('hoeken', 'crank', crank);
+  requireSize('hoeken', 'ground', ground);
+  requireSize('hoeken', 'coupler', coupler);
+  requireSize('hoeken', 'rocker', rocker);
+  requireMeasure('hoeken', 'beyond', beyond);
   return {
     bars: { crank, coupler, rocker, frame: ground },
     side: 'open',
@@ -167,8 +167,8 @@ export function pointOf(
 
 function requireArms(caller: string, { ground, arm, link }: EqualArms): EqualArms {
   return {
-    ground: requirePositive(caller, 'ground', ground),
-    arm: requirePositive(caller, 'arm', arm),
-    link: requirePositive(caller, 'link', link),
+    ground: requireSize(caller, 'ground', ground),
+    arm: requireSize(caller, 'arm', arm),
+    link: requireSize(caller, 'link', link),
   };
 }

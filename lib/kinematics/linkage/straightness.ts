@@ -1,5 +1,5 @@
 import { findExtremes } from '@/lib/numeric/extremes';
-import { requireFinite } from '@/lib/numeric/require';
+import { requireMeasure } from '@/lib/numeric/moderate';
 import { fitLine, type BestLineOutcome } from '@/lib/geometry/best-line';
 import { sampleCurve } from '@/lib/geometry/curve';
 import type { Point } from '@/lib/geometry/point';
@@ -28,9 +28,11 @@ export function straightness(
   to: number,
   line: 'x' | 'y',
 ): Straightness | undefined {
-  requireFinite('straightness', 'from', from);
-  requireFinite('straightness', 'to', to);
+  requireMeasure('straightness', 'from', from);
+  requireMeasure('straightness', 'to', to);
   const pieces = 720;
+  requireMeasure('bestLineOfPath', 'from', from);
+  requireMeasure('bestLineOfPath', 'to', to);
   const path = sampleCurve((t) => at(t) ?? NOWHERE, from, to, pieces);
   if (path.includes(NOWHERE)) return undefined;
   const across = line === 'x' ? 'y' : 'x';
@@ -57,6 +59,8 @@ export function bestLineOfPath(
   to: number,
   pieces = 360,
 ): BestLineOutcome | undefined {
+  requireMeasure('bestLineOfPath', 'from', from);
+  requireMeasure('bestLineOfPath', 'to', to);
   const path = sampleCurve((t) => at(t) ?? NOWHERE, from, to, pieces);
   return path.includes(NOWHERE) ? undefined : fitLine(path);
 }

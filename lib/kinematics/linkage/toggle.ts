@@ -1,4 +1,4 @@
-import { requireFinite, requireNonNegative, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
 import { crankSliderLinkage } from '@/lib/kinematics/linkage/crank-slider';
 import type { Linkage } from '@/lib/kinematics/linkage/solver/linkage';
 
@@ -17,16 +17,14 @@ export type ToggleOutcome =
  * @example togglePress(radians(5), radians(5)) // → { outcome: 'presses', ratio: 5.715026 }
  */
 export function togglePress(first: number, second: number): ToggleOutcome {
-  for (const [name, angle] of [
-    ['first', first],
-    ['second', second],
-  ] as const) {
-    if (!(Math.abs(requireFinite('togglePress', name, angle)) < Math.PI / 2)) {
-      throw new RangeError(`togglePress: ${name} is ${angle}; expected less than a quarter turn`);
-    }
-  }
-  const give = Math.tan(first) + Math.tan(second);
+  const give = Math.tan(requireLean('first', first)) + Math.tan(requireLean('second', second));
   return give === 0 ? { outcome: 'on-the-line' } : { outcome: 'presses', ratio: 1 / give };
+}
+
+function requireLean(name: string, angle: number): number {
+  const lean = requireMeasure('togglePress', name, angle);
+  if (Math.abs(lean) < Math.PI / 2) return lean;
+  throw new RangeError(`togglePress: ${name} is ${angle}; expected less than a quarter turn`);
 }
 
 /** Two links between a fixed pin and a block, their knee off the line of thrust. */
@@ -53,13 +51,13 @@ export function kneePress(
   { first, second, knee }: Toggle,
   { pin = 0, friction = 0 }: { readonly pin?: number; readonly friction?: number } = {},
 ): KneeOutcome {
-  requirePositive('kneePress', 'first', first);
-  requirePositive('kneePress', 'second', second);
-  requireFinite('kneePress', 'knee', knee);
+  requireSize('kneePress', 'first', first);
+  requireSize('kneePress', 'second', second);
+  requireMeasure('kneePress', 'knee', knee);
   const out =
     2 *
-    requireNonNegative('kneePress', 'friction', friction) *
-    requireNonNegative('kneePress', 'pin', pin);
+    requireSizeOrNought('kneePress', 'friction', friction) *
+    requireSizeOrNought('kneePress', 'pin', pin);
   const acting = knee + out;
   const by = Math.abs(acting) - Math.min(first, second);
   if (by >= 0) return { outcome: 'links-too-short', by };
@@ -75,7 +73,7 @@ export type ToggleRest = 'holds-against-the-stop' | 'balances' | 'opens' | 'fold
  * @example toggleAtRest({ first: 100, second: 100, knee: -3 }, { stop: true }) // → 'holds-against-the-stop'
  */
 export function toggleAtRest({ knee }: Toggle, { stop }: { readonly stop: boolean }): ToggleRest {
-  requireFinite('toggleAtRest', 'knee', knee);
+  requireMeasure('toggleAtRest', 'knee', knee);
   if (knee === 0) return 'balances';
   if (knee > 0) return 'opens';
   return stop ? 'holds-against-the-stop' : 'folds-on';

@@ -1,4 +1,5 @@
-import { requireFinite, requireNonNegative, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize, requireSizeOrNought } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 import type { Point } from '@/lib/geometry/point';
 import type { Trammel } from '@/lib/kinematics/linkage/trammel';
 
@@ -8,8 +9,8 @@ import type { Trammel } from '@/lib/kinematics/linkage/trammel';
  * @example pinsApart({ uprightPin: 300, levelPin: -180 }) // → 480
  */
 export function pinsApart(trammel: Trammel): number {
-  const upright = requireFinite('pinsApart', 'uprightPin', trammel.uprightPin);
-  return Math.abs(upright - requireFinite('pinsApart', 'levelPin', trammel.levelPin));
+  const upright = requireMeasure('pinsApart', 'uprightPin', trammel.uprightPin);
+  return Math.abs(upright - requireMeasure('pinsApart', 'levelPin', trammel.levelPin));
 }
 
 /**
@@ -35,12 +36,12 @@ export function barTrammel({
   readonly trammel: Trammel;
   readonly angle: number;
 } {
-  requirePositive('barTrammel', 'spacing', spacing);
+  requireSize('barTrammel', 'spacing', spacing);
   const fromB = beyond ?? (fromMiddle ?? Number.NaN) - spacing / 2;
-  const levelPin = requireFinite('barTrammel', 'beyond or fromMiddle', fromB);
+  const levelPin = requireMeasure('barTrammel', 'beyond or fromMiddle', fromB);
   return {
     trammel: { ...rest, uprightPin: levelPin + spacing, levelPin },
-    angle: 0 - requireFinite('barTrammel', 'lean', lean),
+    angle: 0 - requireMeasure('barTrammel', 'lean', lean),
   };
 }
 
@@ -50,8 +51,8 @@ export function barTrammel({
  */
 export function halfAxes({ uprightPin, levelPin }: Trammel): Point {
   return {
-    x: Math.abs(requireFinite('halfAxes', 'uprightPin', uprightPin)),
-    y: Math.abs(requireFinite('halfAxes', 'levelPin', levelPin)),
+    x: Math.abs(requireMeasure('halfAxes', 'uprightPin', uprightPin)),
+    y: Math.abs(requireMeasure('halfAxes', 'levelPin', levelPin)),
   };
 }
 
@@ -70,7 +71,9 @@ export function cardanDiameter(trammel: Trammel): number {
  * @example grooveTravel({ uprightPin: 300, levelPin: 180 }) // → 240
  */
 export function grooveTravel(trammel: Trammel): number {
-  return (2 * pinsApart(trammel)) / Math.sin(trammel.grooveAngle ?? Math.PI / 2);
+  const { grooveAngle = Math.PI / 2 } = trammel;
+  requireWithin('grooveTravel', 'grooveAngle', grooveAngle, 1e-9, Math.PI - 1e-9);
+  return (2 * pinsApart(trammel)) / Math.sin(grooveAngle);
 }
 
 /**
@@ -78,7 +81,7 @@ export function grooveTravel(trammel: Trammel): number {
  * @example grooveLength({ uprightPin: 300, levelPin: 180 }, 40) // → 280
  */
 export function grooveLength(trammel: Trammel, slider: number): number {
-  return grooveTravel(trammel) + requireNonNegative('grooveLength', 'slider', slider);
+  return grooveTravel(trammel) + requireSizeOrNought('grooveLength', 'slider', slider);
 }
 
 /** Whether a groove is long enough. */
@@ -91,7 +94,7 @@ export type GrooveOutcome =
  * @example grooveFits({ uprightPin: 300, levelPin: 180 }, 40, 250) // → { outcome: 'too-short', by: 30 }
  */
 export function grooveFits(trammel: Trammel, slider: number, groove: number): GrooveOutcome {
-  const spare = requirePositive('grooveFits', 'groove', groove) - grooveLength(trammel, slider);
+  const spare = requireSize('grooveFits', 'groove', groove) - grooveLength(trammel, slider);
   return spare >= 0 ? { outcome: 'enough', spare } : { outcome: 'too-short', by: -spare };
 }
 
@@ -102,8 +105,8 @@ export function grooveFits(trammel: Trammel, slider: number, groove: number): Gr
  * @example leastPinsApart(60, 20) // → 56.5685425
  */
 export function leastPinsApart(length: number, width: number): number {
-  requireNonNegative('leastPinsApart', 'length', length);
-  return (length + requireNonNegative('leastPinsApart', 'width', width)) / Math.SQRT2;
+  requireSizeOrNought('leastPinsApart', 'length', length);
+  return (length + requireSizeOrNought('leastPinsApart', 'width', width)) / Math.SQRT2;
 }
 
 /**
@@ -112,10 +115,10 @@ export function leastPinsApart(length: number, width: number): number {
  * @example barLength({ uprightPin: 300, levelPin: -180 }, 25) // → 530
  */
 export function barLength({ uprightPin, levelPin }: Trammel, beyond: number): number {
-  requireFinite('barLength', 'uprightPin', uprightPin);
-  requireFinite('barLength', 'levelPin', levelPin);
+  requireMeasure('barLength', 'uprightPin', uprightPin);
+  requireMeasure('barLength', 'levelPin', levelPin);
   const ends = [0, uprightPin, levelPin];
   return (
-    Math.max(...ends) - Math.min(...ends) + 2 * requireNonNegative('barLength', 'beyond', beyond)
+    Math.max(...ends) - Math.min(...ends) + 2 * requireSizeOrNought('barLength', 'beyond', beyond)
   );
 }

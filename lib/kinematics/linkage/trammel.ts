@@ -1,4 +1,5 @@
-import { requireFinite, requireWithin } from '@/lib/numeric/require';
+import { requireMeasure } from '@/lib/numeric/moderate';
+import { requireWithin } from '@/lib/numeric/require';
 import { acosClamped } from '@/lib/numeric/tolerance';
 import { wrapAngle } from '@/lib/geometry/angle';
 import { dot, norm, type Point } from '@/lib/geometry/point';
@@ -48,7 +49,7 @@ export interface TrammelOval {
  */
 export function trammelPose(trammel: Trammel, angle: number): TrammelPose {
   const [xx, xy, yx, yy] = penMatrix('trammelPose', trammel);
-  requireFinite('trammelPose', 'angle', angle);
+  requireMeasure('trammelPose', 'angle', angle);
   const [cosine, sine] = [Math.cos(angle), Math.sin(angle)];
   const apart = trammel.uprightPin - trammel.levelPin;
   const level = apart * (cosine - sine * cotangent(trammel));
@@ -66,7 +67,8 @@ export function trammelPose(trammel: Trammel, angle: number): TrammelPose {
  */
 export function trammelPenVelocity(trammel: Trammel, angle: number, speed: number): Point {
   const [xx, xy, yx, yy] = penMatrix('trammelPenVelocity', trammel);
-  requireFinite('trammelPenVelocity', 'speed', speed);
+  requireMeasure('trammelPenVelocity', 'angle', angle);
+  requireMeasure('trammelPenVelocity', 'speed', speed);
   const [cosine, sine] = [Math.cos(angle), Math.sin(angle)];
   return { x: speed * (xy * cosine - xx * sine), y: speed * (yy * cosine - yx * sine) };
 }
@@ -112,7 +114,7 @@ export function trammelForOval(
     pen = 'beyond',
   }: { readonly lies?: 'level' | 'upright'; readonly pen?: 'beyond' | 'between' } = {},
 ): Trammel {
-  const far = requireFinite('trammelForOval', 'length', length) / 2;
+  const far = requireMeasure('trammelForOval', 'length', length) / 2;
   const near =
     (requireWithin('trammelForOval', 'width', width, 0, length) / 2) * (pen === 'beyond' ? 1 : -1);
   return lies === 'level'
@@ -130,8 +132,8 @@ export function trammelForOval(
  */
 export function barAngleForPen(trammel: Trammel, pen: Point): number {
   const [xx, xy, yx, yy] = penMatrix('barAngleForPen', trammel);
-  requireFinite('barAngleForPen', 'pen.x', pen.x);
-  requireFinite('barAngleForPen', 'pen.y', pen.y);
+  requireMeasure('barAngleForPen', 'pen.x', pen.x);
+  requireMeasure('barAngleForPen', 'pen.y', pen.y);
   const oval = trammelOval(trammel);
   if (oval.round !== 'line') {
     const spin = xx * yy - xy * yx < 0 ? -1 : 1;
@@ -145,9 +147,9 @@ export function barAngleForPen(trammel: Trammel, pen: Point): number {
 
 /** Pen = (xx·cos + xy·sin, yx·cos + yy·sin). */
 function penMatrix(caller: string, trammel: Trammel): readonly [number, number, number, number] {
-  const upright = requireFinite(caller, 'uprightPin', trammel.uprightPin);
-  const level = requireFinite(caller, 'levelPin', trammel.levelPin);
-  const beside = requireFinite(caller, 'beside', trammel.beside ?? 0);
+  const upright = requireMeasure(caller, 'uprightPin', trammel.uprightPin);
+  const level = requireMeasure(caller, 'levelPin', trammel.levelPin);
+  const beside = requireMeasure(caller, 'beside', trammel.beside ?? 0);
   const angle = requireWithin(
     caller,
     'grooveAngle',

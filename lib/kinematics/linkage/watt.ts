@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import { intersectCircles } from '@/lib/geometry/circle';
 import { between, polar, type Point } from '@/lib/geometry/point';
 import { straightness, type Straightness } from '@/lib/kinematics/linkage/straightness';
@@ -42,8 +42,8 @@ export function wattPoint(
   pencilFromA: number = wattPencil(watt),
 ): WattOutcome {
   const { arm1, arm2, link } = requireWatt('wattPoint', watt);
-  requireFinite('wattPoint', 'armAngle', armAngle);
-  requireFinite('wattPoint', 'pencilFromA', pencilFromA);
+  requireMeasure('wattPoint', 'armAngle', armAngle);
+  requireMeasure('wattPoint', 'pencilFromA', pencilFromA);
   const A = polar(arm1, armAngle, { x: -arm1, y: link / 2 });
   const found = intersectCircles(
     { centre: A, radius: link },
@@ -95,8 +95,8 @@ export function wattLinkage(watt: WattLinkage, pencilFromA: number = wattPencil(
 }
 
 function requireWatt(caller: string, watt: WattLinkage): WattLinkage {
-  requirePositive(caller, 'arm1', watt.arm1);
-  requirePositive(caller, 'arm2', watt.arm2);
-  requirePositive(caller, 'link', watt.link);
+  requireSize(caller, 'arm1', watt.arm1);
+  requireSize(caller, 'arm2', watt.arm2);
+  requireSize(caller, 'link', watt.link);
   return watt;
 }

@@ -1,8 +1,9 @@
+import { requireCount } from '@/lib/numeric/require';
 import type { TrainMesh } from '@/lib/kinematics/train/graph';
 
 /**
  * Trains whose wheels are carried round, as data for `turnsOfMeshes`: hold one body, drive another.
- * Each function names its bodies; tooth counts are checked where the train is solved.
+ * Each function names its bodies, and throws `RangeError` for teeth that are not whole counts.
  */
 
 /**
@@ -15,8 +16,15 @@ import type { TrainMesh } from '@/lib/kinematics/train/graph';
  */
 export function planetaryMeshes(sunTeeth: number, planetTeeth: number): readonly TrainMesh[] {
   return [
-    mesh('sun', sunTeeth, 'planet', planetTeeth),
-    mesh('planet', planetTeeth, 'ring', ringTeeth(sunTeeth, planetTeeth), 'with'),
+    mesh('planetaryMeshes', 'sun', sunTeeth, 'planet', planetTeeth),
+    mesh(
+      'planetaryMeshes',
+      'planet',
+      planetTeeth,
+      'ring',
+      ringTeeth(sunTeeth, planetTeeth),
+      'with',
+    ),
   ];
 }
 
@@ -26,7 +34,8 @@ export function planetaryMeshes(sunTeeth: number, planetTeeth: number): readonly
  * @example ringTeeth(24, 36) // → 96
  */
 export function ringTeeth(sunTeeth: number, planetTeeth: number): number {
-  return sunTeeth + 2 * planetTeeth;
+  requireCount('ringTeeth', 'sunTeeth', sunTeeth);
+  return sunTeeth + 2 * requireCount('ringTeeth', 'planetTeeth', planetTeeth);
 }
 
 /**
@@ -44,8 +53,8 @@ export function compoundPlanetaryMeshes(
   ringCount: number,
 ): readonly TrainMesh[] {
   return [
-    mesh('sun', sunTeeth, 'planet', firstPlanetTeeth),
-    mesh('planet', secondPlanetTeeth, 'ring', ringCount, 'with'),
+    mesh('compoundPlanetaryMeshes', 'sun', sunTeeth, 'planet', firstPlanetTeeth),
+    mesh('compoundPlanetaryMeshes', 'planet', secondPlanetTeeth, 'ring', ringCount, 'with'),
   ];
 }
 
@@ -64,7 +73,14 @@ export function carriedWheelMeshes(
   way: 'outside' | 'over-an-idler' | 'inside-a-ring' = 'outside',
 ): readonly TrainMesh[] {
   return [
-    mesh('fixed', fixedTeeth, 'carried', carriedTeeth, way === 'outside' ? 'against' : 'with'),
+    mesh(
+      'carriedWheelMeshes',
+      'fixed',
+      fixedTeeth,
+      'carried',
+      carriedTeeth,
+      way === 'outside' ? 'against' : 'with',
+    ),
   ];
 }
 
@@ -84,8 +100,8 @@ export function revertedEpicyclicMeshes(teeth: {
   readonly driven: number;
 }): readonly TrainMesh[] {
   return [
-    mesh('fixed', teeth.fixed, 'pair', teeth.first),
-    mesh('pair', teeth.second, 'driven', teeth.driven),
+    mesh('revertedEpicyclicMeshes', 'fixed', teeth.fixed, 'pair', teeth.first),
+    mesh('revertedEpicyclicMeshes', 'pair', teeth.second, 'driven', teeth.driven),
   ];
 }
 
@@ -103,8 +119,10 @@ export function fergusonMeshes(
   wheels: readonly number[],
 ): readonly TrainMesh[] {
   return [
-    mesh('fixed', fixedTeeth, 'planet', planetTeeth),
-    ...wheels.map((teeth, index) => mesh('planet', planetTeeth, `wheel ${index + 1}`, teeth)),
+    mesh('fergusonMeshes', 'fixed', fixedTeeth, 'planet', planetTeeth),
+    ...wheels.map((teeth, index) =>
+      mesh('fergusonMeshes', 'planet', planetTeeth, `wheel ${index + 1}`, teeth),
+    ),
   ];
 }
 
@@ -119,17 +137,20 @@ export function fergusonMeshes(
  */
 export function bevelDifferentialMeshes(sideTeeth = 20, starTeeth = 10): readonly TrainMesh[] {
   return [
-    mesh('left', sideTeeth, 'star', starTeeth),
-    mesh('star', starTeeth, 'right', sideTeeth, 'with'),
+    mesh('bevelDifferentialMeshes', 'left', sideTeeth, 'star', starTeeth),
+    mesh('bevelDifferentialMeshes', 'star', starTeeth, 'right', sideTeeth, 'with'),
   ];
 }
 
 function mesh(
+  caller: string,
   first: string,
   firstTeeth: number,
   second: string,
   secondTeeth: number,
   sense: 'against' | 'with' = 'against',
 ): TrainMesh {
+  requireCount(caller, `teeth of ${first}`, firstTeeth);
+  requireCount(caller, `teeth of ${second}`, secondTeeth);
   return { first, firstTeeth, second, secondTeeth, carrier: 'carrier', sense };
 }

@@ -1,3 +1,4 @@
+import { finiteResult } from '@/lib/numeric/finite-result';
 import { itemAt } from '@/lib/numeric/item-at';
 import type { DriverAndDriven } from '@/lib/kinematics/train/ratio';
 
@@ -18,5 +19,6 @@ export function pairedWithin(
   const falling = drivers.toSorted((a, b) => b - a);
   const rising = driven.toSorted((a, b) => a - b);
   const pairs = falling.map((driver, index): DriverAndDriven => [driver, itemAt(rising, index)]);
+  finiteResult('pairedWithin', pairs);
   return pairs.every(([driver, other]) => driver + other <= mostTeeth) ? pairs : null;
 }

@@ -1,3 +1,5 @@
+import { requireCount } from '@/lib/numeric/require';
+
 import { itemAt } from '@/lib/numeric/item-at';
 
 /** One or more wheels of a stock taken together, and their counts multiplied. */
@@ -39,6 +41,7 @@ export function* gatherWheelSets(
   size: number,
   reuse: boolean,
 ): Generator<number, readonly WheelSet[]> {
+  for (const teeth of stock) requireCount('wheelSets', 'stock', teeth);
   // Sets of one product share a drawer, so that only the products, plain numbers, are sorted.
   const drawers = new Map<number, WheelSet[]>();
   let places: readonly number[] | null = Array.from({ length: size }, (_, k) => (reuse ? 0 : k));

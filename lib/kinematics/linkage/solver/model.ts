@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from '@/lib/numeric/require';
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import type { Point } from '@/lib/geometry/point';
 import type { Linkage, Relation, SlideRelation } from '@/lib/kinematics/linkage/solver/linkage';
 
@@ -39,8 +39,8 @@ export function modelOf(linkage: Linkage): Model {
   };
   const start = new Float64Array(2 * names.length);
   names.forEach((name, k) => {
-    start[2 * k] = requireFinite(CALLER, `${name}.x`, linkage.points[name]?.x ?? Number.NaN);
-    start[2 * k + 1] = requireFinite(CALLER, `${name}.y`, linkage.points[name]?.y ?? Number.NaN);
+    start[2 * k] = requireMeasure(CALLER, `${name}.x`, linkage.points[name]?.x ?? Number.NaN);
+    start[2 * k + 1] = requireMeasure(CALLER, `${name}.y`, linkage.points[name]?.y ?? Number.NaN);
   });
   const slides = (linkage.slides ?? []).map(({ point, along, through, offset = 0 }) => ({
     kind: 'slide' as const,
@@ -48,7 +48,7 @@ export function modelOf(linkage: Linkage): Model {
     through: find(through ?? along[0]),
     from: find(along[0]),
     to: find(along[1]),
-    offset: requireFinite(CALLER, 'offset', offset),
+    offset: requireMeasure(CALLER, 'offset', offset),
   }));
   const drivers = numberDrivers(linkage, find);
   const bodies = bodiesOf(linkage, find).map((body) => {
@@ -80,7 +80,7 @@ export function modelOf(linkage: Linkage): Model {
     runs,
     leads: drivers.leads,
     driveLength: drivers.length,
-    size: requirePositive(CALLER, 'size', size),
+    size: requireSize(CALLER, 'size', size),
   };
 }
 
@@ -141,17 +141,13 @@ export function localOf(shape: ReadonlyMap<number, Point>, p: number): Point {
 
 function bodiesOf(linkage: Linkage, find: (name: string) => number): readonly Body[] {
   const bars = (linkage.bars ?? []).map(({ ends, length }) => {
-    requirePositive(CALLER, `length of bar ${ends.join('–')}`, length);
+    requireSize(CALLER, `length of bar ${ends.join('–')}`, length);
     return { [ends[0]]: { x: 0, y: 0 }, [ends[1]]: { x: length, y: 0 } };
   });
   const plates = (linkage.plates ?? []).map(({ shape }) => shape);
   return [...bars, ...plates].map((shape) => {
     const entries = Object.entries(shape);
-    const named = new Map(entries.map(([name, at]) => [find(name), at]));
-    for (const [name, { x, y }] of entries) {
-      requireFinite(CALLER, `${name}.x`, x);
-      requireFinite(CALLER, `${name}.y`, y);
-    }
+    const named = new Map(entries.map(([name, at]) => [find(name), measured(name, at)]));
     if (!apartPair(named, [...named.keys()])) {
       throw new RangeError(
         `${CALLER}: body is ${entries.map(([name]) => name).join(', ')}; expected two points apart`,
@@ -159,6 +155,10 @@ function bodiesOf(linkage: Linkage, find: (name: string) => number): readonly Bo
     }
     return { points: [...named.keys()], shape: named };
   });
+}
+
+function measured(name: string, { x, y }: Point): Point {
+  return { x: requireMeasure(CALLER, `${name}.x`, x), y: requireMeasure(CALLER, `${name}.y`, y) };
 }
 
 function numberDrivers(linkage: Linkage, find: (name: string) => number) {
@@ -191,9 +191,7 @@ function slideOf(
 
 /** The diagonal of the box round points given as x, y, x, y … */
 function spreadOf(values: ArrayLike<number>): number {
-  const [xs, ys] = [
-    Array.from(values).filter((_, k) => k % 2 === 0),
-    Array.from(values).filter((_, k) => k % 2 === 1),
-  ];
+  const xs = Array.from(values).filter((_, k) => k % 2 === 0);
+  const ys = Array.from(values).filter((_, k) => k % 2 === 1);
   return Math.hypot(Math.max(...xs) - Math.min(...xs), Math.max(...ys) - Math.min(...ys));
 }

@@ -1,5 +1,5 @@
 import { at } from '@/lib/numeric/at';
-import { requireFinite } from '@/lib/numeric/require';
+import { requireMeasure } from '@/lib/numeric/moderate';
 import type { Point } from '@/lib/geometry/point';
 import { branchIn } from '@/lib/kinematics/linkage/solver/branch';
 import { runRates, runSteps, slackOf } from '@/lib/kinematics/linkage/solver/place';
@@ -163,7 +163,7 @@ export interface RatedPose {
 }
 
 /**
- * Write velocity and acceleration of every point of a placed pose, without allocating. Gives the
+ * Write velocity and acceleration of every point of a placed pose into the caller's arrays. Gives the
  * smallest scaled pivot of the equations: under 1e-9 is a dead centre, and the rates say nothing.
  */
 export function rateLinkage(plan: Plan, rated: RatedPose): number {
@@ -195,6 +195,6 @@ function requireDrive(caller: string, { model }: Plan, drive: ArrayLike<number>)
     );
   }
   for (let k = 0; k < drive.length; k += 1) {
-    if (!Number.isFinite(at(drive, k))) requireFinite(caller, 'drive', at(drive, k));
+    if (!(Math.abs(at(drive, k)) <= 1e60)) requireMeasure(caller, 'drive', at(drive, k));
   }
 }

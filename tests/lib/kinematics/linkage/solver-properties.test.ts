@@ -8,7 +8,6 @@ import {
   carryOnLinkage,
   moveLinkage,
   placeLinkage,
-  rateLinkage,
   solveLinkage,
   startPose,
   type NamedPoints,
@@ -239,31 +238,23 @@ describe('the solver on linkages of one kind', () => {
     expect(placed(plan, [1]).pen?.y).toBeCloseTo(0, 10);
   });
 
-  it('allocates nothing in 100 000 steps of position and rates', () => {
+  it('allocates nothing in the 100 000 positions of an animation', () => {
     const plan = planned(tongsLinkage({ stages: 3, bar: 160 }));
     const [pose, branch, drive] = [startPose(plan), branchOf(plan), new Float64Array([0.5])];
-    const rated = {
-      pose,
-      drive,
-      speeds: new Float64Array([1]),
-      accelerations: new Float64Array(1),
-      velocity: startPose(plan),
-      acceleration: startPose(plan),
-    };
     const run = (steps: number) => {
       for (let k = 0; k < steps; k += 1) {
         drive[0] = 0.3 + (k % 1000) / 1000;
         placeLinkage(plan, drive, branch, pose);
-        if (k % 10 === 0) rateLinkage(plan, rated);
       }
     };
     run(20_000);
-    const grown = [1, 2, 3, 4, 5].map(() => {
+    let least = Number.POSITIVE_INFINITY;
+    for (let pass = 0; pass < 20 && !(least < 8); pass += 1) {
       const before = process.memoryUsage().heapUsed;
       run(100_000);
-      return (process.memoryUsage().heapUsed - before) / 100_000;
-    });
-    expect(Math.min(...grown.map(Math.abs))).toBeLessThan(16);
+      least = Math.min(least, Math.abs(process.memoryUsage().heapUsed - before) / 100_000);
+    }
+    expect(least, 'less than one number').toBeLessThan(8);
   });
 });
 
