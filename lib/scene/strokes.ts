@@ -59,7 +59,7 @@ export function label(
 }
 
 /**
- * A dimension between two points: extension lines, a line with an arrow at each end, the figure in
+ * A dimension between two points: extension lines, a line with an arrow at each end, the figure over
  * its middle. `offset` mm is how far it stands off, to the left of the way from `from` to `to`; the
  * extension lines begin at the share `clear` of it.
  */
@@ -87,7 +87,12 @@ export function dimension(
     line('dimension', a, b),
     { kind: 'mark', role: 'dimension', symbol: 'arrowhead', at: b, angle },
     { kind: 'mark', role: 'dimension', symbol: 'arrowhead', at: a, angle: angle + Math.PI },
-    label(text, { x: (a.x + b.x) / 2, y: (a.y + b.y) / 2 }, { angle: readable }),
+    // Above its line, as a draughtsman writes it: nothing runs through the figure.
+    label(
+      text,
+      { x: (a.x + b.x) / 2, y: (a.y + b.y) / 2 },
+      { angle: readable, nudge: { x: 0, y: 10 } },
+    ),
   ];
 }
 
