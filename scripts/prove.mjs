@@ -6,8 +6,8 @@ import { requireServer } from './machine/postgres.mjs';
 import { complain, say } from './machine/say.mjs';
 
 /**
- * The long checks: full counts of seeds and inputs, the whole tour in every width and theme, the
- * site without proxy.ts, mutants of the kinematics library. `npm run prove -- seeds` runs one part.
+ * The long checks: full counts of seeds and inputs, coverage, the whole tour in every width and theme,
+ * mutants of the kinematics library. `npm run prove -- seeds` runs one part.
  */
 const vitest = ['node_modules/vitest/vitest.mjs', 'run'];
 const parts = {
@@ -41,11 +41,6 @@ const parts = {
     what: 'The tour of every screen at every width, light and dark',
     args: [...vitest, '--project', 'e2e', 'tests/e2e/tour.test.ts'],
     env: { HORNBEAM_TOUR: 'whole' },
-  },
-  proxyless: {
-    what: 'The rights, on a build without proxy.ts',
-    args: [...vitest, '--project', 'e2e', 'tests/e2e/rights.test.ts'],
-    env: { HORNBEAM_WITHOUT_PROXY: '1' },
   },
   mutants: { what: 'Mutants of the kinematics library', args: ['scripts/mutate.mjs'] },
 };

@@ -52,13 +52,25 @@ export async function closeSession({ cookie }: Session): Promise<void> {
   });
 }
 
-/** Asks for a path as this session, following nothing. */
-export function ask(session: Session, path: string, init: RequestInit = {}): Promise<Response> {
-  return fetch(`${site().address}${path}`, {
-    redirect: 'manual',
-    ...init,
-    headers: { cookie: session.cookie, ...init.headers },
-  });
+/**
+ * Asks for a path as this session, following nothing but the framework's own step: a router's request
+ * without its mark in the address is sent on to the address that has it.
+ */
+export async function ask(
+  session: Session,
+  path: string,
+  init: RequestInit = {},
+): Promise<Response> {
+  const once = (address: string) =>
+    fetch(address, {
+      redirect: 'manual',
+      ...init,
+      headers: { cookie: session.cookie, ...init.headers },
+    });
+  const answer = await once(`${site().address}${path}`);
+  const onward = answer.headers.get('location');
+  if (onward === null || !onward.includes('_rsc')) return answer;
+  return once(new URL(onward, site().address).href);
 }
 
 /** Posts JSON as the site's own pages do. */
