@@ -11,6 +11,7 @@ import {
   requireNode,
   root,
   runEntry,
+  runsIn,
   startChild,
   stopChild,
 } from './machine/node.mjs';
@@ -71,14 +72,22 @@ function readSecrets() {
   return secrets;
 }
 
-function refuseSecondRun() {
+/** Refuses to run twice, and ends what a run that was killed has left behind. */
+async function clearEarlierRun() {
   if (!existsSync(runFile)) return;
-  const { pid, address } = JSON.parse(readFileSync(runFile, 'utf8'));
+  const { pid, address, children = [] } = JSON.parse(readFileSync(runFile, 'utf8'));
   if (pid !== process.pid && isAlive(pid)) {
     throw new Remedy(
       `Hornbeam already runs from this folder (process ${pid}, ${address}).`,
       `Open ${address}, or end that run with Ctrl-C first.`,
     );
+  }
+  const left = children.filter((child) => isAlive(child) && runsIn(child, root));
+  if (left.length === 0) return;
+  say('Ending what an earlier run had left …');
+  for (const child of left) process.kill(child, 'SIGTERM');
+  for (let attempt = 0; attempt < 100 && left.some(isAlive); attempt += 1) {
+    await new Promise((resolve) => setTimeout(resolve, 100));
   }
 }
 
@@ -157,7 +166,7 @@ async function main() {
   requireNode();
   requireFolder(own);
   requireRoom(own, 600);
-  refuseSecondRun();
+  await clearEarlierRun();
   if (!(await isPortFree(port, host))) {
     throw new Remedy(
       `Port ${port} on ${host} is taken by another program.`,
@@ -202,6 +211,8 @@ async function main() {
     { env, stdio: dev ? 'inherit' : 'pipe' },
   );
   started.push(() => stopChild(next));
+  const children = [worker.child.pid, next.child.pid];
+  writeFileSync(runFile, JSON.stringify({ pid: process.pid, address, children }));
   if (!dev) next.child.stderr.pipe(process.stderr);
   const died = Promise.race([
     next.ended.then((code) => `The web server ended by itself (${code}).`),

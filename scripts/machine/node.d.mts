@@ -32,3 +32,4 @@ export function installPackages(): void;
 export function isPortFree(port: number, host?: string): Promise<boolean>;
 export function freePort(wanted?: number): Promise<number>;
 export function isAlive(pid: number): boolean;
+export function runsIn(pid: number, folder: string): boolean;

@@ -1,6 +1,14 @@
 import { spawn, spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
-import { accessSync, constants, existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
+import {
+  accessSync,
+  constants,
+  existsSync,
+  mkdirSync,
+  readFileSync,
+  readlinkSync,
+  writeFileSync,
+} from 'node:fs';
 import { createServer } from 'node:net';
 import path from 'node:path';
 import { Remedy, say } from './say.mjs';
@@ -122,5 +130,14 @@ export function isAlive(pid) {
     return true;
   } catch (error) {
     return error.code === 'EPERM';
+  }
+}
+
+/** True if a process works in this folder: a number alone may have passed to somebody else's process. */
+export function runsIn(pid, folder) {
+  try {
+    return readlinkSync(`/proc/${pid}/cwd`) === folder;
+  } catch {
+    return false;
   }
 }

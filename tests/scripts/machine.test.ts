@@ -11,6 +11,7 @@ import {
   requireFolder,
   requireNode,
   root,
+  runsIn,
 } from '../../scripts/machine/node.mjs';
 import { findServer } from '../../scripts/machine/postgres.mjs';
 import { requireRoom } from '../../scripts/machine/say.mjs';
@@ -78,6 +79,14 @@ describe('ports', () => {
       server.close(resolve);
     });
     expect(await isPortFree(port)).toBe(true);
+  });
+});
+
+describe('a process that an earlier run left', () => {
+  it('is known by the folder it works in, not by its number alone', () => {
+    expect(runsIn(process.pid, process.cwd())).toBe(true);
+    expect(runsIn(process.pid, '/')).toBe(false);
+    expect(runsIn(2 ** 30, root)).toBe(false);
   });
 });
 
