@@ -18,11 +18,11 @@ export function TitleStrip({ store, id, title, scale, locked }: TitleStripProps)
   const readouts = locked ? [] : model.readouts(drive);
   const units = model.spec.units === 'inch' ? 'in' : 'mm';
   return (
-    <div className="flex flex-col border-b border-ink @2xl:flex-row">
+    <div className="flex flex-col border-b border-ink @4xl:flex-row">
       <p id={id} className="flex-1 px-4 py-3 font-heading text-lg leading-tight font-semibold">
         {title}
       </p>
-      <dl className="grid auto-cols-auto grid-cols-[repeat(auto-fit,minmax(8rem,1fr))] @2xl:flex">
+      <dl className="grid auto-cols-auto grid-cols-[repeat(auto-fit,minmax(8rem,1fr))] @4xl:flex">
         {readouts.map(({ key, label, value }) => (
           <Cell key={key} label={label} value={value} />
         ))}
@@ -34,9 +34,9 @@ export function TitleStrip({ store, id, title, scale, locked }: TitleStripProps)
 
 function Cell({ label, value }: { readonly label: string; readonly value: string }) {
   return (
-    <div className="border-t border-l border-rule px-2.5 py-2 @2xl:min-w-32 @2xl:border-t-0">
+    <div className="border-t border-l border-rule px-2.5 py-2 @4xl:min-w-32 @4xl:border-t-0">
       <dt className="text-[0.8125rem] leading-tight text-pencil">{label}</dt>
-      <dd className="font-mono text-[0.875rem] leading-snug tabular-nums @2xl:text-[0.9375rem] @2xl:whitespace-nowrap">
+      <dd className="font-mono text-[0.875rem] leading-snug tabular-nums @4xl:text-[0.9375rem] @4xl:whitespace-nowrap">
         {value}
       </dd>
     </div>
