@@ -87,6 +87,15 @@ export function siteEnvironment(): SiteEnvironment {
   return site;
 }
 
+/** The part of the site's environment that one-time links need. Throws `EnvironmentError`. */
+export function linkEnvironment(): Pick<SiteEnvironment, 'address' | 'secret'> {
+  const read = parse(
+    siteSchema.pick({ NEXTAUTH_URL: true, NEXTAUTH_SECRET: true }),
+    currentSource(),
+  );
+  return { address: withoutSlash(read.NEXTAUTH_URL), secret: read.NEXTAUTH_SECRET };
+}
+
 /** Forgets what was read, so that a test can change the environment. */
 export function forgetEnvironment(): void {
   database = undefined;
@@ -120,7 +129,7 @@ export function readDatabaseEnvironment(source: Source): DatabaseEnvironment {
 export function readSiteEnvironment(source: Source): SiteEnvironment {
   const read = parse(siteSchema, source);
   return {
-    address: read.NEXTAUTH_URL.replace(/\/+$/, ''),
+    address: withoutSlash(read.NEXTAUTH_URL),
     secure: read.NEXTAUTH_URL.startsWith('https:'),
     secret: read.NEXTAUTH_SECRET,
     trustedProxies: read.TRUSTED_PROXIES,
@@ -159,6 +168,10 @@ function given(source: Source): Source {
 
 function refused(complaints: readonly string[]): EnvironmentError {
   return new EnvironmentError(`The environment is not complete: ${complaints.join('; ')}.`);
+}
+
+function withoutSlash(address: string): string {
+  return address.replace(/\/+$/, '');
 }
 
 function isLoopback(address: string): boolean {

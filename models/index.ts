@@ -6,6 +6,7 @@ import { Attempt } from './attempt';
 import { AuditEntry } from './audit-entry';
 import { ClassGroup } from './class-group';
 import { CountedAttempt } from './counted-attempt';
+import { Invitation } from './invitation';
 import { Learner } from './learner';
 import { Membership } from './membership';
 import { OneTimeLink } from './one-time-link';
@@ -22,6 +23,7 @@ const all = {
   AuditEntry,
   ClassGroup,
   CountedAttempt,
+  Invitation,
   Learner,
   Membership,
   OneTimeLink,

@@ -13,8 +13,11 @@ export class OneTimeLink extends Model<
   InferCreationAttributes<OneTimeLink>
 > {
   declare id: CreationOptional<string>;
-  declare personId: string;
-  declare purpose: 'set-password' | 'confirm-address' | 'change-address';
+  /** Whose it is; null where it leads to an invitation. */
+  declare personId: CreationOptional<string | null>;
+  declare invitationId: CreationOptional<string | null>;
+  declare purpose:
+    'set-password' | 'reset-password' | 'confirm-address' | 'change-address' | 'invitation';
   declare secretHash: string;
   declare newEmail: CreationOptional<string | null>;
   declare madeBy: CreationOptional<string | null>;
@@ -26,7 +29,8 @@ export class OneTimeLink extends Model<
     OneTimeLink.init(
       {
         id: { type: DataTypes.UUID, primaryKey: true, defaultValue: DataTypes.UUIDV4 },
-        personId: { type: DataTypes.UUID, allowNull: false },
+        personId: DataTypes.UUID,
+        invitationId: DataTypes.UUID,
         purpose: { type: DataTypes.TEXT, allowNull: false },
         secretHash: { type: DataTypes.TEXT, allowNull: false },
         newEmail: DataTypes.TEXT,

@@ -13,6 +13,7 @@ async function main() {
         DATABASE_URL: database.app,
         DATABASE_MIGRATION_URL: database.owner,
         NEXTAUTH_URL: process.env.NEXTAUTH_URL ?? 'http://127.0.0.1:3000',
+        NEXTAUTH_SECRET: process.env.NEXTAUTH_SECRET ?? database.session,
       },
       what: 'Making the administrator',
     });

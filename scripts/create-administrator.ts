@@ -12,10 +12,9 @@ async function main(): Promise<void> {
   if (!name || !email || !/^[^\s@]+@[^\s@]+$/.test(email)) {
     throw new Error('Say who: --name "Ada Wright" --email ada@workshop.example');
   }
-  const secret = await createAdministrator({ by: 'console' }, { name, email }, now());
-  const address = (process.env.NEXTAUTH_URL ?? 'http://127.0.0.1:3000').replace(/\/+$/, '');
+  const link = await createAdministrator({ by: 'console' }, { name, email }, now());
   console.log(`${name} is an administrator now. This link sets the password, once, within a week:`);
-  console.log(`  ${address}/set-password/${secret}`);
+  console.log(`  ${link}`);
 }
 
 try {

@@ -34,7 +34,7 @@ export default async function ClassesPage() {
           </p>
         </Section>
       ) : null}
-      {can(viewer, 'change a class') ? (
+      {can(viewer, 'make a class') ? (
         <Section title="Make a class">
           <ActionForm
             action={makeClass}

@@ -3,7 +3,13 @@ import { now as presentTime } from '@/lib/clock';
 import { row, rows, transact } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
 import { recordAudit } from './audit';
-import { complaintAbout, hashPassword, isPassword, type PasswordComplaint } from './entry/password';
+import {
+  complaintAbout,
+  hashPassword,
+  isPassword,
+  knownOf,
+  type PasswordComplaint,
+} from './entry/password';
 import { countTry, forgetTries } from './entry/throttle';
 
 /** What changing one's password comes to. */
@@ -39,8 +45,7 @@ export async function changePassword(
   if (!tries.allowed) return { outcome: 'throttled' };
   if (!(await isPassword(person.passwordHash, current))) return { outcome: 'wrong password' };
   await forgetTries('sign-in by account', person.email);
-  const known = [...person.name.split(/\s+/), person.email, person.email.split('@')[0] ?? ''];
-  const complaint = complaintAbout(next, known);
+  const complaint = complaintAbout(next, knownOf(person));
   if (complaint !== null) return { outcome: 'refused', complaint };
   await keepPassword(viewer, await hashPassword(next), now);
   return { outcome: 'changed' };

@@ -90,7 +90,7 @@ export async function createClass(
   viewer: Viewer,
   { name, timeZone = viewer.timeZone, startsOn = null, endsOn = null }: NewClass,
 ): Promise<string | null> {
-  if (!can(viewer, 'change a class')) return null;
+  if (!can(viewer, 'make a class')) return null;
   if (!isTimeZone(timeZone)) throw new RangeError(`createClass: ${timeZone} is not a time zone`);
   return transact(async (transaction) => {
     const made = await models().ClassGroup.create(

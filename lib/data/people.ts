@@ -2,13 +2,13 @@ import 'server-only';
 import { UniqueConstraintError, type Transaction } from 'sequelize';
 import { isTimeZone, now as presentTime } from '@/lib/clock';
 import { row, rows, transact } from '@/lib/db/query';
-import { siteEnvironment } from '@/lib/env';
 import { can } from '@/lib/policy/can';
 import type { Viewer } from '@/lib/policy/viewer';
 import { models } from '@/models';
 import { recordAudit } from './audit';
 import { isId } from './class-right';
-import { makeSetPasswordSecret } from './entry/one-time-links';
+import { linkAddress } from './entry/link-token';
+import { createLink } from './entry/one-time-links';
 
 /** A person as the administrator sees them. */
 export interface PersonListed {
@@ -93,8 +93,8 @@ export async function createPerson(
       await Learner.create({ personId: person.id }, { transaction });
       await audit(viewer, 'person created', person.id, transaction);
       if (isAdministrator) await audit(viewer, 'administrator made', person.id, transaction);
-      const secret = await makeSetPasswordSecret(person.id, viewer.personId, now, transaction);
-      return { outcome: 'created', personId: person.id, link: linkTo(secret) } as const;
+      const link = await createPasswordLinkFor(viewer, person.id, now, transaction);
+      return { outcome: 'created', personId: person.id, link } as const;
     });
   } catch (error) {
     if (error instanceof UniqueConstraintError) return { outcome: 'address taken' };
@@ -120,7 +120,7 @@ export async function createPasswordLink(
     );
     if (person === null) return null;
     await audit(viewer, 'link made', personId, transaction);
-    return linkTo(await makeSetPasswordSecret(personId, viewer.personId, now, transaction));
+    return createPasswordLinkFor(viewer, personId, now, transaction);
   });
 }
 
@@ -209,7 +209,12 @@ function audit(
   );
 }
 
-/** Built from the configuration, never from what a request says of itself. */
-function linkTo(secret: string): string {
-  return `${siteEnvironment().address}/set-password/${secret}`;
+async function createPasswordLinkFor(
+  viewer: Viewer,
+  personId: string,
+  now: Date,
+  transaction: Transaction,
+): Promise<string> {
+  const target = { purpose: 'set-password', personId } as const;
+  return linkAddress('set-password', await createLink(target, viewer.personId, now, transaction));
 }

@@ -38,6 +38,7 @@ export async function reachDatabase() {
   return {
     owner: databaseUrl(server, 'hornbeam_owner', secrets.owner, 'hornbeam'),
     app: databaseUrl(server, 'hornbeam_app', secrets.app, 'hornbeam'),
+    session: secrets.session,
     stop: async () => {
       if (!running) await stopServer(server);
     },

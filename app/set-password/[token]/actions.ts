@@ -4,7 +4,7 @@ import { z } from 'zod';
 import type { FormState } from '@/components/ui/form-state';
 import { readForm } from '@/app/_components/read-form';
 import { now } from '@/lib/clock';
-import { setPassword } from '@/lib/data/entry/one-time-links';
+import { setPassword } from '@/lib/data/entry/set-password';
 import { passwordSentence } from '@/app/_components/password-sentence';
 
 const schema = z.strictObject({

@@ -4,7 +4,7 @@ import { ButtonLink } from '@/components/ui/button';
 import { Page } from '@/components/ui/page';
 import { PageHeading } from '@/components/ui/page-heading';
 import { now } from '@/lib/clock';
-import { findLinkHolder } from '@/lib/data/entry/one-time-links';
+import { findLinkHolder } from '@/lib/data/entry/set-password';
 import { setPasswordByLink } from './actions';
 
 export const metadata: Metadata = { title: 'Set a password', referrer: 'no-referrer' };

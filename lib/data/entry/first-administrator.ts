@@ -2,7 +2,8 @@ import 'server-only';
 import { transact } from '@/lib/db/query';
 import { models } from '@/models';
 import { recordAudit } from '../audit';
-import { makeSetPasswordSecret } from './one-time-links';
+import { linkAddress } from './link-token';
+import { createLink } from './one-time-links';
 import type { ConsoleProof } from './proof';
 
 /** An administrator to be: a name and an address. */
@@ -13,7 +14,7 @@ export interface NewAdministrator {
 
 /**
  * Makes an administrator from the machine itself, or makes one of the person who has the address
- * already; answers the secret of a link that sets their password.
+ * already; answers the link that sets their password.
  */
 export async function createAdministrator(
   _proof: ConsoleProof,
@@ -45,6 +46,7 @@ export async function createAdministrator(
       },
       transaction,
     );
-    return makeSetPasswordSecret(person.id, null, now, transaction);
+    const target = { purpose: 'set-password', personId: person.id } as const;
+    return linkAddress('set-password', await createLink(target, null, now, transaction));
   });
 }

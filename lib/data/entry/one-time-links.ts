@@ -1,126 +1,72 @@
 import 'server-only';
+import { randomUUID } from 'node:crypto';
 import type { Transaction } from 'sequelize';
-import { row, rows, transact } from '@/lib/db/query';
+import { row } from '@/lib/db/query';
 import { models } from '@/models';
-import { recordAudit } from '../audit';
-import { complaintAbout, hashPassword, type PasswordComplaint } from './password';
+import { linkLifetimes, linkToken, type LinkPurpose } from './link-token';
 import type { LinkProof } from './proof';
-import { hashSecret, newSecret } from './secret';
+import { hashSecret } from './secret';
 
-/** How long a link to set a password lives. */
-export const setPasswordDays = 7;
-
-/** Whose password a link sets. */
-export interface LinkHolder {
-  readonly name: string;
-  readonly email: string;
-  /** Whether the person has a password already, which the link then replaces. */
-  readonly hasPassword: boolean;
-}
-
-/** What setting a password comes to. */
-export type PasswordSet =
-  | { readonly outcome: 'set'; readonly email: string }
-  | { readonly outcome: 'refused'; readonly complaint: PasswordComplaint }
-  | { readonly outcome: 'no longer good' };
-
-/** Whose link this is, if it can still be used. */
-export async function findLinkHolder(proof: LinkProof, now: Date): Promise<LinkHolder | null> {
-  const found = await row<LinkRow>(linkSql, [hashSecret(proof.secret), now]);
-  return (
-    found && { name: found.name, email: found.email, hasPassword: found.passwordHash !== null }
-  );
-}
+/** Where a link leads: to somebody's account, or to an invitation. */
+export type LinkTarget =
+  | {
+      readonly purpose: 'set-password' | 'reset-password';
+      readonly personId: string;
+    }
+  | { readonly purpose: 'change-address'; readonly personId: string; readonly newEmail: string }
+  | { readonly purpose: 'invitation' | 'confirm-address'; readonly invitationId: string };
 
 /**
- * Sets the password of the link's person, uses the link up, and ends every sign-in of that person.
- * It does not sign anybody in.
+ * Makes a link and ends the unused ones that lead to the same; answers its id, from which the token
+ * follows. Whoever calls has made sure of the right to do so.
  */
-export async function setPassword(
-  proof: LinkProof,
-  password: string,
-  now: Date,
-): Promise<PasswordSet> {
-  const holder = await row<LinkRow>(linkSql, [hashSecret(proof.secret), now]);
-  if (holder === null) return { outcome: 'no longer good' };
-  const complaint = complaintAbout(password, [
-    ...holder.name.split(/\s+/),
-    holder.email,
-    holder.email.split('@')[0] ?? '',
-  ]);
-  if (complaint !== null) return { outcome: 'refused', complaint };
-  const passwordHash = await hashPassword(password);
-  return transact(async (transaction) => {
-    const used = await row(
-      `update one_time_links set used_at = $2
-       where id = $1 and used_at is null and expires_at > $2 returning id`,
-      [holder.id, now],
-      transaction,
-    );
-    if (used === null) return { outcome: 'no longer good' } as const;
-    await models().Person.update(
-      { passwordHash, passwordSetAt: now, emailConfirmedAt: now },
-      { where: { id: holder.personId }, transaction },
-    );
-    await rows(
-      `update sessions set ended_at = $2 where person_id = $1 and ended_at is null returning id`,
-      [holder.personId, now],
-      transaction,
-    );
-    await recordAudit(
-      {
-        actorId: holder.personId,
-        action: 'password set',
-        objectKind: 'person',
-        objectId: holder.personId,
-      },
-      transaction,
-    );
-    return { outcome: 'set', email: holder.email } as const;
-  });
-}
-
-/**
- * Makes the secret of a link that sets this person's password, and ends earlier ones. Whoever calls
- * has made sure of the right to do so.
- */
-export async function makeSetPasswordSecret(
-  personId: string,
+export async function createLink(
+  target: LinkTarget,
   madeBy: string | null,
   now: Date,
   transaction: Transaction,
 ): Promise<string> {
-  const secret = newSecret();
   const { OneTimeLink } = models();
-  await OneTimeLink.update(
-    { usedAt: now },
-    { where: { personId, purpose: 'set-password', usedAt: null }, transaction },
-  );
+  const same =
+    'invitationId' in target
+      ? { invitationId: target.invitationId }
+      : { personId: target.personId, purpose: replaced(target.purpose) };
+  await OneTimeLink.update({ usedAt: now }, { where: { ...same, usedAt: null }, transaction });
+  const id = randomUUID();
   await OneTimeLink.create(
     {
-      personId,
-      purpose: 'set-password',
-      secretHash: hashSecret(secret),
+      id,
+      ...target,
+      secretHash: hashSecret(linkToken(id)),
       madeBy,
       createdAt: now,
-      expiresAt: new Date(now.getTime() + setPasswordDays * 86_400_000),
+      expiresAt: new Date(now.getTime() + linkLifetimes[target.purpose]),
     },
     { transaction },
   );
-  return secret;
+  return id;
 }
 
-interface LinkRow {
-  readonly id: string;
-  readonly personId: string;
-  readonly name: string;
-  readonly email: string;
-  readonly passwordHash: string | null;
+/** Uses a link up; false when somebody has meanwhile, or when it has expired. */
+export async function useLink(id: string, now: Date, transaction: Transaction): Promise<boolean> {
+  const used = await row(
+    `update one_time_links set used_at = $2
+     where id = $1 and used_at is null and expires_at > $2 returning id`,
+    [id, now],
+    transaction,
+  );
+  return used !== null;
 }
 
-const linkSql = `
-  select o.id, o.person_id as "personId", p.name, p.email, p.password_hash as "passwordHash"
-  from one_time_links o
-  join people p on p.id = o.person_id and p.disabled_at is null and p.erased_at is null
-  where o.secret_hash = $1 and o.purpose = 'set-password'
-    and o.used_at is null and o.expires_at > $2`;
+/** The condition on `o` (one_time_links) by which a link that can still be used is found. */
+export const usableLink = 'o.secret_hash = $1 and o.used_at is null and o.expires_at > $2';
+
+/** The values for `usableLink`. */
+export function linkValues(proof: LinkProof, now: Date): [string, Date] {
+  return [hashSecret(proof.secret), now];
+}
+
+/** A first password and a forgotten one are set in the same way: each link ends the other kind. */
+function replaced(purpose: LinkPurpose): LinkPurpose[] {
+  return purpose === 'change-address' ? [purpose] : ['set-password', 'reset-password'];
+}

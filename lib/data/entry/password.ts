@@ -39,6 +39,11 @@ export function complaintAbout(
   return left !== plain && left.length < 4 ? 'names you' : null;
 }
 
+/** What everybody knows about somebody, of which their password must not be made. */
+export function knownOf({ name, email }: { readonly name: string; readonly email: string }) {
+  return [...name.split(/\s+/), email, email.split('@')[0] ?? ''];
+}
+
 /** The hash to keep for `password`. */
 export async function hashPassword(password: string): Promise<string> {
   return inTurn(() => hash(normal(password), parameters));
