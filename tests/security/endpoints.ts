@@ -1,0 +1,10 @@
+import { actions } from './actions';
+import type { Endpoint } from './endpoint';
+import { handlers } from './handlers';
+import { pages } from './pages';
+
+/**
+ * Every page, route handler and server action, with what each person gets from it. An endpoint of the
+ * build that is not here fails a test, as does a row without an endpoint.
+ */
+export const endpoints: readonly Endpoint[] = [...pages, ...handlers, ...actions];
