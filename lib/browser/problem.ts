@@ -48,6 +48,9 @@ export function sentenceFor(error: unknown): string {
   if (error.status === 403) return 'This is not yours to do.';
   if (error.status === 404) return 'This is not here any more, or is not yours to see.';
   if (error.status === 429) return 'That was too fast for us. Wait a minute and try again.';
+  if (error.status === 503 && error.detail !== null) {
+    return `${error.detail} What you typed is still here.`;
+  }
   if (error.status >= 500) {
     const id = error.logId === null ? '' : ` Quote ${error.logId} if it goes on.`;
     return `Something broke on our side; nothing you typed is lost. Try again in a moment.${id}`;

@@ -9,7 +9,7 @@ import { freePort } from '../machine/node.mjs';
  */
 export async function startMailCatcher(folder, { smtpPort = 1025, pagePort = 8025 } = {}) {
   const { SMTPServer } = await import('smtp-server');
-  mkdirSync(folder, { recursive: true });
+  mkdirSync(folder, { recursive: true, mode: 0o700 });
   const port = await freePort(smtpPort);
   let count = 0;
   const smtp = new SMTPServer({

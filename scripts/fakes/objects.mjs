@@ -9,7 +9,7 @@ import { freePort } from '../machine/node.mjs';
  * Loopback only; signatures are not checked.
  */
 export async function startObjectStore(folder, { wantedPort = 9025 } = {}) {
-  mkdirSync(folder, { recursive: true });
+  mkdirSync(folder, { recursive: true, mode: 0o700 });
   const port = await freePort(wantedPort);
   // A key becomes one file name, so that no key can reach outside the folder.
   const fileOf = (url) =>

@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import * as z from 'zod/mini';
 import { currentViewer } from '@/lib/auth/viewer';
+import { troubleOf, type Trouble } from '@/lib/db/trouble';
 import type { Viewer } from '@/lib/policy/viewer';
 import { refuseForeignOrigin, refuseOtherContent } from './guard';
 import { problem } from './problem';
@@ -56,13 +57,30 @@ async function readBody(request: Request): Promise<{ value: unknown } | Response
   }
 }
 
-/** No surprise leaves as a stack trace: it is logged, and the person is told its id. */
+/** What a person is told when the database cannot serve just now, and in how many seconds to ask again. */
+const troubles: Readonly<Record<Trouble, readonly [sentence: string, retryAfter: number]>> = {
+  full: [
+    'The disk that keeps the records is full. Nothing was stored and nothing is damaged: tell whoever runs the machine, and send it again afterwards.',
+    60,
+  ],
+  away: ['The records cannot be reached just now. Nothing was stored: try again in a moment.', 5],
+  busy: ['Too many are asking at once. Nothing was stored: try again in a moment.', 2],
+};
+
+/**
+ * No surprise leaves as a stack trace: it is logged, and the person is told its id. The log gets the
+ * stack alone, since a database error also carries the values of its statement.
+ */
 async function guarded(work: () => Promise<Response>): Promise<Response> {
   try {
     return await work();
   } catch (error) {
     const id = randomUUID();
-    console.error(`[${id}]`, error);
-    return problem(500, 'Try again; if it happens again, tell us this number.', { id });
+    console.error(`[${id}]`, error instanceof Error ? error.stack : error);
+    const trouble = troubleOf(error);
+    if (trouble === null)
+      return problem(500, 'Try again; if it happens again, tell us this number.', { id });
+    const [sentence, retryAfter] = troubles[trouble];
+    return problem(503, sentence, { id, headers: { 'Retry-After': String(retryAfter) } });
   }
 }
