@@ -25,7 +25,7 @@ const layers = {
   migrations: ['lib/db'],
   'lib/mail': ['lib/env.ts', 'lib/schemas'],
   'lib/storage': ['lib/env.ts', 'lib/schemas'],
-  'lib/jobs': ['lib/env.ts', 'lib/schemas'],
+  'lib/jobs': ['lib/env.ts', 'lib/schemas', 'lib/db'],
   'content/exercises': ['lib/marking', 'lib/quantities', 'lib/scene', 'lib/kinematics'],
   'lib/data': [
     'content/exercises',

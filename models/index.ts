@@ -8,6 +8,7 @@ import { ClassGroup } from './class-group';
 import { CountedAttempt } from './counted-attempt';
 import { Invitation } from './invitation';
 import { Learner } from './learner';
+import { Letter } from './letter';
 import { Membership } from './membership';
 import { OneTimeLink } from './one-time-link';
 import { Person } from './person';
@@ -25,6 +26,7 @@ const all = {
   CountedAttempt,
   Invitation,
   Learner,
+  Letter,
   Membership,
   OneTimeLink,
   Person,

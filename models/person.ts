@@ -19,6 +19,8 @@ export class Person extends Model<InferAttributes<Person>, InferCreationAttribut
   declare units: CreationOptional<'metric' | 'inch'>;
   declare paper: CreationOptional<'a4' | 'a3' | 'letter' | 'tabloid'>;
   declare reducedMotion: CreationOptional<boolean>;
+  /** Letters about classes; what the account itself needs is always sent. */
+  declare wantsClassMail: CreationOptional<boolean>;
   declare isAdministrator: CreationOptional<boolean>;
   declare disabledAt: CreationOptional<Date | null>;
   declare erasedAt: CreationOptional<Date | null>;
@@ -38,6 +40,7 @@ export class Person extends Model<InferAttributes<Person>, InferCreationAttribut
         units: { type: DataTypes.TEXT, defaultValue: 'metric' },
         paper: { type: DataTypes.TEXT, defaultValue: 'a4' },
         reducedMotion: { type: DataTypes.BOOLEAN, defaultValue: false },
+        wantsClassMail: { type: DataTypes.BOOLEAN, defaultValue: true },
         isAdministrator: { type: DataTypes.BOOLEAN, defaultValue: false },
         disabledAt: DataTypes.DATE,
         erasedAt: DataTypes.DATE,

@@ -18,6 +18,7 @@ export type AuditedAction =
   | 'member removed'
   | 'work set'
   | 'work withdrawn'
+  | 'class mail ended'
   | "learner's work viewed";
 
 /** One line of the audit log. It never holds a password, a secret or a link. */

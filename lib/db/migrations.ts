@@ -10,6 +10,8 @@ import { createAssignments } from '@/migrations/20261201T0909-create-assignments
 import { createReviews } from '@/migrations/20261201T0910-create-reviews';
 import { createAuditEntries } from '@/migrations/20261201T0911-create-audit-entries';
 import { createThrottle } from '@/migrations/20261201T0912-create-throttle';
+import { createLetters } from '@/migrations/20261201T1000-create-letters';
+import { addMailPreference } from '@/migrations/20261201T1001-add-mail-preference';
 import { createInvitations } from '@/migrations/20261201T1100-create-invitations';
 import { widenOneTimeLinks } from '@/migrations/20261201T1101-widen-one-time-links';
 import type { Migration } from './migration';
@@ -28,6 +30,8 @@ export const migrations: readonly { readonly name: string; readonly migration: M
   { name: '20261201T0910-create-reviews', migration: createReviews },
   { name: '20261201T0911-create-audit-entries', migration: createAuditEntries },
   { name: '20261201T0912-create-throttle', migration: createThrottle },
+  { name: '20261201T1000-create-letters', migration: createLetters },
+  { name: '20261201T1001-add-mail-preference', migration: addMailPreference },
   { name: '20261201T1100-create-invitations', migration: createInvitations },
   { name: '20261201T1101-widen-one-time-links', migration: widenOneTimeLinks },
 ];

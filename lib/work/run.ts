@@ -1,19 +1,69 @@
 import 'server-only';
-import { run, type Runner } from 'graphile-worker';
+import { EventEmitter } from 'node:events';
+import { run, type JobHelpers, type TaskList, type WorkerEvents } from 'graphile-worker';
 import { now } from '@/lib/clock';
+import { giveUpLostLetters } from '@/lib/data/entry/letter-delivery';
 import { tidy } from '@/lib/data/entry/tidy';
 import { databaseEnvironment } from '@/lib/env';
+import type { JobName, JobPayloads } from '@/lib/jobs/jobs';
+import { openPostbox, type Postbox } from '@/lib/mail/send';
+import { makePresent } from './presence';
+import { quietLogger } from './quiet-logger';
+import { sendLetter } from './send-letter';
 
-/** Every night, when nobody is at the bench. */
-const timetable = '17 3 * * * tidy';
+/** What the timetable runs by itself, in UTC. What was missed while nobody worked is not made up. */
+const timetable = [
+  // Every night, when nobody is at the bench.
+  '17 3 * * * tidy',
+  '*/10 * * * * give-up-lost-letters',
+].join('\n');
+
+/** Work under way, in this process. */
+export interface Work {
+  /** Takes no more jobs, and waits for those under way. */
+  readonly stop: () => Promise<void>;
+  /** Settles when the work has ended. */
+  readonly ended: Promise<void>;
+}
 
 /** Starts taking jobs off the queue, in the database that all instances share. */
-export function startWork(): Promise<Runner> {
-  return run({
+export async function startWork(postbox: Postbox = openPostbox()): Promise<Work> {
+  const events: WorkerEvents = new EventEmitter();
+  const created = new Promise<string>((resolve) => {
+    events.once('pool:create', ({ workerPool }) => resolve(workerPool.id));
+  });
+  const runner = await run({
     connectionString: databaseEnvironment().url,
     concurrency: 2,
     noHandleSignals: true,
     crontab: timetable,
-    taskList: { tidy: () => tidy({ by: 'job', job: 'tidy' }, now()) },
+    events,
+    logger: quietLogger,
+    taskList: tasks(postbox),
   });
+  const presence = await makePresent(await created);
+  const close = async () => {
+    await presence.end();
+    postbox.close();
+  };
+  let stopping: Promise<void> | undefined;
+  return { stop: () => (stopping ??= runner.stop()), ended: runner.promise.finally(close) };
+}
+
+/** A handler for each job that something in the product puts on the queue. */
+type CausedTasks = {
+  readonly [Name in JobName]: (payload: JobPayloads[Name], helpers: JobHelpers) => Promise<void>;
+};
+
+function tasks(postbox: Postbox): TaskList {
+  const caused: CausedTasks = {
+    'send-letter': (payload, helpers) => sendLetter(payload, helpers, postbox),
+  };
+  return {
+    ...(caused as TaskList),
+    tidy: () => tidy({ by: 'job', job: 'tidy' }, now()),
+    'give-up-lost-letters': async () => {
+      await giveUpLostLetters({ by: 'job', job: 'give-up-lost-letters' }, now());
+    },
+  };
 }

@@ -4,7 +4,8 @@ import 'server-only';
  * What somebody shows before it is known who they are. The functions of this folder take a proof
  * where all others take a viewer; no other folder does.
  */
-export type Proof = PasswordProof | SessionProof | LinkProof | JobProof | ConsoleProof;
+export type Proof =
+  PasswordProof | SessionProof | LinkProof | UnsubscribeProof | JobProof | ConsoleProof;
 
 /** An address and a password, with the network address they come from when it is known. */
 export interface PasswordProof {
@@ -24,6 +25,12 @@ export interface SessionProof {
 export interface LinkProof {
   readonly by: 'link';
   readonly secret: string;
+}
+
+/** The signed token of a letter's "no more of these". */
+export interface UnsubscribeProof {
+  readonly by: 'unsubscribe';
+  readonly token: string;
 }
 
 /** Work that the job queue runs by itself. */
