@@ -48,6 +48,8 @@ export default async function ClassesPage() {
                 options: timeZoneOptions(viewer.timeZone),
                 hint: 'Due dates are meant in it.',
               },
+              { name: 'startsOn', label: 'First day', type: 'date', hint: 'May be left empty.' },
+              { name: 'endsOn', label: 'Last day', type: 'date', hint: 'May be left empty.' },
             ]}
           />
         </Section>

@@ -1,7 +1,7 @@
 import Link from 'next/link';
 import { Cell, ColumnName, HeadRow, Row, RowName, Table } from '@/components/ui/table';
 import type { ClassProgress, ExerciseCell, LessonColumn } from '@/lib/schemas/class-progress';
-import { LearnerLink } from './lessons-table';
+import { LearnerLink } from './learner-link';
 import { MarkSign, markWord } from './mark';
 
 interface ExercisesTableProps {

@@ -1,6 +1,6 @@
-import Link from 'next/link';
 import { Cell, ColumnName, HeadRow, Row, RowName, Table } from '@/components/ui/table';
 import type { ClassProgress, LearnerProgress, LessonColumn } from '@/lib/schemas/class-progress';
+import { LearnerLink } from './learner-link';
 import { PegRail } from './peg-rail';
 import { sayDue } from './say-due';
 
@@ -47,22 +47,6 @@ export function LessonsTable({ progress, onOpen }: LessonsTableProps) {
         ))}
       </tbody>
     </Table>
-  );
-}
-
-/** A learner's name, leading to what they have done in this class. */
-export function LearnerLink({
-  classId,
-  learner,
-}: Readonly<{ classId: string; learner: Pick<LearnerProgress, 'learnerId' | 'name'> }>) {
-  return (
-    <Link
-      href={`/classes/${classId}/learners/${learner.learnerId}`}
-      prefetch={false}
-      className="link link-target min-w-32"
-    >
-      {learner.name}
-    </Link>
   );
 }
 

@@ -36,3 +36,17 @@ export function sayWhen(moment: string, timeZone: string): string {
     hourCycle: 'h23',
   }).format(new Date(moment));
 }
+
+/**
+ * A day as it is said on the screen, in the given time zone.
+ *
+ * @example sayDay('2026-12-08T18:30:00Z', 'Europe/London') // '8 Dec 2026'
+ */
+export function sayDay(moment: string, timeZone: string): string {
+  return new Intl.DateTimeFormat('en-GB', {
+    timeZone,
+    day: 'numeric',
+    month: 'short',
+    year: 'numeric',
+  }).format(new Date(moment));
+}

@@ -14,11 +14,23 @@ export type AuditedAction =
   | 'person enabled'
   | 'administrator made'
   | 'class created'
+  | 'class changed'
+  | 'class archived'
+  | 'class reopened'
+  | 'joining word renewed'
+  | 'joining opened'
+  | 'joining closed'
   | 'member added'
   | 'member removed'
   | 'work set'
+  | 'work changed'
   | 'work withdrawn'
   | 'class mail ended'
+  | 'extension given'
+  | 'extension taken back'
+  | 'comment written'
+  | 'marking overridden'
+  | 'class progress exported'
   | "learner's work viewed";
 
 /** One line of the audit log. It never holds a password, a secret or a link. */

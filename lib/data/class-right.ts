@@ -10,6 +10,9 @@ export const staffOfClass = `
     where mine.class_id = g.id and mine.person_id = $2 and mine.role = 'instructor'
       and mine.left_at is null))`;
 
+/** The same right where something is changed: a class that is put away can only be read. */
+export const staffOfOpenClass = `${staffOfClass} and g.archived_at is null`;
+
 /** The values for `staffOfClass`. */
 export function staffValues(
   viewer: { readonly personId: string; readonly isAdministrator: boolean },

@@ -1,13 +1,11 @@
 import 'server-only';
-import { UniqueConstraintError } from 'sequelize';
-import { isTimeZone, now as presentTime } from '@/lib/clock';
+import { isTimeZone } from '@/lib/clock';
 import { row, rows, transact } from '@/lib/db/query';
 import { can } from '@/lib/policy/can';
 import type { Role, Viewer } from '@/lib/policy/viewer';
 import { models } from '@/models';
-import { recordAudit } from './audit';
-import { isId, staffOfClass, staffValues } from './class-right';
-import { sessionLimits } from './entry/sessions';
+import { recordAudit, type AuditedAction } from './audit';
+import { isId, staffOfClass, staffOfOpenClass, staffValues } from './class-right';
 
 /** A class in a list. */
 export interface ClassListed {
@@ -17,69 +15,63 @@ export interface ClassListed {
   readonly role: Role | null;
   readonly instructors: readonly string[];
   readonly learners: number;
+  /** Put away: it can be read, and nothing in it changes. */
+  readonly archived: boolean;
 }
 
-/** Somebody who is in a class. */
-export interface Member {
-  readonly personId: string;
-  readonly learnerId: string;
-  readonly name: string;
-  readonly email: string | null;
-  readonly role: Role;
-  readonly joinedAt: string;
-}
-
-/** A class with who is in it, for its instructors and the administrator. */
+/** A class as its instructors and the administrator see it. */
 export interface ClassFound {
   readonly classId: string;
   readonly name: string;
   readonly timeZone: string;
   readonly startsOn: string | null;
   readonly endsOn: string | null;
-  readonly members: readonly Member[];
+  readonly archived: boolean;
+  readonly instructors: readonly string[];
+  readonly learners: number;
+  /** The word by which anybody may join while joining is open; null before the first is made. */
+  readonly joiningWord: string | null;
+  readonly joiningOpen: boolean;
 }
 
-/** A class to be made. */
-export interface NewClass {
+/** What is said of a class. */
+export interface ClassFacts {
   readonly name: string;
-  readonly timeZone?: string;
-  readonly startsOn?: string | null;
-  readonly endsOn?: string | null;
+  readonly timeZone: string;
+  readonly startsOn: string | null;
+  readonly endsOn: string | null;
 }
 
-/** The classes that the viewer is in, and for an administrator all of them. */
+/** A class to be made; what is left out is taken from its maker, or stays open. */
+export type NewClass = Pick<ClassFacts, 'name'> & Partial<ClassFacts>;
+
+/**
+ * The classes that the viewer is in, and for an administrator all of them; those put away come last,
+ * and only to their staff.
+ */
 export function listClasses(viewer: Viewer): Promise<ClassListed[]> {
   return rows<ClassListed>(
-    `select g.id as "classId", g.name, mine.role,
-       coalesce((
-         select json_agg(p.name order by p.name) from memberships m
-         join people p on p.id = m.person_id
-         where m.class_id = g.id and m.role = 'instructor' and m.left_at is null), '[]')
-         as instructors,
-       (select count(*)::int from memberships m
-         where m.class_id = g.id and m.role = 'learner' and m.left_at is null) as learners
+    `select g.id as "classId", g.name, mine.role, ${instructorsOf} as instructors,
+       ${learnersOf} as learners, g.archived_at is not null as archived
      from class_groups g
      left join memberships mine
        on mine.class_id = g.id and mine.person_id = $1 and mine.left_at is null
-     where g.archived_at is null and ($2::boolean or mine.id is not null)
-     order by g.name, g.id`,
+     where ($2::boolean or mine.id is not null)
+       and (g.archived_at is null or $2::boolean or mine.role = 'instructor')
+     order by g.archived_at is not null, g.name, g.id`,
     [viewer.personId, viewer.isAdministrator],
   );
 }
 
-/** A class with who is in it; null for anybody but its instructors and the administrator. */
+/** A class; null for anybody but its instructors and the administrator. */
 export async function findClass(viewer: Viewer, classId: string): Promise<ClassFound | null> {
   if (!isId(classId)) return null;
   return row<ClassFound>(
     `select g.id as "classId", g.name, g.time_zone as "timeZone",
        g.starts_on::text as "startsOn", g.ends_on::text as "endsOn",
-       coalesce((
-         select json_agg(json_build_object('personId', p.id, 'learnerId', l.id, 'name', p.name,
-             'email', p.email, 'role', m.role, 'joinedAt', m.joined_at)
-           order by m.role, p.name, p.id)
-         from memberships m join people p on p.id = m.person_id
-         join learners l on l.person_id = p.id
-         where m.class_id = g.id and m.left_at is null), '[]') as members
+       g.archived_at is not null as archived, ${instructorsOf} as instructors,
+       ${learnersOf} as learners, g.joining_word as "joiningWord",
+       g.joining_open as "joiningOpen"
      from class_groups g where ${staffOfClass}`,
     staffValues(viewer, classId),
   );
@@ -93,104 +85,91 @@ export async function createClass(
   if (!can(viewer, 'make a class')) return null;
   if (!isTimeZone(timeZone)) throw new RangeError(`createClass: ${timeZone} is not a time zone`);
   return transact(async (transaction) => {
-    const made = await models().ClassGroup.create(
+    const { id } = await models().ClassGroup.create(
       { name: name.trim(), timeZone, startsOn, endsOn },
       { transaction },
     );
-    await recordAudit(
-      {
-        actorId: viewer.personId,
-        action: 'class created',
-        objectKind: 'class',
-        objectId: made.id,
-        classId: made.id,
-      },
-      transaction,
-    );
-    return made.id;
+    await recordAudit(aboutClass(viewer, id, 'class created'), transaction);
+    return id;
   });
 }
 
-/** What adding somebody to a class comes to. */
-export type MemberAdded = 'added' | 'already there' | 'no such person' | 'not allowed';
-
-/** Adds the person with this address to a class. */
-export async function addMember(
+/**
+ * Says anew what a class is called, where its clock hangs and when it meets. Due moments stay what
+ * they are when the time zone changes. False when that cannot be done. Throws `RangeError` for an
+ * unknown time zone.
+ */
+export async function updateClass(
   viewer: Viewer,
   classId: string,
-  { email, role }: { readonly email: string; readonly role: Role },
-  now: Date = presentTime(),
-): Promise<MemberAdded> {
-  if (!can(viewer, 'change who is in a class', classId) || !isId(classId)) return 'not allowed';
-  try {
-    return await transact(async (transaction) => {
-      const added = await row<{ personId: string }>(
-        `insert into memberships (class_id, person_id, role, joined_at)
-         select g.id, p.id, $3, $4 from class_groups g, people p
-         where g.id = $1 and g.archived_at is null and p.email = $2 and p.disabled_at is null
-         returning person_id as "personId"`,
-        [classId, email.trim().toLowerCase(), role, now],
-        transaction,
-      );
-      if (added === null) return 'no such person';
-      if (role === 'instructor') {
-        // Who teaches signs in for hours, not for weeks: longer sign-ins are cut down.
-        await rows(
-          `update sessions set idle_minutes = least(idle_minutes, $2),
-             expires_at = greatest(least(expires_at, created_at + make_interval(hours => $3)),
-               created_at + interval '1 second')
-           where person_id = $1 and ended_at is null returning id`,
-          [added.personId, sessionLimits.staff.idleMinutes, sessionLimits.staff.hours],
-          transaction,
-        );
-      }
-      await recordAudit(
-        {
-          actorId: viewer.personId,
-          action: 'member added',
-          objectKind: 'person',
-          objectId: added.personId,
-          classId,
-          detail: { role },
-        },
-        transaction,
-      );
-      return 'added';
-    });
-  } catch (error) {
-    if (error instanceof UniqueConstraintError) return 'already there';
-    throw error;
-  }
+  { name, timeZone, startsOn, endsOn }: ClassFacts,
+): Promise<boolean> {
+  if (!isTimeZone(timeZone)) throw new RangeError(`updateClass: ${timeZone} is not a time zone`);
+  return changeClass(
+    viewer,
+    classId,
+    'class changed',
+    `name = $4, time_zone = $5, starts_on = $6, ends_on = $7`,
+    [name.trim(), timeZone, startsOn, endsOn],
+  );
 }
 
-/** Takes somebody out of a class; what they did stays theirs. False when that cannot be done. */
-export async function removeMember(
+/** Puts a class away: it can be read, and nothing in it changes. False when that cannot be done. */
+export async function archiveClass(viewer: Viewer, classId: string): Promise<boolean> {
+  return changeClass(
+    viewer,
+    classId,
+    'class archived',
+    'archived_at = now(), joining_open = false',
+    [],
+  );
+}
+
+/** Takes a class that was put away back into use. False when that cannot be done. */
+export async function reopenClass(viewer: Viewer, classId: string): Promise<boolean> {
+  const putAway = `${staffOfClass} and g.archived_at is not null`;
+  return changeClass(viewer, classId, 'class reopened', 'archived_at = null', [], putAway);
+}
+
+/** Changes one class under the right in `where`, and notes it; `$4` and on are the values. */
+async function changeClass(
   viewer: Viewer,
   classId: string,
-  personId: string,
-  now: Date = presentTime(),
+  action: AuditedAction,
+  changes: string,
+  values: readonly unknown[],
+  where = staffOfOpenClass,
 ): Promise<boolean> {
-  if (!can(viewer, 'change who is in a class', classId) || !isId(classId) || !isId(personId)) {
-    return false;
-  }
+  if (!isId(classId)) return false;
   return transact(async (transaction) => {
-    const left = await row(
-      `update memberships set left_at = greatest($3, joined_at)
-       where class_id = $1 and person_id = $2 and left_at is null returning id`,
-      [classId, personId, now],
+    const changed = await row(
+      `update class_groups g set ${changes}, version = g.version + 1, updated_at = now()
+       where ${where} returning g.id`,
+      [...staffValues(viewer, classId), ...values],
       transaction,
     );
-    if (left === null) return false;
-    await recordAudit(
-      {
-        actorId: viewer.personId,
-        action: 'member removed',
-        objectKind: 'person',
-        objectId: personId,
-        classId,
-      },
-      transaction,
-    );
+    if (changed === null) return false;
+    await recordAudit(aboutClass(viewer, classId, action), transaction);
     return true;
   });
 }
+
+function aboutClass(viewer: Viewer, classId: string, action: AuditedAction) {
+  return {
+    actorId: viewer.personId,
+    action,
+    objectKind: 'class',
+    objectId: classId,
+    classId,
+  } as const;
+}
+
+const instructorsOf = `
+  coalesce((
+    select json_agg(p.name order by p.name) from memberships m
+    join people p on p.id = m.person_id
+    where m.class_id = g.id and m.role = 'instructor' and m.left_at is null), '[]')`;
+
+const learnersOf = `
+  (select count(*)::int from memberships m
+    where m.class_id = g.id and m.role = 'learner' and m.left_at is null)`;

@@ -14,6 +14,7 @@ import { createLetters } from '@/migrations/20261201T1000-create-letters';
 import { addMailPreference } from '@/migrations/20261201T1001-add-mail-preference';
 import { createInvitations } from '@/migrations/20261201T1100-create-invitations';
 import { widenOneTimeLinks } from '@/migrations/20261201T1101-widen-one-time-links';
+import { indexMembershipsByClass } from '@/migrations/20261201T1200-index-memberships-by-class';
 import type { Migration } from './migration';
 
 /** Every change, in order; a name, once released, never changes. */
@@ -34,4 +35,5 @@ export const migrations: readonly { readonly name: string; readonly migration: M
   { name: '20261201T1001-add-mail-preference', migration: addMailPreference },
   { name: '20261201T1100-create-invitations', migration: createInvitations },
   { name: '20261201T1101-widen-one-time-links', migration: widenOneTimeLinks },
+  { name: '20261201T1200-index-memberships-by-class', migration: indexMembershipsByClass },
 ];

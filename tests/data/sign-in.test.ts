@@ -5,7 +5,7 @@ import { complaintAbout, hashPassword, isPassword } from '@/lib/data/entry/passw
 import { createSession, endSession, findViewer } from '@/lib/data/entry/sessions';
 import { tidy } from '@/lib/data/entry/tidy';
 import { createPasswordLink, createPerson, disablePerson, enablePerson } from '@/lib/data/people';
-import { addMember } from '@/lib/data/classes';
+import { addMember } from '@/lib/data/class-people';
 import { row, rows } from '@/lib/db/query';
 import { countRows, openWorkshop, type Workshop } from '../support/workshop';
 

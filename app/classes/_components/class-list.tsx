@@ -29,7 +29,7 @@ export function ClassList({ classes, mayOpenAll }: ClassListProps) {
         <ColumnName>Learners</ColumnName>
       </HeadRow>
       <tbody>
-        {classes.map(({ classId, name, role, instructors, learners }) => (
+        {classes.map(({ classId, name, role, instructors, learners, archived }) => (
           <Row key={classId}>
             <RowName>
               {mayOpenAll || role === 'instructor' ? (
@@ -39,6 +39,7 @@ export function ClassList({ classes, mayOpenAll }: ClassListProps) {
               ) : (
                 name
               )}
+              {archived ? <span className="ml-2 text-pencil">put away</span> : null}
             </RowName>
             <Cell>{role === null ? '–' : role === 'instructor' ? 'teach it' : 'learn in it'}</Cell>
             <Cell>{instructors.join(', ') || 'nobody yet'}</Cell>

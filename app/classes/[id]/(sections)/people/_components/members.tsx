@@ -1,24 +1,25 @@
-import { LearnerLink } from '@/components/progress/lessons-table';
-import { ActionForm } from '@/components/ui/action-form';
+import { LearnerLink } from '@/components/progress/learner-link';
+import { sayDay } from '@/components/progress/say-due';
 import { Empty } from '@/components/ui/panel';
 import { Cell, ColumnName, HeadRow, Row, RowName, Table } from '@/components/ui/table';
-import type { Member } from '@/lib/data/classes';
+import type { Member } from '@/lib/data/class-people';
+import type { ClassFound } from '@/lib/data/classes';
 import { takeOut } from '../actions';
+import { TakeOut } from './take-out';
 
 interface MembersProps {
-  readonly classId: string;
+  readonly found: ClassFound;
   readonly members: readonly Member[];
-  readonly mayRemove: boolean;
 }
 
-/** Who is in the class, instructors first. */
-export function Members({ classId, members, mayRemove }: MembersProps) {
+/** Who is in the class now, instructors first. */
+export function Members({ found, members }: MembersProps) {
+  const { classId, timeZone, archived } = found;
   if (members.length === 0) {
     return (
       <Empty title="Nobody is in this class yet">
-        {mayRemove
-          ? 'Put its instructors and learners into it with the form.'
-          : 'The administrator puts people into classes.'}
+        Put its instructors and learners into it with the form, or open joining and tell them the
+        word.
       </Empty>
     );
   }
@@ -27,11 +28,12 @@ export function Members({ classId, members, mayRemove }: MembersProps) {
       <HeadRow>
         <ColumnName>Name</ColumnName>
         <ColumnName>As</ColumnName>
-        {mayRemove ? (
+        <ColumnName>Since</ColumnName>
+        {archived ? null : (
           <ColumnName>
             <span className="sr-only">Take out</span>
           </ColumnName>
-        ) : null}
+        )}
       </HeadRow>
       <tbody>
         {members.map((member) => (
@@ -44,16 +46,12 @@ export function Members({ classId, members, mayRemove }: MembersProps) {
               )}
             </RowName>
             <Cell>{member.role}</Cell>
-            {mayRemove ? (
-              <Cell>
-                <ActionForm
-                  action={takeOut.bind(null, classId, member.personId)}
-                  fields={[]}
-                  submit="Take out"
-                  variant="quiet"
-                />
+            <Cell className="whitespace-nowrap">{sayDay(member.joinedAt, timeZone)}</Cell>
+            {archived ? null : (
+              <Cell className="text-right">
+                <TakeOut action={takeOut.bind(null, classId, member.personId)} name={member.name} />
               </Cell>
-            ) : null}
+            )}
           </Row>
         ))}
       </tbody>

@@ -1,5 +1,5 @@
 import { ActionForm } from '@/components/ui/action-form';
-import type { Member } from '@/lib/data/classes';
+import type { Member } from '@/lib/data/class-people';
 import { listPeople } from '@/lib/data/people';
 import type { Viewer } from '@/lib/policy/viewer';
 import { putIn } from '../actions';
@@ -10,9 +10,9 @@ interface AddMemberProps {
   readonly members: readonly Member[];
 }
 
-/** Puts somebody who has an account into the class, as a learner or as an instructor. */
+/** Puts somebody who has an account into the class, as a learner or to teach it. */
 export async function AddMember({ classId, viewer, members }: AddMemberProps) {
-  const inside = new Set(members.map((member) => member.personId));
+  const inside = new Set(members.map(({ personId }) => personId));
   const people = (await listPeople(viewer)).filter(
     (person) => !person.disabled && !inside.has(person.personId),
   );
