@@ -17,9 +17,15 @@ function openLesson(lessonId: string | null): void {
   window.history.pushState(null, '', lessonId === null ? '?' : `?lesson=${lessonId}`);
 }
 
-/** A class's progress, fetched by the page: all lessons, or one opened to its exercises. */
-export function ClassProgress({ classId }: Readonly<{ classId: string }>) {
-  const { data, error, refetch } = useClassProgress(classId);
+interface ClassProgressProps {
+  readonly classId: string;
+  /** How it stood when the page was made; without it the page asks first. */
+  readonly initial?: Progress | null;
+}
+
+/** A class's progress, kept up to date by the page: all lessons, or one opened to its exercises. */
+export function ClassProgress({ classId, initial = null }: ClassProgressProps) {
+  const { data, error, refetch } = useClassProgress(classId, initial);
   if (data) return <ProgressTables progress={data} />;
   if (!error) return <Loading lines={6} />;
   return (

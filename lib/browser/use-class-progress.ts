@@ -9,11 +9,12 @@ import { queryKeys } from './query-keys';
 const LOOK_AGAIN = 20_000;
 
 /** The progress of a class, looked at again while the page is open. */
-export function useClassProgress(classId: string) {
+export function useClassProgress(classId: string, initial: ClassProgress | null = null) {
   return useQuery({
     queryKey: queryKeys.classProgress(classId),
     queryFn: ({ signal }) =>
       fetchJson<ClassProgress>(`/api/classes/${encodeURIComponent(classId)}/progress`, { signal }),
+    initialData: initial ?? undefined,
     refetchInterval: LOOK_AGAIN,
   });
 }

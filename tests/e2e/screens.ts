@@ -72,6 +72,12 @@ export const screens: readonly Screen[] = [
     by: ['administrator'],
     prepare: firstClass,
   },
+  ...['work', 'people', 'settings'].map((section) => ({
+    name: `class-${section}`,
+    path: '/classes',
+    by: ['instructor'] as const,
+    prepare: inTurn(firstClass, follow(new RegExp(`/${section}$`))),
+  })),
   {
     name: 'learner-in-class',
     path: '/classes',

@@ -33,6 +33,7 @@ describe('from an account to a marked answer that the instructor sees', () => {
     const link = await page.getByText(/\/set-password\//).innerText();
     await page.goto('/classes', { waitUntil: 'networkidle' });
     await page.getByRole('link', { name: demo.className }).first().click();
+    await page.getByRole('link', { name: 'People', exact: true }).last().click();
     await page.getByLabel('Who', { exact: true }).selectOption(email);
     await page.getByRole('button', { name: 'Put into the class' }).click();
     await page.getByText('Wilma Brandt').first().waitFor();

@@ -1,6 +1,5 @@
-import { forEverybody, forSignedIn, only, staffOfTheClass, type ActionRow } from './endpoint';
-
-const onClass = ({ classId }: { readonly classId: string }) => `/classes/${classId}`;
+import { classActions } from './class-actions';
+import { forEverybody, forSignedIn, only, type ActionRow } from './endpoint';
 
 /** Every server action, and what calling it comes to for each person. */
 export const actions: readonly ActionRow[] = [
@@ -34,45 +33,15 @@ export const actions: readonly ActionRow[] = [
     file: 'app/classes/actions.ts',
     name: 'makeClass',
     on: () => '/classes',
-    form: () => ({ name: 'Made by the matrix', timeZone: 'Europe/London' }),
+    form: () => ({
+      name: 'Made by the matrix',
+      timeZone: 'Europe/London',
+      startsOn: '',
+      endsOn: '',
+    }),
     outcome: only(['administrator'], 'sent on', 'refused', 'sign in'),
   },
-  {
-    kind: 'action',
-    file: 'app/classes/[id]/actions.ts',
-    name: 'setLesson',
-    on: onClass,
-    bound: ({ classId }) => [classId],
-    form: ({ dueOn }) => ({ lessonId: 'trammel-and-oval', dueOn, dueTime: '18:30', note: '' }),
-    outcome: only(staffOfTheClass, 'done', 'refused', 'sign in'),
-  },
-  {
-    kind: 'action',
-    file: 'app/classes/[id]/actions.ts',
-    name: 'withdrawWork',
-    on: onClass,
-    bound: async ({ classId, newAssignment }) => [classId, await newAssignment()],
-    form: () => ({}),
-    outcome: only(staffOfTheClass, 'done', 'refused', 'sign in'),
-  },
-  {
-    kind: 'action',
-    file: 'app/classes/[id]/actions.ts',
-    name: 'putIn',
-    on: onClass,
-    bound: ({ classId }) => [classId],
-    form: ({ addressOfNobody }) => ({ email: addressOfNobody, role: 'learner' }),
-    outcome: only([], 'refused', 'refused', 'sign in'),
-  },
-  {
-    kind: 'action',
-    file: 'app/classes/[id]/actions.ts',
-    name: 'takeOut',
-    on: onClass,
-    bound: async ({ classId, newMember }) => [classId, await newMember()],
-    form: () => ({}),
-    outcome: only(['administrator'], 'done', 'refused', 'sign in'),
-  },
+  ...classActions,
   {
     kind: 'action',
     file: 'app/people/actions.ts',

@@ -45,6 +45,14 @@ export const pages: readonly PageRow[] = [
     at: () => '/classes/not-an-id',
     outcome: forSignedIn('missing', 'sign in'),
   },
+  ...(['work', 'people', 'settings'] as const).map((section): PageRow => ({
+    kind: 'page',
+    route: `/classes/[id]/${section}`,
+    at: ({ classId }) => `/classes/${classId}/${section}`,
+    outcome: only(staffOfTheClass, 'shown', 'missing', 'sign in'),
+    holds: ({ canaries }) =>
+      section === 'people' ? canaries.classmateName.text : canaries.className.text,
+  })),
   {
     kind: 'page',
     route: '/classes/[id]/learners/[learnerId]',

@@ -32,6 +32,7 @@ export interface Planted {
   readonly addressOfNobody: string;
   readonly dueOn: string;
   readonly canaries: Readonly<Record<string, Canary>> & {
+    readonly className: Canary;
     readonly classmateName: Canary;
     readonly learnerName: Canary;
     readonly learnerAddress: Canary;
@@ -42,6 +43,8 @@ export interface Planted {
   readonly newAssignment: () => Promise<string>;
   readonly newMember: () => Promise<string>;
   readonly newDisabled: () => Promise<string>;
+  /** Another class of the instructor of the class, in this state. */
+  readonly newClass: (state: { archivedAt?: Date; joiningWord?: string }) => Promise<string>;
 }
 
 /** Read by every number part, and never right: the rounds stay open. */
@@ -98,6 +101,13 @@ export async function plantWorkshop(): Promise<Planted> {
     newAddress: () => `made-${randomUUID()}@workshop.example`,
     newAssignment,
     newMember,
+    newClass: async (state) => {
+      const { ClassGroup, Membership } = models();
+      const { id } = await ClassGroup.create({ name: 'Canaryclass Spare', ...state });
+      const { personId } = instructor;
+      await Membership.create({ classId: id, personId, role: 'instructor' });
+      return id;
+    },
     newDisabled: async () => {
       const personId = await newMember();
       await models().Person.update({ disabledAt: new Date() }, { where: { id: personId } });

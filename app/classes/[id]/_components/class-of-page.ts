@@ -1,5 +1,4 @@
 import { notFound } from 'next/navigation';
-import { cache } from 'react';
 import { requireViewer } from '@/lib/auth/viewer';
 import { findClass, type ClassFound } from '@/lib/data/classes';
 
@@ -8,9 +7,9 @@ export interface ClassPageProps {
   readonly params: Promise<{ readonly id: string }>;
 }
 
-/** The class of a page, looked up once a request; for anybody but its staff it is not there. */
-export const requireClass = cache(async (classId: string): Promise<ClassFound> => {
-  const found = await findClass(await requireViewer(), classId);
+/** The class of a page, or not found: for anybody but its staff it is not there. */
+export async function requireClass({ params }: ClassPageProps): Promise<ClassFound> {
+  const found = await findClass(await requireViewer(), (await params).id);
   if (found === null) notFound();
   return found;
-});
+}

@@ -3,16 +3,17 @@ import { Notice } from '@/components/ui/notice';
 import { Page } from '@/components/ui/page';
 import { PageHeading } from '@/components/ui/page-heading';
 import { SectionNav } from '@/components/ui/section-nav';
-import { requireClass, type ClassPageProps } from '../_components/class-of-page';
+import type { ClassFound } from '@/lib/data/classes';
 
-/** The frame of a class: its name, and the way between its pages. */
-export default async function ClassLayout({
-  params,
-  children,
-}: ClassPageProps & { readonly children: ReactNode }) {
-  const { id } = await params;
-  const { name, learners, instructors, archived } = await requireClass(id);
-  const base = `/classes/${id}`;
+interface ClassFrameProps {
+  readonly found: ClassFound;
+  readonly children: ReactNode;
+}
+
+/** The frame of a class's pages: its name, and the way between them. */
+export function ClassFrame({ found, children }: ClassFrameProps) {
+  const { classId, name, learners, instructors, archived } = found;
+  const base = `/classes/${classId}`;
   const taught = instructors.length > 0 ? ` · taught by ${instructors.join(' and ')}` : '';
   return (
     <Page>
@@ -26,7 +27,6 @@ export default async function ClassLayout({
         links={[
           { href: base, label: 'Progress' },
           { href: `${base}/work`, label: 'Work' },
-          { href: `${base}/sticking-points`, label: 'Sticking points' },
           { href: `${base}/people`, label: 'People' },
           { href: `${base}/settings`, label: 'Settings' },
         ]}

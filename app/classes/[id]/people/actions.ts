@@ -8,7 +8,7 @@ import { requireViewer } from '@/lib/auth/viewer';
 import { addMember, removeMember, type MemberAdded } from '@/lib/data/class-people';
 import { renewJoiningWord, setJoining } from '@/lib/data/joining-word';
 import { newMemberSchema, takeOutSchema } from '@/lib/schemas/class';
-import { notYours } from '../../_components/not-yours';
+import { notYours } from '../_components/not-yours';
 
 const refusals: Readonly<Record<Exclude<MemberAdded, 'added'>, string>> = {
   'already there': 'They are in this class already.',

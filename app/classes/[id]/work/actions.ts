@@ -6,7 +6,7 @@ import type { FormState } from '@/components/ui/form-state';
 import { requireViewer } from '@/lib/auth/viewer';
 import { createAssignment, withdrawAssignment } from '@/lib/data/assignments';
 import { newAssignmentSchema } from '@/lib/schemas/class';
-import { notYours } from '../../_components/not-yours';
+import { notYours } from '../_components/not-yours';
 
 /** Sets a lesson to a class. */
 export async function setLesson(

@@ -6,7 +6,7 @@ import type { FormState } from '@/components/ui/form-state';
 import { requireViewer } from '@/lib/auth/viewer';
 import { archiveClass, reopenClass, updateClass } from '@/lib/data/classes';
 import { classSchema } from '@/lib/schemas/class';
-import { notYours } from '../../_components/not-yours';
+import { notYours } from '../_components/not-yours';
 
 /** Says anew what a class is called, where its clock hangs and when it meets. */
 export async function changeClass(

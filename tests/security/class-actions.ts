@@ -1,0 +1,101 @@
+import { randomUUID } from 'node:crypto';
+import { only, staffOfTheClass, type ActionOutcome, type ActionRow } from './endpoint';
+import type { Planted } from './planted';
+
+const page =
+  (section: string) =>
+  ({ classId }: Planted) =>
+    `/classes/${classId}/${section}`;
+const bound = ({ classId }: Planted) => [classId];
+const byStaff = only<ActionOutcome>(staffOfTheClass, 'done', 'refused', 'sign in');
+const byAdministrator = only<ActionOutcome>([], 'refused', 'refused', 'sign in');
+
+/** Every server action of a class's own pages. */
+export const classActions: readonly ActionRow[] = [
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/work/actions.ts',
+    name: 'setLesson',
+    on: page('work'),
+    bound,
+    form: ({ dueOn }) => ({ lessonId: 'trammel-and-oval', dueOn, dueTime: '18:30', note: '' }),
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/work/actions.ts',
+    name: 'withdrawWork',
+    on: page('work'),
+    bound: async ({ classId, newAssignment }) => [classId, await newAssignment()],
+    form: () => ({}),
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/people/actions.ts',
+    name: 'putIn',
+    on: page('people'),
+    bound,
+    form: ({ addressOfNobody }) => ({ email: addressOfNobody, role: 'learner' }),
+    outcome: byAdministrator,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/people/actions.ts',
+    name: 'takeOut',
+    on: page('people'),
+    bound: async ({ classId, newMember }) => [classId, await newMember()],
+    form: () => ({ evenTheLast: 'no' }),
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/people/actions.ts',
+    name: 'renewWord',
+    on: page('people'),
+    bound,
+    form: () => ({}),
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/people/actions.ts',
+    name: 'letJoin',
+    on: page('people'),
+    bound: async ({ newClass }) => [await newClass({ joiningWord: randomUUID() }), true],
+    form: () => ({}),
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/settings/actions.ts',
+    name: 'changeClass',
+    on: page('settings'),
+    bound,
+    form: () => ({
+      name: 'Canaryclass Harbour',
+      timeZone: 'Europe/London',
+      startsOn: '',
+      endsOn: '',
+    }),
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/settings/actions.ts',
+    name: 'putAway',
+    on: page('settings'),
+    bound: async ({ newClass }) => [await newClass({})],
+    form: () => ({}),
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/settings/actions.ts',
+    name: 'takeBack',
+    on: page('settings'),
+    bound: async ({ newClass }) => [await newClass({ archivedAt: new Date() })],
+    form: () => ({}),
+    outcome: byStaff,
+  },
+];
