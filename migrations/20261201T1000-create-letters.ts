@@ -15,7 +15,7 @@ export const createLetters: Migration = {
         person_id uuid references people (id),
         data jsonb not null,
         once_key text,
-        again_of uuid references letters (id),
+        again_of uuid references letters (id) on delete set null,
         state text not null default 'waiting',
         tries integer not null default 0,
         last_error text,

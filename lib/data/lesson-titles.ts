@@ -28,3 +28,13 @@ export function lessonOfExercise(exerciseId: string): string | null {
   const listed = lessons.find((one) => one.exercises.includes(exerciseId));
   return listed?.id ?? exercises.get(exerciseId)?.lesson ?? null;
 }
+
+/** What is set, as it is read: each lesson once, and the exercises that were set by themselves. */
+export function workTitles(
+  items: readonly { readonly lessonId: string | null; readonly exerciseId: string }[],
+): string[] {
+  const titles = items.map(({ lessonId, exerciseId }) =>
+    lessonId === null ? exerciseTitle(exerciseId) : lessonName(lessonId).title,
+  );
+  return [...new Set(titles)];
+}

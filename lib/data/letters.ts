@@ -2,9 +2,9 @@ import 'server-only';
 import { randomUUID } from 'node:crypto';
 import type { Transaction } from 'sequelize';
 import * as z from 'zod';
-import { row } from '@/lib/db/query';
+import { rows } from '@/lib/db/query';
 import { siteEnvironment } from '@/lib/env';
-import { enqueue } from '@/lib/jobs/enqueue';
+import { enqueueAll } from '@/lib/jobs/enqueue';
 import { isEssential, letterSchema, type Letter } from '@/lib/mail/letter';
 import { email } from '@/lib/schemas/person';
 
@@ -34,42 +34,53 @@ export interface NewLetter {
  */
 export async function queueLetter(
   transaction: Transaction,
-  { to, personId, letter, once, sendAfter }: NewLetter,
+  letter: NewLetter,
 ): Promise<string | null> {
-  const id = randomUUID();
-  const { kind, ...data } = letterSchema.parse(letter);
-  const queued = await row(
-    `insert into letters (id, message_id, kind, to_address, person_id, data, once_key, send_after)
-     select $1, $2, $3, $4, $5::uuid, $6::jsonb, $7, coalesce($8::timestamptz, now())
-     where $9::boolean or $5::uuid is null or exists (
-       select 1 from people p where p.id = $5::uuid and p.wants_class_mail)
-     on conflict (once_key) do nothing returning id`,
-    [
-      id,
-      messageIdOf(id),
-      kind,
-      oneAddress(to),
-      personId ?? null,
-      JSON.stringify(data),
-      once ?? null,
-      sendAfter ?? null,
-      isEssential(kind),
-    ],
-    transaction,
-  );
-  if (queued === null) return null;
-  await queueSending(transaction, id, sendAfter);
-  return id;
+  const [letterId] = await queueLetters(transaction, [letter]);
+  return letterId ?? null;
 }
 
-/** Puts the job that sends a letter of the outbox on the queue; one a letter at a time. */
+/** As `queueLetter`, for many at once and in two statements; answers the ids of those written. */
+export async function queueLetters(
+  transaction: Transaction,
+  letters: readonly NewLetter[],
+): Promise<string[]> {
+  if (letters.length === 0) return [];
+  const queued = await rows<{ id: string; sendAfter: Date }>(
+    `insert into letters (id, message_id, kind, to_address, person_id, data, once_key, send_after)
+     select n.id, n."messageId", n.kind, n."to", n."personId", n.data, n.once,
+       coalesce(n."sendAfter", now())
+     from jsonb_to_recordset($1::jsonb) as n (id uuid, "messageId" text, kind text, "to" text,
+       "personId" uuid, data jsonb, once text, "sendAfter" timestamptz, essential boolean)
+     where n.essential or n."personId" is null or exists (
+       select 1 from people p where p.id = n."personId" and p.wants_class_mail)
+     on conflict (once_key) do nothing returning id, send_after as "sendAfter"`,
+    [JSON.stringify(letters.map(recordOf))],
+    transaction,
+  );
+  await queueSending(transaction, queued);
+  return queued.map(({ id }) => id);
+}
+
+/** Puts the jobs that send these letters on the queue; one a letter at a time. */
 export async function queueSending(
   transaction: Transaction,
-  letterId: string,
-  runAt?: Date,
+  letters: readonly { readonly id: string; readonly sendAfter: Date }[],
 ): Promise<void> {
-  const key = `send-letter:${letterId}`;
-  await enqueue(transaction, 'send-letter', { letterId }, { key, runAt, tries: letterTries });
+  const jobs = letters.map(({ id, sendAfter }) => ({
+    payload: { letterId: id },
+    key: `send-letter:${id}`,
+    runAt: sendAfter,
+    tries: letterTries,
+  }));
+  await enqueueAll(transaction, 'send-letter', jobs);
+}
+
+function recordOf({ to, letter, ...rest }: NewLetter) {
+  const id = randomUUID();
+  const { kind, ...data } = letterSchema.parse(letter);
+  const essential = isEssential(kind);
+  return { ...rest, id, messageId: messageIdOf(id), kind, to: oneAddress(to), data, essential };
 }
 
 /** The same for every try of a letter, so that a second copy can be known for what it is. */

@@ -13,22 +13,39 @@ export interface JobOptions {
   readonly tries?: number;
 }
 
+/** A job to be put on the queue. */
+export interface NewJob<Name extends JobName> extends JobOptions {
+  readonly payload: JobPayloads[Name];
+}
+
 /**
  * Puts a job on the queue as part of the transaction that causes it: rolled back with it, seen by
  * the workers when it is committed.
  *
  * @example await enqueue(transaction, 'send-letter', { letterId });
  */
-export async function enqueue<Name extends JobName>(
+export function enqueue<Name extends JobName>(
   transaction: Transaction,
   name: Name,
   payload: JobPayloads[Name],
-  { key, runAt, tries }: JobOptions = {},
+  options: JobOptions = {},
 ): Promise<void> {
+  return enqueueAll(transaction, name, [{ ...options, payload }]);
+}
+
+/** As `enqueue`, for many jobs of one name in one statement. */
+export async function enqueueAll<Name extends JobName>(
+  transaction: Transaction,
+  name: Name,
+  jobs: readonly NewJob<Name>[],
+): Promise<void> {
+  if (jobs.length === 0) return;
   await rows(
-    `select 1 as queued from graphile_worker.add_job($1, $2::json, job_key => $3, run_at => $4,
-       max_attempts => $5)`,
-    [name, JSON.stringify(payload), key ?? null, runAt ?? null, tries ?? null],
+    `select count(job.id) from jsonb_to_recordset($2::jsonb)
+       as n (payload json, key text, "runAt" timestamptz, tries int)
+     cross join lateral graphile_worker.add_job($1, n.payload, job_key => n.key,
+       run_at => n."runAt", max_attempts => n.tries) job`,
+    [name, JSON.stringify(jobs)],
     transaction,
   );
 }

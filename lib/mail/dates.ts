@@ -31,9 +31,11 @@ export function sayLifetime(minutes: number): string {
   return `${Math.round(minutes / 1440)} days`;
 }
 
+/** Put together from its parts, because one version of Unicode's data has a comma where another has none. */
 function sayDay(moment: Date, timeZone: string): string {
   const shown = { weekday: 'long', day: 'numeric', month: 'long', year: 'numeric' } as const;
-  return format(moment, timeZone, shown);
+  const parts = new Intl.DateTimeFormat('en-GB', { timeZone, ...shown }).formatToParts(moment);
+  return parts.flatMap(({ type, value }) => (type === 'literal' ? [] : [value])).join(' ');
 }
 
 function format(moment: Date, timeZone: string, shown: Intl.DateTimeFormatOptions): string {

@@ -27,7 +27,7 @@ export function weeklySummary(
       ),
       ...part(
         'Due next',
-        due.map(({ work, dueAt }) => `${work}, ${sayDeadline(dueAt, timeZone)}`),
+        due.map(({ work, dueAt }) => `${work}: ${sayDeadline(dueAt, timeZone)}`),
         'Nothing is due after this.',
       ),
       { press: 'Open the class', href: `${siteAddress}/classes/${classId}` },

@@ -2,8 +2,10 @@ import 'server-only';
 import { EventEmitter } from 'node:events';
 import { run, type JobHelpers, type TaskList, type WorkerEvents } from 'graphile-worker';
 import { now } from '@/lib/clock';
+import { remindOfDueWork } from '@/lib/data/entry/due-reminders';
 import { giveUpLostLetters } from '@/lib/data/entry/letter-delivery';
 import { tidy } from '@/lib/data/entry/tidy';
+import { summariseWeeks } from '@/lib/data/entry/weekly-summaries';
 import { databaseEnvironment } from '@/lib/env';
 import type { JobName, JobPayloads } from '@/lib/jobs/jobs';
 import { openPostbox, type Postbox } from '@/lib/mail/send';
@@ -16,6 +18,9 @@ const timetable = [
   // Every night, when nobody is at the bench.
   '17 3 * * * tidy',
   '*/10 * * * * give-up-lost-letters',
+  // Every hour, because nine o'clock and Monday come to each class by its own clock.
+  '5 * * * * due-tomorrow',
+  '10 * * * * weekly-summary',
 ].join('\n');
 
 /** Work under way, in this process. */
@@ -64,6 +69,12 @@ function tasks(postbox: Postbox): TaskList {
     tidy: () => tidy({ by: 'job', job: 'tidy' }, now()),
     'give-up-lost-letters': async () => {
       await giveUpLostLetters({ by: 'job', job: 'give-up-lost-letters' }, now());
+    },
+    'due-tomorrow': async () => {
+      await remindOfDueWork({ by: 'job', job: 'due-tomorrow' }, now());
+    },
+    'weekly-summary': async () => {
+      await summariseWeeks({ by: 'job', job: 'weekly-summary' }, now());
     },
   };
 }

@@ -5,6 +5,7 @@ import type { LetterContext } from '@/lib/mail/draft';
 import { isEssential, letterSchema, type Letter } from '@/lib/mail/letter';
 import { linkAddress } from './link-token';
 import type { JobProof } from './proof';
+import { concernedLearners, isConcerned } from './set-work';
 import { unsubscribeAddresses } from './unsubscribe';
 
 /** A letter that a worker has taken to send it, with all that is needed to write it. */
@@ -28,7 +29,7 @@ export async function claimLetter(
 ): Promise<ClaimedLetter | null> {
   const found = await row<LetterRow>(claimSql, [letterId, now]);
   if (found === null) return null;
-  const letter = letterSchema.parse({ kind: found.kind, ...found.data });
+  const letter = letterOf(found);
   const reason = reasonAgainst(found, letter, now);
   if (reason !== null) {
     await closeLetter(letterId, 'dropped', reason, now);
@@ -105,12 +106,22 @@ async function closeLetter(
   );
 }
 
+/** The letter as it was queued, but with the time by which the work is due now. */
+function letterOf({ kind, data, dueAt }: LetterRow): Letter {
+  const letter = letterSchema.parse({ kind, ...data });
+  return 'assignmentId' in letter && dueAt !== null
+    ? { ...letter, dueAt: dueAt.toISOString() }
+    : letter;
+}
+
 function reasonAgainst(found: LetterRow, letter: Letter, now: Date): string | null {
   if (found.gone) return 'The account is disabled or was erased.';
   if (!isEssential(letter.kind) && found.wants === false) {
     return 'They want no letters about their classes.';
   }
-  if (found.withdrawn) return 'The work was withdrawn.';
+  if ('assignmentId' in letter && !found.concerned) {
+    return 'The work was withdrawn, or is no longer set to them.';
+  }
   if (!('linkId' in letter)) return null;
   const good = found.linkExpiresAt !== null && !found.linkUsed && found.linkExpiresAt > now;
   return good ? null : 'The link in it is used up or too old.';
@@ -133,7 +144,8 @@ interface LetterRow {
   readonly timeZone: string | null;
   readonly wants: boolean | null;
   readonly gone: boolean;
-  readonly withdrawn: boolean;
+  readonly concerned: boolean;
+  readonly dueAt: Date | null;
   readonly linkMadeAt: Date | null;
   readonly linkExpiresAt: Date | null;
   readonly linkUsed: boolean;
@@ -143,14 +155,17 @@ const claimSql = `
   with claimed as (
     update letters set tries = tries + 1, tried_at = $2
     where id = $1 and state = 'waiting' returning *)
-  select l.message_id as "messageId", l.kind, l.to_address as "to", l.data,
-    l.person_id as "personId", l.send_after as "sendAfter", p.name, p.time_zone as "timeZone",
+  select claimed.message_id as "messageId", claimed.kind, claimed.to_address as "to", claimed.data,
+    claimed.person_id as "personId", claimed.send_after as "sendAfter", p.name, p.time_zone as "timeZone",
     p.wants_class_mail as wants,
     (p.id is not null and (p.disabled_at is not null or p.erased_at is not null)) as gone,
-    coalesce(a.withdrawn_at is not null, false) as withdrawn,
+    work.assignment_id is not null as concerned, work.due_at as "dueAt",
     o.created_at as "linkMadeAt", o.expires_at as "linkExpiresAt",
     coalesce(o.used_at is not null, true) as "linkUsed"
-  from claimed l
-  left join people p on p.id = l.person_id
-  left join assignments a on a.id = (l.data ->> 'assignmentId')::uuid
-  left join one_time_links o on o.id = (l.data ->> 'linkId')::uuid`;
+  from claimed
+  left join people p on p.id = claimed.person_id
+  left join lateral (
+    select a.id as assignment_id, coalesce(e.due_at, a.due_at) as due_at from ${concernedLearners}
+    where a.id = (claimed.data ->> 'assignmentId')::uuid and p.id = claimed.person_id
+      and ${isConcerned}) work on true
+  left join one_time_links o on o.id = (claimed.data ->> 'linkId')::uuid`;

@@ -5,9 +5,12 @@ import type { JobProof } from './proof';
 /** How long what is over is kept: retries have long ceased by then. */
 const keptDays = 30;
 
+/** How long the log of letters reaches back. */
+const lettersKeptDays = 180;
+
 /**
  * Removes what is over and done with: remembered answers to requests, sessions and one-time links
- * past their time, and counts of tries. Attempts and the audit log are never touched.
+ * past their time, letters of long ago, and counts of tries. Attempts and the audit log are never touched.
  */
 export async function tidy(_proof: JobProof, now: Date): Promise<void> {
   const before = new Date(now.getTime() - keptDays * 86_400_000);
@@ -23,6 +26,11 @@ export async function tidy(_proof: JobProof, now: Date): Promise<void> {
         transaction,
       );
     }
+    await rows(
+      "delete from letters where state <> 'waiting' and created_at < $1 returning 1 as gone",
+      [new Date(now.getTime() - lettersKeptDays * 86_400_000)],
+      transaction,
+    );
     await rows(
       'delete from throttle where expire < $1 returning 1 as gone',
       [now.getTime()],
