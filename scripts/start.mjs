@@ -26,6 +26,7 @@ import {
   stopLeftServer,
   stopServer,
 } from './machine/postgres.mjs';
+import { startSite, untilReady } from './machine/site.mjs';
 import { complain, Remedy, requireRoom, say } from './machine/say.mjs';
 
 const dev = process.argv.includes('--dev');
@@ -205,20 +206,21 @@ async function main() {
     { env },
   );
   started.push(() => stopChild(worker));
-  const next = startChild(
-    process.execPath,
-    ['node_modules/next/dist/bin/next', dev ? 'dev' : 'start', '-H', host, '-p', String(port)],
-    { env, stdio: dev ? 'inherit' : 'pipe' },
-  );
-  started.push(() => stopChild(next));
-  const children = [worker.child.pid, next.child.pid];
+  const site = startSite({
+    address: `http://${host}:${port}`,
+    env,
+    mode: dev ? 'dev' : 'start',
+    stdio: dev ? 'inherit' : 'pipe',
+  });
+  started.push(site.stop);
+  const children = [worker.child.pid, site.child.pid];
   writeFileSync(runFile, JSON.stringify({ pid: process.pid, address, children }));
-  if (!dev) next.child.stderr.pipe(process.stderr);
+  if (!dev) site.child.stderr.pipe(process.stderr);
   const died = Promise.race([
-    next.ended.then((code) => `The web server ended by itself (${code}).`),
+    site.ended.then((code) => `The web server ended by itself (${code}).`),
     worker.ended.then((code) => `The job worker ended by itself (${code}).`),
   ]);
-  await Promise.race([untilReady(address), died.then((why) => Promise.reject(new Error(why)))]);
+  await Promise.race([untilReady(site), died.then((why) => Promise.reject(new Error(why)))]);
   tell(address, demo, embedded, mailPage, signIns);
   say(`(ready after ${((Date.now() - begun) / 1000).toFixed(1)} s)`);
   const why = await died;
@@ -226,23 +228,6 @@ async function main() {
     complain(new Error(why));
     await end(1);
   }
-}
-
-async function untilReady(address) {
-  const url = `http://${host}:${port}/api/health/ready`;
-  for (let attempt = 0; attempt < 600; attempt += 1) {
-    try {
-      const reply = await fetch(url);
-      if (reply.ok) return;
-    } catch {
-      // not listening yet
-    }
-    await new Promise((resolve) => setTimeout(resolve, 100));
-  }
-  throw new Remedy(
-    `${address} did not become ready within a minute.`,
-    'See the lines above for the reason.',
-  );
 }
 
 main().catch(async (error) => {

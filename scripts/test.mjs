@@ -1,7 +1,7 @@
 import { spawnSync } from 'node:child_process';
 import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs';
 import path from 'node:path';
-import { installDebian } from './machine/debian.mjs';
+import { requireChromium } from './machine/chromium.mjs';
 import { installPackages, requireFolder, requireNode, root } from './machine/node.mjs';
 import { requireServer } from './machine/postgres.mjs';
 import { complain, requireRoom, say } from './machine/say.mjs';
@@ -38,7 +38,7 @@ function main() {
   requireRoom(own, 800);
   installPackages();
   requireServer();
-  if (!existsSync('/usr/bin/chromium')) installDebian(['chromium'], 'Chromium');
+  requireChromium();
   mkdirSync(own, { recursive: true });
   const report = path.join(own, 'report.json');
   rmSync(report, { force: true });

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { load, median } from './load.mjs';
-import { sessionCookie } from './site.mjs';
+import { signInByForm } from '../machine/sign-in.mjs';
 
 const rounds = 3;
 
@@ -9,8 +9,8 @@ const rounds = 3;
  * same build: interleaved rounds of one run, the median of each.
  */
 export async function benchHttp({ address, demo }) {
-  const learner = await sessionCookie(address, demo.learner, demo.password);
-  const instructor = await sessionCookie(address, demo.instructor, demo.password);
+  const learner = await signInByForm(address, demo.learner, demo.password);
+  const instructor = await signInByForm(address, demo.instructor, demo.password);
   const opened = await post(address, `/api/exercises/${demo.exercise}/round`, learner, {});
   const part = opened.parts.find((candidate) => candidate.kind === 'number');
   const choice = opened.parts.find((candidate) => candidate.kind === 'choice');

@@ -2,21 +2,8 @@ import { readFileSync } from 'node:fs';
 import path from 'node:path';
 import { gzipSync } from 'node:zlib';
 import { chromium } from 'playwright-core';
+import { chromiumLaunch } from '../machine/chromium.mjs';
 import { root } from '../machine/node.mjs';
-
-const launch = {
-  executablePath: '/usr/bin/chromium',
-  args: [
-    '--headless',
-    '--no-sandbox',
-    '--disable-gpu',
-    '--disable-quic',
-    '--no-first-run',
-    '--disable-background-networking',
-    '--disable-component-update',
-    '--disable-sync',
-  ],
-};
 
 const zipped = (body) => gzipSync(body, { level: 6 }).length;
 
@@ -31,7 +18,7 @@ function frameworkBase(distDir) {
 
 /** Gzipped client script of each page once it has settled, and what of it is not the framework's. */
 export async function benchWeight({ address, distDir, pages }) {
-  const browser = await chromium.launch(launch);
+  const browser = await chromium.launch(chromiumLaunch);
   const base = frameworkBase(distDir);
   const rows = [];
   for (const [name, url] of Object.entries(pages)) {
@@ -55,7 +42,7 @@ export async function benchWeight({ address, distDir, pages }) {
  * frame, ours and the canvas library's alike. With `slow`, the processor is throttled so many times.
  */
 export async function benchFrames({ address, url, start, frames = 300, slow = 1 }) {
-  const browser = await chromium.launch(launch);
+  const browser = await chromium.launch(chromiumLaunch);
   const page = await browser.newPage({ viewport: { width: 1280, height: 900 } });
   await page.addInitScript(() => {
     const original = window.requestAnimationFrame.bind(window);

@@ -25,7 +25,11 @@ export function runEntry(
 export function startChild(
   command: string,
   args: readonly string[],
-  options?: { env?: Record<string, string | undefined>; stdio?: 'inherit' | 'pipe' | 'ignore' },
+  options?: {
+    env?: Record<string, string | undefined>;
+    stdio?: 'inherit' | 'pipe' | 'ignore';
+    folder?: string;
+  },
 ): Child;
 export function stopChild(child: Child, graceMs?: number): Promise<void>;
 export function installPackages(): void;

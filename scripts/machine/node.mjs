@@ -65,9 +65,9 @@ export function runEntry(script, { env, args = [], what, quiet } = {}) {
 }
 
 /** Starts a child that is ended with us; `ended` resolves with its exit code. */
-export function startChild(command, args, { env, stdio = 'inherit' } = {}) {
+export function startChild(command, args, { env, stdio = 'inherit', folder = root } = {}) {
   const child = spawn(command, args, {
-    cwd: root,
+    cwd: folder,
     env: { ...process.env, NEXT_TELEMETRY_DISABLED: '1', ...env },
     stdio: ['ignore', stdio, stdio],
     // A group of its own: Ctrl-C reaches us alone, and we end the children in order.

@@ -3,6 +3,7 @@ import { createRequire } from 'node:module';
 import type axeCore from 'axe-core';
 import { chromium, type Browser, type BrowserContext, type Page } from 'playwright-core';
 import { expect } from 'vitest';
+import { chromiumLaunch } from '../../scripts/machine/chromium.mjs';
 import { site } from './site';
 
 const axeSource = readFileSync(
@@ -14,19 +15,7 @@ export const widths = { phone: 390, tablet: 820, desktop: 1440 } as const;
 export type Theme = 'light' | 'dark';
 
 export function launchBrowser(): Promise<Browser> {
-  return chromium.launch({
-    executablePath: '/usr/bin/chromium',
-    args: [
-      '--headless',
-      '--no-sandbox',
-      '--disable-gpu',
-      '--disable-quic',
-      '--no-first-run',
-      '--disable-background-networking',
-      '--disable-component-update',
-      '--disable-sync',
-    ],
-  });
+  return chromium.launch(chromiumLaunch);
 }
 
 /** A visitor: one browser context, and everything that went wrong in its pages. */

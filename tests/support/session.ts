@@ -1,3 +1,4 @@
+import { signInByForm, signOutByForm } from '../../scripts/machine/sign-in.mjs';
 import { site } from './site';
 
 /** A session gained as a form would gain it, for asking without a browser. */
@@ -8,48 +9,11 @@ export interface Session {
 export const nobody: Session = { cookie: '' };
 
 export async function openSession(email: string, password: string): Promise<Session> {
-  const { address } = site();
-  const jar = new Map<string, string>();
-  const keep = (answer: Response) => {
-    for (const line of answer.headers.getSetCookie()) {
-      const pair = line.split(';')[0] ?? '';
-      jar.set(pair.slice(0, pair.indexOf('=')), pair.slice(pair.indexOf('=') + 1));
-    }
-  };
-  const cookie = () => [...jar].map(([name, value]) => `${name}=${value}`).join('; ');
-  const first = await fetch(`${address}/api/auth/csrf`);
-  keep(first);
-  const { csrfToken } = (await first.json()) as { csrfToken: string };
-  const answer = await fetch(`${address}/api/auth/callback/credentials`, {
-    method: 'POST',
-    redirect: 'manual',
-    headers: {
-      'content-type': 'application/x-www-form-urlencoded',
-      origin: address,
-      cookie: cookie(),
-    },
-    body: new URLSearchParams({ csrfToken, email, password, json: 'true' }),
-  });
-  keep(answer);
-  if (!answer.ok) throw new Error(`${email} was refused: ${answer.status}`);
-  return { cookie: cookie() };
+  return { cookie: await signInByForm(site().address, email, password) };
 }
 
-export async function closeSession({ cookie }: Session): Promise<void> {
-  const { address } = site();
-  const first = await fetch(`${address}/api/auth/csrf`, { headers: { cookie } });
-  const { csrfToken } = (await first.json()) as { csrfToken: string };
-  const fresh = first.headers.getSetCookie().map((line) => line.split(';')[0]);
-  await fetch(`${address}/api/auth/signout`, {
-    method: 'POST',
-    redirect: 'manual',
-    headers: {
-      'content-type': 'application/x-www-form-urlencoded',
-      origin: address,
-      cookie: [cookie, ...fresh].filter(Boolean).join('; '),
-    },
-    body: new URLSearchParams({ csrfToken, json: 'true' }),
-  });
+export function closeSession({ cookie }: Session): Promise<void> {
+  return signOutByForm(site().address, cookie);
 }
 
 /**
