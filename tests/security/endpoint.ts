@@ -42,6 +42,8 @@ export interface HandlerRow {
   readonly headers?: (planted: Planted) => Readonly<Record<string, string>>;
   /** Of another form than ours: no JSON, no problem details; only who gets what is tried. */
   readonly foreign?: true;
+  /** Holds nothing of anybody's: it may be kept by whoever asks. */
+  readonly bare?: true;
 }
 
 /** A server action: `file` and `name` as the build knows it. */

@@ -4,7 +4,14 @@ import { wrongResponse } from './planted';
 
 /** Every route handler and method, and the status that it answers each person. */
 export const handlers: readonly HandlerRow[] = [
-  { kind: 'handler', method: 'GET', route: '/api/floor', outcome: forEverybody(200) },
+  {
+    kind: 'handler',
+    method: 'GET',
+    route: '/api/floor',
+    outcome: forEverybody(200),
+    foreign: true,
+    bare: true,
+  },
   {
     kind: 'handler',
     method: 'POST',
@@ -12,6 +19,7 @@ export const handlers: readonly HandlerRow[] = [
     body: () => ({}),
     outcome: forEverybody(200),
     foreign: true,
+    bare: true,
   },
   { kind: 'handler', method: 'GET', route: '/api/health/live', outcome: forEverybody(200) },
   { kind: 'handler', method: 'GET', route: '/api/health/ready', outcome: forEverybody(200) },

@@ -1,0 +1,7 @@
+export function signInByForm(
+  address: string,
+  email: string,
+  password: string,
+  options?: { device?: string },
+): Promise<string>;
+export function signOutByForm(address: string, cookie: string): Promise<void>;
