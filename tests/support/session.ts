@@ -1,4 +1,4 @@
-import { signInByForm, signOutByForm } from '../../scripts/machine/sign-in.mjs';
+import { signInByForm } from '../../scripts/machine/sign-in.mjs';
 import { site } from './site';
 
 /** A session gained as a form would gain it, for asking without a browser. */
@@ -6,14 +6,8 @@ export interface Session {
   readonly cookie: string;
 }
 
-export const nobody: Session = { cookie: '' };
-
 export async function openSession(email: string, password: string): Promise<Session> {
   return { cookie: await signInByForm(site().address, email, password) };
-}
-
-export function closeSession({ cookie }: Session): Promise<void> {
-  return signOutByForm(site().address, cookie);
 }
 
 /**
