@@ -53,7 +53,11 @@ export default async function RootLayout({ children }: Readonly<{ children: Reac
   // page made at build time.
   const viewer = await currentViewer();
   return (
-    <html lang="en-GB" className={`${besley.variable} ${text.variable} ${mono.variable}`}>
+    <html
+      lang="en-GB"
+      className={`${besley.variable} ${text.variable} ${mono.variable}`}
+      data-motion={viewer?.reducedMotion ? 'less' : undefined}
+    >
       <body>
         <SkipLink />
         <QueryProvider>

@@ -17,3 +17,6 @@ export function passwordSentence(complaint: PasswordComplaint): string {
       return 'That is mostly your own name or address, which others know. Take something they do not.';
   }
 }
+
+/** What is asked of a new password, said before anything is typed. */
+export const passwordHint = `${leastPasswordLength} characters at least. Three or four words in a row do well; paste one if you like.`;

@@ -4,7 +4,7 @@ import { Page } from '@/components/ui/page';
 import { PageHeading } from '@/components/ui/page-heading';
 import { Section } from '@/components/ui/panel';
 import { requireViewer } from '@/lib/auth/viewer';
-import { findOwnAddress } from '@/lib/data/account';
+import { findOwnAddress } from '@/lib/data/own-address';
 import { savePassword, saveProfile } from './actions';
 import { passwordFields, profileFields } from './_components/fields';
 import { SignOut } from './_components/sign-out';

@@ -1,7 +1,9 @@
 import type { Metadata } from 'next';
+import { ActionForm } from '@/components/ui/action-form';
 import { ButtonLink } from '@/components/ui/button';
 import { Page } from '@/components/ui/page';
 import { PageHeading } from '@/components/ui/page-heading';
+import { askReset } from './actions';
 
 export const metadata: Metadata = { title: 'Forgotten password' };
 
@@ -9,13 +11,27 @@ export default function ForgottenPage() {
   return (
     <Page width="narrow">
       <PageHeading>Forgotten your password?</PageHeading>
-      <p className="mb-3 max-w-measure">
-        Ask whoever looks after Hornbeam in your workshop. They make a link for you that sets a new
-        password; it works once, and for seven days.
+      <p className="mb-6 max-w-measure">
+        Type the address of your account. A letter goes to it with a link that sets a new password:
+        it works once, and for half an hour.
       </p>
-      <p className="mb-6 max-w-measure text-pencil">
-        Your answers and your pegs are kept meanwhile. Setting a new password signs you out on every
-        device.
+      <ActionForm
+        action={askReset}
+        submit="Send me the letter"
+        fields={[
+          {
+            name: 'email',
+            label: 'E-mail',
+            type: 'email',
+            autoComplete: 'username',
+            required: true,
+          },
+        ]}
+      />
+      <p className="mt-8 mb-6 max-w-measure text-pencil">
+        Nothing in the post after some minutes? Look among the unwanted mail, then ask whoever looks
+        after Hornbeam in your workshop: they can make a link for you. Your answers and your pegs
+        are kept meanwhile.
       </p>
       <ButtonLink href="/sign-in" variant="secondary">
         Back to signing in

@@ -34,8 +34,11 @@ export default async function SignInPage({ searchParams }: SignInPageProps) {
         <Link href="/forgotten" prefetch={false} className="link">
           Forgotten your password?
         </Link>{' '}
-        No account yet? Whoever looks after Hornbeam in your workshop makes one for you. The lessons
-        are open to read without.
+        No account yet? You come in with an invitation from your workshop, or{' '}
+        <Link href="/join" prefetch={false} className="link">
+          with the joining word of a class
+        </Link>
+        . The lessons are open to read without.
       </p>
     </Page>
   );

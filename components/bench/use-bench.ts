@@ -42,9 +42,15 @@ export function useSettled(store: BenchStore): BenchMoment {
   return settled;
 }
 
-/** Whether the person has asked for less motion. */
+/** Whether the person has asked for less motion: on their device, or on their account page. */
 export function useReducedMotion(): boolean {
-  return useMedia('(prefers-reduced-motion: reduce)');
+  const device = useMedia('(prefers-reduced-motion: reduce)');
+  const account = useSyncExternalStore(
+    () => () => undefined,
+    () => document.documentElement.dataset.motion === 'less',
+    () => false,
+  );
+  return device || account;
 }
 
 function useMedia(query: string): boolean {

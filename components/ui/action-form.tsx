@@ -1,11 +1,12 @@
 'use client';
 
 import { useActionState, useEffect, useRef, type ReactNode } from 'react';
-import { SelectField, TextField } from './field';
+import { SelectField, TextAreaField, TextField } from './field';
 import { idle, type FormState } from './form-state';
 import { Notice } from './notice';
 import { OneTimeLink } from './one-time-link';
 import { SubmitButton } from './submit-button';
+import { useFormDraft } from './use-form-draft';
 
 /** One field of a form, as data. */
 export interface FormField {
@@ -19,6 +20,8 @@ export interface FormField {
   /** With options the field is a choice of one of them. */
   readonly options?: readonly { readonly value: string; readonly label: string }[];
   readonly required?: boolean;
+  /** How many lines it has, when it has several. */
+  readonly rows?: number;
 }
 
 interface ActionFormProps {
@@ -37,7 +40,7 @@ function Field({
   state,
   prefix,
 }: Readonly<{ field: FormField; state: FormState; prefix: string }>) {
-  const { name, label, hint, type = 'text', autoComplete, value, options, required } = field;
+  const { name, label, hint, type = 'text', autoComplete, value, options, required, rows } = field;
   const kept = type === 'password' ? '' : (state.values?.[name] ?? value ?? '');
   const common = {
     id: `${prefix}${name}`,
@@ -60,6 +63,7 @@ function Field({
       </SelectField>
     );
   }
+  if (rows) return <TextAreaField {...common} rows={rows} />;
   return <TextField {...common} type={type} autoComplete={autoComplete} />;
 }
 
@@ -71,12 +75,13 @@ export function ActionForm(props: ActionFormProps) {
   const { action, fields, submit, variant, prefix = '', children } = props;
   const [state, send] = useActionState(action, idle);
   const form = useRef<HTMLFormElement>(null);
+  const keepDraft = useFormDraft(form, `${prefix}${submit}`, state);
   useEffect(() => {
     if (state.outcome !== 'refused') return;
     form.current?.querySelector<HTMLElement>('[aria-invalid=true]')?.focus();
   }, [state]);
   return (
-    <form ref={form} action={send} noValidate className="max-w-md">
+    <form ref={form} action={send} onSubmit={keepDraft} noValidate className="max-w-md">
       {state.outcome === 'refused' && state.message ? (
         <Notice tone="wrong" title={state.message} role="alert" />
       ) : null}

@@ -64,6 +64,24 @@ export function TextField({ label, hint, error, id, className, ...rest }: TextFi
   );
 }
 
+type TextAreaFieldProps = Around & Omit<ComponentProps<'textarea'>, 'name'>;
+
+/** Several lines to type in, with their label, their hint and their error tied to them. */
+export function TextAreaField({ label, hint, error, id, className, ...rest }: TextAreaFieldProps) {
+  const key = id ?? rest.name;
+  return (
+    <Surround id={key} label={label} hint={hint} error={error}>
+      <textarea
+        id={key}
+        className={clsx(control, className)}
+        aria-invalid={error ? true : undefined}
+        aria-describedby={described(key, hint, error)}
+        {...rest}
+      />
+    </Surround>
+  );
+}
+
 type SelectFieldProps = Around & Omit<ComponentProps<'select'>, 'name'>;
 
 /** A choice of one from a list, with its label, its hint and its error tied to it. */

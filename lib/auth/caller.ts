@@ -1,4 +1,5 @@
 import 'server-only';
+import { headers } from 'next/headers';
 import { siteEnvironment } from '@/lib/env';
 
 /**
@@ -14,4 +15,14 @@ export function callerAddress(forwardedFor: string | null | undefined): string |
       .map((part) => part.trim())
       .at(-trustedProxies) ?? null
   );
+}
+
+/** The same for the request that is being answered. */
+export async function currentCaller(): Promise<string | null> {
+  return callerAddress((await headers()).get('x-forwarded-for'));
+}
+
+/** What the browser of the request that is being answered says of itself. */
+export async function currentDevice(): Promise<string> {
+  return (await headers()).get('user-agent') ?? '';
 }

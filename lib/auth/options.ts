@@ -2,10 +2,10 @@ import 'server-only';
 import type { AuthOptions } from 'next-auth';
 import CredentialsProvider from 'next-auth/providers/credentials';
 import { now } from '@/lib/clock';
-import { createSession, endSession, findViewer, sessionLimits } from '@/lib/data/entry/sessions';
+import { createSession, endSession, findViewer } from '@/lib/data/entry/sessions';
 import { siteEnvironment } from '@/lib/env';
 import { callerAddress } from './caller';
-import { sessionCookieName } from './cookie';
+import { sessionCookie, tokenAge } from './cookie';
 
 /** The error with which next-auth answers a sign-in that was tried too often. */
 export const throttledError = 'throttled';
@@ -18,14 +18,11 @@ export function authOptions(): AuthOptions {
   const { secure, secret } = siteEnvironment();
   return {
     secret,
-    session: { strategy: 'jwt', maxAge: sessionLimits.learner.hours * 3600 },
+    session: { strategy: 'jwt', maxAge: tokenAge },
     pages: { signIn: '/sign-in', signOut: '/sign-out', error: '/sign-in' },
     useSecureCookies: secure,
     cookies: {
-      sessionToken: {
-        name: sessionCookieName(),
-        options: { httpOnly: true, sameSite: 'lax', path: '/', secure },
-      },
+      sessionToken: sessionCookie(),
     },
     providers: [
       CredentialsProvider({

@@ -3,6 +3,7 @@ import { now as presentTime } from '@/lib/clock';
 import { row, rows, transact } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
 import { recordAudit } from './audit';
+import { queueLetter } from './letters';
 import {
   complaintAbout,
   hashPassword,
@@ -18,14 +19,6 @@ export type PasswordChange =
   | { readonly outcome: 'wrong password' }
   | { readonly outcome: 'throttled' }
   | { readonly outcome: 'refused'; readonly complaint: PasswordComplaint };
-
-/** The address with which the viewer signs in. */
-export async function findOwnAddress(viewer: Viewer): Promise<string | null> {
-  const person = await row<{ email: string | null }>('select email from people where id = $1', [
-    viewer.personId,
-  ]);
-  return person?.email ?? null;
-}
 
 /**
  * Changes the viewer's password; the one they have is the proof. Every other sign-in of theirs
@@ -47,11 +40,16 @@ export async function changePassword(
   await forgetTries('sign-in by account', person.email);
   const complaint = complaintAbout(next, knownOf(person));
   if (complaint !== null) return { outcome: 'refused', complaint };
-  await keepPassword(viewer, await hashPassword(next), now);
+  await keepPassword(viewer, person.email, await hashPassword(next), now);
   return { outcome: 'changed' };
 }
 
-async function keepPassword(viewer: Viewer, passwordHash: string, now: Date): Promise<void> {
+async function keepPassword(
+  viewer: Viewer,
+  email: string,
+  passwordHash: string,
+  now: Date,
+): Promise<void> {
   await transact(async (transaction) => {
     await rows(
       `update people set password_hash = $2, password_set_at = $3, updated_at = $3
@@ -74,5 +72,10 @@ async function keepPassword(viewer: Viewer, passwordHash: string, now: Date): Pr
       },
       transaction,
     );
+    await queueLetter(transaction, {
+      to: email,
+      personId: viewer.personId,
+      letter: { kind: 'password-changed' },
+    });
   });
 }

@@ -9,10 +9,22 @@ export type AuditedAction =
   | 'signed out'
   | 'password set'
   | 'link made'
+  | 'session ended'
+  | 'signed out everywhere'
+  | 'password given again'
+  | 'reset asked for'
+  | 'address change asked for'
+  | 'address changed'
+  | 'own records taken away'
+  | 'audit log taken away'
+  | 'person invited'
+  | 'invitation sent again'
+  | 'invitation withdrawn'
   | 'person created'
   | 'person disabled'
   | 'person enabled'
   | 'administrator made'
+  | 'administrator unmade'
   | 'class created'
   | 'class changed'
   | 'class archived'
@@ -37,7 +49,15 @@ export type AuditedAction =
 export interface AuditLine {
   readonly actorId: string | null;
   readonly action: AuditedAction;
-  readonly objectKind: 'person' | 'learner' | 'class' | 'assignment' | 'attempt' | 'session';
+  readonly objectKind:
+    | 'person'
+    | 'learner'
+    | 'class'
+    | 'assignment'
+    | 'attempt'
+    | 'session'
+    | 'invitation'
+    | 'audit log';
   readonly objectId?: string | null;
   readonly classId?: string | null;
   readonly detail?: Readonly<Record<string, string | number | boolean | null>>;

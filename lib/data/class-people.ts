@@ -6,7 +6,6 @@ import { can } from '@/lib/policy/can';
 import type { Role, Viewer } from '@/lib/policy/viewer';
 import { recordAudit } from './audit';
 import { isId, staffOfClass, staffOfOpenClass, staffValues } from './class-right';
-import { sessionLimits } from './entry/sessions';
 
 /** Somebody who is in a class, or was. */
 export interface Member {
@@ -72,7 +71,6 @@ export async function addMember(
         transaction,
       );
       if (added === null) return 'no such person';
-      if (role === 'instructor') await shortenSessions(added.personId, transaction);
       await noteMember(viewer, classId, added.personId, 'member added', transaction, { role });
       return 'added';
     });
@@ -134,18 +132,6 @@ async function lockClass(
     transaction,
   );
   return held !== null;
-}
-
-/** Who teaches signs in for hours, not for weeks: longer sign-ins are cut down. */
-async function shortenSessions(personId: string, transaction: Transaction): Promise<void> {
-  await rows(
-    `update sessions set idle_minutes = least(idle_minutes, $2),
-       expires_at = greatest(least(expires_at, created_at + make_interval(hours => $3)),
-         created_at + interval '1 second')
-     where person_id = $1 and ended_at is null returning id`,
-    [personId, sessionLimits.staff.idleMinutes, sessionLimits.staff.hours],
-    transaction,
-  );
 }
 
 async function noteMember(

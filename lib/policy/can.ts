@@ -29,6 +29,7 @@ export const rights = {
   'change who is in a class': ['administrator'],
   'take somebody out of a class': ['instructor', 'administrator'],
   'invite people to a class': ['instructor', 'administrator'],
+  'invite an instructor to a class': ['administrator'],
   'open a class to its joining word': ['instructor', 'administrator'],
   'invite people to the workshop': ['administrator'],
   'look after people': ['administrator'],

@@ -16,6 +16,8 @@ export interface Viewer {
   readonly isAdministrator: boolean;
   readonly units: 'metric' | 'inch';
   readonly timeZone: string;
+  /** Whether they want less to move, whatever their device says. */
+  readonly reducedMotion: boolean;
   readonly sessionId: string;
   readonly memberships: readonly Membership[];
 }

@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import { unitSystems } from '@/lib/quantities/unit-system';
 
-const name = z
+/** A person's name. */
+export const personName = z
   .string()
   .trim()
   .min(1, 'Type a name.')
@@ -29,22 +30,37 @@ function isTimeZone(zone: string): boolean {
   }
 }
 
+/** Paper sizes, by their names in ISO 216 and ANSI Y14.1. */
+export const papers = ['a4', 'a3', 'letter', 'tabloid'] as const;
+
 const units = z.enum(unitSystems, 'Choose millimetres or inches.');
 
 /** What an administrator says of a new person. */
 export const newPersonSchema = z.strictObject({
-  name,
+  name: personName,
   email,
   isAdministrator: z.enum(['yes', 'no']).transform((said) => said === 'yes'),
 });
 
 /** What people may change about themselves. */
-export const profileSchema = z.strictObject({ name, timeZone, units });
+export const profileSchema = z.strictObject({
+  name: personName,
+  timeZone,
+  units,
+  paper: z.enum(papers, 'Choose a paper size from the list.'),
+  reducedMotion: z.enum(['no', 'yes']).transform((said) => said === 'yes'),
+});
 
 /** Changing a password: the old one is the proof. */
 export const passwordChangeSchema = z.strictObject({
   currentPassword: z.string().min(1, 'Type the password you have now.').max(1000),
   newPassword: z.string().min(1, 'Type a new password.').max(1000, 'That is longer than we take.'),
+});
+
+/** A new address to sign in with, and the password, where it is asked for again. */
+export const newAddressSchema = z.strictObject({
+  email,
+  password: z.string().max(1000).optional(),
 });
 
 /** Millimetres or inches. */

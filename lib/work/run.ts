@@ -3,6 +3,8 @@ import { EventEmitter } from 'node:events';
 import { run, type JobHelpers, type TaskList, type WorkerEvents } from 'graphile-worker';
 import { now } from '@/lib/clock';
 import { remindOfDueWork } from '@/lib/data/entry/due-reminders';
+import { sendReset } from '@/lib/data/entry/forgotten';
+import { takeUpJoining } from '@/lib/data/entry/joining';
 import { giveUpLostLetters } from '@/lib/data/entry/letter-delivery';
 import { tidy } from '@/lib/data/entry/tidy';
 import { summariseWeeks } from '@/lib/data/entry/weekly-summaries';
@@ -63,6 +65,9 @@ type CausedTasks = {
 function tasks(postbox: Postbox): TaskList {
   const caused: CausedTasks = {
     'send-letter': (payload, helpers) => sendLetter(payload, helpers, postbox),
+    'send-reset': (payload) => sendReset({ by: 'job', job: 'send-reset' }, payload, now()),
+    'take-up-joining': (payload) =>
+      takeUpJoining({ by: 'job', job: 'take-up-joining' }, payload, now()),
   };
   return {
     ...(caused as TaskList),

@@ -96,6 +96,7 @@ async function makePerson(
     isAdministrator,
     units: units ?? 'metric',
     timeZone,
+    reducedMotion: false,
     sessionId: randomUUID(),
     memberships: [],
   };

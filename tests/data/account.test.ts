@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { createTestDatabase, type TestDatabase } from '../support/database';
-import { changePassword, findOwnAddress } from '@/lib/data/account';
+import { changePassword } from '@/lib/data/account';
+import { findOwnAddress } from '@/lib/data/own-address';
 import { createAdministrator } from '@/lib/data/entry/first-administrator';
 import { setPassword } from '@/lib/data/entry/set-password';
 import { createSession, findViewer } from '@/lib/data/entry/sessions';

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { findOwnAddress } from '@/lib/data/account';
+import { findOwnAddress } from '@/lib/data/own-address';
 import { createAssignment } from '@/lib/data/assignments';
 import { addMember, findClassPeople, removeMember } from '@/lib/data/class-people';
 import {
@@ -168,7 +168,8 @@ describe('who is in a class', () => {
       removeMember(one, classId, other.personId),
       removeMember(other, classId, one.personId),
     ]);
-    expect(results.sort()).toEqual(['not allowed', 'removed']);
+    // Whoever comes second is the last instructor or is one no longer, as the lock falls.
+    expect(results.filter((result) => result === 'removed')).toHaveLength(1);
     const [left] = (await findClassPeople(workshop.administrator, classId)) ?? [];
     const last = left?.personId ?? '';
     expect(await removeMember(workshop.administrator, classId, last)).toBe('last instructor');

@@ -1,4 +1,5 @@
 import { actions } from './actions';
+import { actionsOfComingIn, pagesOfComingIn } from './coming-in';
 import type { Endpoint } from './endpoint';
 import { handlers } from './handlers';
 import { pages } from './pages';
@@ -7,4 +8,10 @@ import { pages } from './pages';
  * Every page, route handler and server action, with what each person gets from it. An endpoint of the
  * build that is not here fails a test, as does a row without an endpoint.
  */
-export const endpoints: readonly Endpoint[] = [...pages, ...handlers, ...actions];
+export const endpoints: readonly Endpoint[] = [
+  ...pages,
+  ...pagesOfComingIn,
+  ...handlers,
+  ...actions,
+  ...actionsOfComingIn,
+];

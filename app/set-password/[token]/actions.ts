@@ -5,11 +5,10 @@ import type { FormState } from '@/components/ui/form-state';
 import { readForm } from '@/app/_components/read-form';
 import { now } from '@/lib/clock';
 import { setPassword } from '@/lib/data/entry/set-password';
+import { newPassword } from '@/lib/schemas/coming-in';
 import { passwordSentence } from '@/app/_components/password-sentence';
 
-const schema = z.strictObject({
-  password: z.string().min(1, 'Type a password.').max(1000, 'That is longer than we can take.'),
-});
+const schema = z.strictObject({ password: newPassword });
 
 /** Sets the password of the person the link belongs to. The link itself is the proof. */
 export async function setPasswordByLink(

@@ -1,4 +1,6 @@
 import type { Metadata } from 'next';
+import { DeadLink } from '@/app/_components/dead-link';
+import { passwordHint } from '@/app/_components/password-sentence';
 import { ActionForm } from '@/components/ui/action-form';
 import { ButtonLink } from '@/components/ui/button';
 import { Page } from '@/components/ui/page';
@@ -7,7 +9,7 @@ import { now } from '@/lib/clock';
 import { findLinkHolder } from '@/lib/data/entry/set-password';
 import { setPasswordByLink } from './actions';
 
-export const metadata: Metadata = { title: 'Set a password', referrer: 'no-referrer' };
+export const metadata: Metadata = { title: 'Set a password', referrer: 'strict-origin' };
 
 interface SetPasswordPageProps {
   readonly params: Promise<{ readonly token: string }>;
@@ -18,7 +20,7 @@ const password = {
   label: 'New password',
   type: 'password',
   autoComplete: 'new-password',
-  hint: 'Ten characters at least. Three or four words in a row do well; paste one if you like.',
+  hint: passwordHint,
 } as const;
 
 export default async function SetPasswordPage({ params }: SetPasswordPageProps) {
@@ -26,14 +28,10 @@ export default async function SetPasswordPage({ params }: SetPasswordPageProps) 
   const holder = await findLinkHolder({ by: 'link', secret: token }, now());
   if (holder === null) {
     return (
-      <Page width="narrow">
-        <PageHeading>This link is used up</PageHeading>
-        <p className="mb-6 max-w-measure">
-          A link works once, and for seven days. If you have set your password with it, sign in. If
-          not, ask for a new one where you got this.
-        </p>
-        <ButtonLink href="/sign-in">Sign in</ButtonLink>
-      </Page>
+      <DeadLink>
+        A link works once: for half an hour when you asked for it, for seven days when it was made
+        for you. If you have set your password with it, sign in. If not, ask for another.
+      </DeadLink>
     );
   }
   return (

@@ -6,6 +6,7 @@ import { useRef, useState, type FormEvent } from 'react';
 import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
+import { noteSignedInAgain } from '@/lib/browser/form-draft';
 import { sentenceForSignIn } from './sign-in-sentence';
 
 interface SignInFormProps {
@@ -29,6 +30,7 @@ export function SignInForm({ next }: SignInFormProps) {
     const refusedWith = await tryToSignIn(String(data.get('email')), String(data.get('password')));
     if (refusedWith === null) {
       // Pages seen while signed out may be kept with their redirect: forget them first.
+      noteSignedInAgain(next);
       router.refresh();
       router.push(next);
       return;

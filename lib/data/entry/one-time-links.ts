@@ -48,7 +48,7 @@ export async function createLink(
 }
 
 /** Uses a link up; false when somebody has meanwhile, or when it has expired. */
-export async function useLink(id: string, now: Date, transaction: Transaction): Promise<boolean> {
+export async function spendLink(id: string, now: Date, transaction: Transaction): Promise<boolean> {
   const used = await row(
     `update one_time_links set used_at = $2
      where id = $1 and used_at is null and expires_at > $2 returning id`,

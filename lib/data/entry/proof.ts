@@ -5,7 +5,7 @@ import 'server-only';
  * where all others take a viewer; no other folder does.
  */
 export type Proof =
-  PasswordProof | SessionProof | LinkProof | UnsubscribeProof | JobProof | ConsoleProof;
+  PasswordProof | SessionProof | LinkProof | UnsubscribeProof | FormProof | JobProof | ConsoleProof;
 
 /** An address and a password, with the network address they come from when it is known. */
 export interface PasswordProof {
@@ -31,6 +31,12 @@ export interface LinkProof {
 export interface UnsubscribeProof {
   readonly by: 'unsubscribe';
   readonly token: string;
+}
+
+/** A form that anybody may send: nothing is known but the network address, if that. */
+export interface FormProof {
+  readonly by: 'form';
+  readonly from: string | null;
 }
 
 /** Work that the job queue runs by itself. */

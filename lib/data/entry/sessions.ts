@@ -1,4 +1,5 @@
 import 'server-only';
+import type { Transaction } from 'sequelize';
 import { row, rows, transact } from '@/lib/db/query';
 import type { Membership, Viewer } from '@/lib/policy/viewer';
 import { models } from '@/models';
@@ -48,7 +49,10 @@ export async function createSession(
     return { outcome: 'refused' };
   }
   await forgetTries('sign-in by account', email);
-  return openSession(person, device, now);
+  const secret = await transact((transaction) =>
+    insertSession(person.id, device, now, transaction),
+  );
+  return { outcome: 'signed in', personId: person.id, secret };
 }
 
 /** Who holds this session, if it is in force; one query a request, and a touch once a minute. */
@@ -91,15 +95,11 @@ interface PasswordRow {
   readonly id: string;
   readonly passwordHash: string | null;
   readonly disabled: boolean;
-  readonly staff: boolean;
 }
 
 const passwordSql = `
   select p.id, p.password_hash as "passwordHash",
-    (p.disabled_at is not null or p.erased_at is not null) as disabled,
-    (p.is_administrator or exists (
-      select 1 from memberships m
-      where m.person_id = p.id and m.left_at is null and m.role = 'instructor')) as staff
+    (p.disabled_at is not null or p.erased_at is not null) as disabled
   from people p where p.email = $1`;
 
 interface ViewerRow extends Viewer {
@@ -107,40 +107,60 @@ interface ViewerRow extends Viewer {
   readonly stale: boolean;
 }
 
+/** The condition on `s` (sessions) and `staff` under which a session is in force at `at`. */
+export function inForce(at: string): string {
+  return `
+    s.ended_at is null and s.expires_at > ${at}
+    and s.last_seen_at > ${at} - make_interval(mins => s.idle_minutes)
+    and (not staff or (
+      s.created_at > ${at} - interval '${sessionLimits.staff.hours} hours'
+      and s.last_seen_at > ${at} - interval '${sessionLimits.staff.idleMinutes} minutes'))`;
+}
+
+/** What somebody is now decides how long their sign-ins hold, whatever they were when they signed in. */
 const viewerSql = `
   select s.id as "sessionId", p.id as "personId", l.id as "learnerId", p.name,
     p.is_administrator as "isAdministrator", p.units, p.time_zone as "timeZone",
-    coalesce((
-      select json_agg(json_build_object('classId', m.class_id, 'role', m.role) order by m.joined_at)
-      from memberships m where m.person_id = p.id and m.left_at is null), '[]') as memberships,
+    p.reduced_motion as "reducedMotion",
+    coalesce(inside.memberships, '[]') as memberships,
     s.last_seen_at < $2::timestamptz - interval '1 minute' as stale
   from sessions s
   join people p on p.id = s.person_id and p.disabled_at is null and p.erased_at is null
   join learners l on l.person_id = p.id
-  where s.secret_hash = $1 and s.ended_at is null and s.expires_at > $2::timestamptz
-    and s.last_seen_at > $2::timestamptz - make_interval(mins => s.idle_minutes)`;
+  cross join lateral (
+    select json_agg(json_build_object('classId', m.class_id, 'role', m.role) order by m.joined_at)
+        as memberships,
+      coalesce(bool_or(m.role = 'instructor'), false) or p.is_administrator as staff
+    from memberships m where m.person_id = p.id and m.left_at is null) inside
+  where s.secret_hash = $1 and ${inForce('$2::timestamptz')}`;
 
-async function openSession(person: PasswordRow, device: string, now: Date): Promise<SignIn> {
+/**
+ * Opens a session for somebody who has just proven who they are; answers its secret. It is opened
+ * for as long as a learner's; who teaches or administers is held to less at every request.
+ */
+export async function insertSession(
+  personId: string,
+  device: string,
+  now: Date,
+  transaction: Transaction,
+): Promise<string> {
   const secret = newSecret();
-  const limits = person.staff ? sessionLimits.staff : sessionLimits.learner;
-  await transact(async (transaction) => {
-    const session = await models().Session.create(
-      {
-        secretHash: hashSecret(secret),
-        personId: person.id,
-        device: device.slice(0, 200),
-        createdAt: now,
-        lastSeenAt: now,
-        passwordGivenAt: now,
-        idleMinutes: limits.idleMinutes,
-        expiresAt: new Date(now.getTime() + limits.hours * 3_600_000),
-      },
-      { transaction },
-    );
-    await recordAudit(
-      { actorId: person.id, action: 'signed in', objectKind: 'session', objectId: session.id },
-      transaction,
-    );
-  });
-  return { outcome: 'signed in', personId: person.id, secret };
+  const session = await models().Session.create(
+    {
+      secretHash: hashSecret(secret),
+      personId,
+      device: device.slice(0, 200),
+      createdAt: now,
+      lastSeenAt: now,
+      passwordGivenAt: now,
+      idleMinutes: sessionLimits.learner.idleMinutes,
+      expiresAt: new Date(now.getTime() + sessionLimits.learner.hours * 3_600_000),
+    },
+    { transaction },
+  );
+  await recordAudit(
+    { actorId: personId, action: 'signed in', objectKind: 'session', objectId: session.id },
+    transaction,
+  );
+  return secret;
 }

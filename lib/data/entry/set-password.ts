@@ -3,7 +3,8 @@ import type { Transaction } from 'sequelize';
 import { row, rows, transact } from '@/lib/db/query';
 import { models } from '@/models';
 import { recordAudit } from '../audit';
-import { linkValues, usableLink, useLink } from './one-time-links';
+import { queueLetter } from '../letters';
+import { linkValues, usableLink, spendLink } from './one-time-links';
 import { complaintAbout, hashPassword, knownOf, type PasswordComplaint } from './password';
 import type { LinkProof } from './proof';
 
@@ -44,15 +45,15 @@ export async function setPassword(
   if (complaint !== null) return { outcome: 'refused', complaint };
   const passwordHash = await hashPassword(password);
   return transact(async (transaction) => {
-    if (!(await useLink(holder.id, now, transaction)))
+    if (!(await spendLink(holder.id, now, transaction)))
       return { outcome: 'no longer good' } as const;
-    await keepPassword(holder.personId, passwordHash, now, transaction);
+    await keepPassword(holder, passwordHash, now, transaction);
     return { outcome: 'set', email: holder.email } as const;
   });
 }
 
 async function keepPassword(
-  personId: string,
+  { personId, email, passwordHash: earlier }: LinkRow,
   passwordHash: string,
   now: Date,
   transaction: Transaction,
@@ -70,6 +71,8 @@ async function keepPassword(
     { actorId: personId, action: 'password set', objectKind: 'person', objectId: personId },
     transaction,
   );
+  if (earlier === null) return;
+  await queueLetter(transaction, { to: email, personId, letter: { kind: 'password-changed' } });
 }
 
 interface LinkRow {

@@ -8,6 +8,13 @@ const limits = {
   'sign-in by account': { points: 10, duration: 15 * 60 },
   'sign-in by address': { points: 100, duration: 15 * 60 },
   'link by address': { points: 30, duration: 15 * 60 },
+  'reset by account': { points: 5, duration: 60 * 60 },
+  'reset by address': { points: 30, duration: 60 * 60 },
+  'join by account': { points: 5, duration: 60 * 60 },
+  'join by address': { points: 60, duration: 60 * 60 },
+  'joining word by person': { points: 20, duration: 60 * 60 },
+  'invitations by person': { points: 1000, duration: 24 * 60 * 60 },
+  'new address by person': { points: 5, duration: 60 * 60 },
 } as const;
 
 /** What is counted. */
@@ -19,10 +26,10 @@ export type Allowance =
 
 const limiters = new Map<Counted, { limiter: RateLimiterPostgres; of: unknown }>();
 
-/** Counts one try by `who` and says whether it is allowed; every instance counts together. */
-export async function countTry(what: Counted, who: string): Promise<Allowance> {
+/** Counts a try by `who` and says whether it is allowed; every instance counts together. */
+export async function countTry(what: Counted, who: string, points = 1): Promise<Allowance> {
   try {
-    await limiterOf(what).consume(hidden(who));
+    await limiterOf(what).consume(hidden(who), points);
     return { allowed: true };
   } catch (refusal) {
     if (!(refusal instanceof RateLimiterRes)) throw refusal;

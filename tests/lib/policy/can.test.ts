@@ -10,6 +10,7 @@ function viewer(memberships: Membership[], isAdministrator = false): Viewer {
     isAdministrator,
     units: 'metric',
     timeZone: 'Europe/London',
+    reducedMotion: false,
     sessionId: 's',
     memberships,
   };
@@ -59,6 +60,7 @@ const expected: Record<Action, (keyof typeof people)[]> = {
   'change who is in a class': ['administrator'],
   'take somebody out of a class': staff,
   'invite people to a class': staff,
+  'invite an instructor to a class': ['administrator'],
   'open a class to its joining word': staff,
   'invite people to the workshop': ['administrator'],
   'look after people': ['administrator'],
