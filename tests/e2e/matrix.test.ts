@@ -9,6 +9,7 @@ import {
   ways,
   type Answer,
 } from '../security/call';
+import { undescribed } from '../security/described';
 import {
   nameOf,
   persons,
@@ -109,6 +110,7 @@ describe.each(titled(handlers))('%s', (_title, row) => {
       );
       expect(answer.status, `${person}: ${answer.body.slice(0, 300)}`).toBe(row.outcome[person]);
       expect(foreignIn(answer, person), `${person}: foreign`).toEqual([]);
+      if (!row.foreign) expect(undescribed(row, answer), person).toEqual([]);
       if (!row.bare) expect(answer.headers.get('cache-control'), person).toContain('no-store');
     }
   });
@@ -164,6 +166,59 @@ describe('a cookie kept after signing out', () => {
     for (const row of handlers) {
       const answer = await ask(`${site.address}${pathOf(row)}`, requestOf(row, cookie));
       expect(answer.status, nameOf(row)).toBe(row.outcome.anonymous);
+    }
+  });
+});
+
+const writers = handlers.filter((row) => row.body !== undefined && !row.foreign);
+describe.each(titled(writers))('%s, written to wrongly,', (_title, row) => {
+  const send = (headers: Record<string, string | null>, body?: string) => {
+    const request = requestOf(row, planted.cookies['learner of the class']);
+    const all = new Headers(request.headers);
+    for (const [name, value] of Object.entries(headers)) {
+      if (value === null) all.delete(name);
+      else all.set(name, value);
+    }
+    return ask(`${site.address}${pathOf(row)}`, {
+      ...request,
+      headers: all,
+      body: body ?? (request.body as string),
+    });
+  };
+  const badBodies = () => ({
+    '{': 400,
+    '': 400,
+    null: 422,
+    '[]': 422,
+    '{"unknown":1}': 422,
+    [JSON.stringify({ ...(row.body?.(planted) as object), isAdministrator: true })]: 422,
+    [`"${'x'.repeat(70_000)}"`]: 413,
+  });
+
+  it.each([null, 'null', 'https://elsewhere.example', 'http://127.0.0.1:1'])(
+    'from the origin %s, answers a problem and does nothing',
+    async (origin) => {
+      const answer = await send({ origin });
+      expect(answer.status).toBe(403);
+      expect(undescribed(row, answer)).toEqual([]);
+    },
+  );
+
+  it.each([null, 'text/plain', 'multipart/form-data', 'application/x-www-form-urlencoded'])(
+    'as %s, answers a problem and does nothing',
+    async (type) => {
+      const answer = await send({ 'content-type': type });
+      expect(answer.status).toBe(415);
+      expect(undescribed(row, answer)).toEqual([]);
+    },
+  );
+
+  it('with a body that does not fit, says so and shows nothing of the code', async () => {
+    for (const [body, status] of Object.entries(badBodies())) {
+      const answer = await send({}, body);
+      expect(answer.status, body.slice(0, 80)).toBe(status);
+      expect(undescribed(row, answer), body.slice(0, 80)).toEqual([]);
+      expect(answer.body).not.toMatch(/\bat .*\.(ts|js)/);
     }
   });
 });

@@ -21,6 +21,7 @@ export const handlers: readonly HandlerRow[] = [
     foreign: true,
     bare: true,
   },
+  { kind: 'handler', method: 'GET', route: '/api/openapi.json', outcome: forEverybody(200) },
   { kind: 'handler', method: 'GET', route: '/api/health/live', outcome: forEverybody(200) },
   { kind: 'handler', method: 'GET', route: '/api/health/ready', outcome: forEverybody(200) },
   {

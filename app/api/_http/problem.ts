@@ -1,13 +1,4 @@
-/** What went wrong, as RFC 9457 says it. */
-export interface Problem {
-  readonly title: string;
-  readonly status: number;
-  readonly detail?: string;
-  /** Under which the surprise is in the log. */
-  readonly id?: string;
-  /** Field by field, what is wrong with the body. */
-  readonly errors?: readonly { readonly field: string; readonly message: string }[];
-}
+import type { Problem } from '@/lib/schemas/problem';
 
 const titles: Readonly<Record<number, string>> = {
   400: 'The request cannot be read',
