@@ -1,7 +1,8 @@
-import { Page } from './page';
-import { TickedRule } from './page-heading';
-
-/** Blank lines where text will stand; said once to screen readers. */
+/**
+ * Blank lines where text will stand; said once to screen readers. It is the fallback inside a page,
+ * after the page has found out who asks: a `loading.tsx` beside the page would answer 200 before a
+ * redirect or a 404 could be told.
+ */
 export function Loading({ lines = 3 }: Readonly<{ lines?: number }>) {
   return (
     <div role="status">
@@ -12,18 +13,5 @@ export function Loading({ lines = 3 }: Readonly<{ lines?: number }>) {
         ))}
       </div>
     </div>
-  );
-}
-
-/** A page while its contents are on the way: the place of the heading, the rule, blank lines. */
-export function LoadingPage() {
-  return (
-    <Page>
-      <div className="mb-3 h-12 w-64 max-w-full rounded bg-board" aria-hidden="true" />
-      <TickedRule />
-      <div className="mt-8">
-        <Loading lines={4} />
-      </div>
-    </Page>
   );
 }

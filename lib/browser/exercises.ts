@@ -13,9 +13,9 @@ export function openRound(exerciseId: string, units?: UnitSystem): Promise<Round
   });
 }
 
-/** Records that one more hint was taken and gives the round with it. */
-export function takeHint(exerciseId: string, roundId: string): Promise<RoundView> {
-  return fetchJson<RoundView>(exercisePath(exerciseId, 'hints'), { body: { roundId } });
+/** Records that a hint, counted from 1, was taken and gives the round with it. */
+export function takeHint(exerciseId: string, roundId: string, hint: number): Promise<RoundView> {
+  return fetchJson<RoundView>(exercisePath(exerciseId, 'hints'), { body: { roundId, hint } });
 }
 
 /** Shows the worked solution, which closes the round. */

@@ -46,8 +46,8 @@ export function useRound(of: RoundOf, initial: RoundView | null): RoundInPage {
     onSuccess: (round) => client.setQueryData(queryKey, round),
   });
   const round = data ?? null;
-  const about = (ask: (exercise: string, roundId: string) => Promise<RoundView>) => () => {
-    if (round !== null && !asking.isPending) asking.mutate(() => ask(exerciseId, round.roundId));
+  const about = (ask: (round: RoundView) => Promise<RoundView>) => () => {
+    if (round !== null && !asking.isPending) asking.mutate(() => ask(round));
   };
   return {
     round,
@@ -56,7 +56,7 @@ export function useRound(of: RoundOf, initial: RoundView | null): RoundInPage {
     open: () => {
       if (!asking.isPending) asking.mutate(() => openRound(exerciseId, units));
     },
-    hint: about(takeHint),
-    solution: about(showSolution),
+    hint: about(({ roundId, hints }) => takeHint(exerciseId, roundId, hints.length + 1)),
+    solution: about(({ roundId }) => showSolution(exerciseId, roundId)),
   };
 }

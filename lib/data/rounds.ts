@@ -85,27 +85,28 @@ export async function openRound(
 }
 
 /**
- * Records that one more hint was taken, in the open rounds of both units, and answers the round
- * with it. A closed round, or one with all hints taken, is answered as it is; null when the viewer
- * has no such round at this exercise.
+ * Records that a hint, counted from 1, was taken, in the open rounds of both units, and answers the
+ * round with it. Hints come in order, one at a time. A closed round, or one with this hint taken, is
+ * answered as it is; null when the viewer has no such round at this exercise.
  */
 export async function takeHint(
   viewer: Viewer,
   exerciseId: string,
   roundId: string,
+  hint: number,
 ): Promise<RoundView | null> {
   const definition = exercises.get(exerciseId);
   if (definition === undefined) return null;
   await rows(
     `with asked as (
-       select hints_taken + 1 as wanted from rounds
+       select least($4::int, $5::int, hints_taken + 1) as wanted from rounds
        where id = $1 and learner_id = $2 and exercise_id = $3 and closed_at is null
        for update)
-     update rounds set hints_taken = least($4, greatest(rounds.hints_taken, asked.wanted))
+     update rounds set hints_taken = greatest(rounds.hints_taken, asked.wanted)
      from asked
      where learner_id = $2 and exercise_id = $3 and closed_at is null
      returning id`,
-    [roundId, viewer.learnerId, exerciseId, hintsTotal],
+    [roundId, viewer.learnerId, exerciseId, hintsTotal, hint],
   );
   const record = await findRoundRecord(viewer.learnerId, roundId);
   return record?.exerciseId === exerciseId ? viewRound(definition, record) : null;

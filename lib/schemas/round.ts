@@ -175,7 +175,17 @@ export type PegView = z.infer<typeof pegViewSchema>;
 export const roundRequestSchema = z.strictObject({ units: z.optional(z.enum(unitSystems)) });
 export type RoundRequest = z.infer<typeof roundRequestSchema>;
 
-/** Asking for a hint or the worked solution of a round. */
+/**
+ * Asking for a hint of a round by its number, from 1: a retry or a double press takes the same one
+ * hint, and one that was taken before is told again at no price.
+ */
+export const hintRequestSchema = z.strictObject({
+  roundId: z.uuid(),
+  hint: z.int().check(z.minimum(1), z.maximum(3)),
+});
+export type HintRequest = z.infer<typeof hintRequestSchema>;
+
+/** Asking for the worked solution of a round. */
 export const helpRequestSchema = z.strictObject({ roundId: z.uuid() });
 export type HelpRequest = z.infer<typeof helpRequestSchema>;
 

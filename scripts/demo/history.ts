@@ -121,7 +121,8 @@ async function tryExercise({ viewer, exerciseId, taken, manner, source, at }: Tr
       await showSolution(viewer, exerciseId, round.roundId, later(1, 2));
       return time;
     }
-    if (chance(habit.hint)) await takeHint(viewer, exerciseId, round.roundId);
+    const { roundId, hints } = result.reply.round;
+    if (chance(habit.hint)) await takeHint(viewer, exerciseId, roundId, hints.length + 1);
   }
   return time;
 }

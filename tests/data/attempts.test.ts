@@ -66,7 +66,7 @@ describe('an attempt', () => {
   it('after three hints counts as helped', async () => {
     const viewer = await makeViewer('Hal Helped', []);
     const { roundId } = await mustOpen(viewer, exerciseId);
-    for (let n = 0; n < 3; n += 1) await takeHint(viewer, exerciseId, roundId);
+    for (let n = 1; n <= 3; n += 1) await takeHint(viewer, exerciseId, roundId, n);
     await createAttempt(viewer, await requestFor(roundId, 'right'), randomUUID());
     expect(await countRows('skill_facts', 'round_id = $1 and not unaided', [roundId])).toBe(2);
     expect(await countRows('attempts', 'round_id = $1 and not unaided', [roundId])).toBe(1);

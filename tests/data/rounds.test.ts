@@ -44,11 +44,11 @@ describe('opening a round', () => {
   it('keeps a round for each unit, and hints count across both', async () => {
     const viewer = await makeViewer('Una Units', []);
     const metric = await openRound(viewer, { exerciseId, units: 'metric' });
-    await takeHint(viewer, exerciseId, metric?.roundId ?? '');
+    await takeHint(viewer, exerciseId, metric?.roundId ?? '', 1);
     const inch = await openRound(viewer, { exerciseId, units: 'inch' });
     expect(inch?.roundId).not.toBe(metric?.roundId);
     expect(inch?.hints).toHaveLength(1);
-    await takeHint(viewer, exerciseId, inch?.roundId ?? '');
+    await takeHint(viewer, exerciseId, inch?.roundId ?? '', 2);
     const again = await openRound(viewer, { exerciseId, units: 'metric' });
     expect(again?.roundId).toBe(metric?.roundId);
     expect(again?.hints).toHaveLength(2);
@@ -103,9 +103,25 @@ describe('hints and the worked solution', () => {
     const viewer = await makeViewer('Hilda Hints', []);
     const { roundId } = await mustOpen(viewer, exerciseId);
     const taken = [];
-    for (let n = 1; n <= 4; n += 1) taken.push(await takeHint(viewer, exerciseId, roundId));
+    for (let n = 1; n <= 4; n += 1) taken.push(await takeHint(viewer, exerciseId, roundId, n));
     expect(taken.map((round) => round?.hints.length)).toEqual([1, 2, 3, 3]);
     expect(taken.map((round) => round?.unaided)).toEqual([true, true, false, false]);
+  });
+
+  it('asked for twice at once, or again later, are the same one', async () => {
+    const viewer = await makeViewer('Dora Double', []);
+    const { roundId } = await mustOpen(viewer, exerciseId);
+    const twice = await Promise.all([1, 1, 1].map((n) => takeHint(viewer, exerciseId, roundId, n)));
+    expect(twice.map((round) => round?.hints.length)).toEqual([1, 1, 1]);
+    expect((await takeHint(viewer, exerciseId, roundId, 2))?.hints).toHaveLength(2);
+    expect((await takeHint(viewer, exerciseId, roundId, 1))?.hints).toHaveLength(2);
+  });
+
+  it('cannot be skipped: the third asked for first is the first', async () => {
+    const viewer = await makeViewer('Skip Ahead', []);
+    const { roundId } = await mustOpen(viewer, exerciseId);
+    const round = await takeHint(viewer, exerciseId, roundId, 3);
+    expect(round).toMatchObject({ unaided: true, hints: [expect.any(String)] });
   });
 
   it('the solution closes the round, and the next has new numbers', async () => {
@@ -131,11 +147,11 @@ describe('hints and the worked solution', () => {
     const before = await findRound(workshop.learner, { exerciseId });
     const { classmate, stranger, instructor, otherInstructor, administrator } = workshop;
     for (const other of [classmate, stranger, instructor, otherInstructor, administrator]) {
-      expect(await takeHint(other, exerciseId, roundId)).toBeNull();
+      expect(await takeHint(other, exerciseId, roundId, 1)).toBeNull();
       expect(await showSolution(other, exerciseId, roundId)).toBeNull();
     }
-    expect(await takeHint(workshop.learner, exerciseId, randomUUID())).toBeNull();
-    expect(await takeHint(workshop.learner, 'edging-strip', roundId)).toBeNull();
+    expect(await takeHint(workshop.learner, exerciseId, randomUUID(), 1)).toBeNull();
+    expect(await takeHint(workshop.learner, 'edging-strip', roundId, 1)).toBeNull();
     expect(await findRound(workshop.learner, { exerciseId })).toEqual(before);
   });
 });

@@ -49,7 +49,7 @@ const writers = {
   round: { call: (request: Request) => postRound(request, { params }), body: {} },
   hints: {
     call: (request: Request) => postHint(request, { params }),
-    body: { roundId: randomUUID() },
+    body: { roundId: randomUUID(), hint: 1 },
   },
   solution: {
     call: (request: Request) => postSolution(request, { params }),
@@ -191,7 +191,7 @@ describe('the loop over HTTP', () => {
     const request = await requestFor(roundId, 'right');
     await signIn(workshop.classmate.personId);
     expect((await postAttempt(post(request))).status).toBe(404);
-    expect((await postHint(post({ roundId }), { params })).status).toBe(404);
+    expect((await postHint(post({ roundId, hint: 1 }), { params })).status).toBe(404);
     expect((await postSolution(post({ roundId }), { params })).status).toBe(404);
   });
 });

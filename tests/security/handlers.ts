@@ -70,7 +70,7 @@ export const handlers: readonly HandlerRow[] = [
     method: 'POST',
     route: '/api/exercises/[id]/hints',
     at: ({ round }) => `/api/exercises/${round.exerciseId}/hints`,
-    body: ({ round }) => ({ roundId: round.roundId }),
+    body: ({ round }) => ({ roundId: round.roundId, hint: 1 }),
     outcome: only(['learner of the class'], 200, 404, 401),
   },
   {

@@ -1,5 +1,0 @@
-import { LoadingPage } from '@/components/ui/loading';
-
-export default function Loading() {
-  return <LoadingPage />;
-}
