@@ -3,10 +3,10 @@
 import type Konva from 'konva/lib/Core';
 import 'konva/lib/shapes/Circle';
 import { useEffect, useRef, useState } from 'react';
-import { Circle, Layer, Stage } from 'react-konva/lib/ReactKonvaCore';
+import { Circle, Layer, Shape, Stage } from 'react-konva/lib/ReactKonvaCore';
 import type { BenchStore } from './bench-store';
 import { onThemeChange, readInk } from './colours';
-import { createPainter } from './painter';
+import { paintScene } from './painter';
 import { takeHold } from './take-hold';
 import { useChosen } from './use-bench';
 import { pixelAt, viewOf, type Zoom } from './view';
@@ -30,7 +30,7 @@ interface BenchCanvasProps {
 export function BenchCanvas({ store, width, height, zoom, onPan, onReady }: BenchCanvasProps) {
   const model = useChosen(store, (moment) => moment.model);
   const frame = useChosen(store, (moment) => moment.frame);
-  const drawing = useRef<Konva.Layer>(null);
+  const drawing = useRef<Konva.Shape>(null);
   const holds = useRef<Konva.Layer>(null);
   const [themes, setThemes] = useState(0);
   const view = viewOf(frame, width, height, zoom);
@@ -42,20 +42,22 @@ export function BenchCanvas({ store, width, height, zoom, onPan, onReady }: Benc
   }, []);
 
   useEffect(() => {
-    const [layer, holdLayer] = [drawing.current, holds.current];
-    const container = layer?.getStage()?.container();
-    if (!layer || !holdLayer || !container) return;
-    layer.destroyChildren();
-    const painter = createPainter(layer);
+    const [shape, holdLayer] = [drawing.current, holds.current];
+    const layer = shape?.getLayer();
+    const container = layer?.getStage().container();
+    if (!shape || !layer || !holdLayer || !container) return;
     const ink = readInk(container);
-    const paint = () => {
-      const { showing, ...moment } = store.moment();
-      const now = viewOf(moment.frame, width, height, zoom);
-      painter.paint(moment.model.scene(moment, showing), now, width, ink);
-    };
+    const seen = () => viewOf(store.moment().frame, width, height, zoom);
+    shape.sceneFunc((context) => {
+      const { model: at, showing: shown, ...state } = store.moment();
+      const density = layer.getCanvas().getPixelRatio();
+      const sheet = { pen: context._context, view: seen(), width, density, ink };
+      paintScene(sheet, at.scene(state, shown));
+    });
+    const paint = () => layer.drawScene();
     const place = () => {
-      const { model: at, drive, frame: seen } = store.moment();
-      const now = viewOf(seen, width, height, zoom);
+      const { model: at, drive } = store.moment();
+      const now = seen();
       for (const handle of at.handles(drive)) {
         const hold = holdLayer.children.find((node) => node.id() === handle.id);
         hold?.position(pixelAt(now, handle.at));
@@ -77,7 +79,9 @@ export function BenchCanvas({ store, width, height, zoom, onPan, onReady }: Benc
         if (event.target === stage && zoom.factor > 1) takeHold.ofGround(stage, event.evt, onPan);
       }}
     >
-      <Layer ref={drawing} listening={false} />
+      <Layer listening={false}>
+        <Shape ref={drawing} />
+      </Layer>
       <Layer ref={holds}>
         {handles.map((handle) => (
           <Circle

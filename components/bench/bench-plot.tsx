@@ -1,4 +1,5 @@
 import { scaleLinear } from 'd3-scale';
+import { memo } from 'react';
 import type { Plot } from '@/lib/scene/bench-model';
 import { shortNumber } from '@/lib/scene/measure';
 
@@ -12,52 +13,15 @@ interface BenchPlotProps {
 
 /** Output against drive, with a dot on each line where the drive stands. */
 export function BenchPlot({ plot, drive }: BenchPlotProps) {
-  const x = scaleLinear([plot.across.least, plot.across.most], [inside.left, inside.right]);
-  const y = scaleLinear([plot.up.least, plot.up.most], [inside.bottom, inside.top]);
-  const path = (points: Plot['lines'][number]['points']) =>
-    `M${points.map((point) => `${brief(x(point.x))} ${brief(y(point.y))}`).join('L')}`;
+  const { x, y } = scalesOf(plot);
   const now = plot.now(drive);
   return (
     <figure className="m-0">
       <figcaption className="pb-1 text-[0.9375rem] font-semibold">{plot.title}</figcaption>
       <svg viewBox={`0 0 ${width} ${height}`} role="img" aria-label={plot.title} className="w-full">
-        <g className="stroke-rule">
-          {plot.across.ticks.map((tick) => (
-            <path key={`x${tick}`} d={`M${brief(x(tick))} ${inside.top}V${inside.bottom}`} />
-          ))}
-          {plot.up.ticks.map((tick) => (
-            <path key={`y${tick}`} d={`M${inside.left} ${brief(y(tick))}H${inside.right}`} />
-          ))}
-        </g>
-        <path
-          className="fill-none stroke-pencil"
-          d={`M${inside.left} ${inside.top}V${inside.bottom}H${inside.right}`}
-        />
-        <g className="fill-pencil font-mono text-[12px]">
-          {plot.across.ticks.map((tick) => (
-            <text key={tick} x={brief(x(tick))} y={inside.bottom + 16} textAnchor="middle">
-              {shortNumber(tick, 2)}
-            </text>
-          ))}
-          {plot.up.ticks.map((tick) => (
-            <text key={tick} x={inside.left - 6} y={brief(y(tick))} dy="0.35em" textAnchor="end">
-              {shortNumber(tick, 2)}
-            </text>
-          ))}
-        </g>
-        <text
-          className="fill-pencil text-[13px]"
-          x={(inside.left + inside.right) / 2}
-          y={inside.bottom + 36}
-          textAnchor="middle"
-        >
-          across: {plot.across.label}; up: {plot.up.label}
-        </text>
+        <Still plot={plot} />
         {plot.lines.map((line, index) => (
-          <g key={line.label} fill="none" strokeWidth={2} style={{ stroke: `var(--${line.role})` }}>
-            <path d={path(line.points)} strokeDasharray={line.dashed ? '5 4' : undefined} />
-            <Dot x={x} y={y} at={now[index]} role={line.role} />
-          </g>
+          <Dot key={line.label} x={x} y={y} at={now[index]} role={line.role} />
         ))}
       </svg>
       <ul className="flex flex-wrap gap-x-5 text-[0.9375rem]">
@@ -78,6 +42,66 @@ export function BenchPlot({ plot, drive }: BenchPlotProps) {
     </figure>
   );
 }
+
+function scalesOf({ across, up }: Plot) {
+  return {
+    x: scaleLinear([across.least, across.most], [inside.left, inside.right]),
+    y: scaleLinear([up.least, up.most], [inside.bottom, inside.top]),
+  };
+}
+
+/** Axes and lines: what stays as it is while the mechanism moves. */
+const Still = memo(function Still({ plot }: Pick<BenchPlotProps, 'plot'>) {
+  const { x, y } = scalesOf(plot);
+  const path = (points: Plot['lines'][number]['points']) =>
+    `M${points.map((point) => `${brief(x(point.x))} ${brief(y(point.y))}`).join('L')}`;
+  return (
+    <>
+      <g className="stroke-rule">
+        {plot.across.ticks.map((tick) => (
+          <path key={`x${tick}`} d={`M${brief(x(tick))} ${inside.top}V${inside.bottom}`} />
+        ))}
+        {plot.up.ticks.map((tick) => (
+          <path key={`y${tick}`} d={`M${inside.left} ${brief(y(tick))}H${inside.right}`} />
+        ))}
+      </g>
+      <path
+        className="fill-none stroke-pencil"
+        d={`M${inside.left} ${inside.top}V${inside.bottom}H${inside.right}`}
+      />
+      <g className="fill-pencil font-mono text-[12px]">
+        {plot.across.ticks.map((tick) => (
+          <text key={tick} x={brief(x(tick))} y={inside.bottom + 16} textAnchor="middle">
+            {shortNumber(tick, 2)}
+          </text>
+        ))}
+        {plot.up.ticks.map((tick) => (
+          <text key={tick} x={inside.left - 6} y={brief(y(tick))} dy="0.35em" textAnchor="end">
+            {shortNumber(tick, 2)}
+          </text>
+        ))}
+      </g>
+      <text
+        className="fill-pencil text-[13px]"
+        x={(inside.left + inside.right) / 2}
+        y={inside.bottom + 36}
+        textAnchor="middle"
+      >
+        across: {plot.across.label}; up: {plot.up.label}
+      </text>
+      {plot.lines.map((line) => (
+        <path
+          key={line.label}
+          d={path(line.points)}
+          fill="none"
+          strokeWidth={2}
+          strokeDasharray={line.dashed ? '5 4' : undefined}
+          style={{ stroke: `var(--${line.role})` }}
+        />
+      ))}
+    </>
+  );
+});
 
 /** To a tenth of a pixel: servers and browsers may differ in the last digits of a sine. */
 function brief(value: number): number {

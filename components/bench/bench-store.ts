@@ -27,7 +27,8 @@ export interface BenchStore {
   readonly shown: () => BenchMoment;
   readonly onFrame: (listener: () => void) => () => void;
   readonly onShown: (listener: () => void) => () => void;
-  readonly moveTo: (drive: number, change: string) => void;
+  /** Moves the driver; with the `time` of a pull, words and controls follow at a reading pace. */
+  readonly moveTo: (drive: number, change: string, time?: number) => void;
   readonly stepBy: (steps: number) => void;
   /** Changes the setting; while `held` by a hand the frame stays as it is. */
   readonly setting: (spec: BenchSpec, change: string, held?: boolean) => void;
@@ -96,9 +97,9 @@ export function createBenchStore(start: BenchSpec): BenchStore {
       shownListeners.add(listener);
       return () => shownListeners.delete(listener);
     },
-    moveTo: (drive, change) => {
+    moveTo: (drive, change, time) => {
       remember(change);
-      moveTo(drive);
+      moveTo(drive, time);
     },
     stepBy: (steps) => {
       const { toShown, fromShown, step } = now.model.drive;
@@ -138,8 +139,7 @@ export function createBenchStore(start: BenchSpec): BenchStore {
     },
     settle: () => {
       lastChange = null;
-      const frame = frameFor(now.frame, now.model.bounds);
-      if (frame !== now.frame) publish({ ...now, frame });
+      publish({ ...now, frame: frameFor(now.frame, now.model.bounds) });
     },
   };
 }

@@ -1,31 +1,41 @@
 'use client';
 
+import { useRef } from 'react';
 import { fixedNumber } from '@/lib/scene/measure';
-import type { BenchStore } from './bench-store';
+import type { BenchMoment, BenchStore } from './bench-store';
 import { NumberEntry } from './number-entry';
 import { railButton } from './rail-button';
-import { useShown } from './use-bench';
+import { useChosen, useWriting } from './use-bench';
 
 interface DriveRailProps {
   readonly store: BenchStore;
   readonly id: string;
 }
 
-/** The driver's controls: turn, step, slide, type. */
+/**
+ * The driver's controls: turn, step, slide, type. While it runs by itself, slider and field follow it
+ * without React.
+ */
 export function DriveRail({ store, id }: DriveRailProps) {
-  const { model, drive, running, pace } = useShown(store);
-  const control = model.drive;
-  const raw = control.toShown(drive);
-  const exact = control.round === null ? raw : wrapped(raw, control.least, control.round);
-  const shown = Number(exact.toFixed(control.places + 2));
-  const text = fixedNumber(shown, control.places);
+  const running = useChosen(store, (moment) => moment.running);
+  const pace = useChosen(store, (moment) => moment.pace);
+  const control = useChosen(store, (moment) => moment.model).drive;
+  // At rest React hears of the drive too, so that its own idea of the fields is never stale.
+  useChosen(store, (moment) => (moment.running ? null : moment.drive));
+  const { shown, text, spoken } = reading(store.shown());
+  const rail = useRef<HTMLDivElement>(null);
+  useWriting(store, (moment) => follow(rail.current, reading(moment)));
   const moveTo = (value: number) => {
+    const { whole } = reading(store.moment());
     store.run(false);
-    store.moveTo(control.fromShown(value + raw - exact), 'drive');
+    store.moveTo(control.fromShown(value + whole), 'drive');
   };
   const { pace: paces } = control;
   return (
-    <div className="grid gap-x-4 gap-y-1 @2xl:grid-cols-[auto_1fr_auto] @2xl:items-center">
+    <div
+      ref={rail}
+      className="grid gap-x-4 gap-y-1 @2xl:grid-cols-[auto_1fr_auto] @2xl:items-center"
+    >
       <div className="flex gap-2">
         <button type="button" className={railButton('main')} onClick={() => store.run(!running)}>
           {running ? 'Pause' : control.verb}
@@ -45,8 +55,9 @@ export function DriveRail({ store, id }: DriveRailProps) {
           min={control.least}
           max={control.most}
           step={control.notch}
+          data-drive
           value={Math.min(control.most, Math.max(control.least, shown))}
-          aria-valuetext={`${text} ${control.unit}`}
+          aria-valuetext={spoken}
           onChange={(event) => moveTo(Number(event.target.value))}
           onPointerUp={() => store.settle()}
         />
@@ -56,8 +67,9 @@ export function DriveRail({ store, id }: DriveRailProps) {
         label={`${control.label}, ${control.unit}`}
         unit={control.unit}
         value={shown}
+        valueNow={() => reading(store.moment()).shown}
         text={text}
-        spoken={`${text} ${control.unit}`}
+        spoken={spoken}
         least={control.round === null ? -1e6 : control.least}
         most={control.round === null ? 1e6 : control.most}
         step={control.notch}
@@ -84,7 +96,30 @@ export function DriveRail({ store, id }: DriveRailProps) {
   );
 }
 
-/** The value brought into the range that begins at `least` by whole rounds. */
-function wrapped(value: number, least: number, round: number): number {
-  return value - Math.floor((value - least) / round) * round;
+/** The drive as it is read: within its round, and the whole rounds that were left out. */
+function reading({ model, drive }: BenchMoment) {
+  const { toShown, round, least, places, unit } = model.drive;
+  const raw = toShown(drive);
+  const whole = round === null ? 0 : Math.floor((raw - least) / round) * round;
+  const shown = Number((raw - whole).toFixed(places + 2));
+  const text = fixedNumber(shown, places);
+  return { shown, whole, text, spoken: `${text} ${unit}` };
+}
+
+/** Brings slider and field to where the drive stands; what somebody is typing is left alone. */
+function follow(
+  rail: HTMLElement | null,
+  { shown, text, spoken }: ReturnType<typeof reading>,
+): void {
+  const slider = rail?.querySelector<HTMLInputElement>('[data-drive]');
+  const field = rail?.querySelector<HTMLInputElement>('[role=spinbutton]');
+  if (slider) {
+    slider.value = String(shown);
+    slider.setAttribute('aria-valuetext', spoken);
+  }
+  if (field && field.dataset.typed === undefined) {
+    if (field.value !== text) field.value = text;
+    field.setAttribute('aria-valuenow', String(shown));
+    field.setAttribute('aria-valuetext', spoken);
+  }
 }

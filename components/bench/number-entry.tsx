@@ -9,6 +9,8 @@ interface NumberEntryProps {
   readonly label: string;
   readonly unit: string;
   readonly value: number;
+  /** Where the value stands at this moment, if it moves by itself. */
+  readonly valueNow?: () => number;
   readonly text: string;
   readonly spoken: string;
   readonly least: number;
@@ -24,6 +26,7 @@ const square =
 /** A number to be typed as a woodworker writes it, stepped by arrow keys, or pressed up and down. */
 export function NumberEntry(props: NumberEntryProps) {
   const { id, label, unit, value, text, spoken, least, most, step, field, onChange } = props;
+  const { valueNow = () => value } = props;
   const [typed, setTyped] = useState<string | null>(null);
   const reading = typed === null ? null : readQuantity(typed, field);
   const refused = reading !== null && !reading.ok ? reading.message : null;
@@ -39,7 +42,7 @@ export function NumberEntry(props: NumberEntryProps) {
       commit();
     }
     if (event.key === 'Escape') setTyped(null);
-    const next = steppedBy(event.key, value, step, least, most);
+    const next = steppedBy(event.key, valueNow(), step, least, most);
     if (next === null) return;
     event.preventDefault();
     setTyped(null);
@@ -52,7 +55,7 @@ export function NumberEntry(props: NumberEntryProps) {
         className={square}
         aria-label={`${label}: less`}
         disabled={value <= least}
-        onClick={() => take(value - step)}
+        onClick={() => take(valueNow() - step)}
       >
         −
       </button>
@@ -69,6 +72,7 @@ export function NumberEntry(props: NumberEntryProps) {
         aria-valuetext={spoken}
         aria-invalid={refused ? true : undefined}
         aria-describedby={refused ? `${id}-refused` : undefined}
+        data-typed={typed === null ? undefined : true}
         value={typed ?? text}
         onChange={(event) => setTyped(event.target.value)}
         onBlur={commit}
@@ -79,7 +83,7 @@ export function NumberEntry(props: NumberEntryProps) {
         className={square}
         aria-label={`${label}: more`}
         disabled={value >= most}
-        onClick={() => take(value + step)}
+        onClick={() => take(valueNow() + step)}
       >
         +
       </button>

@@ -1,7 +1,3 @@
-import Konva from 'konva/lib/Core';
-import { Circle } from 'konva/lib/shapes/Circle';
-import { Line } from 'konva/lib/shapes/Line';
-import { Text } from 'konva/lib/shapes/Text';
 import {
   appearance,
   labelSize,
@@ -10,217 +6,139 @@ import {
   type Paint,
   type SymbolStroke,
 } from '@/lib/scene/appearance';
-import type { Arc, Body, Label, Mark, Scene, Shape } from '@/lib/scene/scene';
+import type { Body, Label, Mark, Scene, Shape } from '@/lib/scene/scene';
 import type { Ink } from './colours';
+import { outlineOf, strokePath } from './paths';
 import type { View } from './view';
 
-type Node = Konva.Group | Konva.Shape;
-
-interface Painted {
-  shape: Shape;
-  readonly node: Node;
-}
-
-/** Paints scenes on a layer, keeping its nodes from one frame to the next. */
-export interface Painter {
-  readonly paint: (scene: Scene, view: View, width: number, ink: Ink) => void;
-}
-
-/**
- * A painter for one layer. A wheel that only turned gets a new angle and nothing else; shapes that
- * are the same object as before are left alone.
- */
-export function createPainter(layer: Konva.Layer): Painter {
-  const world = new Konva.Group();
-  layer.add(world);
-  let kept: Painted[] = [];
-  let before: { readonly scale: number; readonly ink: Ink } | null = null;
-  return {
-    paint: (scene, view, width, ink) => {
-      world.setAttrs({ x: view.x, y: view.y, scaleX: view.scale, scaleY: -view.scale });
-      if (before?.scale !== view.scale || before.ink !== ink) {
-        world.destroyChildren();
-        kept = [];
-        before = { scale: view.scale, ink };
-      }
-      const share = Math.min(1, width / fullSizeFrom);
-      kept = paintAll(world, kept, scene.shapes, {
-        scale: view.scale,
-        letters: Math.max(leastLetters, share),
-        lines: Math.max(leastLines, share),
-        ink,
-      });
-      layer.batchDraw();
-    },
-  };
-}
-
-/** Pixels a mm, and how much of their full size letters, symbols and lines have here. */
-interface Brush {
-  readonly scale: number;
-  readonly letters: number;
-  readonly lines: number;
+/** Where a drawing goes and what it is drawn with. */
+export interface Sheet {
+  readonly pen: CanvasRenderingContext2D;
+  readonly view: View;
+  /** Width of the drawing on the page, px. */
+  readonly width: number;
+  /** Pixels of the canvas for one of the page. */
+  readonly density: number;
   readonly ink: Ink;
 }
+
+/** A sheet with the size that lines and letters have on it, as a share of their full size. */
+interface Hand extends Sheet {
+  readonly lines: number;
+  readonly letters: number;
+}
+
+/** Where a frame of reference stands in the world, mm and radians. */
+type Frame = Body['pose'];
+
+const world: Frame = { x: 0, y: 0, angle: 0 };
 
 /** From this width on, px, everything has its full size; narrower drawings are drawn finer. */
 const fullSizeFrom = 600;
 const leastLetters = 0.85;
 const leastLines = 0.65;
 
-function paintAll(
-  parent: Konva.Group,
-  kept: readonly Painted[],
-  shapes: readonly Shape[],
-  brush: Brush,
-): Painted[] {
-  const next: Painted[] = [];
-  let inOrder = true;
-  shapes.forEach((shape, index) => {
-    const old = kept[index];
-    if (inOrder && old && refreshed(old, shape, brush)) {
-      next.push(old);
-      return;
-    }
-    if (inOrder) {
-      inOrder = false;
-      kept.slice(index).forEach(({ node }) => node.destroy());
-    }
-    const node = nodeOf(shape, brush);
-    parent.add(node);
-    next.push({ shape, node });
-  });
-  if (inOrder) kept.slice(shapes.length).forEach(({ node }) => node.destroy());
-  return next;
+/** Paints a scene, back to front. Here, as in `toSvg`, y is turned over. */
+export function paintScene(sheet: Sheet, { shapes }: Scene): void {
+  const share = Math.min(1, sheet.width / fullSizeFrom);
+  const lines = Math.max(leastLines, share);
+  const letters = Math.max(leastLetters, share);
+  sheet.pen.lineJoin = 'round';
+  paintAll({ ...sheet, lines, letters }, shapes, world);
 }
 
-/** Brings a kept node up to date; false when it has to be made anew. */
-function refreshed(old: Painted, shape: Shape, brush: Brush): boolean {
-  if (old.shape === shape) return true;
-  if (old.shape.kind !== shape.kind) return false;
-  if (shape.kind === 'body') {
-    if ((old.shape as Body).shapes !== shape.shapes) return false;
-    old.node.setAttrs(poseOf(shape));
-  } else if (shape.kind === 'mark') {
-    if ((old.shape as Mark).symbol !== shape.symbol) return false;
-    old.node.setAttrs(placeOf(shape, brush));
-  } else {
-    old.node.setAttrs(attributesOf(shape, brush));
-  }
-  old.shape = shape;
-  return true;
+function paintAll(hand: Hand, shapes: readonly Shape[], frame: Frame): void {
+  for (const shape of shapes) paint(hand, shape, frame);
 }
 
-function nodeOf(shape: Shape, brush: Brush): Node {
+function paint(hand: Hand, shape: Shape, frame: Frame): void {
   switch (shape.kind) {
-    case 'body': {
-      const group = new Konva.Group(poseOf(shape));
-      shape.shapes.forEach((inner) => group.add(nodeOf(inner, brush)));
-      return group;
-    }
-    case 'mark': {
-      const group = new Konva.Group(placeOf(shape, brush));
-      symbols[shape.symbol].forEach((stroke) => group.add(symbolNode(stroke, brush)));
-      return group;
-    }
+    case 'body':
+      return paintAll(
+        hand,
+        shape.shapes,
+        within(frame, shape.pose.x, shape.pose.y, shape.pose.angle),
+      );
+    case 'mark':
+      return paintMark(hand, shape, frame);
     case 'label':
-      return new Text({ ...quiet, ...labelAttributes(shape, brush) });
-    case 'circle':
-      return new Circle({ ...quiet, ...attributesOf(shape, brush) });
-    default:
-      return new Line({ ...quiet, ...attributesOf(shape, brush) });
+      return write(hand, shape, frame);
+    default: {
+      const { scale } = hand.view;
+      stand(hand, frame, scale);
+      hand.pen.globalAlpha = strength(shape.age ?? 0);
+      draw(hand, outlineOf(shape), appearance[shape.role], hand.lines / scale);
+      hand.pen.globalAlpha = 1;
+    }
   }
 }
 
-const quiet = {
-  listening: false,
-  perfectDrawEnabled: false,
-  shadowForStrokeEnabled: false,
-  strokeScaleEnabled: false,
-};
+function paintMark(hand: Hand, { at, angle = 0, symbol }: Mark, frame: Frame): void {
+  stand(hand, within(frame, at.x, at.y, angle), hand.lines);
+  for (const stroke of symbols[symbol]) draw(hand, strokePath(stroke), stroke, 1);
+}
 
-function attributesOf(shape: Exclude<Shape, Body | Mark>, brush: Brush): object {
-  if (shape.kind === 'label') return labelAttributes(shape, brush);
-  const paint = {
-    ...paintAttributes(appearance[shape.role], brush),
-    opacity: strength(shape.age ?? 0),
-  };
-  if (shape.kind === 'circle') {
-    return { ...paint, x: shape.centre.x, y: shape.centre.y, radius: shape.radius };
+/** Fills and outlines a path; `size` is a pixel of line in the units of the path. */
+function draw({ pen, ink }: Hand, path: Path2D, paint: Paint | SymbolStroke, size: number): void {
+  if (paint.fill !== undefined) {
+    pen.fillStyle = ink.colour(paint.fill);
+    if (paint.fillOpacity !== undefined) pen.globalAlpha *= paint.fillOpacity;
+    pen.fill(path);
+    if (paint.fillOpacity !== undefined) pen.globalAlpha /= paint.fillOpacity;
   }
-  const points = shape.kind === 'arc' ? arcPoints(shape) : shape.points;
-  return { ...paint, points, closed: shape.kind === 'outline' && shape.closed, lineJoin: 'round' };
+  if (paint.stroke === undefined) return;
+  pen.strokeStyle = ink.colour(paint.stroke);
+  pen.lineWidth = paint.width * size;
+  pen.setLineDash(paint.dash === undefined ? solid : paint.dash.map((length) => length * size));
+  pen.stroke(path);
 }
 
-function paintAttributes(paint: Paint, { ink, lines }: Brush): object {
-  const face = paint.fill === undefined ? undefined : ink.colour(paint.fill);
-  return {
-    fill: paint.fillOpacity === undefined || !face ? face : translucent(face, paint.fillOpacity),
-    stroke: paint.stroke === undefined ? undefined : ink.colour(paint.stroke),
-    strokeWidth: paint.width * lines,
-    dash: paint.dash?.map((length) => length * lines),
-  };
-}
+const solid: number[] = [];
 
-/** `#rrggbb` with an opacity; other forms are left as they are. */
-function translucent(colour: string, opacity: number): string {
-  if (!/^#[0-9a-f]{6}$/i.test(colour)) return colour;
-  return `${colour}${Math.round(opacity * 255)
-    .toString(16)
-    .padStart(2, '0')}`;
-}
-
-function symbolNode(stroke: SymbolStroke, brush: Brush): Konva.Shape {
-  const paint = { ...quiet, ...paintAttributes(stroke, brush) };
-  if ('circle' in stroke) {
-    const [x, y, radius] = stroke.circle;
-    return new Circle({ ...paint, x, y, radius });
-  }
-  return new Line({ ...paint, points: [...stroke.points], closed: stroke.closed });
-}
-
-function labelAttributes(label: Label, { scale, letters, ink }: Brush): object {
+/** Letters over a halo of paper, upright on the page unless they are turned. */
+function write(hand: Hand, label: Label, frame: Frame): void {
+  const { pen, ink, letters } = hand;
   const { x, y } = label.nudge ?? { x: 0, y: 0 };
-  const width = 400;
-  const inset = { start: 0, middle: width / 2, end: width }[label.anchor];
-  return {
-    x: label.at.x,
-    y: label.at.y,
-    scaleX: letters / scale,
-    scaleY: -letters / scale,
-    rotation: degrees(label.angle ?? 0),
-    offsetX: inset - x,
-    offsetY: labelSize / 2 + y,
-    width,
-    align: { start: 'left', middle: 'center', end: 'right' }[label.anchor],
-    text: label.text,
-    fontSize: labelSize,
-    fontFamily: label.face === 'figure' ? ink.figure : ink.name,
-    fill: ink.colour(label.role),
-    stroke: ink.colour('paper'),
-    strokeWidth: 4,
-    fillAfterStrokeEnabled: true,
-    lineJoin: 'round',
-  };
+  stand(hand, within(frame, label.at.x, label.at.y, label.angle ?? 0), letters, 'reads');
+  pen.font = `${labelSize}px ${label.face === 'figure' ? ink.figure : ink.name}`;
+  pen.textAlign = label.anchor === 'middle' ? 'center' : label.anchor;
+  pen.setLineDash(solid);
+  pen.strokeStyle = ink.colour('paper');
+  pen.lineWidth = halo;
+  pen.strokeText(label.text, x, baseline - y);
+  pen.fillStyle = ink.colour(label.role);
+  pen.fillText(label.text, x, baseline - y);
 }
 
-function poseOf({ pose }: Body) {
-  return { x: pose.x, y: pose.y, rotation: degrees(pose.angle) };
+const halo = 4;
+/** A line of figures stands this far under its own middle. */
+const baseline = 0.35 * labelSize;
+
+/** The frame that stands at a place of another, turned. */
+function within({ x, y, angle }: Frame, atX: number, atY: number, turned: number): Frame {
+  const [c, s] = [Math.cos(angle), Math.sin(angle)];
+  return { x: x + c * atX - s * atY, y: y + s * atX + c * atY, angle: angle + turned };
 }
 
-function placeOf({ at, angle }: Mark, { scale, lines }: Brush) {
-  const size = lines / scale;
-  return { x: at.x, y: at.y, scaleX: size, scaleY: size, rotation: degrees(angle ?? 0) };
-}
-
-/** An arc as a run of short lines. */
-function arcPoints({ centre, radius, from, to }: Arc): number[] {
-  const steps = Math.max(4, Math.ceil((to - from) / 0.1));
-  return Array.from({ length: steps + 1 }, (_, i) => from + ((to - from) * i) / steps).flatMap(
-    (angle) => [centre.x + radius * Math.cos(angle), centre.y + radius * Math.sin(angle)],
+/**
+ * Makes the pen draw in a frame, `scale` pixels to its unit: y upwards, or downwards for what is
+ * to be read.
+ */
+function stand(
+  { pen, view, density }: Hand,
+  frame: Frame,
+  scale: number,
+  y: 'rises' | 'reads' = 'rises',
+): void {
+  const c = density * scale * Math.cos(frame.angle);
+  const s = density * scale * Math.sin(frame.angle);
+  const up = y === 'rises' ? -1 : 1;
+  pen.setTransform(
+    c,
+    -s,
+    up * s,
+    up * c,
+    density * (view.x + view.scale * frame.x),
+    density * (view.y - view.scale * frame.y),
   );
-}
-
-function degrees(angle: number): number {
-  return (angle * 180) / Math.PI;
 }

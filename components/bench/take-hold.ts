@@ -32,7 +32,9 @@ function ofHandle(
           ? now.model.drag(handle.id, last, to, now.drive)
           : start.model.drag(handle.id, from, to, start.drive);
       last = to;
-      if (dragged.kind === 'drive') store.moveTo(dragged.drive, `drag ${handle.id}`);
+      if (dragged.kind === 'drive') {
+        store.moveTo(dragged.drive, `drag ${handle.id}`, pointer.timeStamp);
+      }
       if (dragged.kind === 'spec') store.setting(dragged.spec, `drag ${handle.id}`, true);
     },
     end: () => store.settle(),

@@ -1,7 +1,9 @@
 'use client';
 
-import type { BenchStore } from './bench-store';
-import { useShown } from './use-bench';
+import { useRef } from 'react';
+import type { Readout } from '@/lib/scene/bench-model';
+import type { BenchMoment, BenchStore } from './bench-store';
+import { useChosen, useWriting } from './use-bench';
 
 interface TitleStripProps {
   readonly store: BenchStore;
@@ -12,31 +14,57 @@ interface TitleStripProps {
   readonly locked: boolean;
 }
 
-/** The bench's name and readouts, set out like the title block of a working drawing. */
+/**
+ * The bench's name and readouts, set out like the title block of a working drawing. React renders
+ * it anew for another mechanism only; while one moves, its figures are written straight into place.
+ */
 export function TitleStrip({ store, id, title, scale, locked }: TitleStripProps) {
-  const { model, drive } = useShown(store);
-  const readouts = locked ? [] : model.readouts(drive);
-  const units = model.spec.units === 'inch' ? 'in' : 'mm';
+  const { units } = useChosen(store, (moment) => moment.model).spec;
+  const readouts = locked ? [] : readoutsAt(store.shown());
+  const list = useRef<HTMLDListElement>(null);
+  useWriting(store, (moment) => {
+    for (const { key, value } of locked ? [] : readoutsAt(moment)) {
+      const figure = list.current?.querySelector(`[data-readout="${key}"]`)?.firstChild;
+      if (figure && figure.nodeValue !== value) figure.nodeValue = value;
+    }
+  });
   return (
     <div className="flex flex-col border-b border-ink @4xl:flex-row">
       <p id={id} className="flex-1 px-4 py-3 font-heading text-lg leading-tight font-semibold">
         {title}
       </p>
-      <dl className="grid auto-cols-auto grid-cols-[repeat(auto-fit,minmax(8rem,1fr))] @4xl:flex">
+      <dl
+        ref={list}
+        className="grid auto-cols-auto grid-cols-[repeat(auto-fit,minmax(8rem,1fr))] @4xl:flex"
+      >
         {readouts.map(({ key, label, value }) => (
-          <Cell key={key} label={label} value={value} />
+          <Cell key={key} name={key} label={label} value={value} />
         ))}
-        <Cell label="Scale" value={`${scaleText(scale)}, ${units}`} />
+        <Cell label="Scale" value={`${scaleText(scale)}, ${units === 'inch' ? 'in' : 'mm'}`} />
       </dl>
     </div>
   );
 }
 
-function Cell({ label, value }: { readonly label: string; readonly value: string }) {
+function readoutsAt({ model, drive }: BenchMoment): readonly Readout[] {
+  return model.readouts(drive);
+}
+
+interface CellProps {
+  readonly label: string;
+  readonly value: string;
+  /** The readout's key, by which its figure is found again. */
+  readonly name?: string;
+}
+
+function Cell({ label, value, name }: CellProps) {
   return (
     <div className="border-t border-l border-rule px-2.5 py-2 @4xl:min-w-32 @4xl:border-t-0">
       <dt className="text-[0.8125rem] leading-tight text-pencil">{label}</dt>
-      <dd className="font-mono text-[0.875rem] leading-snug tabular-nums @4xl:text-[0.9375rem] @4xl:whitespace-nowrap">
+      <dd
+        data-readout={name}
+        className="font-mono text-[0.875rem] leading-snug tabular-nums @4xl:text-[0.9375rem] @4xl:whitespace-nowrap"
+      >
         {value}
       </dd>
     </div>

@@ -8,11 +8,6 @@ export function useBenchStore(spec: BenchSpec): BenchStore {
   return store;
 }
 
-/** The moment as words and controls show it. */
-export function useShown(store: BenchStore): BenchMoment {
-  return useSyncExternalStore(store.onShown, store.shown, store.shown);
-}
-
 /**
  * One part of the moment, as words and controls show it; what uses it is rendered anew only when
  * that part has changed. `choose` must give the same value for the same moment.
@@ -20,6 +15,18 @@ export function useShown(store: BenchStore): BenchMoment {
 export function useChosen<T>(store: BenchStore, choose: (moment: BenchMoment) => T): T {
   const read = () => choose(store.shown());
   return useSyncExternalStore(store.onShown, read, read);
+}
+
+/**
+ * Writes the moment straight into the page, after every rendering and whenever it is shown anew: for
+ * figures that follow the drive, so that a bench can run without React.
+ */
+export function useWriting(store: BenchStore, write: (moment: BenchMoment) => void): void {
+  useEffect(() => {
+    const now = () => write(store.shown());
+    now();
+    return store.onShown(now);
+  });
 }
 
 const settledAfter = 600;

@@ -12,30 +12,52 @@ export function rowsHeight(rows: number): number {
   return rowShare * (rows + 0.7);
 }
 
+/** Where the rims of a train are rolled out, a row a wheel. */
+export interface RimRows {
+  readonly left: number;
+  /** How far the crank turns until the longest rim would run off the drawing, radians. */
+  readonly wholeTurn: number;
+  /** Half the height of a tick, mm. */
+  readonly tick: number;
+  readonly rows: readonly { readonly wheel: SetWheel; readonly y: number }[];
+  /** The names and the lines that wait for the chalk. */
+  readonly still: readonly Shape[];
+}
+
+/** The rows under a train in which its rims are rolled out; none where nothing turns. */
+export function rimRows(setup: TrainSetup, bounds: Bounds): RimRows | null {
+  const width = bounds.right - bounds.left;
+  const [left, span] = [bounds.left + leftShare * width, spanShare * width];
+  const fastest = Math.max(...setup.wheels.map(rimSpeed));
+  if (!(fastest > 0)) return null;
+  const rows = setup.wheels.map((wheel, row) => ({
+    wheel,
+    y: bounds.bottom + (setup.wheels.length - row - 0.2) * rowShare * width,
+  }));
+  return {
+    left,
+    wholeTurn: Math.min(2 * Math.PI, span / fastest),
+    tick: 0.2 * rowShare * width,
+    rows,
+    still: rows.flatMap(({ wheel, y }): Shape[] => [
+      label(`${wheel.teeth} t`, { x: left, y }, { anchor: 'end', nudge: { x: -8, y: 0 } }),
+      line('dimension', { x: left, y }, { x: left + span, y }, 0.6),
+    ]),
+  };
+}
+
 /**
  * The rim of each wheel rolled out in chalk under the train, a tick a tooth, so that equal lengths
  * show at a mesh. The strip begins anew before the longest rim would run off the drawing.
  */
-export function rimsUnrolled(setup: TrainSetup, drive: number, bounds: Bounds): readonly Shape[] {
-  const width = bounds.right - bounds.left;
-  const [left, span] = [bounds.left + leftShare * width, spanShare * width];
-  const fastest = Math.max(...setup.wheels.map(rimSpeed));
-  if (!(fastest > 0)) return [];
-  const wholeTurn = Math.min(2 * Math.PI, span / fastest);
-  const turned = setup.stuck ? 0 : Math.abs(drive) % wholeTurn;
-  return setup.wheels.flatMap((wheel, row): Shape[] => {
-    const y = bounds.bottom + (setup.wheels.length - row - 0.2) * rowShare * width;
+export function rimsUnrolled(rims: RimRows, { spec, stuck }: TrainSetup, drive: number): Shape[] {
+  const { left, rows, tick, wholeTurn } = rims;
+  const turned = stuck ? 0 : Math.abs(drive) % wholeTurn;
+  return rows.flatMap(({ wheel, y }): Shape[] => {
     const length = rimSpeed(wheel) * turned;
-    const name = label(
-      `${wheel.teeth} t`,
-      { x: left, y },
-      { anchor: 'end', nudge: { x: -8, y: 0 } },
-    );
     return [
-      name,
-      line('dimension', { x: left, y }, { x: left + span, y }, 0.6),
       line('tracing', { x: left, y }, { x: left + length, y }),
-      ...ticks(left, y, length, Math.PI * setup.spec.module, 0.2 * rowShare * width),
+      comb(left, y, length, Math.PI * spec.module, tick),
     ];
   });
 }
@@ -45,8 +67,12 @@ function rimSpeed({ ratio, pitchRadius }: SetWheel): number {
   return Math.abs(ratio ?? 0) * pitchRadius;
 }
 
-function ticks(left: number, y: number, length: number, pitch: number, half: number): Shape[] {
-  return Array.from({ length: Math.floor(length / pitch + 1e-9) + 1 }, (_, i) =>
-    line('thread', { x: left + i * pitch, y: y - half }, { x: left + i * pitch, y: y + half }),
-  );
+/** A tick at every pitch of a length, as one stroke that goes along it and up and down. */
+function comb(left: number, y: number, length: number, pitch: number, half: number): Shape {
+  const ticks = Math.floor(length / pitch + 1e-9) + 1;
+  const points = Array.from({ length: ticks }, (_, i) => {
+    const x = left + i * pitch;
+    return [x, y, x, y + half, x, y - half, x, y];
+  }).flat();
+  return { kind: 'outline', role: 'thread', points, closed: false };
 }

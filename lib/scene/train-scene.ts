@@ -13,7 +13,7 @@ import {
   type Shape,
 } from './scene';
 import { dimension, label, lath, line, outline } from './strokes';
-import { rimsUnrolled, rowsHeight } from './train-rims';
+import { rimRows, rimsUnrolled, rowsHeight, type RimRows } from './train-rims';
 import type { SetWheel, TrainSetup } from './train-setup';
 import { troubles } from './train-troubles';
 
@@ -33,6 +33,8 @@ export interface TrainDrawing {
   readonly under: readonly Shape[];
   readonly over: readonly Shape[];
   readonly centres: readonly Shape[];
+  /** Null where the rims are not rolled out. */
+  readonly rims: RimRows | null;
 }
 
 /** Cuts the wheels of a train once; `trainScene` then only turns them. */
@@ -42,9 +44,10 @@ export function drawTrain(setup: TrainSetup): TrainDrawing {
   const reach = leverReach(setup);
   const hidden = new Set(setup.spec.hide ?? []);
   const lever = [lath('driver', { x: 0, y: 0 }, { x: reach, y: 0 }, 2.4 * setup.spec.module)];
+  const bounds = trainBounds(setup, reach);
   return {
     setup,
-    bounds: trainBounds(setup, reach),
+    bounds,
     wheels,
     lever,
     under: [
@@ -55,6 +58,7 @@ export function drawTrain(setup: TrainSetup): TrainDrawing {
     ],
     over: [...pivots(setup), ...counts(setup)],
     centres: hidden.has('centres') ? [] : centres(setup),
+    rims: hidden.has('teeth') ? null : rimRows(setup, bounds),
   };
 }
 
@@ -77,13 +81,12 @@ const leverRest = (Math.PI * 7) / 6;
 
 /** A train with its crank at `drive`, back to front. */
 export function trainScene(drawing: TrainDrawing, { drive }: DriveState, showing: Showing): Scene {
-  const { setup } = drawing;
+  const { setup, rims } = drawing;
   const wheels = drawing.wheels.map(({ wheel, shapes }): Body => {
     const angle = wheel.phase + (wheel.ratio ?? 0) * drive;
     return { kind: 'body', pose: { ...wheel.centre, angle }, shapes };
   });
   const crank = setup.arbors[setup.crank] ?? { x: 0, y: 0 };
-  const unrolled = showing.tracing && !setup.spec.hide?.includes('teeth');
   return {
     bounds: drawing.bounds,
     shapes: [
@@ -97,7 +100,7 @@ export function trainScene(drawing: TrainDrawing, { drive }: DriveState, showing
       { kind: 'mark', role: 'driver', symbol: 'handle', at: leverEnd(setup, drive) },
       ...drawing.over,
       ...(showing.dimensions ? drawing.centres : []),
-      ...(unrolled ? rimsUnrolled(setup, drive, drawing.bounds) : []),
+      ...(showing.tracing && rims ? [...rims.still, ...rimsUnrolled(rims, setup, drive)] : []),
     ],
   };
 }

@@ -5,7 +5,14 @@ import { ruleText, lengthText } from './measure';
 import { boundsOf, withAspect, type Bounds, type Scene, type Shape } from './scene';
 import { dimension, hatch, label, lath, line, outline, rectangle } from './strokes';
 import { trail } from './trail';
-import { barEnds, isStopped, onBar, sliderWidth, type TrammelSetup } from './trammel-setup';
+import {
+  barEnds,
+  isStopped,
+  onBar,
+  penBetween,
+  sliderWidth,
+  type TrammelSetup,
+} from './trammel-setup';
 
 /** What of a trammel's drawing stands still. */
 export interface TrammelDrawing {
@@ -39,7 +46,7 @@ export function trammelScene(drawing: TrammelDrawing, state: DriveState, showing
   const { setup } = drawing;
   const pose = setup.pose(state.drive);
   const still = [...drawing.board, ...(showing.tracing ? drawing.oval : [])];
-  const fresh = showing.tracing ? trail(state, freshArc, (drive) => setup.pose(drive).pen) : [];
+  const fresh = showing.tracing ? trail(state, freshArc, (drive) => penBetween(setup, drive)) : [];
   const moving = [...sliders(setup, pose), ...bar(setup, pose, state.drive, showing)];
   const shapes = [...still, ...fresh, ...moving, ...(showing.dimensions ? drawing.sizes : [])];
   if (setup.spec.held === 'board') return { bounds: drawing.bounds, shapes };

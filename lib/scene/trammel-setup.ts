@@ -1,4 +1,4 @@
-import { add, distance, polar, rotate, type Point } from '@/lib/geometry/point';
+import { add, between, distance, polar, rotate, type Point } from '@/lib/geometry/point';
 import { planLinkage } from '@/lib/kinematics/linkage/solver/plan-linkage';
 import { solveLinkage } from '@/lib/kinematics/linkage/solver/solver';
 import { trammelLinkage } from '@/lib/kinematics/linkage/trammel-linkage';
@@ -62,6 +62,20 @@ export function setUpTrammel(spec: TrammelSpec): TrammelSetup {
     pose,
     path: Array.from({ length: pathSteps + 1 }, (_, i) => pose((2 * Math.PI * i) / pathSteps).pen),
   };
+}
+
+/** The pen's place between the points of its way, without solving anew. */
+export function penBetween({ path }: TrammelSetup, drive: number): Point | null {
+  const place = (turnShare(drive) * pathSteps) % pathSteps;
+  const i = Math.floor(place);
+  const [a, b] = [path[i], path[i + 1]];
+  return a && b ? between(a, b, place - i) : null;
+}
+
+/** How much of a turn an angle is beyond its whole turns, from 0 to 1. */
+function turnShare(angle: number): number {
+  const turns = angle / (2 * Math.PI);
+  return turns - Math.floor(turns);
 }
 
 /** A slider is a third as wide as it is long, and so is its groove. */

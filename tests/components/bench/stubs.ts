@@ -1,11 +1,23 @@
 import { vi } from 'vitest';
 
-/** A canvas that draws nothing, and a box of a given size around it. */
-export function stubCanvas(size?: { readonly width: number; readonly height: number }): void {
+/** A path that nobody traces. */
+class NoPath {
+  lineTo() {}
+  arc() {}
+  closePath() {}
+}
+
+/**
+ * A canvas that draws nothing, and a box of a given size around it.
+ * @returns what has been written on it
+ */
+export function stubCanvas(size?: { readonly width: number; readonly height: number }): string[] {
+  const written: string[] = [];
   const context = new Proxy(
     {},
     {
       get: (_, key) => {
+        if (key === 'fillText') return (text: string) => written.push(text);
         if (key === 'measureText') return () => ({ width: 40 });
         if (key === 'getImageData') return () => ({ data: new Uint8ClampedArray(4) });
         return () => undefined;
@@ -16,6 +28,7 @@ export function stubCanvas(size?: { readonly width: number; readonly height: num
   vi.spyOn(HTMLCanvasElement.prototype, 'getContext').mockImplementation(
     () => context as CanvasRenderingContext2D,
   );
+  vi.stubGlobal('Path2D', NoPath);
   vi.stubGlobal(
     'ResizeObserver',
     class {
@@ -29,6 +42,7 @@ export function stubCanvas(size?: { readonly width: number; readonly height: num
       disconnect() {}
     },
   );
+  return written;
 }
 
 /** A page that is light, moves, and can be told to move less. */
