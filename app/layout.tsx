@@ -1,5 +1,6 @@
 import type { Metadata, Viewport } from 'next';
 import localFont from 'next/font/local';
+import { readerUnits } from '@/lib/auth/reader-units';
 import { currentViewer } from '@/lib/auth/viewer';
 import { WaitingNotice } from '@/components/exercise/waiting-notice';
 import { QueryProvider } from '@/lib/browser/query-provider';
@@ -51,7 +52,7 @@ export const viewport: Viewport = {
 export default async function RootLayout({ children }: Readonly<{ children: React.ReactNode }>) {
   // Reading the session also makes every document when it is asked for: a nonce never reaches a
   // page made at build time.
-  const viewer = await currentViewer();
+  const [viewer, units] = await Promise.all([currentViewer(), readerUnits()]);
   return (
     <html
       lang="en-GB"
@@ -61,7 +62,7 @@ export default async function RootLayout({ children }: Readonly<{ children: Reac
       <body>
         <SkipLink />
         <QueryProvider>
-          <SiteHeader viewer={viewer} />
+          <SiteHeader viewer={viewer} units={units} />
           <WaitingNotice personId={viewer?.personId ?? null} signInHref="/sign-in" />
           {children}
           <SiteFooter />

@@ -1,6 +1,7 @@
 import { ButtonLink } from '@/components/ui/button';
 import { Page } from '@/components/ui/page';
 import { lessonPath, listLessons } from '@/content/lessons/front-matter';
+import { readerUnits } from '@/lib/auth/reader-units';
 import { currentViewer } from '@/lib/auth/viewer';
 import { LandingAnswer } from './_components/landing-answer';
 import { LandingHero } from './_components/landing-hero';
@@ -8,7 +9,7 @@ import { LandingPegs } from './_components/landing-pegs';
 import { LessonCard } from './lessons/_components/lesson-card';
 
 export default async function LandingPage() {
-  const viewer = await currentViewer();
+  const [viewer, units] = await Promise.all([currentViewer(), readerUnits()]);
   const lessons = listLessons();
   const first = lessons[0];
   return (
@@ -16,6 +17,7 @@ export default async function LandingPage() {
       <LandingHero
         firstLesson={first ? lessonPath(first) : '/lessons'}
         signedIn={viewer !== null}
+        units={units}
       />
       <LandingAnswer />
       <LandingPegs />

@@ -1,6 +1,7 @@
 import { Bench } from '@/components/bench/bench';
 import { ButtonLink } from '@/components/ui/button';
 import { TickedRule } from '@/components/ui/page-heading';
+import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { LandingSteps } from './landing-steps';
 import { landingTrain } from './pictures';
 
@@ -8,10 +9,11 @@ interface LandingHeroProps {
   /** Where the first lesson is read. */
   readonly firstLesson: string;
   readonly signedIn: boolean;
+  readonly units: UnitSystem;
 }
 
 /** The first look: what Hornbeam is for, one way in, a mechanism to turn at once, and how it goes. */
-export function LandingHero({ firstLesson, signedIn }: LandingHeroProps) {
+export function LandingHero({ firstLesson, signedIn, units }: LandingHeroProps) {
   return (
     <div className="grid items-start gap-x-12 gap-y-6 lg:grid-cols-[1fr_32rem] lg:grid-rows-[auto_1fr]">
       <div>
@@ -34,7 +36,7 @@ export function LandingHero({ firstLesson, signedIn }: LandingHeroProps) {
         </div>
       </div>
       <div className="min-w-0 lg:col-start-2 lg:row-span-2 lg:row-start-1">
-        <Bench spec={landingTrain} title="A train of toothed wheels" />
+        <Bench spec={landingTrain(units)} title="A train of toothed wheels" />
       </div>
       <LandingSteps />
     </div>

@@ -1,46 +1,26 @@
 import { lessonBench } from '@/content/lessons/benches';
-import { centreDistance } from '@/lib/kinematics/gear/mesh';
 import type { DriverAndDriven } from '@/lib/kinematics/train/ratio';
-import type { Arbor, BenchSpec, FreeTrainSpec } from '@/lib/scene/bench-spec';
+import { toMillimetres } from '@/lib/quantities/units';
+import type { UnitSystem } from '@/lib/quantities/unit-system';
+import type { BenchSpec } from '@/lib/scene/bench-spec';
+import { trainInLine } from '@/lib/scene/train-model';
 
-const MODULE = 4;
-
-/** Arbors in a line, each meshing with the next: what the first hands on, the second takes. */
-function inLine(wheels: readonly (readonly number[])[]): readonly Arbor[] {
-  let x = 0;
-  let handsOn = 0;
-  return wheels.map((teeth, index) => {
-    const takes = teeth[0] ?? 0;
-    if (index > 0) {
-      x += centreDistance({ module: MODULE, firstTeeth: handsOn, secondTeeth: takes });
-    }
-    handsOn = teeth.at(-1) ?? 0;
-    return { x, y: 0, wheels: teeth.map((count) => ({ teeth: count })), fast: true };
-  });
-}
-
-/** A train of wheels in line, the crank on the first arbor. */
-function trainOf(...wheels: readonly (readonly number[])[]): FreeTrainSpec {
-  return { bench: 'train', layout: 'free', module: MODULE, arbors: inLine(wheels), crank: 0 };
-}
-
-/** A train of pairs: each driven wheel sits fast beside the next driver. */
-function trainOfPairs(pairs: readonly DriverAndDriven[]): FreeTrainSpec {
-  const beside = (index: number) => (pairs[index + 1] ? [pairs[index + 1]?.[0] ?? 0] : []);
-  return trainOf(
-    [pairs[0]?.[0] ?? 0],
-    ...pairs.map(([, driven], index) => [driven, ...beside(index)]),
-  );
+/** Module 4, or six teeth to the inch of diameter. */
+function toothSize(units: UnitSystem): number {
+  return units === 'metric' ? 4 : toMillimetres(1 / 6, units);
 }
 
 /** The pairs of the train on the front page: a small wheel drives a large one, twice over. */
-export const landingPairs: readonly DriverAndDriven[] = [
+export const landingPairs: readonly [DriverAndDriven, DriverAndDriven] = [
   [12, 36],
   [14, 28],
 ];
 
 /** The train on the front page: to be turned, not yet to be changed. */
-export const landingTrain: BenchSpec = { ...trainOfPairs(landingPairs), controls: [] };
+export function landingTrain(units: UnitSystem): BenchSpec {
+  const [[first, second], [third, last]] = landingPairs;
+  return trainInLine(toothSize(units), [[first], [second, third], [last]], { controls: [], units });
+}
 
 /** The same train in words: "12 on 36, and beside that 14 on 28". */
 export const landingWords = landingPairs
@@ -49,9 +29,9 @@ export const landingWords = landingPairs
 
 /** The trains that show one motion each. */
 const byWay: Readonly<Record<string, BenchSpec>> = {
-  slower: trainOf([12], [36]),
-  faster: trainOf([36], [12]),
-  'other-way': trainOf([20], [20]),
+  slower: trainInLine(4, [[12], [36]]),
+  faster: trainInLine(4, [[36], [12]]),
+  'other-way': trainInLine(4, [[20], [20]]),
 };
 
 /** The bench that stands for a lesson in lists. */

@@ -17,6 +17,12 @@ interface ChoiceFieldProps {
   readonly disabled?: boolean;
 }
 
+/** An option that says more as a mechanism than in words, to be driven. */
+export function OptionBench({ option }: { readonly option: ChoicePart['options'][number] }) {
+  if (option.figure === undefined) return null;
+  return <Bench spec={option.figure as BenchSpec} title={option.label} />;
+}
+
 /** One or several of some options, each in words or as a live bench. */
 export function ChoiceField({
   part,
@@ -58,11 +64,7 @@ export function ChoiceField({
               />
               <span>{option.label}</span>
             </label>
-            {option.figure === undefined ? null : (
-              <div className="mt-2">
-                <Bench spec={option.figure as BenchSpec} title={option.label} />
-              </div>
-            )}
+            <OptionBench option={option} />
           </div>
         ))}
       </div>

@@ -8,6 +8,7 @@ import { useRound } from '@/lib/browser/use-round';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import type { PegView, RoundView } from '@/lib/schemas/round';
 import { OpenRound, Question } from './open-round';
+import { SampleParts } from './sample-parts';
 
 /** What the server says of an exercise before any round is opened. */
 export interface ExerciseEntry {
@@ -105,7 +106,12 @@ function SignedOut({
 }) {
   return (
     <>
-      {sample === null ? null : <Question round={sample} />}
+      {sample === null ? null : (
+        <>
+          <Question round={sample} />
+          <SampleParts round={sample} />
+        </>
+      )}
       <p className="mt-4 max-w-measure text-pencil">
         These numbers are only to look at: answering needs an account, and draws you your own.
       </p>

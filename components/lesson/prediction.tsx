@@ -121,6 +121,7 @@ function Asked({
       <Guess
         round={round}
         done={done}
+        kept={attempt?.parts.flatMap((part) => part.chosen ?? [])}
         busy={answering.state === 'sending'}
         onGuess={(part, chosen) => void send({ answers: { [part]: [...chosen] } })}
       />
@@ -138,17 +139,19 @@ interface GuessProps {
   readonly round: RoundView;
   readonly done: boolean;
   readonly busy?: boolean;
+  /** The options of the stored guess, which stay marked wherever the lesson is opened. */
+  readonly kept?: readonly string[];
   readonly onGuess: (part: string, chosen: readonly string[]) => void;
   /** What stands beside the button. */
   readonly children?: ReactNode;
 }
 
-function Guess({ round, done, busy = false, onGuess, children }: GuessProps) {
+function Guess({ round, done, busy = false, kept = [], onGuess, children }: GuessProps) {
   const [draft, change] = useDraft(round.roundId);
   const [checked, setChecked] = useState(false);
   const part = round.parts.find((one) => one.kind === 'choice');
   if (part?.kind !== 'choice') return null;
-  const chosen = chosenOf(draft[part.key]);
+  const chosen = kept.length > 0 ? kept : chosenOf(draft[part.key]);
   const commit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();
     setChecked(true);

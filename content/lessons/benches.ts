@@ -1,4 +1,5 @@
 import type { BenchSpec, FreeTrainSpec } from '@/lib/scene/bench-spec';
+import { trainInLine } from '@/lib/scene/train-model';
 import { toMillimetres } from '@/lib/quantities/units';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 
@@ -9,14 +10,8 @@ const rightAngle = Math.PI / 2;
 
 /** Three wheels in a row, each alone on its arbor; the teeth are those of the prediction. */
 function rowOfThree(units: UnitSystem): FreeTrainSpec {
-  const teeth = [16, 48, 16];
   const size = units === 'metric' ? 4 : toMillimetres(1 / 6, units);
-  let x = 0;
-  const arbors = teeth.map((count, index) => {
-    if (index > 0) x += (size * ((teeth[index - 1] ?? 0) + count)) / 2;
-    return { x, y: 0, wheels: [{ teeth: count }], fast: true };
-  });
-  return { bench: 'train', layout: 'free', module: size, arbors, crank: 0, units };
+  return trainInLine(size, [[16], [48], [16]], { units });
 }
 
 const benches: Readonly<Record<string, BenchOf>> = {

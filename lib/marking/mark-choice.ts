@@ -43,6 +43,7 @@ export function markChoice(
       echo: chosen.map(({ label }) => label).join(', '),
       ...(right ? {} : { message: slip?.advice(variant) ?? 'Not yet.' }),
       ...(slip === undefined ? {} : { slip: slip.id }),
+      chosen: chosen.map(({ id }) => id),
       weight,
       skills,
     },

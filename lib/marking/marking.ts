@@ -9,6 +9,8 @@ export interface MarkedPart {
   /** The advice of the slip that was recognised, or what is amiss. */
   readonly message?: string;
   readonly slip?: string;
+  /** The ids of the options that were chosen, in the round they were shown in. */
+  readonly chosen?: string[];
 }
 
 /** A part as marked, with its share of the whole and the skills it shows. */

@@ -114,6 +114,7 @@ export const markedPartSchema = z.strictObject({
   echo: z.string(),
   message: z.optional(z.string()),
   slip: z.optional(z.string()),
+  chosen: z.optional(z.array(z.string())),
 });
 
 /** An attempt as its learner sees it. */

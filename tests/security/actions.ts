@@ -7,10 +7,10 @@ export const actions: readonly ActionRow[] = [
     kind: 'action',
     file: 'app/actions.ts',
     name: 'setUnits',
-    on: () => '/today',
+    on: () => '/lessons',
     bound: () => ['inch'],
     form: null,
-    outcome: forSignedIn('done', 'sign in'),
+    outcome: forEverybody('done'),
   },
   {
     kind: 'action',

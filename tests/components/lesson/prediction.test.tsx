@@ -114,9 +114,13 @@ describe('a prediction', () => {
     expect(bench()).toBe('locked');
   });
 
-  it('stays open once it was made', () => {
-    show(ada, fresh({ closed: true, attempts: [kept] }));
+  it('stays open once it was made, with the guess marked on whatever device it is read', () => {
+    const part = { key: 'oval', label: 'The oval', right: false, echo: 'It keeps its shape' };
+    const guessed = halfRight({ parts: [{ ...part, chosen: ['p2'] }] });
+    show(ada, fresh({ closed: true, attempts: [guessed] }));
     expect(bench()).toBe('open');
+    expect(screen.getByRole('radio', { name: 'It keeps its shape' })).toBeChecked();
+    expect(screen.getByText('You guessed: It keeps its shape.')).toBeVisible();
     expect(screen.queryByRole('button', { name: 'That is my guess' })).toBeNull();
   });
 

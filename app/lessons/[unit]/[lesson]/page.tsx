@@ -7,6 +7,7 @@ import { Page } from '@/components/ui/page';
 import { PageHeading } from '@/components/ui/page-heading';
 import { documents } from '@/content/lessons/documents';
 import { findLesson, lessonPath } from '@/content/lessons/front-matter';
+import { readerUnits } from '@/lib/auth/reader-units';
 import { currentViewer } from '@/lib/auth/viewer';
 import { lessonNames } from './_components/lesson-names';
 import { findLessonWork } from './_components/lesson-work';
@@ -24,8 +25,7 @@ export default async function LessonPage({ params }: Props) {
   const lesson = findLesson(unit, id);
   const load = documents.get(id);
   if (lesson === null || load === undefined) notFound();
-  const viewer = await currentViewer();
-  const units = viewer?.units ?? 'metric';
+  const [viewer, units] = await Promise.all([currentViewer(), readerUnits()]);
   const [{ default: Text }, work] = await Promise.all([load(), findLessonWork(id, viewer, units)]);
   const personId = viewer?.personId ?? null;
   const signInHref = `/sign-in?from=${encodeURIComponent(lessonPath(lesson))}`;
