@@ -6,7 +6,9 @@ import { Section } from '@/components/ui/panel';
 import { requireViewer } from '@/lib/auth/viewer';
 import { findOwnAddress } from '@/lib/data/own-address';
 import { savePassword, saveProfile } from './actions';
+import { CalendarAddress } from './_components/calendar-address';
 import { passwordFields, profileFields } from './_components/fields';
+import { MailPreference } from './_components/mail-preference';
 import { SignOut } from './_components/sign-out';
 
 export const metadata: Metadata = { title: 'Account' };
@@ -28,6 +30,8 @@ export default async function AccountPage() {
           variant="secondary"
         />
       </Section>
+      <MailPreference viewer={viewer} />
+      <CalendarAddress viewer={viewer} />
       <Section title="Leave">
         <SignOut personId={viewer.personId} />
       </Section>

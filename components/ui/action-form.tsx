@@ -89,7 +89,7 @@ export function ActionForm(props: ActionFormProps) {
         {state.outcome === 'done' && state.message ? (
           <Notice tone="right" title={state.message} />
         ) : null}
-        {state.link ? <OneTimeLink link={state.link} /> : null}
+        {state.link ? <OneTimeLink link={state.link} says={state.linkSays} /> : null}
       </div>
       {fields.map((field) => (
         <Field key={field.name} field={field} state={state} prefix={prefix} />

@@ -9,6 +9,8 @@ export interface FormState {
   readonly values?: Readonly<Record<string, string>>;
   /** A link that is shown this once and kept nowhere. */
   readonly link?: string;
+  /** What to do with the link, where it is not one to be handed over. */
+  readonly linkSays?: string;
 }
 
 /** A form before anything was sent. */

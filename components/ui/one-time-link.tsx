@@ -3,8 +3,16 @@
 import { useState } from 'react';
 import { Button } from './button';
 
+const handOver = 'Hand this link over now: it is shown this once, works once, and for seven days.';
+
+interface OneTimeLinkProps {
+  readonly link: string;
+  /** What to do with it; to hand it over, unless said otherwise. */
+  readonly says?: string;
+}
+
 /** A link that is shown once: to be copied now and handed over. */
-export function OneTimeLink({ link }: Readonly<{ link: string }>) {
+export function OneTimeLink({ link, says = handOver }: OneTimeLinkProps) {
   const [copied, setCopied] = useState(false);
   const copy = async () => {
     try {
@@ -17,9 +25,7 @@ export function OneTimeLink({ link }: Readonly<{ link: string }>) {
   };
   return (
     <div className="mb-6 rounded border border-l-[6px] border-brass bg-board px-4 py-3">
-      <p className="font-semibold">
-        Hand this link over now: it is shown this once, works once, and for seven days.
-      </p>
+      <p className="font-semibold">{says}</p>
       <p className="my-2 font-mono text-[0.9375rem] break-all select-all">{link}</p>
       <div className="flex items-center gap-3">
         <Button variant="quiet" onClick={() => void copy()}>

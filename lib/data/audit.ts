@@ -38,6 +38,10 @@ export type AuditedAction =
   | 'work changed'
   | 'work withdrawn'
   | 'class mail ended'
+  | 'class mail wanted'
+  | 'letter sent again'
+  | 'calendar address made'
+  | 'calendar address ended'
   | 'extension given'
   | 'extension taken back'
   | 'comment written'
@@ -57,6 +61,7 @@ export interface AuditLine {
     | 'attempt'
     | 'session'
     | 'invitation'
+    | 'letter'
     | 'audit log';
   readonly objectId?: string | null;
   readonly classId?: string | null;

@@ -12,6 +12,7 @@ import { createAuditEntries } from '@/migrations/20261201T0911-create-audit-entr
 import { createThrottle } from '@/migrations/20261201T0912-create-throttle';
 import { createLetters } from '@/migrations/20261201T1000-create-letters';
 import { addMailPreference } from '@/migrations/20261201T1001-add-mail-preference';
+import { createCalendarAddresses } from '@/migrations/20261201T1002-create-calendar-addresses';
 import { createInvitations } from '@/migrations/20261201T1100-create-invitations';
 import { widenOneTimeLinks } from '@/migrations/20261201T1101-widen-one-time-links';
 import { indexMembershipsByClass } from '@/migrations/20261201T1200-index-memberships-by-class';
@@ -33,6 +34,7 @@ export const migrations: readonly { readonly name: string; readonly migration: M
   { name: '20261201T0912-create-throttle', migration: createThrottle },
   { name: '20261201T1000-create-letters', migration: createLetters },
   { name: '20261201T1001-add-mail-preference', migration: addMailPreference },
+  { name: '20261201T1002-create-calendar-addresses', migration: createCalendarAddresses },
   { name: '20261201T1100-create-invitations', migration: createInvitations },
   { name: '20261201T1101-widen-one-time-links', migration: widenOneTimeLinks },
   { name: '20261201T1200-index-memberships-by-class', migration: indexMembershipsByClass },

@@ -7,6 +7,7 @@ import type { Role, Viewer } from '@/lib/policy/viewer';
 import { dateIn } from '@/lib/clock';
 import { models } from '@/models';
 import { liveThrough } from './history';
+import { fileLetters } from './letters';
 import {
   demoAddress,
   demoAdministrator,
@@ -67,6 +68,7 @@ export async function loadDemo(now: Date): Promise<void> {
     }
   }
   await Promise.all(lives.map((life) => liveThrough(life, now)));
+  await fileLetters(now);
   await makePerson(demoAdministrator, passwordHash, began, true);
 }
 

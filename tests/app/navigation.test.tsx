@@ -22,7 +22,7 @@ describe('the navigation', () => {
       'Lessons',
       'By motion',
     ]);
-    expect(labels(person([], true))).toEqual(['People', 'Classes', 'Lessons', 'By motion']);
+    expect(labels(person([], true))).toEqual(['People', 'Classes', 'Mail', 'Lessons', 'By motion']);
   });
 
   it('treats somebody in no class as a learner', () => {

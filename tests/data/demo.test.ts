@@ -34,6 +34,11 @@ describe('the demo data', () => {
     expect(await countRows('people')).toBe(33);
     expect(await countRows('attempts', 'created_at > $1', [now])).toBe(0);
     expect(await countRows('rounds', 'opened_at > $1', [now])).toBe(0);
+    // Letters of weeks that are over lie in the log; nothing of them goes out now.
+    expect(await countRows('letters', "state = 'sent'")).toBeGreaterThan(50);
+    expect(await countRows('letters', "state = 'failed'")).toBe(1);
+    expect(await countRows('letters', "state = 'waiting' and send_after <= $1", [now])).toBe(0);
+    expect(await countRows('graphile_worker.jobs')).toBe(0);
   }, 300_000);
 
   it('is varied: right and wrong, known slips, hints, solutions, work left open', async () => {

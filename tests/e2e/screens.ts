@@ -64,6 +64,15 @@ export const screens: readonly Screen[] = [
   })),
   { name: 'today', path: '/today', by: ['learner'] },
   { name: 'account', path: '/account', by: known },
+  {
+    name: 'calendar-address',
+    path: '/account',
+    by: ['learner'],
+    prepare: async (page) => {
+      await page.getByRole('button', { name: /Make (the|a new) address/ }).click();
+      await page.getByText('Copy it now').waitFor();
+    },
+  },
   { name: 'classes', path: '/classes', by: ['instructor', 'administrator'] },
   { name: 'class', path: '/classes', by: ['instructor'], prepare: firstClass },
   {
@@ -93,6 +102,8 @@ export const screens: readonly Screen[] = [
   { name: 'exercises', path: '/exercises', by: ['instructor'] },
   { name: 'key', path: '/exercises', by: ['instructor'], prepare: follow(/\/key$/) },
   { name: 'people', path: '/people', by: ['administrator'] },
+  { name: 'mail', path: '/mail', by: ['administrator'] },
+  { name: 'mail-failed', path: '/mail?state=failed', by: ['administrator'] },
   {
     name: 'person',
     path: '/people',

@@ -1,4 +1,5 @@
 import { actions } from './actions';
+import { actionsOfBeingTold, handlersOfBeingTold, pagesOfBeingTold } from './being-told';
 import { actionsOfComingIn, pagesOfComingIn } from './coming-in';
 import type { Endpoint } from './endpoint';
 import { handlers } from './handlers';
@@ -11,7 +12,10 @@ import { pages } from './pages';
 export const endpoints: readonly Endpoint[] = [
   ...pages,
   ...pagesOfComingIn,
+  ...pagesOfBeingTold,
   ...handlers,
+  ...handlersOfBeingTold,
   ...actions,
   ...actionsOfComingIn,
+  ...actionsOfBeingTold,
 ];

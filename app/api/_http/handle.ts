@@ -9,6 +9,11 @@ import { problem } from './problem';
 /** The largest body that is read: answers are short. */
 const LARGEST_BODY = 64 * 1024;
 
+/** Answers a request that carries its own proof, whoever sends it; surprises are logged under an id. */
+export async function handleOpen(work: () => Promise<Response>): Promise<Response> {
+  return guarded(work);
+}
+
 /** Answers a reading request for a signed-in person; surprises are logged under an id. */
 export async function handleRead(work: (viewer: Viewer) => Promise<Response>): Promise<Response> {
   return guarded(async () => {

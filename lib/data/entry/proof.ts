@@ -5,7 +5,14 @@ import 'server-only';
  * where all others take a viewer; no other folder does.
  */
 export type Proof =
-  PasswordProof | SessionProof | LinkProof | UnsubscribeProof | FormProof | JobProof | ConsoleProof;
+  | PasswordProof
+  | SessionProof
+  | LinkProof
+  | UnsubscribeProof
+  | FeedProof
+  | FormProof
+  | JobProof
+  | ConsoleProof;
 
 /** An address and a password, with the network address they come from when it is known. */
 export interface PasswordProof {
@@ -37,6 +44,12 @@ export interface UnsubscribeProof {
 export interface FormProof {
   readonly by: 'form';
   readonly from: string | null;
+}
+
+/** The secret in the address of a calendar feed. */
+export interface FeedProof {
+  readonly by: 'feed';
+  readonly secret: string;
 }
 
 /** Work that the job queue runs by itself. */

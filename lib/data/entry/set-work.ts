@@ -14,10 +14,13 @@ export const concernedLearners = `
   join learners l on l.person_id = p.id
   left join extensions e on e.assignment_id = a.id and e.learner_id = l.id`;
 
-/** That the assignment stands, and is for the whole class or for this learner. */
-export const isConcerned = `
-  a.withdrawn_at is null and (not a.for_chosen_learners or exists (
+/** That the assignment is for the whole class, or for this learner among others. */
+export const isForLearner = `
+  (not a.for_chosen_learners or exists (
     select 1 from assignment_learners x where x.assignment_id = a.id and x.learner_id = l.id))`;
+
+/** That the assignment stands, and is for this learner. */
+export const isConcerned = `a.withdrawn_at is null and ${isForLearner}`;
 
 /**
  * That item `i` is still to be done: nothing right counts for it, an instructor's override looked at
