@@ -42,6 +42,11 @@ const parts = {
     args: [...vitest, '--project', 'e2e', 'tests/e2e/tour.test.ts'],
     env: { HORNBEAM_TOUR: 'whole' },
   },
+  worker: {
+    what: 'The worker killed between sending and marking, eight times',
+    args: [...vitest, '--project', 'data', 'tests/data/worker-killed.test.ts'],
+    env: { HORNBEAM_KILLS: '8' },
+  },
   mutants: { what: 'Mutants of the kinematics library', args: ['scripts/mutate.mjs'] },
 };
 
