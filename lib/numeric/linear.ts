@@ -1,21 +1,25 @@
 import { at } from '@/lib/numeric/at';
 
 /**
- * Solve `matrix · x = right` in place: `right` becomes x, `matrix` is used up, nothing is allocated.
+ * Solve `matrix · x = right` in place: the first n of `right` become x, `matrix` is used up,
+ * nothing is allocated.
  *
  * `matrix` holds n rows of n, row after row; any units. Gaussian elimination with the rows scaled
- * and the largest pivot chosen. Gives back the smallest scaled pivot: a number near 1 says well
- * conditioned, 0 says singular, and `right` is then left as it stood half-way.
- * @example solveLinear(new Float64Array([2, 0, 0, 4]), new Float64Array([2, 8]), 2) > 0 // → true
+ * and the largest pivot chosen. `right` is n + 1 long: its last place takes the smallest scaled
+ * pivot. A number near 1 says well conditioned, 0 says singular, and the rest of `right` is then
+ * left as it stood half-way.
  */
-export function solveLinear(matrix: Float64Array, right: Float64Array, n: number): number {
+export function solveLinear(matrix: Float64Array, right: Float64Array, n: number): void {
   let smallest = 1;
   scaleRows(matrix, right, n);
   for (let column = 0; column < n; column += 1) {
     const row = largestBelow(matrix, n, column);
     const pivot = at(matrix, row * n + column);
     smallest = Math.min(smallest, Math.abs(pivot));
-    if (!(Math.abs(pivot) > 1e-300)) return 0;
+    if (!(Math.abs(pivot) > 1e-300)) {
+      right[n] = 0;
+      return;
+    }
     if (row !== column) swapRows(matrix, right, n, row, column);
     for (let below = column + 1; below < n; below += 1) {
       const factor = at(matrix, below * n + column) / pivot;
@@ -31,7 +35,7 @@ export function solveLinear(matrix: Float64Array, right: Float64Array, n: number
     for (let k = row + 1; k < n; k += 1) sum -= at(matrix, row * n + k) * at(right, k);
     right[row] = sum / at(matrix, row * n + row);
   }
-  return smallest;
+  right[n] = smallest;
 }
 
 /**

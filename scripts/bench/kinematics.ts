@@ -9,6 +9,7 @@ import {
   drivenLinkages,
   fourBar,
   oracleStepper,
+  ratedStepper,
   stepper,
   swing,
   type Driven,
@@ -33,7 +34,10 @@ export async function benchKinematics(): Promise<readonly BenchRow[]> {
   const rows = [closedAgainstGeneral()];
   for (const driven of drivenLinkages) rows.push(await generalAgainstOracle(driven));
   for (const driven of drivenLinkages) rows.push(closing(driven));
-  for (const driven of drivenLinkages) rows.push(heapGrowth(driven));
+  for (const driven of drivenLinkages) {
+    rows.push(heapGrowth(driven, 'positions', stepper(driven)));
+    rows.push(heapGrowth(driven, 'with speeds and accelerations', ratedStepper(driven)));
+  }
   return [...rows, wholeWheel(), twoStages(), threeStages()];
 }
 
@@ -92,9 +96,8 @@ function closing(driven: Driven): BenchRow {
 }
 
 /** Bytes by which the heap grows a step of a hundred thousand, once the engine has compiled the step. */
-function heapGrowth(driven: Driven): BenchRow {
+function heapGrowth(driven: Driven, what: string, run: (drives: Float64Array) => number): BenchRow {
   const drives = swing(driven, 5000);
-  const run = stepper(driven);
   for (let k = 0; k < 40; k += 1) run(drives);
   setFlagsFromString('--expose-gc');
   const collect: unknown = runInNewContext('gc');
@@ -104,7 +107,7 @@ function heapGrowth(driven: Driven): BenchRow {
     bytes = Math.min(bytes, grownOver(20, () => run(drives)) / (20 * drives.length));
   }
   return {
-    name: `heap growth a step, over 100 000 steps: ${driven.name}`,
+    name: `heap growth a step, over 100 000 steps, ${what}: ${driven.name}`,
     value: `${bytes.toFixed(2)} bytes`,
     aim: 'under 1 byte',
     ok: bytes < 1,

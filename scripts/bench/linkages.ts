@@ -8,6 +8,7 @@ import type { Plan } from '@/lib/kinematics/linkage/solver/plan';
 import {
   branchOf,
   placeLinkage,
+  rateLinkage,
   startPose,
   type Linkage,
 } from '@/lib/kinematics/linkage/solver/solver';
@@ -92,6 +93,30 @@ export function stepper(driven: Driven): (drives: Float64Array) => number {
       worst = Math.max(worst, placeLinkage(plan, drive, branch, pose));
     }
     return worst;
+  };
+}
+
+/** As `stepper`, with velocity and acceleration of every point at each step. Gives the dead centres. */
+export function ratedStepper(driven: Driven): (drives: Float64Array) => number {
+  const plan = planOf(driven);
+  const branch = branchOf(plan);
+  const drive = new Float64Array(1);
+  const rated = {
+    pose: startPose(plan),
+    drive,
+    speeds: new Float64Array([2]),
+    accelerations: new Float64Array([-3]),
+    velocity: startPose(plan),
+    acceleration: startPose(plan),
+  };
+  return (drives) => {
+    let dead = 0;
+    for (let k = 0; k < drives.length; k += 1) {
+      drive[0] = drives[k] ?? 0;
+      placeLinkage(plan, drive, branch, rated.pose);
+      if (!rateLinkage(plan, rated)) dead += 1;
+    }
+    return dead;
   };
 }
 

@@ -38,15 +38,16 @@ export function fourBarThroughPairs(
 ): SynthesisOutcome {
   requireSize('fourBarThroughPairs', 'frame', frame);
   const matrix = new Float64Array(9);
-  const right = new Float64Array(3);
+  const right = new Float64Array(4);
   pairs.forEach(({ crank, rocker }, k) => {
     requireMeasure('fourBarThroughPairs', 'crank', crank);
     requireMeasure('fourBarThroughPairs', 'rocker', rocker);
     matrix.set([Math.cos(rocker), -Math.cos(crank), 1], 3 * k);
     right[k] = Math.cos(crank - rocker);
   });
-  if (solveLinear(matrix, right, 3) < DEPENDENT) return { outcome: 'undetermined' };
-  const [k1 = 0, k2 = 0, k3 = 0] = right;
+  solveLinear(matrix, right, 3);
+  const [k1 = 0, k2 = 0, k3 = 0, pivot = 0] = right;
+  if (pivot < DEPENDENT) return { outcome: 'undetermined' };
   if (Math.abs(k1) < DEPENDENT || Math.abs(k2) < DEPENDENT) return { outcome: 'impossible', by: 0 };
   const [a, c] = [1 / k1, 1 / k2];
   const squared = a * a + c * c + 1 - 2 * a * c * k3;

@@ -173,8 +173,7 @@ function rates(plan: Plan, drive: readonly number[], pose: Float64Array): unknow
   const [velocity, acceleration] = [startPose(plan), startPose(plan)];
   const accelerations = drive.map(() => 0);
   const rated = { pose, drive, speeds: drive, accelerations, velocity, acceleration };
-  const pivot = rateLinkage(plan, rated);
-  return pivot < 1e-9 ? pivot : [pivot, velocity, acceleration];
+  return rateLinkage(plan, rated) ? [velocity, acceleration] : 'dead-centre';
 }
 
 const linkages = linkageCalls.map(([call, drive]) => ({

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { at } from '@/lib/numeric/at';
+import { at, givenAt, nth, wholeAt } from '@/lib/numeric/at';
 import { singularValues, solveLinear } from '@/lib/numeric/linear';
 
 describe('solveLinear', () => {
@@ -9,20 +9,27 @@ describe('solveLinear', () => {
       { length: 16 },
       (_, k) => 1 / (1 + (k % 4) + Math.floor(k / 4)),
     );
-    const right = new Float64Array([25 / 12, 77 / 60, 57 / 60, 319 / 420]);
-    expect(solveLinear(matrix, right, 4)).toBeGreaterThan(0);
-    for (const x of right) expect(x).toBeCloseTo(1, 10);
+    const right = new Float64Array([25 / 12, 77 / 60, 57 / 60, 319 / 420, 0]);
+    solveLinear(matrix, right, 4);
+    expect(at(right, 4)).toBeGreaterThan(0);
+    for (const x of right.subarray(0, 4)) expect(x).toBeCloseTo(1, 10);
   });
 
   it('changes rows where the pivot is nought', () => {
-    const right = new Float64Array([2, 3]);
-    expect(solveLinear(new Float64Array([0, 1, 1, 0]), right, 2)).toBe(1);
-    expect([...right]).toEqual([3, 2]);
+    const right = new Float64Array([2, 3, 0]);
+    solveLinear(new Float64Array([0, 1, 1, 0]), right, 2);
+    expect([...right]).toEqual([3, 2, 1]);
   });
 
-  it('gives 0 for equations that say the same twice', () => {
-    expect(solveLinear(new Float64Array([1, 2, 2, 4]), new Float64Array([1, 2]), 2)).toBe(0);
-    expect(solveLinear(new Float64Array([0, 0, 0, 0]), new Float64Array([0, 0]), 2)).toBe(0);
+  it('leaves a pivot of 0 for equations that say the same twice', () => {
+    for (const matrix of [
+      [1, 2, 2, 4],
+      [0, 0, 0, 0],
+    ]) {
+      const right = new Float64Array([1, 2, 9]);
+      solveLinear(Float64Array.from(matrix), right, 2);
+      expect(at(right, 2)).toBe(0);
+    }
   });
 
   it('puts its answer back into the equations', () => {
@@ -31,11 +38,11 @@ describe('solveLinear', () => {
       fc.property(fc.array(number, { minLength: 12, maxLength: 12 }), (numbers) => {
         const matrix = numbers.slice(0, 9);
         const right = numbers.slice(9);
-        const x = Float64Array.from(right);
-        const pivot = solveLinear(Float64Array.from(matrix), x, 3);
-        fc.pre(pivot > 1e-3);
+        const x = Float64Array.from([...right, 0]);
+        solveLinear(Float64Array.from(matrix), x, 3);
+        fc.pre(at(x, 3) > 1e-3);
         right.forEach((wanted, row) => {
-          const got = [0, 1, 2].reduce((sum, k) => sum + at(matrix, 3 * row + k) * at(x, k), 0);
+          const got = [0, 1, 2].reduce((sum, k) => sum + givenAt(matrix, 3 * row + k) * at(x, k), 0);
           expect(got).toBeCloseTo(wanted, 7);
         });
       }),
@@ -57,9 +64,14 @@ describe('singularValues', () => {
   });
 });
 
-describe('at', () => {
-  it('is 0 outside the array', () => {
-    expect(at([5], 1)).toBe(0);
+describe('the readers of arrays', () => {
+  it('give what stands there, and 0 outside the array', () => {
     expect(at(new Float64Array([5]), 0)).toBe(5);
+    expect(at(new Float64Array([5]), 1)).toBe(0);
+    expect(wholeAt(new Int8Array([-1]), 0)).toBe(-1);
+    expect(wholeAt(new Int32Array([7]), 1)).toBe(0);
+    expect(givenAt([2.5], 0)).toBe(2.5);
+    expect(givenAt([2.5], 1)).toBe(0);
+    expect(nth(['oak', 'ash'], 1)).toBe('ash');
   });
 });

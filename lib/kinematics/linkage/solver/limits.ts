@@ -2,7 +2,7 @@ import { at } from '@/lib/numeric/at';
 import { TURN } from '@/lib/geometry/angle';
 import { runSteps, slackOf } from '@/lib/kinematics/linkage/solver/place';
 import type { Plan } from '@/lib/kinematics/linkage/solver/plan';
-import { driveOf } from '@/lib/kinematics/linkage/solver/rank';
+import { driveOf } from '@/lib/kinematics/linkage/solver/drive';
 import { branchOf } from '@/lib/kinematics/linkage/solver/solver';
 
 /** How far one number of a drive can go from where it stands. */

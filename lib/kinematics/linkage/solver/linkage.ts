@@ -49,39 +49,26 @@ export type Driver =
   /** A point led along x and y. */
   | { readonly kind: 'lead'; readonly point: string };
 
-/**
- * What holds points, by their numbers: one equation each, `rigid` two. `drive` is the place of a
- * driver's number in the drive.
- */
-export type Relation =
-  | { readonly kind: 'distance'; readonly p: number; readonly q: number; readonly length: number }
-  | {
-      readonly kind: 'rigid';
-      readonly p: number;
-      readonly a: number;
-      readonly b: number;
-      /** Shares of the way from a to b, along it and square to its left. */
-      readonly along: number;
-      readonly across: number;
-    }
-  | SlideRelation
-  | {
-      readonly kind: 'angle';
-      readonly a: number;
-      readonly b: number;
-      /** The way from a to b is turned so much from the driven direction. */
-      readonly shift: number;
-      readonly drive: number;
-    }
-  | {
-      readonly kind: 'reach';
-      readonly p: number;
-      readonly through: number;
-      readonly from: number;
-      readonly to: number;
-      readonly drive: number;
-    };
+/** Two points keep their distance. */
+export interface Distance {
+  readonly kind: 'distance';
+  readonly p: number;
+  readonly q: number;
+  readonly length: number;
+}
 
+/** A point keeps its place in a body, told by two points of it. */
+export interface Rigid {
+  readonly kind: 'rigid';
+  readonly p: number;
+  readonly a: number;
+  readonly b: number;
+  /** Shares of the way from a to b, along it and square to its left. */
+  readonly along: number;
+  readonly across: number;
+}
+
+/** A point keeps to a groove. */
 export interface SlideRelation {
   readonly kind: 'slide';
   readonly p: number;
@@ -91,21 +78,30 @@ export interface SlideRelation {
   readonly offset: number;
 }
 
+/** A driven direction; `drive` is the place of the driver's number in the drive. */
+export interface Angle {
+  readonly kind: 'angle';
+  readonly a: number;
+  readonly b: number;
+  /** The way from a to b is turned so much from the driven direction. */
+  readonly shift: number;
+  readonly drive: number;
+}
+
+/** A driven place along a groove. */
+export interface Reach {
+  readonly kind: 'reach';
+  readonly p: number;
+  readonly through: number;
+  readonly from: number;
+  readonly to: number;
+  readonly drive: number;
+}
+
+/** What holds points, by their numbers: one equation each, `rigid` two. */
+export type Relation = Distance | Rigid | SlideRelation | Angle | Reach;
+
 /** How many equations a relation stands for. */
 export function equationsOf(relations: readonly Relation[]): number {
   return relations.reduce((sum, { kind }) => sum + (kind === 'rigid' ? 2 : 1), 0);
-}
-
-/** Numbers of the points that a relation holds. */
-export function pointsOf(relation: Relation): readonly number[] {
-  switch (relation.kind) {
-    case 'distance':
-      return [relation.p, relation.q];
-    case 'rigid':
-      return [relation.p, relation.a, relation.b];
-    case 'angle':
-      return [relation.a, relation.b];
-    default:
-      return [relation.p, relation.through, relation.from, relation.to];
-  }
 }

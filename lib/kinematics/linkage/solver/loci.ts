@@ -1,5 +1,4 @@
 import { at } from '@/lib/numeric/at';
-import { lengthOf } from '@/lib/numeric/length';
 import type { Locus } from '@/lib/kinematics/linkage/solver/plan';
 
 /*
@@ -25,7 +24,7 @@ export function layLocus(
   }
   const gx = at(pose, 2 * locus.to) - at(pose, 2 * locus.from);
   const gy = at(pose, 2 * locus.to + 1) - at(pose, 2 * locus.from + 1);
-  const long = lengthOf(gx, gy);
+  const long = Math.sqrt(gx * gx + gy * gy);
   const ux = long > 0 ? gx / long : 1;
   const uy = long > 0 ? gy / long : 0;
   const other = locus.p === p ? locus.through : locus.p;

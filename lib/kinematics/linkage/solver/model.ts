@@ -1,14 +1,7 @@
 import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import type { Point } from '@/lib/geometry/point';
+import { apartPair, distanceOf, rigidOf, type Body } from '@/lib/kinematics/linkage/solver/body';
 import type { Linkage, Relation, SlideRelation } from '@/lib/kinematics/linkage/solver/linkage';
-
-/** A rigid body: its points by number, and where they lie in its own frame. */
-export interface Body {
-  readonly points: readonly number[];
-  readonly shape: ReadonlyMap<number, Point>;
-  /** The driven direction, if an angle drives this body. */
-  readonly driven?: { readonly from: number; readonly to: number; readonly drive: number };
-}
 
 /** A linkage with names turned into numbers, checked. */
 export interface Model {
@@ -58,7 +51,7 @@ export function modelOf(linkage: Linkage): Model {
     return driven ? { ...body, driven } : body;
   });
   for (const angle of drivers.angles) {
-    if (!bodies.some((body) => body.driven === angle)) {
+    if (!bodies.some(({ shape }) => shape.has(angle.from) && shape.has(angle.to))) {
       throw new RangeError(
         `${CALLER}: driver turns ${names[angle.from]} to ${names[angle.to]}; expected two points of one bar or plate`,
       );
@@ -92,51 +85,6 @@ export function relationsOf({ points, shape, driven }: Body): readonly Relation[
     ? [{ kind: 'angle', a: driven.from, b: driven.to, shift: 0, drive: driven.drive }]
     : [];
   return [distanceOf(shape, a, b), ...rest.map((p) => rigidOf(shape, p, a, b)), ...turned];
-}
-
-/** The first of some points of a body, and the first that does not lie on it. */
-export function apartPair(
-  shape: ReadonlyMap<number, Point>,
-  points: readonly number[],
-): readonly [number, number] | undefined {
-  const [a] = points;
-  const b = points.find((p) => a !== undefined && !coincide(shape, a, p));
-  return a === undefined || b === undefined ? undefined : [a, b];
-}
-
-/** Whether two points of a body lie in one place. */
-export function coincide(shape: ReadonlyMap<number, Point>, p: number, q: number): boolean {
-  const [at, other] = [localOf(shape, p), localOf(shape, q)];
-  return at.x === other.x && at.y === other.y;
-}
-
-export function distanceOf(shape: ReadonlyMap<number, Point>, p: number, q: number): Relation {
-  const [from, to] = [localOf(shape, p), localOf(shape, q)];
-  return { kind: 'distance', p, q, length: Math.hypot(to.x - from.x, to.y - from.y) };
-}
-
-export function rigidOf(
-  shape: ReadonlyMap<number, Point>,
-  p: number,
-  a: number,
-  b: number,
-): Relation {
-  const [origin, end, at] = [localOf(shape, a), localOf(shape, b), localOf(shape, p)];
-  const [ux, uy] = [end.x - origin.x, end.y - origin.y];
-  const [wx, wy] = [at.x - origin.x, at.y - origin.y];
-  const squared = ux * ux + uy * uy;
-  return {
-    kind: 'rigid',
-    p,
-    a,
-    b,
-    along: (wx * ux + wy * uy) / squared,
-    across: (wy * ux - wx * uy) / squared,
-  };
-}
-
-export function localOf(shape: ReadonlyMap<number, Point>, p: number): Point {
-  return shape.get(p) ?? { x: 0, y: 0 };
 }
 
 function bodiesOf(linkage: Linkage, find: (name: string) => number): readonly Body[] {

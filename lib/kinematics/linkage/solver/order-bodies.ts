@@ -4,7 +4,7 @@ import {
   distanceOf,
   localOf,
   rigidOf,
-} from '@/lib/kinematics/linkage/solver/model';
+} from '@/lib/kinematics/linkage/solver/body';
 import { angleOf, lociOf, type Progress } from '@/lib/kinematics/linkage/solver/progress';
 
 /** A body about a known pivot, whose own groove must pass through a known point. */
@@ -50,7 +50,7 @@ export function aim({
     });
     for (const q of points) placed.add(q);
     if (body.driven && !turned.has(body))
-      checks.push(angleOf(body, body.driven.from, body.driven.to));
+      checks.push(angleOf(body, body.driven, body.driven.from, body.driven.to));
     joined.add(body);
     done.add(body);
     usedSlides.add(slide);
@@ -73,8 +73,7 @@ export function shift(progress: Progress): boolean {
     const two = held.find(({ p }) => one && !coincide(body.shape, one.p, p));
     if (!one || !two) continue;
     const distance = distanceOf(body.shape, one.p, two.p);
-    const angle = angleOf(body, one.p, two.p);
-    if (distance.kind !== 'distance' || angle.kind !== 'angle') continue;
+    const angle = angleOf(body, body.driven, one.p, two.p);
     steps.push({
       method: {
         kind: 'shift',

@@ -1,12 +1,6 @@
-import type { Relation } from '@/lib/kinematics/linkage/solver/linkage';
-import {
-  apartPair,
-  coincide,
-  distanceOf,
-  relationsOf,
-  rigidOf,
-  type Model,
-} from '@/lib/kinematics/linkage/solver/model';
+import { apartPair, coincide, distanceOf, rigidOf } from '@/lib/kinematics/linkage/solver/body';
+import type { Relation, Rigid } from '@/lib/kinematics/linkage/solver/linkage';
+import { relationsOf, type Model } from '@/lib/kinematics/linkage/solver/model';
 import { aim, shift } from '@/lib/kinematics/linkage/solver/order-bodies';
 import {
   angleOf,
@@ -91,12 +85,11 @@ function carry({ model, placed, joined, done, turned, steps, checks }: Progress)
     for (const p of body.points.filter((point) => point !== a && point !== b)) {
       const rigid = rigidOf(body.shape, p, a, b);
       if (placed.has(p)) checks.push(rigid);
-      else if (rigid.kind === 'rigid')
-        steps.push({ method: { kind: 'carry', rigid }, points: [p], relations: [rigid] });
+      else steps.push({ method: { kind: 'carry', rigid }, points: [p], relations: [rigid] });
       placed.add(p);
     }
     if (body.driven && !turned.has(body))
-      checks.push(angleOf(body, body.driven.from, body.driven.to));
+      checks.push(angleOf(body, body.driven, body.driven.from, body.driven.to));
     done.add(body);
     return true;
   }
@@ -110,7 +103,7 @@ function copy({ model, placed, done, steps }: Progress): boolean {
     for (const p of body.points) {
       const on = body.points.find((q) => placed.has(q) && coincide(body.shape, p, q));
       if (placed.has(p) || on === undefined) continue;
-      const rigid = { kind: 'rigid' as const, p, a: on, b: on, along: 0, across: 0 };
+      const rigid: Rigid = { kind: 'rigid', p, a: on, b: on, along: 0, across: 0 };
       steps.push({ method: { kind: 'carry', rigid }, points: [p], relations: [rigid] });
       placed.add(p);
       return true;
@@ -127,8 +120,7 @@ function turn({ model, placed, joined, done, turned, steps }: Progress): boolean
     const { from, to } = body.driven;
     const p = pivot === from ? to : from;
     const distance = distanceOf(body.shape, pivot, p);
-    const angle = angleOf(body, pivot, p);
-    if (distance.kind !== 'distance' || angle.kind !== 'angle') continue;
+    const angle = angleOf(body, body.driven, pivot, p);
     steps.push({
       method: { kind: 'turn', distance, angle, p },
       points: [p],
@@ -146,8 +138,8 @@ function turn({ model, placed, joined, done, turned, steps }: Progress): boolean
 function run({ model, placed, usedSlides, usedRuns, steps }: Progress): boolean {
   for (const [slide, drive] of model.runs) {
     const known = [slide.through, slide.from, slide.to].every((p) => placed.has(p));
+    if (!known || placed.has(slide.p)) continue;
     const reach = reachOf(slide, drive);
-    if (!known || placed.has(slide.p) || reach.kind !== 'reach') continue;
     steps.push({
       method: { kind: 'run', slide, reach },
       points: [slide.p],

@@ -1,9 +1,9 @@
-import { at } from '@/lib/numeric/at';
+import { at, givenAt, nth } from '@/lib/numeric/at';
 import { solveLinear } from '@/lib/numeric/linear';
 import type { Plan, Step } from '@/lib/kinematics/linkage/solver/plan';
 import type { Motion } from '@/lib/kinematics/linkage/solver/block';
 import { writeRelation } from '@/lib/kinematics/linkage/solver/relations';
-import { SLACK, takeStep, type Choice } from '@/lib/kinematics/linkage/solver/steps';
+import { PIVOT, SLACK, takeStep, type Choice } from '@/lib/kinematics/linkage/solver/steps';
 
 /**
  * Share of the linkage's size by which a dyad may fail to meet and still count as meeting: what
@@ -30,17 +30,15 @@ export function runSteps(
 ): void {
   const { model, steps, scratch } = plan;
   for (let k = 0; k < model.leads.length; k += 1) {
-    const lead = model.leads[k];
-    if (!lead) continue;
-    pose[2 * lead.point] = at(drive, lead.drive);
-    pose[2 * lead.point + 1] = at(drive, lead.drive + 1);
+    const lead = nth(model.leads, k);
+    pose[2 * lead.point] = givenAt(drive, lead.drive);
+    pose[2 * lead.point + 1] = givenAt(drive, lead.drive + 1);
   }
   const touch = -TOUCH_TOLERANCE * model.size;
   let least = Number.MAX_VALUE;
   let failed = -1;
   for (let k = 0; k < steps.length; k += 1) {
-    const step = steps[k];
-    if (!step) continue;
+    const step = nth(steps, k);
     const { method } = step;
     if (method.kind === 'solve') solveStep(plan, step, drive, pose);
     else takeStep(method, k, pose, drive, choice, scratch);
@@ -71,7 +69,8 @@ function solveStep(plan: Plan, step: Step, drive: ArrayLike<number>, pose: Float
   const motion = still(plan, pose, drive);
   let error = writeAll(step, motion);
   for (let turn = 0; turn < NEWTON_TURNS; turn += 1) {
-    if (solveLinear(block.matrix, block.right, 2 * points.length) === 0) {
+    solveLinear(block.matrix, block.right, 2 * points.length);
+    if (at(block.right, 2 * points.length) === 0) {
       plan.scratch[SLACK] = -Math.max(error, tolerance);
       return;
     }
@@ -94,8 +93,7 @@ function solveStep(plan: Plan, step: Step, drive: ArrayLike<number>, pose: Float
 function writeAll({ relations, block }: Step, motion: Motion): number {
   let row = 0;
   for (let k = 0; k < relations.length; k += 1) {
-    const relation = relations[k];
-    if (relation) row = writeRelation(relation, 0, motion, block, row);
+    row = writeRelation(nth(relations, k), 0, motion, block, row);
   }
   return largest(block.right, row);
 }
@@ -104,9 +102,7 @@ function writeAll({ relations, block }: Step, motion: Motion): number {
 function writeError({ checkBlock }: Plan, { relations }: Step, motion: Motion): number {
   let worst = 0;
   for (let k = 0; k < relations.length; k += 1) {
-    const relation = relations[k];
-    if (!relation) continue;
-    const rows = writeRelation(relation, 0, motion, checkBlock, 0);
+    const rows = writeRelation(nth(relations, k), 0, motion, checkBlock, 0);
     worst = Math.max(worst, largest(checkBlock.right, rows));
   }
   return worst;
@@ -116,7 +112,7 @@ function writeError({ checkBlock }: Plan, { relations }: Step, motion: Motion): 
 function movePoints({ points, block }: Step, pose: Float64Array, share: number): number {
   let most = 0;
   for (let k = 0; k < points.length; k += 1) {
-    const p = points[k] ?? 0;
+    const p = nth(points, k);
     const x = share * at(block.right, 2 * k);
     const y = share * at(block.right, 2 * k + 1);
     pose[2 * p] = at(pose, 2 * p) + x;
@@ -131,9 +127,7 @@ function checkAll(plan: Plan, drive: ArrayLike<number>, pose: Float64Array): num
   const motion = still(plan, pose, drive);
   let worst = 0;
   for (let k = 0; k < plan.checks.length; k += 1) {
-    const check = plan.checks[k];
-    if (!check) continue;
-    const rows = writeRelation(check, 0, motion, plan.checkBlock, 0);
+    const rows = writeRelation(nth(plan.checks, k), 0, motion, plan.checkBlock, 0);
     worst = Math.max(worst, largest(plan.checkBlock.right, rows));
   }
   return worst;
@@ -141,37 +135,39 @@ function checkAll(plan: Plan, drive: ArrayLike<number>, pose: Float64Array): num
 
 /**
  * Velocities or accelerations of all points, one step after another, in the pose as it stands.
- * Gives the smallest pivot met, near 0 at a dead centre; then the rates are not to be used.
+ * `pivotOf` then tells the smallest pivot met, near 0 at a dead centre, where the rates are not to
+ * be used.
  */
-export function runRates(plan: Plan, order: 1 | 2, motion: Motion, out: Float64Array): number {
-  const { model, steps } = plan;
+export function runRates(plan: Plan, order: 1 | 2, motion: Motion, out: Float64Array): void {
+  const { model, steps, scratch } = plan;
   out.fill(0);
   const source = order === 1 ? motion.speeds : motion.accelerations;
   for (let k = 0; k < model.leads.length; k += 1) {
-    const lead = model.leads[k];
-    if (!lead) continue;
-    out[2 * lead.point] = at(source, lead.drive);
-    out[2 * lead.point + 1] = at(source, lead.drive + 1);
+    const lead = nth(model.leads, k);
+    out[2 * lead.point] = givenAt(source, lead.drive);
+    out[2 * lead.point + 1] = givenAt(source, lead.drive + 1);
   }
   let pivot = 1;
   for (let k = 0; k < steps.length; k += 1) {
-    const step = steps[k];
-    if (!step) continue;
-    const { points, relations, block } = step;
+    const { points, relations, block } = nth(steps, k);
     let row = 0;
     for (let r = 0; r < relations.length; r += 1) {
-      const relation = relations[r];
-      if (relation) row = writeRelation(relation, order, motion, block, row);
+      row = writeRelation(nth(relations, r), order, motion, block, row);
     }
-    const found = solveLinear(block.matrix, block.right, 2 * points.length);
-    pivot = Math.min(pivot, found);
-    for (let c = 0; c < points.length && found > 0; c += 1) {
-      const p = points[c] ?? 0;
+    solveLinear(block.matrix, block.right, 2 * points.length);
+    pivot = Math.min(pivot, at(block.right, 2 * points.length));
+    for (let c = 0; c < points.length && pivot > 0; c += 1) {
+      const p = nth(points, c);
       out[2 * p] = at(block.right, 2 * c);
       out[2 * p + 1] = at(block.right, 2 * c + 1);
     }
   }
-  return pivot;
+  scratch[PIVOT] = pivot;
+}
+
+/** The smallest pivot that the last `runRates` of a plan met. */
+export function pivotOf({ scratch }: Plan): number {
+  return at(scratch, PIVOT);
 }
 
 /** The plan's own working motion, set to a pose and a drive; of the rates nothing is read. */

@@ -1,15 +1,11 @@
 import { equationsOf, type Linkage, type Relation } from '@/lib/kinematics/linkage/solver/linkage';
+import { driversOf } from '@/lib/kinematics/linkage/solver/drive';
 import { modelOf, type Model } from '@/lib/kinematics/linkage/solver/model';
 import { orderDyads } from '@/lib/kinematics/linkage/solver/order';
-import { blockFor, type Plan } from '@/lib/kinematics/linkage/solver/plan';
+import { blockFor } from '@/lib/kinematics/linkage/solver/block';
+import type { Plan } from '@/lib/kinematics/linkage/solver/plan';
 import type { OrderedStep } from '@/lib/kinematics/linkage/solver/progress';
-import {
-  driversOf,
-  freePoints,
-  geometryOf,
-  rankOf,
-  rowsOf,
-} from '@/lib/kinematics/linkage/solver/rank';
+import { freePoints, geometryOf, rankOf, rowsOf } from '@/lib/kinematics/linkage/solver/rank';
 import { SCRATCH_LENGTH } from '@/lib/kinematics/linkage/solver/steps';
 
 /** What planning a linkage came to. */

@@ -1,11 +1,13 @@
-import type { Relation, SlideRelation } from '@/lib/kinematics/linkage/solver/linkage';
-import type { Model } from '@/lib/kinematics/linkage/solver/model';
 import type { Block, Motion } from '@/lib/kinematics/linkage/solver/block';
-
-type Distance = Extract<Relation, { kind: 'distance' }>;
-type Angle = Extract<Relation, { kind: 'angle' }>;
-type Rigid = Extract<Relation, { kind: 'rigid' }>;
-type Reach = Extract<Relation, { kind: 'reach' }>;
+import type {
+  Angle,
+  Distance,
+  Reach,
+  Relation,
+  Rigid,
+  SlideRelation,
+} from '@/lib/kinematics/linkage/solver/linkage';
+import type { Model } from '@/lib/kinematics/linkage/solver/model';
 
 /** What settles one point beside another: the circle of a bar, or a groove. */
 export type Locus = Distance | SlideRelation;
@@ -76,19 +78,4 @@ export interface Plan {
     pose: Float64Array;
     drive: ArrayLike<number>;
   } & Pick<Motion, 'velocity' | 'acceleration' | 'speeds' | 'accelerations'>;
-}
-
-/** Working space for equations in the coordinates of some points. */
-export function blockFor(points: readonly number[], pointCount: number, rows: number): Block {
-  const columns = new Int32Array(pointCount).fill(-1);
-  points.forEach((p, k) => {
-    columns[p] = 2 * k;
-  });
-  const width = 2 * points.length;
-  return {
-    columns,
-    width,
-    matrix: new Float64Array(Math.max(rows, 1) * Math.max(width, 1)),
-    right: new Float64Array(Math.max(rows, 1)),
-  };
 }

@@ -1,11 +1,17 @@
-import type { Relation, SlideRelation } from '@/lib/kinematics/linkage/solver/linkage';
 import {
   apartPair,
   distanceOf,
   localOf,
   type Body,
-  type Model,
-} from '@/lib/kinematics/linkage/solver/model';
+  type DrivenWay,
+} from '@/lib/kinematics/linkage/solver/body';
+import type {
+  Angle,
+  Reach,
+  Relation,
+  SlideRelation,
+} from '@/lib/kinematics/linkage/solver/linkage';
+import type { Model } from '@/lib/kinematics/linkage/solver/model';
 import type { Locus, Method } from '@/lib/kinematics/linkage/solver/plan';
 
 /** A method with the points that it settles and the equations that it uses up. */
@@ -37,8 +43,7 @@ export function lociOf({ model, placed, joined, done, usedSlides }: Progress, p:
     const known = body.points.filter((q) => placed.has(q));
     const [q] = known;
     if (q === undefined || apartPair(body.shape, known)) continue;
-    const locus = distanceOf(body.shape, p, q);
-    if (locus.kind === 'distance') found.push({ locus, mark: () => joined.add(body) });
+    found.push({ locus: distanceOf(body.shape, p, q), mark: () => joined.add(body) });
   }
   for (const slide of model.slides) {
     if (usedSlides.has(slide)) continue;
@@ -52,12 +57,11 @@ export function lociOf({ model, placed, joined, done, usedSlides }: Progress, p:
 }
 
 /** The driven direction of a body, told for two of its points. */
-export function angleOf(body: Body, a: number, b: number): Relation {
+export function angleOf({ shape }: Body, driven: DrivenWay, a: number, b: number): Angle {
   const way = (from: number, to: number) => {
-    const [start, end] = [localOf(body.shape, from), localOf(body.shape, to)];
+    const [start, end] = [localOf(shape, from), localOf(shape, to)];
     return Math.atan2(end.y - start.y, end.x - start.x);
   };
-  const driven = body.driven ?? { from: a, to: b, drive: 0 };
   return {
     kind: 'angle',
     a,
@@ -67,6 +71,7 @@ export function angleOf(body: Body, a: number, b: number): Relation {
   };
 }
 
-export function reachOf({ p, through, from, to }: SlideRelation, drive: number): Relation {
+/** A driven slide: where along its groove the point is to stand. */
+export function reachOf({ p, through, from, to }: SlideRelation, drive: number): Reach {
   return { kind: 'reach', p, through, from, to, drive };
 }

@@ -2,8 +2,9 @@ import { at } from '@/lib/numeric/at';
 import { singularValues } from '@/lib/numeric/linear';
 import { RANK_TOLERANCE } from '@/lib/numeric/tolerance';
 import { equationsOf, type Relation } from '@/lib/kinematics/linkage/solver/linkage';
+import { driveOf } from '@/lib/kinematics/linkage/solver/drive';
 import { relationsOf, type Model } from '@/lib/kinematics/linkage/solver/model';
-import { blockFor } from '@/lib/kinematics/linkage/solver/plan';
+import { blockFor } from '@/lib/kinematics/linkage/solver/block';
 import { writeRelation } from '@/lib/kinematics/linkage/solver/relations';
 
 /** Rows of relations at the starting pose, over the coordinates of the given points. */
@@ -52,54 +53,4 @@ export function geometryOf(model: Model): readonly Relation[] {
     ...model.bodies.flatMap((body) => relationsOf({ ...body, driven: undefined })),
     ...model.slides,
   ];
-}
-
-/** The relations of the drivers, without points that are led. */
-export function driversOf(model: Model): readonly Relation[] {
-  const angles = new Map<number, Relation>();
-  for (const { driven } of model.bodies) {
-    if (driven) {
-      angles.set(driven.drive, {
-        kind: 'angle',
-        a: driven.from,
-        b: driven.to,
-        shift: 0,
-        drive: driven.drive,
-      });
-    }
-  }
-  const reaches = [...model.runs].map(([{ p, through, from, to }, drive]) => ({
-    kind: 'reach' as const,
-    p,
-    through,
-    from,
-    to,
-    drive,
-  }));
-  return [...angles.values(), ...reaches];
-}
-
-/** The drive as it reads in a pose: directions, ways along grooves, places of led points. */
-export function driveOf(model: Model, pose: ArrayLike<number>): Float64Array {
-  const drive = new Float64Array(model.driveLength);
-  const way = (from: number, to: number) => ({
-    x: at(pose, 2 * to) - at(pose, 2 * from),
-    y: at(pose, 2 * to + 1) - at(pose, 2 * from + 1),
-  });
-  for (const relation of driversOf(model)) {
-    if (relation.kind === 'angle') {
-      const { x, y } = way(relation.a, relation.b);
-      drive[relation.drive] = Math.atan2(y, x);
-    } else if (relation.kind === 'reach') {
-      const along = way(relation.from, relation.to);
-      const reached = way(relation.through, relation.p);
-      const long = Math.hypot(along.x, along.y);
-      drive[relation.drive] = long > 0 ? (along.x * reached.x + along.y * reached.y) / long : 0;
-    }
-  }
-  for (const { point, drive: place } of model.leads) {
-    drive[place] = at(pose, 2 * point);
-    drive[place + 1] = at(pose, 2 * point + 1);
-  }
-  return drive;
 }

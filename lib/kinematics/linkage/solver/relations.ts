@@ -1,15 +1,12 @@
-import { at } from '@/lib/numeric/at';
-import { lengthOf } from '@/lib/numeric/length';
+import { at, givenAt } from '@/lib/numeric/at';
 import {
-  addRight,
-  gap,
-  put,
+  fillRow,
   type Block,
   type Motion,
   type Order,
 } from '@/lib/kinematics/linkage/solver/block';
 import { writeGroove } from '@/lib/kinematics/linkage/solver/groove-relation';
-import type { Relation } from '@/lib/kinematics/linkage/solver/linkage';
+import type { Angle, Distance, Relation, Rigid } from '@/lib/kinematics/linkage/solver/linkage';
 
 /**
  * Write the row or rows of a relation, from `row` on, and the right-hand side of the wanted order;
@@ -25,11 +22,6 @@ export function writeRelation(
   block: Block,
   row: number,
 ): number {
-  for (let k = 0; k < block.width; k += 1) {
-    block.matrix[row * block.width + k] = 0;
-    if (relation.kind === 'rigid') block.matrix[(row + 1) * block.width + k] = 0;
-  }
-  block.right[row] = 0;
   switch (relation.kind) {
     case 'distance':
       return writeDistance(relation, order, motion, block, row);
@@ -44,79 +36,109 @@ export function writeRelation(
 
 /** |P − Q| = length. */
 function writeDistance(
-  { p, q, length }: Extract<Relation, { kind: 'distance' }>,
+  { p, q, length }: Distance,
   order: Order,
   motion: Motion,
   block: Block,
   row: number,
 ): number {
-  const x = gap(motion.pose, 0, q, p);
-  const y = gap(motion.pose, 1, q, p);
-  const long = lengthOf(x, y);
+  const { pose, velocity } = motion;
+  const { held, parts, right } = block;
+  const x = at(pose, 2 * p) - at(pose, 2 * q);
+  const y = at(pose, 2 * p + 1) - at(pose, 2 * q + 1);
+  const long = Math.sqrt(x * x + y * y);
   const ux = long > 0 ? x / long : 1;
   const uy = long > 0 ? y / long : 0;
-  put(block, motion, order, row, p, ux, uy);
-  put(block, motion, order, row, q, -ux, -uy);
-  if (order === 0) addRight(block, row, length - long);
+  held[0] = p;
+  held[1] = q;
+  parts[0] = ux;
+  parts[1] = uy;
+  parts[2] = -ux;
+  parts[3] = -uy;
+  fillRow(block, motion, order, row, 2);
+  if (order === 0) right[row] = length - long;
   if (order === 2 && long > 0) {
-    const vx = gap(motion.velocity, 0, q, p);
-    const vy = gap(motion.velocity, 1, q, p);
+    const vx = at(velocity, 2 * p) - at(velocity, 2 * q);
+    const vy = at(velocity, 2 * p + 1) - at(velocity, 2 * q + 1);
     const side = vy * ux - vx * uy;
-    addRight(block, row, -(side * side) / long);
+    right[row] = at(right, row) - (side * side) / long;
   }
   return row + 1;
 }
 
 /** P = A + along·(B − A) + across·(B − A turned left): linear, so every order reads alike. */
 function writeRigid(
-  { p, a, b, along, across }: Extract<Relation, { kind: 'rigid' }>,
+  { p, a, b, along, across }: Rigid,
   order: Order,
   motion: Motion,
   block: Block,
   row: number,
 ): number {
-  block.right[row + 1] = 0;
-  put(block, motion, order, row, p, 1, 0);
-  put(block, motion, order, row, a, along - 1, -across);
-  put(block, motion, order, row, b, -along, across);
-  put(block, motion, order, row + 1, p, 0, 1);
-  put(block, motion, order, row + 1, a, across, along - 1);
-  put(block, motion, order, row + 1, b, -across, -along);
+  const { held, parts, right } = block;
+  held[0] = p;
+  held[1] = a;
+  held[2] = b;
+  parts[0] = 1;
+  parts[1] = 0;
+  parts[2] = along - 1;
+  parts[3] = -across;
+  parts[4] = -along;
+  parts[5] = across;
+  fillRow(block, motion, order, row, 3);
+  parts[0] = 0;
+  parts[1] = 1;
+  parts[2] = across;
+  parts[3] = along - 1;
+  parts[4] = -across;
+  parts[5] = -along;
+  fillRow(block, motion, order, row + 1, 3);
   if (order === 0) {
     const { pose } = motion;
-    const ux = gap(pose, 0, a, b);
-    const uy = gap(pose, 1, a, b);
-    addRight(block, row, along * ux - across * uy - gap(pose, 0, a, p));
-    addRight(block, row + 1, along * uy + across * ux - gap(pose, 1, a, p));
+    const x = at(pose, 2 * a);
+    const y = at(pose, 2 * a + 1);
+    const ux = at(pose, 2 * b) - x;
+    const uy = at(pose, 2 * b + 1) - y;
+    right[row] = x + along * ux - across * uy - at(pose, 2 * p);
+    right[row + 1] = y + along * uy + across * ux - at(pose, 2 * p + 1);
   }
   return row + 2;
 }
 
 /** B − A has no part square to the driven direction. */
 function writeAngle(
-  { a, b, shift, drive }: Extract<Relation, { kind: 'angle' }>,
+  { a, b, shift, drive }: Angle,
   order: Order,
   motion: Motion,
   block: Block,
   row: number,
 ): number {
-  const angle = at(motion.drive, drive) + shift;
+  const { pose, velocity } = motion;
+  const { held, parts, right } = block;
+  const angle = givenAt(motion.drive, drive) + shift;
   const ux = Math.cos(angle);
   const uy = Math.sin(angle);
-  const x = gap(motion.pose, 0, a, b);
-  const y = gap(motion.pose, 1, a, b);
-  put(block, motion, order, row, b, -uy, ux);
-  put(block, motion, order, row, a, uy, -ux);
+  const x = at(pose, 2 * b) - at(pose, 2 * a);
+  const y = at(pose, 2 * b + 1) - at(pose, 2 * a + 1);
   const along = x * ux + y * uy;
   const off = y * ux - x * uy;
-  const speed = at(motion.speeds, drive);
-  if (order === 0) addRight(block, row, -off);
-  if (order === 1) addRight(block, row, speed * along);
+  held[0] = b;
+  held[1] = a;
+  parts[0] = -uy;
+  parts[1] = ux;
+  parts[2] = uy;
+  parts[3] = -ux;
+  fillRow(block, motion, order, row, 2);
+  const speed = givenAt(motion.speeds, drive);
+  if (order === 0) right[row] = -off;
+  if (order === 1) right[row] = at(right, row) + speed * along;
   if (order === 2) {
-    const vx = gap(motion.velocity, 0, a, b);
-    const vy = gap(motion.velocity, 1, a, b);
-    const outward = 2 * speed * (vx * ux + vy * uy);
-    addRight(block, row, outward + at(motion.accelerations, drive) * along + speed * speed * off);
+    const vx = at(velocity, 2 * b) - at(velocity, 2 * a);
+    const vy = at(velocity, 2 * b + 1) - at(velocity, 2 * a + 1);
+    right[row] =
+      at(right, row) +
+      2 * speed * (vx * ux + vy * uy) +
+      givenAt(motion.accelerations, drive) * along +
+      speed * speed * off;
   }
   return row + 1;
 }

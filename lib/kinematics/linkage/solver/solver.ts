@@ -1,8 +1,8 @@
-import { at } from '@/lib/numeric/at';
-import { requireMeasure } from '@/lib/numeric/moderate';
+import { at, givenAt, wholeAt } from '@/lib/numeric/at';
 import type { Point } from '@/lib/geometry/point';
 import { branchIn } from '@/lib/kinematics/linkage/solver/branch';
-import { runRates, runSteps, slackOf } from '@/lib/kinematics/linkage/solver/place';
+import { requireDrive } from '@/lib/kinematics/linkage/solver/drive';
+import { pivotOf, runRates, runSteps, slackOf } from '@/lib/kinematics/linkage/solver/place';
 import type { Plan } from '@/lib/kinematics/linkage/solver/plan';
 
 export type { Bar, Driver, Linkage, Plate, Slide } from '@/lib/kinematics/linkage/solver/linkage';
@@ -103,7 +103,7 @@ export function solveLinkage(
   const slack = slackOf(plan);
   const points = named(plan, pose);
   if (slack >= 0) return { outcome: 'closes', points, slack };
-  const step = plan.steps[at(report, 0)];
+  const step = plan.steps[wholeAt(report, 0)];
   const failing = (step?.points ?? []).map((p) => plan.model.names[p] ?? '');
   return { outcome: 'does-not-close', by: -slack, at: failing, points };
 }
@@ -142,8 +142,9 @@ export function moveLinkage(
   );
   const velocity = new Float64Array(pose.length);
   const acceleration = new Float64Array(pose.length);
-  const pivot = rateLinkage(plan, { pose, drive, speeds, accelerations, velocity, acceleration });
-  if (pivot < DEAD_CENTRE) return { outcome: 'dead-centre', points: placed.points };
+  if (!rateLinkage(plan, { pose, drive, speeds, accelerations, velocity, acceleration })) {
+    return { outcome: 'dead-centre', points: placed.points };
+  }
   return {
     outcome: 'moves',
     points: placed.points,
@@ -163,12 +164,14 @@ export interface RatedPose {
 }
 
 /**
- * Write velocity and acceleration of every point of a placed pose into the caller's arrays. Gives the
- * smallest scaled pivot of the equations: under 1e-9 is a dead centre, and the rates say nothing.
+ * Write velocity and acceleration of every point of a placed pose into the caller's arrays, without
+ * allocating. False at a dead centre, where the drive cannot say how the linkage moves on and the
+ * rates are not to be used.
  */
-export function rateLinkage(plan: Plan, rated: RatedPose): number {
-  const first = runRates(plan, 1, rated, rated.velocity);
-  return Math.min(first, runRates(plan, 2, rated, rated.acceleration));
+export function rateLinkage(plan: Plan, rated: RatedPose): boolean {
+  runRates(plan, 1, rated, rated.velocity);
+  runRates(plan, 2, rated, rated.acceleration);
+  return pivotOf(plan) >= DEAD_CENTRE;
 }
 
 /** The plan's own choice, set anew so that a step of an animation allocates nothing. */
@@ -184,17 +187,9 @@ function chosen(
 
 function named({ model }: Plan, values: ArrayLike<number>): NamedPoints {
   return Object.fromEntries(
-    model.names.map((name, k) => [name, { x: at(values, 2 * k), y: at(values, 2 * k + 1) }]),
+    model.names.map((name, k) => [
+      name,
+      { x: givenAt(values, 2 * k), y: givenAt(values, 2 * k + 1) },
+    ]),
   );
-}
-
-function requireDrive(caller: string, { model }: Plan, drive: ArrayLike<number>): void {
-  if (drive.length !== model.driveLength) {
-    throw new RangeError(
-      `${caller}: drive has ${drive.length} numbers; expected ${model.driveLength}`,
-    );
-  }
-  for (let k = 0; k < drive.length; k += 1) {
-    if (!(Math.abs(at(drive, k)) <= 1e60)) requireMeasure(caller, 'drive', at(drive, k));
-  }
 }

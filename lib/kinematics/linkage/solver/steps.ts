@@ -1,5 +1,4 @@
-import { at } from '@/lib/numeric/at';
-import { lengthOf } from '@/lib/numeric/length';
+import { at, givenAt, nth, wholeAt } from '@/lib/numeric/at';
 import {
   layLocus,
   meetCircles,
@@ -14,7 +13,9 @@ const SECOND = 4;
 const FOUND = 8;
 /** Where a step leaves its slack: returned numbers would be allocated. */
 export const SLACK = FOUND + 4;
-export const SCRATCH_LENGTH = SLACK + 1;
+/** Where the rates leave their smallest pivot. */
+export const PIVOT = SLACK + 1;
+export const SCRATCH_LENGTH = PIVOT + 1;
 
 /** How one of two assemblies is chosen: the sign of step `k`, or what lies nearest to `expected`. */
 export interface Choice {
@@ -43,7 +44,7 @@ export function takeStep(
       return takeCarry(method, pose);
     case 'turn': {
       const { distance, angle, p } = method;
-      const direction = at(drive, angle.drive) + angle.shift;
+      const direction = givenAt(drive, angle.drive) + angle.shift;
       pose[2 * p] = at(pose, 2 * angle.a) + distance.length * Math.cos(direction);
       pose[2 * p + 1] = at(pose, 2 * angle.a + 1) + distance.length * Math.sin(direction);
       return;
@@ -51,7 +52,7 @@ export function takeStep(
     case 'run': {
       const { slide, reach } = method;
       layLocus(slide, slide.p, pose, scratch, FIRST);
-      const along = at(drive, reach.drive);
+      const along = givenAt(drive, reach.drive);
       pose[2 * slide.p] = at(scratch, FIRST) + along * at(scratch, FIRST + 2);
       pose[2 * slide.p + 1] = at(scratch, FIRST + 1) + along * at(scratch, FIRST + 3);
       return;
@@ -96,7 +97,7 @@ function takeAim(
   const y = at(pose, 2 * pivot + 1);
   const dx = at(pose, 2 * target) - x;
   const dy = at(pose, 2 * target + 1) - y;
-  const away = lengthOf(dx, dy);
+  const away = Math.sqrt(dx * dx + dy * dy);
   const swing = away > 0 ? Math.acos(Math.min(Math.max(off / away, -1), 1)) : 0;
   const towards = Math.atan2(dy, dx);
   const lead = members[0];
@@ -108,12 +109,11 @@ function takeAim(
       ahead * (at(expected, 2 * lead.p + 1) - y) - aside * (at(expected, 2 * lead.p) - x);
     branch[k] = left >= 0 ? 1 : -1;
   }
-  const normal = towards + (at(branch, k) < 0 ? -swing : swing);
+  const normal = towards + (wholeAt(branch, k) < 0 ? -swing : swing);
   const cosine = Math.cos(normal);
   const sine = Math.sin(normal);
   for (let m = 0; m < members.length; m += 1) {
-    const member = members[m];
-    if (!member) continue;
+    const member = nth(members, m);
     pose[2 * member.p] = x + member.x * cosine - member.y * sine;
     pose[2 * member.p + 1] = y + member.x * sine + member.y * cosine;
   }
@@ -128,7 +128,7 @@ function takeShift(
   choice: Choice,
   scratch: Float64Array,
 ): void {
-  const direction = at(drive, angle.drive) + angle.shift;
+  const direction = givenAt(drive, angle.drive) + angle.shift;
   const dx = distance.length * Math.cos(direction);
   const dy = distance.length * Math.sin(direction);
   const circleSecond = first.kind === 'slide' && second.kind === 'distance';
@@ -162,11 +162,14 @@ function settle(
   if (expected) {
     const ex = at(expected, 2 * p);
     const ey = at(expected, 2 * p + 1);
-    const left = lengthOf(at(scratch, FOUND) - ex, at(scratch, FOUND + 1) - ey);
-    const right = lengthOf(at(scratch, FOUND + 2) - ex, at(scratch, FOUND + 3) - ey);
-    branch[k] = left <= right ? 1 : -1;
+    // Nearer to the left one: on its side of the middle of the two.
+    const lx = at(scratch, FOUND) - at(scratch, FOUND + 2);
+    const ly = at(scratch, FOUND + 1) - at(scratch, FOUND + 3);
+    const mx = (at(scratch, FOUND) + at(scratch, FOUND + 2)) / 2;
+    const my = (at(scratch, FOUND + 1) + at(scratch, FOUND + 3)) / 2;
+    branch[k] = lx * (ex - mx) + ly * (ey - my) >= 0 ? 1 : -1;
   }
-  const from = at(branch, k) < 0 ? FOUND + 2 : FOUND;
+  const from = wholeAt(branch, k) < 0 ? FOUND + 2 : FOUND;
   pose[2 * p] = at(scratch, from);
   pose[2 * p + 1] = at(scratch, from + 1);
 }
