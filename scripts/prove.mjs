@@ -17,7 +17,7 @@ const parts = {
     env: { HORNBEAM_SEEDS: '10000' },
   },
   inputs: {
-    what: 'A hundred thousand random inputs a function of the kinematics library',
+    what: 'A hundred thousand random inputs a module of the kinematics library',
     args: [...vitest, '--project', 'unit', 'tests/lib/kinematics', 'tests/reference'],
     env: { HORNBEAM_INPUTS: '100000' },
   },

@@ -6,6 +6,7 @@ import {
   distance,
   dot,
   perpendicular,
+  polar,
   subtract,
   type Point,
 } from '@/lib/geometry/point';
@@ -139,4 +140,24 @@ function unit(caller: string, along: Point): Point {
     throw new RangeError(`${caller}: along is ${along.x}, ${along.y}; expected a direction`);
   }
   return { x: along.x / length, y: along.y / length };
+}
+
+/** Points on the arcs of an outline: 3° apart at the most. */
+const arcStep = Math.PI / 60;
+
+/**
+ * Points on an arc from one angle to another, at most 3° apart, its ends among them; clockwise if
+ * the second angle is the smaller.
+ * @example arcPoints(2, 0, Math.PI / 60, { x: 1, y: 0 })[0] // → { x: 3, y: 0 }
+ */
+export function arcPoints(
+  radius: number,
+  from: number,
+  to: number,
+  centre: Point,
+): readonly Point[] {
+  const pieces = Math.max(2, Math.ceil(Math.abs(to - from) / arcStep));
+  return Array.from({ length: pieces + 1 }, (_, k) =>
+    polar(radius, from + ((to - from) * k) / pieces, centre),
+  );
 }

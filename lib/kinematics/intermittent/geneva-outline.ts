@@ -1,3 +1,4 @@
+import { arcPoints } from '@/lib/geometry/circle';
 import { type Point, polar, rotate } from '@/lib/geometry/point';
 import { finiteResult } from '@/lib/numeric/finite-result';
 import { requireNonNegative } from '@/lib/numeric/require';
@@ -10,9 +11,6 @@ export type GenevaOutline =
   | { readonly outcome: 'no-wood-at-arbor'; readonly by: number }
   /** Slot and hollow meet: a horn has no thickness. */
   | { readonly outcome: 'no-horn'; readonly by: number };
-
-/** Points on the arcs of an outline: 3° apart at the most. */
-const arcStep = Math.PI / 60;
 
 /**
  * The closed outline of an outside Geneva wheel, counter-clockwise, a slot on +x: slots as wide as
@@ -49,7 +47,7 @@ function stepOutline(make: GenevaMake, halfSlot: number, floorCentre: number): P
   const half = Math.PI / make.slots;
   const mouth = make.crank / Math.tan(half);
   const wallEnd = Math.sqrt(mouth - halfSlot) * Math.sqrt(mouth + halfSlot);
-  const floorArc = arc(halfSlot, -Math.PI / 2, -1.5 * Math.PI, { x: floorCentre, y: 0 });
+  const floorArc = arcPoints(halfSlot, -Math.PI / 2, -1.5 * Math.PI, { x: floorCentre, y: 0 });
   const centre = polar(make.crank / Math.sin(half), half);
   // the hollow's arc, cut by the circle of the mouths, about the crank's arbor
   const reach = hollowHalfAngle(make, mouth);
@@ -58,7 +56,7 @@ function stepOutline(make: GenevaMake, halfSlot: number, floorCentre: number): P
     { x: wallEnd, y: -halfSlot },
     ...floorArc,
     { x: wallEnd, y: halfSlot },
-    ...arc(make.lockRadius, towards + reach, towards - reach, centre),
+    ...arcPoints(make.lockRadius, towards + reach, towards - reach, centre),
   ];
 }
 
@@ -91,17 +89,10 @@ export function genevaLockOutline(make: GenevaMake): GenevaOutline {
   if (horn <= 0) return { outcome: 'no-horn', by: -horn };
   const open = Math.PI / 2 - half;
   const centre = { x: radius / Math.sin(half), y: 0 };
-  const hollow = arc(radius / Math.tan(half), Math.PI + half, Math.PI - half, centre);
-  const rim = arc(radius, open, 2 * Math.PI - open, { x: 0, y: 0 });
+  const hollow = arcPoints(radius / Math.tan(half), Math.PI + half, Math.PI - half, centre);
+  const rim = arcPoints(radius, open, 2 * Math.PI - open, { x: 0, y: 0 });
   return finiteResult('genevaLockOutline', {
     outcome: 'outlined',
     points: [...rim, ...hollow.slice(1, -1)],
   });
-}
-
-function arc(radius: number, from: number, to: number, centre: Point): Point[] {
-  const pieces = Math.max(2, Math.ceil(Math.abs(to - from) / arcStep));
-  return Array.from({ length: pieces + 1 }, (_, i) =>
-    polar(radius, from + ((to - from) * i) / pieces, centre),
-  );
 }

@@ -1,3 +1,4 @@
+import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import { equationsOf, type Linkage } from '@/lib/kinematics/linkage/solver/linkage';
 import { modelOf } from '@/lib/kinematics/linkage/solver/model';
 import { freePoints, geometryOf, rankOf, rowsOf } from '@/lib/kinematics/linkage/solver/rank';
@@ -37,18 +38,44 @@ export interface SpatialJoint {
   readonly axis: readonly [number, number, number];
 }
 
+/** How free a ring of joints is, and how much of that can be seen at the joints that matter. */
+export interface RingMobility {
+  readonly real: number;
+  /** Freedoms that move a joint that matters: the others are idle, such as a rod's own turning. */
+  readonly useful: number;
+}
+
 /**
  * Freedom of one closed ring of hinges and slides in space, first order: joints less the rank of
  * their screws. It tells the truth where the count does not (Sarrus, Bennett).
  *
+ * A ball is three hinges through one point, a rolling contact a hinge where it touches, a sliding
+ * one a hinge and a slide there. `mattering` are the places of the joints that matter, all if left
+ * out: what the others can do while those stand still is idle. Throws `RangeError` for an axis
+ * without a direction and a place that no joint has.
+ *
  * Source: R. S. Ball, A Treatise on the Theory of Screws, 1900.
- * @example ringFreedom([{ kind: 'hinge', at: [0, 0, 0], axis: [0, 0, 1] }, { kind: 'hinge', at: [1, 0, 0], axis: [0, 0, 1] }, { kind: 'hinge', at: [2, 1, 0], axis: [0, 0, 1] }, { kind: 'hinge', at: [0, 2, 0], axis: [0, 0, 1] }]) // → 1
+ * @example ringMobility([{ kind: 'hinge', at: [0, 0, 0], axis: [0, 0, 1] }, { kind: 'hinge', at: [1, 0, 0], axis: [0, 0, 1] }, { kind: 'hinge', at: [2, 1, 0], axis: [0, 0, 1] }, { kind: 'hinge', at: [0, 2, 0], axis: [0, 0, 1] }]) // → { real: 1, useful: 1 }
  */
-export function ringFreedom(joints: readonly SpatialJoint[]): number {
-  const screws = joints.map(({ kind, at: [px, py, pz], axis: [x, y, z] }) =>
-    kind === 'slide'
-      ? [0, 0, 0, x, y, z]
-      : [x, y, z, py * z - pz * y, pz * x - px * z, px * y - py * x],
-  );
-  return joints.length - rankOf(screws);
+export function ringMobility(
+  joints: readonly SpatialJoint[],
+  mattering: readonly number[] = [...joints.keys()],
+): RingMobility {
+  for (const place of mattering) {
+    if (!(place in joints)) {
+      throw new RangeError(`ringMobility: mattering is ${place}; expected the place of a joint`);
+    }
+  }
+  const others = joints.filter((_, k) => !mattering.includes(k));
+  const real = joints.length - rankOf(joints.map(screwOf));
+  const idle = others.length - rankOf(others.map(screwOf));
+  return { real, useful: real - idle };
+}
+
+function screwOf({ kind, at, axis }: SpatialJoint): readonly number[] {
+  const [px = 0, py = 0, pz = 0] = at.map((value) => requireMeasure('ringMobility', 'at', value));
+  const [x = 0, y = 0, z = 0] = axis.map((value) => requireMeasure('ringMobility', 'axis', value));
+  requireSize('ringMobility', 'length of the axis', Math.hypot(x, y, z));
+  if (kind === 'slide') return [0, 0, 0, x, y, z];
+  return [x, y, z, py * z - pz * y, pz * x - px * z, px * y - py * x];
 }

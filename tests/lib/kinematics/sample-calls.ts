@@ -64,6 +64,7 @@ export const moreCalls: readonly string[] = [
   `grooveLines(${groove}, 3, 12)`,
   `genevaWheelOutline(${geneva}, 0.3)`,
   `genevaLockOutline(${geneva})`,
+  `genevaTailOutline(${geneva})`,
   ...linkageCalls.map(([call]) => call),
   `couplerPointOf(fourBarPosition(${bars}, 1).open, { distance: 60, angle: 0.4 })`,
   `reachesOf('reachesOf', ${copier}, 'end-to-middle')`,

@@ -9,12 +9,8 @@ import {
 } from '@/lib/geometry/ellipse';
 import { counterCrank, counterRatios } from '@/lib/kinematics/linkage/antiparallelogram';
 import { scissorLift, tongsPose, tongsTravel } from '@/lib/kinematics/linkage/lazy-tongs';
-import {
-  knownCorrection,
-  planarMobility,
-  spatialMobility,
-  usefulMobility,
-} from '@/lib/kinematics/linkage/mobility';
+import { planarMobility, spatialMobility, usefulMobility } from '@/lib/kinematics/linkage/mobility';
+import { knownCorrection } from '@/lib/kinematics/linkage/paradoxes';
 import {
   pantographCopy,
   pantographDisplacement,
