@@ -42,7 +42,10 @@ describe('solveLinear', () => {
         solveLinear(Float64Array.from(matrix), x, 3);
         fc.pre(at(x, 3) > 1e-3);
         right.forEach((wanted, row) => {
-          const got = [0, 1, 2].reduce((sum, k) => sum + givenAt(matrix, 3 * row + k) * at(x, k), 0);
+          const got = [0, 1, 2].reduce(
+            (sum, k) => sum + givenAt(matrix, 3 * row + k) * at(x, k),
+            0,
+          );
           expect(got).toBeCloseTo(wanted, 7);
         });
       }),
