@@ -19,6 +19,17 @@ export function dateIn(timeZone: string, moment: Date): string {
 }
 
 /**
+ * The time that a clock in `timeZone` shows at `moment`, as `HH:MM`. Throws `RangeError` for an
+ * unknown time zone.
+ *
+ * @example timeIn('Europe/Berlin', new Date('2026-07-01T16:00:00Z')) // '18:00'
+ */
+export function timeIn(timeZone: string, moment: Date): string {
+  const { hour, minute } = wallClock(timeZone, moment);
+  return `${pad(hour)}:${pad(minute)}`;
+}
+
+/**
  * The moment at which a clock in `timeZone` shows `date` and `time` (`HH:MM`). A time that a
  * clock change skips is taken that much later; one that comes twice is the first of the two.
  * Throws `RangeError` for a malformed date, time or zone.

@@ -11,15 +11,24 @@ export type FormReading<Data> =
 
 /**
  * Reads a form with a strict schema; a field the schema does not name is refused. What was typed
- * comes back with the state, secrets left out.
+ * comes back with the state, secrets left out. The names in `lists` may come any number of times:
+ * the schema gets them as lists, and they come back in one string with blanks between.
  */
-export function readForm<Data>(form: FormData, schema: ZodType<Data>): FormReading<Data> {
+export function readForm<Data>(
+  form: FormData,
+  schema: ZodType<Data>,
+  lists: readonly string[] = [],
+): FormReading<Data> {
   const entries = [...form.entries()].filter(
     (entry): entry is [string, string] =>
       typeof entry[1] === 'string' && !entry[0].startsWith('$ACTION'),
   );
-  const typed = Object.fromEntries(entries);
-  const values = Object.fromEntries(entries.filter(([name]) => !secret.test(name)));
+  const several = lists.map((name) => [name, form.getAll(name).map(String)] as const);
+  const typed = { ...Object.fromEntries(entries), ...Object.fromEntries(several) };
+  const values = {
+    ...Object.fromEntries(entries.filter(([name]) => !secret.test(name))),
+    ...Object.fromEntries(several.map(([name, chosen]) => [name, chosen.join(' ')])),
+  };
   const result = schema.safeParse(typed);
   if (result.success) return { ok: true, data: result.data, values };
   const errors: Record<string, string> = {};

@@ -8,6 +8,7 @@ import type { RoundInPage } from '@/lib/browser/use-round';
 import { useWaitingAnswers } from '@/lib/browser/use-waiting-answers';
 import type { BenchSpec } from '@/lib/scene/bench-spec';
 import type { RoundView } from '@/lib/schemas/round';
+import { CountingNotice } from './counting-notice';
 import { GivensTable } from './givens-table';
 import { Help, Solution } from './help';
 import { MarkingNotice } from './marking-notice';
@@ -41,6 +42,7 @@ export function OpenRound({ personId, signInHref, page, round }: OpenRoundProps)
       )}
       <div role="status" aria-atomic="true">
         {latest === undefined || waiting ? null : <MarkingNotice attempt={latest} />}
+        {answering.state === 'idle' ? <CountingNotice counting={answering.counting ?? []} /> : null}
         <Delivery answering={answering} waiting={waiting} signInHref={signInHref} />
         {page.error === null ? null : <p className="mt-3 text-madder">{sentenceFor(page.error)}</p>}
       </div>

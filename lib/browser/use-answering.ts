@@ -2,7 +2,7 @@
 
 import { useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { useRef, useState } from 'react';
-import type { ExerciseResponse, RoundView } from '@/lib/schemas/round';
+import type { Counting, ExerciseResponse, RoundView } from '@/lib/schemas/round';
 import { sendAttempt } from './exercises';
 import { newKey } from './new-key';
 import { isSignedOut, NetworkAway, sentenceFor } from './problem';
@@ -11,7 +11,8 @@ import { keepAnswer, type WaitingAnswer } from './waiting-answers';
 
 /** What became of the answer that was last sent from this page. */
 export type Answering =
-  | { readonly state: 'idle' }
+  /** Nothing is on its way; `counting` says what the last one counted for. */
+  | { readonly state: 'idle'; readonly counting?: readonly Counting[] }
   | { readonly state: 'sending' }
   /** Kept on this device: the network is away, or the session has ended. */
   | { readonly state: 'kept'; readonly because: 'network' | 'session' }
@@ -40,9 +41,10 @@ export function useAnswering(
     const givenAt = new Date().toISOString();
     const request = { roundId: round.roundId, response, answeredAt: givenAt };
     try {
-      rememberReply(client, personId, await sendAttempt(request, key));
+      const reply = await sendAttempt(request, key);
+      rememberReply(client, personId, reply);
       lastKey.current = null;
-      setAnswering({ state: 'idle' });
+      setAnswering({ state: 'idle', counting: reply.counting });
     } catch (error) {
       const { exerciseId, title } = round;
       const answer = { key, personId, exerciseId, title, request, givenAt };

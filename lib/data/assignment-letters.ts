@@ -64,7 +64,7 @@ interface LearnerRow {
 }
 
 const learnersSql = `
-  select p.id as "personId", l.id as "learnerId", p.email, coalesce(e.due_at, a.due_at) as "dueAt"
+  select p.id as "personId", l.id as "learnerId", p.email, greatest(a.due_at, e.due_at) as "dueAt"
   from assignments a
   join memberships m on m.class_id = a.class_id and m.role = 'learner' and m.left_at is null
   join people p on p.id = m.person_id and p.disabled_at is null and p.erased_at is null

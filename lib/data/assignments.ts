@@ -1,50 +1,49 @@
 import 'server-only';
-import { exercises, lessons } from '@/content/exercises/registry';
-import { momentIn, now as presentTime } from '@/lib/clock';
+import type { Transaction } from 'sequelize';
+import { now as presentTime } from '@/lib/clock';
 import { row, rows, transact } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
 import { models } from '@/models';
+import { queueAssignmentLetters } from './assignment-letters';
+import { itemsOf, type Chosen } from './assignment-items';
 import { recordAudit } from './audit';
-import { isId, staffOfClass, staffValues } from './class-right';
-import { exerciseTitle, lessonName } from './lesson-titles';
+import { isId, staffOfOpenClass, staffValues } from './class-right';
+import { classMoment, openingMoment } from './class-time';
 
-/** Work to be set to a class. */
-export interface NewAssignment {
-  /** Lessons, each of which is set as all of its exercises. */
-  readonly lessons: readonly string[];
-  /** Single exercises beside them. */
-  readonly exercises: readonly string[];
-  /** The date by which it is due, in the class's time zone. */
+/** Work to be set to a class. Days and times are those of the clock of the class. */
+export interface NewAssignment extends Chosen {
+  /** To whom of the class, by their learner's key; to everybody when left out or null. */
+  readonly learners?: readonly string[] | null;
+  /** From when on; at once when left out or empty. */
+  readonly opensOn?: string;
+  readonly opensTime?: string;
   readonly dueOn: string;
-  /** The time on that date; the last minute of it unless said otherwise. */
+  /** The end of the day unless said otherwise. */
   readonly dueTime?: string;
+  /** How many attempts count for each exercise; any number when left out or null. */
+  readonly attemptsAllowed?: number | null;
+  /** Which attempt stands for the exercise. */
+  readonly counting?: 'best' | 'latest';
+  /** Whether what comes late counts and is marked late, or does not count. */
+  readonly lateWork?: 'marked' | 'closed';
   readonly note?: string;
+  /** Whether everybody concerned is written to; they are unless said otherwise. */
+  readonly tell?: boolean;
 }
 
 /** What setting work comes to. */
 export type AssignmentCreated =
-  | { readonly outcome: 'set'; readonly assignmentId: string }
-  | { readonly outcome: 'nothing chosen' }
-  | { readonly outcome: 'due in the past' }
-  | { readonly outcome: 'no such class' };
+  | { readonly outcome: 'set'; readonly assignmentId: string; readonly dueAt: string }
+  | { readonly outcome: AssignmentFault | 'no such class' };
 
-/** Work that is set to a class. */
-export interface AssignmentListed {
-  readonly assignmentId: string;
-  readonly dueAt: string;
-  readonly note: string;
-  readonly setBy: string;
-  readonly lessons: readonly { readonly lessonId: string; readonly title: string }[];
-  /** Exercises set by themselves, not as part of a lesson. */
-  readonly exercises: readonly { readonly exerciseId: string; readonly title: string }[];
-  /** How many learners have a right counted attempt at every exercise of it, of how many. */
-  readonly done: number;
-  readonly learners: number;
-}
+/** What is wrong with the rules of an assignment. */
+export type AssignmentFault =
+  'nothing chosen' | 'nobody chosen' | 'due in the past' | 'due before it opens';
 
 /**
- * Sets lessons and exercises to a class, by one of its instructors or the administrator. What is
- * not there, or is named twice, is left out. Throws `RangeError` for a malformed date.
+ * Sets lessons and exercises to a class or to some of its learners, by one of its instructors or the
+ * administrator. What is not there, or is named twice, is left out. Throws `RangeError` for a
+ * malformed day or time.
  */
 export async function createAssignment(
   viewer: Viewer,
@@ -57,62 +56,35 @@ export async function createAssignment(
   if (items.length === 0) return { outcome: 'nothing chosen' };
   return transact(async (transaction) => {
     const found = await row<{ timeZone: string }>(
-      `select g.time_zone as "timeZone" from class_groups g
-       where ${staffOfClass} and g.archived_at is null`,
+      `select g.time_zone as "timeZone" from class_groups g where ${staffOfOpenClass} for share`,
       staffValues(viewer, classId),
       transaction,
     );
     if (found === null) return { outcome: 'no such class' } as const;
-    const dueAt = dueMoment(found.timeZone, wanted);
+    const opensAt = opening(found.timeZone, wanted, now);
+    const dueAt = classMoment(found.timeZone, { on: wanted.dueOn, time: wanted.dueTime ?? '' });
     if (dueAt <= now) return { outcome: 'due in the past' } as const;
-    const { Assignment, AssignmentItem } = models();
-    const made = await Assignment.create(
+    if (dueAt <= opensAt) return { outcome: 'due before it opens' } as const;
+    const chosen = await learnersInClass(classId, wanted.learners ?? null, transaction);
+    if (chosen?.length === 0) return { outcome: 'nobody chosen' } as const;
+    const made = await models().Assignment.create(
       {
+        ...rulesOf(wanted),
         classId,
-        note: wanted.note?.trim() ?? '',
-        opensAt: now,
+        forChosenLearners: chosen !== null,
+        opensAt,
         dueAt,
         setBy: viewer.personId,
         createdAt: now,
       },
       { transaction },
     );
-    await AssignmentItem.bulkCreate(
-      items.map((item, position) => ({ ...item, position, assignmentId: made.id })),
-      { transaction },
-    );
-    await recordAudit(
-      {
-        actorId: viewer.personId,
-        action: 'work set',
-        objectKind: 'assignment',
-        objectId: made.id,
-        classId,
-      },
-      transaction,
-    );
-    return { outcome: 'set', assignmentId: made.id } as const;
+    await writeItems(made.id, items, transaction);
+    await writeLearners(made.id, chosen ?? [], transaction);
+    await recordAudit(aboutWork(viewer, classId, made.id, 'work set'), transaction);
+    if (wanted.tell !== false) await queueAssignmentLetters(transaction, made.id);
+    return { outcome: 'set', assignmentId: made.id, dueAt: dueAt.toISOString() } as const;
   });
-}
-
-/** What is set to a class, the next due first; nothing for anybody but its staff. */
-export async function listAssignments(
-  viewer: Viewer,
-  classId: string,
-): Promise<AssignmentListed[]> {
-  if (!isId(classId)) return [];
-  const found = await rows<AssignmentRow>(listSql, staffValues(viewer, classId));
-  return found.map(({ items, dueAt, ...rest }) => ({
-    ...rest,
-    dueAt: dueAt.toISOString(),
-    lessons: [...new Set(items.flatMap(({ lessonId }) => lessonId ?? []))].map((lessonId) => ({
-      lessonId,
-      title: lessonName(lessonId).title,
-    })),
-    exercises: items.flatMap(({ lessonId, exerciseId }) =>
-      lessonId === null ? [{ exerciseId, title: exerciseTitle(exerciseId) }] : [],
-    ),
-  }));
 }
 
 /** Takes back what was set; what was done for it is kept. False when that cannot be done. */
@@ -127,74 +99,102 @@ export async function withdrawAssignment(
     const withdrawn = await row(
       `update assignments a set withdrawn_at = $5, updated_at = $5, version = a.version + 1
        from class_groups g
-       where a.id = $4 and a.class_id = g.id and a.withdrawn_at is null and ${staffOfClass}
+       where a.id = $4 and a.class_id = g.id and a.withdrawn_at is null and ${staffOfOpenClass}
        returning a.id`,
       [...staffValues(viewer, classId), assignmentId, now],
       transaction,
     );
     if (withdrawn === null) return false;
-    await recordAudit(
-      {
-        actorId: viewer.personId,
-        action: 'work withdrawn',
-        objectKind: 'assignment',
-        objectId: assignmentId,
-        classId,
-      },
-      transaction,
-    );
+    await recordAudit(aboutWork(viewer, classId, assignmentId, 'work withdrawn'), transaction);
     return true;
   });
 }
 
-interface Item {
-  readonly lessonId: string | null;
-  readonly exerciseId: string;
+/** The moment from which on it is open; one that is there already stays when it reads the same. */
+export function opening(timeZone: string, wanted: NewAssignment, now: Date, kept?: Date): Date {
+  if (!wanted.opensOn) return kept !== undefined && kept < now ? kept : now;
+  return openingMoment(timeZone, { on: wanted.opensOn, time: wanted.opensTime ?? '' }, kept);
 }
 
-function itemsOf(wanted: NewAssignment): Item[] {
-  const byLesson = wanted.lessons.flatMap((lessonId) =>
-    (lessons.find(({ id }) => id === lessonId)?.exercises ?? []).map((exerciseId) => ({
-      lessonId,
-      exerciseId,
-    })),
+/** The rules that are kept as they are said. */
+export function rulesOf({ note, attemptsAllowed, counting, lateWork }: NewAssignment) {
+  return {
+    note: note?.trim() ?? '',
+    attemptsAllowed: attemptsAllowed ?? null,
+    counting: counting ?? 'best',
+    lateWork: lateWork ?? 'marked',
+  } as const;
+}
+
+/** Those of the chosen who learn in the class now; null when it is for everybody. */
+export async function learnersInClass(
+  classId: string,
+  wanted: readonly string[] | null,
+  transaction: Transaction,
+): Promise<string[] | null> {
+  if (wanted === null) return null;
+  const found = await rows<{ learnerId: string }>(
+    `select l.id as "learnerId" from memberships m join learners l on l.person_id = m.person_id
+     where m.class_id = $1 and m.role = 'learner' and m.left_at is null and l.id = any($2::uuid[])`,
+    [classId, wanted.filter(isId)],
+    transaction,
   );
-  const alone = wanted.exercises.map((exerciseId) => ({ lessonId: null, exerciseId }));
-  const once = new Map<string, Item>();
-  for (const item of [...byLesson, ...alone]) {
-    const definition = exercises.get(item.exerciseId);
-    const settable = definition !== undefined && definition.kind !== 'prediction';
-    if (settable && !once.has(item.exerciseId)) once.set(item.exerciseId, item);
-  }
-  return [...once.values()];
+  return found.map(({ learnerId }) => learnerId);
 }
 
-/** The end of the day, when no time is given, is the first moment that is no longer in it. */
-function dueMoment(timeZone: string, { dueOn, dueTime }: NewAssignment): Date {
-  return dueTime === undefined
-    ? new Date(momentIn(timeZone, dueOn, '23:59').getTime() + 60_000)
-    : momentIn(timeZone, dueOn, dueTime);
+/** Writes the exercises of an assignment that are not in it yet, and the order of all of them. */
+export async function writeItems(
+  assignmentId: string,
+  items: ReturnType<typeof itemsOf>,
+  transaction: Transaction,
+): Promise<void> {
+  await rows(
+    `insert into assignment_items (assignment_id, position, lesson_id, exercise_id)
+     select $1, i.position, i.lesson_id, i.exercise_id
+     from jsonb_to_recordset($2::jsonb) i (position int, lesson_id text, exercise_id text)
+     on conflict (assignment_id, exercise_id)
+       do update set position = excluded.position, lesson_id = excluded.lesson_id
+     returning id`,
+    [
+      assignmentId,
+      JSON.stringify(
+        items.map(({ lessonId, exerciseId }, position) => ({
+          position,
+          lesson_id: lessonId,
+          exercise_id: exerciseId,
+        })),
+      ),
+    ],
+    transaction,
+  );
 }
 
-interface AssignmentRow extends Omit<AssignmentListed, 'dueAt' | 'lessons' | 'exercises'> {
-  readonly dueAt: Date;
-  readonly items: readonly Item[];
+/** Writes for whom an assignment is, when it is not for everybody. */
+export async function writeLearners(
+  assignmentId: string,
+  learners: readonly string[],
+  transaction: Transaction,
+): Promise<void> {
+  await rows(
+    `insert into assignment_learners (assignment_id, learner_id)
+     select $1, unnest($2::uuid[]) on conflict do nothing returning learner_id`,
+    [assignmentId, [...learners]],
+    transaction,
+  );
 }
 
-const listSql = `
-  select a.id as "assignmentId", a.due_at as "dueAt", a.note, setter.name as "setBy",
-    (select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
-      order by i.position) from assignment_items i where i.assignment_id = a.id) as items,
-    (select count(*)::int from memberships m
-      where m.class_id = g.id and m.role = 'learner' and m.left_at is null) as learners,
-    (select count(*)::int from memberships m join learners l on l.person_id = m.person_id
-      where m.class_id = g.id and m.role = 'learner' and m.left_at is null
-        and not exists (
-          select 1 from assignment_items i where i.assignment_id = a.id and not exists (
-            select 1 from counted_attempts c join attempts t on t.id = c.attempt_id
-            where c.item_id = i.id and c.learner_id = l.id and t.verdict = 'right'))) as done
-  from class_groups g
-  join assignments a on a.class_id = g.id and a.withdrawn_at is null
-  join people setter on setter.id = a.set_by
-  where ${staffOfClass}
-  order by a.due_at, a.id`;
+/** A line of the audit log about work that is set. */
+export function aboutWork(
+  viewer: Viewer,
+  classId: string,
+  assignmentId: string,
+  action: 'work set' | 'work changed' | 'work withdrawn',
+) {
+  return {
+    actorId: viewer.personId,
+    action,
+    objectKind: 'assignment',
+    objectId: assignmentId,
+    classId,
+  } as const;
+}

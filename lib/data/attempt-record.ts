@@ -82,14 +82,15 @@ export interface AttemptRecord {
 /**
  * Keeps an attempt with its marking, closes the round, notes what it showed of each skill, counts
  * it for every assignment open to the learner, and remembers the answer for the request's key: one
- * statement, so that all of it is there or none. False when the round was closed meanwhile. Throws
- * a unique violation when the key, or a number of a counted attempt, was taken meanwhile.
+ * statement, so that all of it is there or none. Answers what it counts for and what not; null when
+ * the round was closed meanwhile. Throws a unique violation when the key, or a number of a counted
+ * attempt, was taken meanwhile.
  */
 export async function insertAttempt(
   record: AttemptRecord,
   transaction?: Transaction,
-): Promise<boolean> {
-  const kept = await row<{ id: string }>(
+): Promise<AttemptReply['counting'] | null> {
+  const kept = await row<{ counting: AttemptReply['counting'] }>(
     insertAttemptSql,
     [
       record.attemptId,
@@ -112,7 +113,7 @@ export async function insertAttempt(
     ],
     transaction,
   );
-  return kept !== null;
+  return kept?.counting ?? null;
 }
 
 const insertAttemptSql = `
@@ -136,31 +137,42 @@ const insertAttemptSql = `
       (select count(*) + 1 from attempts before where before.round_id = $2)
     from kept, jsonb_to_recordset($16::jsonb) as f (skill text, "right" boolean, unaided boolean)
     returning skill
+  ), asked as (
+    select i.id as item_id, g.name as class_name, a.attempts_allowed,
+      greatest(a.due_at, e.due_at) as due_at, taken.n as taken,
+      case
+        when a.late_work = 'closed' and $12 > greatest(a.due_at, e.due_at) then 'closed'
+        when taken.n >= a.attempts_allowed then 'none left'
+        else 'counted'
+      end as outcome
+    from kept
+    join assignment_items i on i.exercise_id = kept.exercise_id
+    join assignments a on a.id = i.assignment_id and a.opens_at <= $12 and a.withdrawn_at is null
+    join class_groups g on g.id = a.class_id and g.archived_at is null
+    join memberships m on m.class_id = a.class_id and m.role = 'learner' and m.left_at is null
+    join learners l on l.person_id = m.person_id and l.id = kept.learner_id
+    left join extensions e on e.assignment_id = a.id and e.learner_id = kept.learner_id
+    cross join lateral (
+      select coalesce(max(c.n), 0) as n from counted_attempts c
+      where c.item_id = i.id and c.learner_id = kept.learner_id) taken
+    where $17::boolean and (not a.for_chosen_learners or exists (
+      select 1 from assignment_learners x
+      where x.assignment_id = a.id and x.learner_id = kept.learner_id))
   ), counted as (
     insert into counted_attempts (item_id, learner_id, n, attempt_id, late)
-    select open_item.id, kept.learner_id, open_item.taken + 1, kept.id, $12 > open_item.due_at
-    from kept, lateral (
-      select i.id, coalesce(e.due_at, a.due_at) as due_at, a.late_work, a.attempts_allowed, (
-        select coalesce(max(c.n), 0) from counted_attempts c
-        where c.item_id = i.id and c.learner_id = kept.learner_id) as taken
-      from assignment_items i
-      join assignments a on a.id = i.assignment_id
-      join class_groups g on g.id = a.class_id
-      join memberships m on m.class_id = a.class_id and m.role = 'learner' and m.left_at is null
-      join learners l on l.person_id = m.person_id and l.id = kept.learner_id
-      left join extensions e on e.assignment_id = a.id and e.learner_id = kept.learner_id
-      where i.exercise_id = kept.exercise_id and a.opens_at <= $12 and a.withdrawn_at is null
-        and g.archived_at is null and (not a.for_chosen_learners or exists (
-          select 1 from assignment_learners x
-          where x.assignment_id = a.id and x.learner_id = kept.learner_id))
-    ) open_item
-    where $17::boolean
-      and (open_item.late_work = 'marked' or $12 <= open_item.due_at)
-      and (open_item.attempts_allowed is null or open_item.taken < open_item.attempts_allowed)
+    select asked.item_id, kept.learner_id, asked.taken + 1, kept.id, $12 > asked.due_at
+    from asked, kept where asked.outcome = 'counted'
     returning n
+  ), told as (
+    select coalesce(jsonb_agg(jsonb_build_object(
+      'className', class_name, 'outcome', outcome, 'allowed', attempts_allowed,
+      'n', case outcome when 'counted' then taken + 1 else taken end, 'late', $12 > due_at)
+      order by due_at, item_id), '[]') as counting
+    from asked
   ), remembered as (
     insert into request_keys (learner_id, key, body_hash, attempt_id, answer, created_at)
-    select learner_id, $13, $14, id, $15::jsonb, $12 from kept
+    select learner_id, $13, $14, id, $15::jsonb || jsonb_build_object('counting', told.counting), $12
+    from kept, told
     returning key
   )
-  select id from kept`;
+  select kept.id, told.counting from kept, told`;

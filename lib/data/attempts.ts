@@ -1,6 +1,6 @@
 import 'server-only';
 import { createHash, randomUUID } from 'node:crypto';
-import { UniqueConstraintError, type Transaction } from 'sequelize';
+import { ForeignKeyConstraintError, UniqueConstraintError, type Transaction } from 'sequelize';
 import { exercises } from '@/content/exercises/registry';
 import { now as presentTime } from '@/lib/clock';
 import { rows, transact } from '@/lib/db/query';
@@ -69,7 +69,10 @@ async function unlessTaken<Result>(work: () => Promise<Result>): Promise<Result 
   try {
     return await work();
   } catch (error) {
-    if (error instanceof UniqueConstraintError) return taken;
+    // A foreign key fails where an exercise was taken out of an assignment at this very moment.
+    if (error instanceof UniqueConstraintError || error instanceof ForeignKeyConstraintError) {
+      return taken;
+    }
     throw error;
   }
 }
@@ -100,7 +103,7 @@ async function tryAttempt(
   if (marking.outcome === 'refused') return marking;
   const { outcome: _marked, ...kept } = marking;
   const made = compose(viewer, definition, record, kept, rounds, now);
-  const inserted = await insertAttempt(
+  const counting = await insertAttempt(
     {
       ...made,
       roundId: record.roundId,
@@ -117,12 +120,14 @@ async function tryAttempt(
     },
     transaction,
   );
-  return inserted
-    ? { outcome: 'kept', reply: made.answer, repeated: false }
-    : { outcome: 'round closed' };
+  return counting === null
+    ? { outcome: 'round closed' }
+    : { outcome: 'kept', reply: { ...made.answer, counting }, repeated: false };
 }
 
-type Composed = Pick<AttemptRecord, 'attemptId' | 'unaided' | 'facts'> & { answer: AttemptReply };
+type Composed = Pick<AttemptRecord, 'attemptId' | 'unaided' | 'facts'> & {
+  answer: Omit<AttemptReply, 'counting'>;
+};
 
 /** What the attempt will have made of the round and of the pegs, once it is kept. */
 function compose(

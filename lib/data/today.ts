@@ -118,7 +118,7 @@ interface SetRow {
 const setSql = `
   select * from (
     select a.id as "assignmentId", g.id as "classId", g.name as "className", a.note,
-      coalesce(e.due_at, a.due_at) as "dueAt", g.time_zone as "timeZone",
+      greatest(a.due_at, e.due_at) as "dueAt", g.time_zone as "timeZone",
       (select json_agg(json_build_object('exerciseId', i.exercise_id, 'lessonId', i.lesson_id,
           'mark', coalesce((
             select t.verdict from counted_attempts c join attempts t on t.id = c.attempt_id

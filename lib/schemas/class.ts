@@ -29,11 +29,3 @@ export const newMemberSchema = z.strictObject({
 export const takeOutSchema = z.strictObject({
   evenTheLast: z.enum(['yes', 'no']).transform((said) => said === 'yes'),
 });
-
-/** A lesson set to a class: the date and time are those of the clock on the class's wall. */
-export const newAssignmentSchema = z.strictObject({
-  lessonId: z.string().regex(/^[a-z0-9-]{1,60}$/, 'Choose a lesson from the list.'),
-  dueOn: z.iso.date('Choose a day; it looks like 2026-12-08.'),
-  dueTime: z.iso.time({ precision: -1, error: 'Choose a time; it looks like 18:30.' }),
-  note: z.string().trim().max(500, 'A note may have 500 characters at most.'),
-});

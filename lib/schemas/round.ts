@@ -198,10 +198,24 @@ export const attemptRequestSchema = z.strictObject({
 });
 export type AttemptRequest = z.infer<typeof attemptRequestSchema>;
 
+/** Whether an attempt counts for work that is set: as which of how many, or why not. */
+export const countingSchema = z.strictObject({
+  className: z.string(),
+  outcome: z.enum(['counted', 'none left', 'closed']),
+  /** Attempts that count so far, this one among them if it does. */
+  n: z.number(),
+  /** How many may count; null for any number. */
+  allowed: z.nullable(z.number()),
+  late: z.boolean(),
+});
+export type Counting = z.infer<typeof countingSchema>;
+
 /** What comes back for an attempt. */
 export const attemptReplySchema = z.strictObject({
   attempt: attemptViewSchema,
   round: roundViewSchema,
   pegs: z.array(pegViewSchema),
+  /** One line for each assignment that asks for the exercise. */
+  counting: z.array(countingSchema),
 });
 export type AttemptReply = z.infer<typeof attemptReplySchema>;

@@ -88,6 +88,18 @@ export const screens: readonly Screen[] = [
     prepare: inTurn(firstClass, follow(new RegExp(`/${section}$`))),
   })),
   {
+    name: 'class-set-work',
+    path: '/classes',
+    by: ['instructor'],
+    prepare: inTurn(firstClass, follow(/\/work$/), follow(/\/work\/new$/)),
+  },
+  {
+    name: 'class-change-work',
+    path: '/classes',
+    by: ['instructor'],
+    prepare: inTurn(firstClass, follow(/\/work$/), follow(/\/work\/[0-9a-f-]{36}$/)),
+  },
+  {
     name: 'learner-in-class',
     path: '/classes',
     by: ['instructor'],

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { dateIn, isTimeZone, momentIn } from '@/lib/clock';
+import { dateIn, isTimeZone, momentIn, timeIn } from '@/lib/clock';
 
 describe('dateIn', () => {
   it('gives the date that the wall calendar shows', () => {
@@ -36,6 +36,14 @@ describe('momentIn', () => {
 
   it('refuses a malformed date', () => {
     expect(() => momentIn('Europe/Berlin', '2026-3-1', '18:00')).toThrow(RangeError);
+  });
+});
+
+describe('timeIn', () => {
+  it('gives what the clock on the wall shows, midnight as 00:00', () => {
+    expect(timeIn('Europe/Berlin', new Date('2026-07-01T16:00:00Z'))).toBe('18:00');
+    expect(timeIn('Europe/Berlin', new Date('2026-03-29T01:30:00Z'))).toBe('03:30');
+    expect(timeIn('Asia/Kolkata', new Date('2026-12-07T18:30:00Z'))).toBe('00:00');
   });
 });
 

@@ -10,15 +10,60 @@ const bound = ({ classId }: Planted) => [classId];
 const byStaff = only<ActionOutcome>(staffOfTheClass, 'done', 'refused', 'sign in');
 const byAdministrator = only<ActionOutcome>([], 'refused', 'refused', 'sign in');
 
+const workForm = ({ dueOn }: Planted) => ({
+  exercise: 'pins-for-an-oval',
+  for: 'everybody',
+  opensOn: '',
+  opensTime: '',
+  dueOn,
+  dueTime: '18:30',
+  attemptsAllowed: '',
+  counting: 'best',
+  lateWork: 'marked',
+  note: '',
+  version: '0',
+});
+
 /** Every server action of a class's own pages. */
 export const classActions: readonly ActionRow[] = [
   {
     kind: 'action',
     file: 'app/classes/[id]/work/actions.ts',
-    name: 'setLesson',
-    on: page('work'),
+    name: 'setWork',
+    on: page('work/new'),
     bound,
-    form: ({ dueOn }) => ({ lessonId: 'trammel-and-oval', dueOn, dueTime: '18:30', note: '' }),
+    form: workForm,
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/work/actions.ts',
+    name: 'changeWork',
+    on: ({ classId, assignmentId }) => `/classes/${classId}/work/${assignmentId}`,
+    bound: async ({ classId, newAssignment }) => [classId, await newAssignment()],
+    form: workForm,
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/work/actions.ts',
+    name: 'giveTime',
+    on: ({ classId, assignmentId }) => `/classes/${classId}/work/${assignmentId}`,
+    bound: async ({ classId, newAssignment }) => [classId, await newAssignment()],
+    form: ({ learnerId }) => ({ learnerId, dueOn: '2099-12-31', dueTime: '' }),
+    outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/work/actions.ts',
+    name: 'takeTimeBack',
+    on: ({ classId, assignmentId }) => `/classes/${classId}/work/${assignmentId}`,
+    bound: async ({ classId, learnerId, newExtension }) => [
+      classId,
+      await newExtension(),
+      learnerId,
+    ],
+    form: () => ({}),
     outcome: byStaff,
   },
   {

@@ -45,7 +45,7 @@ export const pages: readonly PageRow[] = [
     at: () => '/classes/not-an-id',
     outcome: forSignedIn('missing', 'sign in'),
   },
-  ...(['work', 'people', 'settings'] as const).map((section): PageRow => ({
+  ...(['work', 'work/new', 'people', 'settings'] as const).map((section): PageRow => ({
     kind: 'page',
     route: `/classes/[id]/${section}`,
     at: ({ classId }) => `/classes/${classId}/${section}`,
@@ -53,6 +53,19 @@ export const pages: readonly PageRow[] = [
     holds: ({ canaries }) =>
       section === 'people' ? canaries.classmateName.text : canaries.className.text,
   })),
+  {
+    kind: 'page',
+    route: '/classes/[id]/work/[assignmentId]',
+    at: ({ classId, assignmentId }) => `/classes/${classId}/work/${assignmentId}`,
+    outcome: only(staffOfTheClass, 'shown', 'missing', 'sign in'),
+    holds: ({ canaries }) => canaries.classmateName.text,
+  },
+  {
+    kind: 'page',
+    route: '/classes/[id]/work/[assignmentId]',
+    at: ({ otherClassId, assignmentId }) => `/classes/${otherClassId}/work/${assignmentId}`,
+    outcome: forSignedIn('missing', 'sign in'),
+  },
   {
     kind: 'page',
     route: '/classes/[id]/learners/[learnerId]',

@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { encode } from 'next-auth/jwt';
 import { createAttempt } from '@/lib/data/attempts';
+import { giveExtension } from '@/lib/data/extensions';
 import { createPasswordLink } from '@/lib/data/people';
 import type { Viewer } from '@/lib/policy/viewer';
 import { models } from '@/models';
@@ -22,6 +23,8 @@ export interface Planted {
   readonly otherClassId: string;
   readonly learnerId: string;
   readonly learnerPersonId: string;
+  /** Work that is set to the class. */
+  readonly assignmentId: string;
   /** An answer of the learner of the class, which counts for it. */
   readonly attemptId: string;
   /** Rounds of the learner of the class: one that stays open, one whose solution may be shown. */
@@ -41,6 +44,8 @@ export interface Planted {
   /** Fresh ones for an action that uses them up. */
   readonly newAddress: () => string;
   readonly newAssignment: () => Promise<string>;
+  /** Work for which the learner of the class has been given more time. */
+  readonly newExtension: () => Promise<string>;
   readonly newMember: () => Promise<string>;
   readonly newDisabled: () => Promise<string>;
   /** Another class of the instructor of the class, in this state. */
@@ -99,7 +104,17 @@ export async function plantWorkshop(): Promise<Planted> {
     dueOn: new Date(Date.now() + 7 * 86_400_000).toISOString().slice(0, 10),
     canaries: await canariesOf(learner, classmate),
     newAddress: () => `made-${randomUUID()}@workshop.example`,
+    assignmentId: await newAssignment(),
     newAssignment,
+    newExtension: async () => {
+      const assignmentId = await newAssignment();
+      await giveExtension(instructor, classId, assignmentId, {
+        learnerId: learner.learnerId,
+        dueOn: '2099-12-31',
+        dueTime: '',
+      });
+      return assignmentId;
+    },
     newMember,
     newClass: async (state) => {
       const { ClassGroup, Membership } = models();
