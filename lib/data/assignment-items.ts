@@ -1,6 +1,5 @@
 import 'server-only';
 import { exercises, lessons } from '@/content/exercises/registry';
-import { exerciseTitle, lessonName } from './lesson-titles';
 
 /** One exercise of an assignment, and the lesson with which it was set. */
 export interface Item {
@@ -41,13 +40,4 @@ export function chosenOf(items: readonly Item[]): Chosen {
     lessons: [...new Set(items.flatMap(({ lessonId }) => lessonId ?? []))],
     exercises: items.flatMap(({ lessonId, exerciseId }) => (lessonId === null ? exerciseId : [])),
   };
-}
-
-/** The titles under which what is set is read. */
-export function titlesOf(items: readonly Item[]): string[] {
-  const chosen = chosenOf(items);
-  return [
-    ...chosen.lessons.map((lessonId) => lessonName(lessonId).title),
-    ...chosen.exercises.map(exerciseTitle),
-  ];
 }

@@ -1,8 +1,9 @@
 import 'server-only';
 import { row, rows } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
-import { chosenOf, titlesOf, type Chosen, type Item } from './assignment-items';
+import { chosenOf, type Chosen, type Item } from './assignment-items';
 import { isId, staffOfClass, staffValues } from './class-right';
+import { workTitles } from './lesson-titles';
 
 /** The rules of work that is set. */
 export interface AssignmentRules {
@@ -70,7 +71,7 @@ export async function listAssignments(
     ...rest,
     opensAt: opensAt.toISOString(),
     dueAt: dueAt.toISOString(),
-    titles: titlesOf(items),
+    titles: workTitles(items),
     exercises: items.length,
   }));
 }
@@ -89,7 +90,7 @@ export async function findAssignment(
     ...rest,
     opensAt: opensAt.toISOString(),
     dueAt: dueAt.toISOString(),
-    titles: titlesOf(items),
+    titles: workTitles(items),
     chosen: chosenOf(items),
     extensions: extensions.map((one) => ({ ...one, dueAt: new Date(one.dueAt).toISOString() })),
   };

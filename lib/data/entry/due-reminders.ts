@@ -46,7 +46,7 @@ interface ReminderRow {
 const dueSql = `
   select * from (
     select a.id as "assignmentId", g.name as "className", g.time_zone as "timeZone",
-      p.id as "personId", l.id as "learnerId", p.email, coalesce(e.due_at, a.due_at) as "dueAt",
+      p.id as "personId", l.id as "learnerId", p.email, greatest(a.due_at, e.due_at) as "dueAt",
       (select json_agg(i.exercise_id order by i.position) from assignment_items i
         where i.assignment_id = a.id and ${isUnfinished}) as left
     from ${concernedLearners}
@@ -56,8 +56,8 @@ const dueSql = `
         select id from assignments where due_at between $1 and $1::timestamptz + interval '3 days'
         union select assignment_id from extensions
         where due_at between $1 and $1::timestamptz + interval '3 days')
-      and coalesce(e.due_at, a.due_at) > $1
-      and ((coalesce(e.due_at, a.due_at) - interval '1 millisecond') at time zone g.time_zone)::date
+      and greatest(a.due_at, e.due_at) > $1
+      and ((greatest(a.due_at, e.due_at) - interval '1 millisecond') at time zone g.time_zone)::date
         = ($1::timestamptz at time zone g.time_zone)::date + 1
       and ($1::timestamptz at time zone g.time_zone)::time >= '09:00') due
   where due.left is not null

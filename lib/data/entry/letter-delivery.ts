@@ -165,7 +165,7 @@ const claimSql = `
   from claimed
   left join people p on p.id = claimed.person_id
   left join lateral (
-    select a.id as assignment_id, coalesce(e.due_at, a.due_at) as due_at from ${concernedLearners}
+    select a.id as assignment_id, greatest(a.due_at, e.due_at) as due_at from ${concernedLearners}
     where a.id = (claimed.data ->> 'assignmentId')::uuid and p.id = claimed.person_id
       and ${isConcerned}) work on true
   left join one_time_links o on o.id = (claimed.data ->> 'linkId')::uuid`;

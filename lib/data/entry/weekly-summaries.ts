@@ -140,7 +140,7 @@ const weekSql = `
     select distinct l.id, p.name from ${concernedLearners}
     join assignment_items i on i.assignment_id = a.id
     where g.id = $1 and ${isConcerned} and a.opens_at < $3::timestamptz - interval '1 day'
-      and (a.late_work = 'marked' or coalesce(e.due_at, a.due_at) > $2)
+      and (a.late_work = 'marked' or greatest(a.due_at, e.due_at) > $2)
       and not exists (select 1 from counted c where c.learner_id = l.id) and ${isUnfinished}),
   slips as (
     select c.exercise_id as "exerciseId", part ->> 'slip' as slip,
