@@ -2,7 +2,7 @@
 
 import { rememberUnits } from '@/lib/auth/reader-units';
 import { currentViewer } from '@/lib/auth/viewer';
-import { updatePreferences } from '@/lib/data/people';
+import { updateProfile } from '@/lib/data/profile';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { unitsSchema } from '@/lib/schemas/person';
 
@@ -15,5 +15,5 @@ export async function setUnits(units: UnitSystem): Promise<void> {
   if (!reading.success) return;
   const viewer = await currentViewer();
   if (viewer === null) await rememberUnits(reading.data);
-  else await updatePreferences(viewer, { units: reading.data });
+  else await updateProfile(viewer, { units: reading.data });
 }

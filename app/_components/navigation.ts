@@ -16,6 +16,7 @@ const byMotion: NavigationLink = { href: '/by-motion', label: 'By motion' };
 const classes: NavigationLink = { href: '/classes', label: 'Classes' };
 const people: NavigationLink = { href: '/people', label: 'People' };
 const mail: NavigationLink = { href: '/mail', label: 'Mail' };
+const audit: NavigationLink = { href: '/audit', label: 'Audit log' };
 const forInstructors: NavigationLink = { href: '/for-instructors', label: 'For instructors' };
 
 /** True for somebody who teaches one class at least. */
@@ -45,7 +46,7 @@ export function linksFor(viewer: NavigationViewer | null): readonly NavigationLi
   const links: NavigationLink[] = [];
   if (viewer.isAdministrator) links.push(people);
   if (viewer.isAdministrator || teaches(viewer)) links.push(classes);
-  if (viewer.isAdministrator) links.push(mail);
+  if (viewer.isAdministrator) links.push(mail, audit);
   if (learns(viewer)) links.unshift(today);
   return [...links, lessons, byMotion];
 }

@@ -23,7 +23,6 @@ export interface InvitationListed {
   /** `asked` came with the joining word and has not confirmed the address yet. */
   readonly state: 'invited' | 'asked' | 'expired' | 'joined' | 'withdrawn';
   readonly sentAt: string;
-  readonly expiresAt: string;
 }
 
 /** What inviting comes to. */
@@ -42,19 +41,20 @@ export async function listInvitations(
   now: Date = presentTime(),
 ): Promise<InvitationListed[]> {
   if (classId !== null && !isId(classId)) return [];
-  return rows<InvitationListed>(
+  const found = await rows<Omit<InvitationListed, 'sentAt'> & { sentAt: Date }>(
     `select i.id as "invitationId", i.email, i.name, i.role,
        case when i.accepted_at is not null then 'joined'
          when i.withdrawn_at is not null then 'withdrawn'
          when i.expires_at <= $4 then 'expired'
          when i.joining_word is not null then 'asked'
          else 'invited' end as state,
-       i.sent_at as "sentAt", i.expires_at as "expiresAt"
+       i.sent_at as "sentAt"
      from invitations i
      where i.class_id is not distinct from $1::uuid and ${mayInvite}
      order by i.created_at desc, i.id limit 500`,
     [classId, viewer.personId, viewer.isAdministrator, now],
   );
+  return found.map((one) => ({ ...one, sentAt: one.sentAt.toISOString() }));
 }
 
 /**

@@ -22,7 +22,9 @@ export async function listOwnSessions(
   viewer: Viewer,
   now: Date = presentTime(),
 ): Promise<OwnSession[]> {
-  return rows<OwnSession>(
+  const found = await rows<
+    Omit<OwnSession, 'signedInAt' | 'lastSeenAt'> & { signedInAt: Date; lastSeenAt: Date }
+  >(
     `select s.id as "sessionId", s.device, s.created_at as "signedInAt",
        s.last_seen_at as "lastSeenAt", s.id = $2 as here
      from sessions s, (select $4::boolean as staff) as who
@@ -30,6 +32,11 @@ export async function listOwnSessions(
      order by here desc, s.last_seen_at desc`,
     [viewer.personId, viewer.sessionId, now, isStaff(viewer)],
   );
+  return found.map((one) => ({
+    ...one,
+    signedInAt: one.signedInAt.toISOString(),
+    lastSeenAt: one.lastSeenAt.toISOString(),
+  }));
 }
 
 /** Ends one of the viewer's sign-ins at once. False when it is not theirs or over already. */

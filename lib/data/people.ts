@@ -1,6 +1,6 @@
 import 'server-only';
 import { UniqueConstraintError, type Transaction } from 'sequelize';
-import { isTimeZone, now as presentTime } from '@/lib/clock';
+import { now as presentTime } from '@/lib/clock';
 import { row, rows, transact } from '@/lib/db/query';
 import { can } from '@/lib/policy/can';
 import type { Viewer } from '@/lib/policy/viewer';
@@ -9,23 +9,8 @@ import { recordAudit } from './audit';
 import { isId } from './class-right';
 import { linkAddress } from './entry/link-token';
 import { createLink } from './entry/one-time-links';
-
-/** A person as the administrator sees them. */
-export interface PersonListed {
-  readonly personId: string;
-  readonly name: string;
-  readonly email: string | null;
-  readonly isAdministrator: boolean;
-  readonly disabled: boolean;
-  /** Whether they have set a password, and so can sign in. */
-  readonly hasPassword: boolean;
-  readonly lastSeenAt: string | null;
-  readonly classes: readonly {
-    readonly classId: string;
-    readonly name: string;
-    readonly role: 'learner' | 'instructor';
-  }[];
-}
+import { queueLetter } from './letters';
+import { hasGivenPassword } from './password-given';
 
 /** A person to be made. */
 export interface NewPerson {
@@ -34,41 +19,16 @@ export interface NewPerson {
   readonly isAdministrator?: boolean;
 }
 
-/** What making a person comes to; the link is shown once and kept only as a hash. */
+/**
+ * What making a person comes to. A letter brings them the link; it is shown once, too, for where
+ * letters do not arrive, and is kept only as a hash.
+ */
 export type PersonCreated =
   | { readonly outcome: 'created'; readonly personId: string; readonly link: string }
   | { readonly outcome: 'address taken' }
+  /** For an administrator to be, the viewer's own password is asked for again. */
+  | { readonly outcome: 'password wanted' }
   | { readonly outcome: 'not allowed' };
-
-/** Everybody, by name, for the administrator; nobody for anybody else. Three parts, one query. */
-export function listPeople(viewer: Viewer): Promise<PersonListed[]> {
-  return people(viewer, null);
-}
-
-/** One person, for the administrator; null for anybody else and for somebody who is not there. */
-export async function findPerson(viewer: Viewer, personId: string): Promise<PersonListed | null> {
-  if (!isId(personId)) return null;
-  const [person] = await people(viewer, personId);
-  return person ?? null;
-}
-
-async function people(viewer: Viewer, personId: string | null): Promise<PersonListed[]> {
-  const found = await rows<Omit<PersonListed, 'lastSeenAt'> & { lastSeenAt: Date | null }>(
-    `select p.id as "personId", p.name, p.email, p.is_administrator as "isAdministrator",
-       p.disabled_at is not null as disabled, p.password_hash is not null as "hasPassword",
-       (select max(s.last_seen_at) from sessions s where s.person_id = p.id) as "lastSeenAt",
-       coalesce((
-         select json_agg(json_build_object('classId', g.id, 'name', g.name, 'role', m.role)
-           order by g.name)
-         from memberships m join class_groups g on g.id = m.class_id and g.archived_at is null
-         where m.person_id = p.id and m.left_at is null), '[]') as classes
-     from people p
-     where $1::boolean and p.erased_at is null and ($2::uuid is null or p.id = $2::uuid)
-     order by p.name, p.id`,
-    [can(viewer, 'look after people'), personId],
-  );
-  return found.map((one) => ({ ...one, lastSeenAt: one.lastSeenAt?.toISOString() ?? null }));
-}
 
 /** Makes a person, with the link by which they set their first password. */
 export async function createPerson(
@@ -77,13 +37,17 @@ export async function createPerson(
   now: Date = presentTime(),
 ): Promise<PersonCreated> {
   if (!can(viewer, 'look after people')) return { outcome: 'not allowed' };
+  if (isAdministrator && !(await hasGivenPassword(viewer, now))) {
+    return { outcome: 'password wanted' };
+  }
   const { Person, Learner } = models();
+  const address = email.trim().toLowerCase();
   try {
     return await transact(async (transaction) => {
       const person = await Person.create(
         {
           name: name.trim(),
-          email: email.trim().toLowerCase(),
+          email: address,
           isAdministrator,
           timeZone: viewer.timeZone,
           units: viewer.units,
@@ -93,7 +57,12 @@ export async function createPerson(
       await Learner.create({ personId: person.id }, { transaction });
       await audit(viewer, 'person created', person.id, transaction);
       if (isAdministrator) await audit(viewer, 'administrator made', person.id, transaction);
-      const link = await createPasswordLinkFor(viewer, person.id, now, transaction);
+      const link = await createPasswordLinkFor(
+        viewer,
+        { personId: person.id, to: address },
+        now,
+        transaction,
+      );
       return { outcome: 'created', personId: person.id, link } as const;
     });
   } catch (error) {
@@ -113,28 +82,29 @@ export async function createPasswordLink(
 ): Promise<string | null> {
   if (!can(viewer, 'look after people') || !isId(personId)) return null;
   return transact(async (transaction) => {
-    const person = await row(
-      'select id from people where id = $1 and disabled_at is null and erased_at is null',
+    const person = await row<{ email: string }>(
+      'select email from people where id = $1 and disabled_at is null and erased_at is null',
       [personId],
       transaction,
     );
     if (person === null) return null;
     await audit(viewer, 'link made', personId, transaction);
-    return createPasswordLinkFor(viewer, personId, now, transaction);
+    return createPasswordLinkFor(viewer, { personId, to: person.email }, now, transaction);
   });
 }
 
-/** Shuts a person out at once, sessions and links included. False when that cannot be done. */
+/**
+ * Shuts a person out at once, sessions and links included. False when that cannot be done, or when
+ * the viewer has given their password too long ago.
+ */
 export async function disablePerson(
   viewer: Viewer,
   personId: string,
   now: Date = presentTime(),
 ): Promise<boolean> {
   // Nobody shuts themselves out: there is always an administrator left.
-  if (!can(viewer, 'look after people') || !isId(personId) || personId === viewer.personId) {
-    return false;
-  }
-  return transact(async (transaction) => {
+  if (personId === viewer.personId) return false;
+  return changePerson(viewer, personId, now, async (transaction) => {
     const disabled = await row(
       `update people set disabled_at = $2, updated_at = $2
        where id = $1 and disabled_at is null and erased_at is null returning id`,
@@ -168,20 +138,70 @@ export async function enablePerson(
   });
 }
 
-/** How somebody likes things shown. */
-export interface Preferences {
-  readonly name?: string;
-  readonly units?: 'metric' | 'inch';
-  readonly timeZone?: string;
+/**
+ * Makes somebody an administrator. False when that cannot be done, or when the viewer has given their
+ * password too long ago.
+ */
+export async function makeAdministrator(
+  viewer: Viewer,
+  personId: string,
+  now: Date = presentTime(),
+): Promise<boolean> {
+  return changePerson(viewer, personId, now, async (transaction) => {
+    const made = await row(
+      `update people set is_administrator = true, updated_at = $2
+       where id = $1 and not is_administrator and disabled_at is null and erased_at is null
+       returning id`,
+      [personId, now],
+      transaction,
+    );
+    if (made === null) return false;
+    await audit(viewer, 'administrator made', personId, transaction);
+    return true;
+  });
 }
 
-/** Changes the viewer's own name, units or time zone. Throws `RangeError` for an unknown zone. */
-export async function updatePreferences(viewer: Viewer, wanted: Preferences): Promise<void> {
-  if (wanted.timeZone !== undefined && !isTimeZone(wanted.timeZone)) {
-    throw new RangeError(`updatePreferences: ${wanted.timeZone} is not a time zone`);
-  }
-  const { name, units, timeZone } = wanted;
-  await models().Person.update({ name, units, timeZone }, { where: { id: viewer.personId } });
+/** Makes an administrator one no longer; the last one stays. False when that cannot be done. */
+export async function unmakeAdministrator(
+  viewer: Viewer,
+  personId: string,
+  now: Date = presentTime(),
+): Promise<boolean> {
+  return changePerson(viewer, personId, now, async (transaction, administrators) => {
+    if (administrators.length < 2 || !administrators.includes(personId)) return false;
+    await rows(
+      'update people set is_administrator = false, updated_at = $2 where id = $1 returning id',
+      [personId, now],
+      transaction,
+    );
+    await audit(viewer, 'administrator unmade', personId, transaction);
+    return true;
+  });
+}
+
+/**
+ * Runs a change of somebody's account, for an administrator who has given their password lately. All
+ * administrators are held meanwhile: two of them cannot shut each other out at once.
+ */
+async function changePerson(
+  viewer: Viewer,
+  personId: string,
+  now: Date,
+  work: (transaction: Transaction, administrators: readonly string[]) => Promise<boolean>,
+): Promise<boolean> {
+  if (!can(viewer, 'make somebody an administrator') || !isId(personId)) return false;
+  return transact(async (transaction) => {
+    const held = await rows<{ id: string }>(
+      `select id from people
+       where is_administrator and disabled_at is null and erased_at is null order by id for update`,
+      [],
+      transaction,
+    );
+    const administrators = held.map(({ id }) => id);
+    if (!administrators.includes(viewer.personId)) return false;
+    if (!(await hasGivenPassword(viewer, now, transaction))) return false;
+    return work(transaction, administrators);
+  });
 }
 
 async function endEverything(personId: string, now: Date, transaction: Transaction) {
@@ -209,12 +229,15 @@ function audit(
   );
 }
 
+/** Makes the link and the letter that brings it. */
 async function createPasswordLinkFor(
   viewer: Viewer,
-  personId: string,
+  { personId, to }: { readonly personId: string; readonly to: string },
   now: Date,
   transaction: Transaction,
 ): Promise<string> {
   const target = { purpose: 'set-password', personId } as const;
-  return linkAddress('set-password', await createLink(target, viewer.personId, now, transaction));
+  const linkId = await createLink(target, viewer.personId, now, transaction);
+  await queueLetter(transaction, { to, personId, letter: { kind: 'set-password', linkId } });
+  return linkAddress('set-password', linkId);
 }

@@ -57,11 +57,18 @@ export const passwordChangeSchema = z.strictObject({
   newPassword: z.string().min(1, 'Type a new password.').max(1000, 'That is longer than we take.'),
 });
 
-/** A new address to sign in with, and the password, where it is asked for again. */
-export const newAddressSchema = z.strictObject({
-  email,
-  password: z.string().max(1000).optional(),
-});
+/** A new address to sign in with. */
+export const newAddressSchema = z.strictObject({ email });
 
 /** Millimetres or inches. */
 export const unitsSchema = units;
+
+/** Which people the administrator looks for. */
+export const peopleQuerySchema = z.object({
+  search: z.string().trim().max(100).catch(''),
+  standing: z
+    .enum(['administrator', 'instructor', 'learner', 'disabled', 'no password'])
+    .optional()
+    .catch(undefined),
+  page: z.coerce.number().int().min(1).max(100_000).catch(1),
+});

@@ -22,7 +22,14 @@ describe('the navigation', () => {
       'Lessons',
       'By motion',
     ]);
-    expect(labels(person([], true))).toEqual(['People', 'Classes', 'Mail', 'Lessons', 'By motion']);
+    expect(labels(person([], true))).toEqual([
+      'People',
+      'Classes',
+      'Mail',
+      'Audit log',
+      'Lessons',
+      'By motion',
+    ]);
   });
 
   it('treats somebody in no class as a learner', () => {

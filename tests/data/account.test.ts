@@ -5,7 +5,8 @@ import { findOwnAddress } from '@/lib/data/own-address';
 import { createAdministrator } from '@/lib/data/entry/first-administrator';
 import { setPassword } from '@/lib/data/entry/set-password';
 import { createSession, findViewer } from '@/lib/data/entry/sessions';
-import { createPerson, findPerson } from '@/lib/data/people';
+import { createPerson } from '@/lib/data/people';
+import { findPerson } from '@/lib/data/people-list';
 import { closeDatabase } from '@/lib/db/connection';
 import type { Viewer } from '@/lib/policy/viewer';
 

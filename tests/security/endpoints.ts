@@ -1,6 +1,11 @@
 import { actions } from './actions';
 import { actionsOfBeingTold, handlersOfBeingTold, pagesOfBeingTold } from './being-told';
-import { actionsOfComingIn, pagesOfComingIn } from './coming-in';
+import {
+  actionsOfAccounts,
+  actionsOfComingIn,
+  filesToTakeAway,
+  pagesOfComingIn,
+} from './coming-in';
 import type { Endpoint } from './endpoint';
 import { handlers } from './handlers';
 import { pages } from './pages';
@@ -14,8 +19,10 @@ export const endpoints: readonly Endpoint[] = [
   ...pagesOfComingIn,
   ...pagesOfBeingTold,
   ...handlers,
+  ...filesToTakeAway,
   ...handlersOfBeingTold,
   ...actions,
   ...actionsOfComingIn,
+  ...actionsOfAccounts,
   ...actionsOfBeingTold,
 ];

@@ -48,6 +48,8 @@ export interface Planted {
   readonly newExtension: () => Promise<string>;
   readonly newMember: () => Promise<string>;
   readonly newDisabled: () => Promise<string>;
+  /** Somebody invited into the class an hour ago. */
+  readonly newInvitation: () => Promise<string>;
   /** Another class of the instructor of the class, in this state. */
   readonly newClass: (state: { archivedAt?: Date; joiningWord?: string }) => Promise<string>;
 }
@@ -122,6 +124,18 @@ export async function plantWorkshop(): Promise<Planted> {
       const { personId } = instructor;
       await Membership.create({ classId: id, personId, role: 'instructor' });
       return id;
+    },
+    newInvitation: async () => {
+      const sentAt = new Date(Date.now() - 3_600_000);
+      const made = await models().Invitation.create({
+        classId,
+        role: 'learner',
+        email: `asked-${randomUUID()}@workshop.example`,
+        invitedBy: instructor.personId,
+        sentAt,
+        expiresAt: new Date(Date.now() + 86_400_000),
+      });
+      return made.id;
     },
     newDisabled: async () => {
       const personId = await newMember();

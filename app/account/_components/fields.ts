@@ -1,11 +1,14 @@
+import { passwordHint } from '@/app/_components/password-sentence';
 import { timeZoneOptions, unitOptions } from '@/app/_components/time-zones';
 import type { FormField } from '@/components/ui/action-form';
+import type { Profile } from '@/lib/data/profile';
 
-interface Profile {
-  readonly name: string;
-  readonly timeZone: string;
-  readonly units: string;
-}
+const paperOptions = [
+  { value: 'a4', label: 'A4' },
+  { value: 'a3', label: 'A3' },
+  { value: 'letter', label: 'Letter' },
+  { value: 'tabloid', label: 'Tabloid' },
+] as const;
 
 /** What people may change about themselves, as fields. */
 export function profileFields(profile: Profile): readonly FormField[] {
@@ -19,11 +22,27 @@ export function profileFields(profile: Profile): readonly FormField[] {
       hint: 'Exercises open in these. An exercise you have begun in the other unit waits for you there.',
     },
     {
+      name: 'paper',
+      label: 'Paper',
+      value: profile.paper,
+      options: paperOptions,
+      hint: 'What your printer takes.',
+    },
+    {
       name: 'timeZone',
       label: 'Time zone',
       value: profile.timeZone,
       options: timeZoneOptions(profile.timeZone),
       hint: 'Your days are counted in it, and dates are shown in it.',
+    },
+    {
+      name: 'reducedMotion',
+      label: 'Movement',
+      value: profile.reducedMotion ? 'yes' : 'no',
+      options: [
+        { value: 'no', label: 'As my device has it' },
+        { value: 'yes', label: 'Less: benches stand still until I turn them' },
+      ],
     },
   ];
 }
@@ -42,7 +61,19 @@ export const passwordFields: readonly FormField[] = [
     label: 'The new one',
     type: 'password',
     autoComplete: 'new-password',
-    hint: 'Ten characters at least. Three or four words in a row do well.',
+    hint: passwordHint,
+    required: true,
+  },
+];
+
+/** A new address. */
+export const addressFields: readonly FormField[] = [
+  {
+    name: 'email',
+    label: 'New address',
+    type: 'email',
+    autoComplete: 'email',
+    hint: 'A letter goes there; the change is made when you follow its link, within half an hour.',
     required: true,
   },
 ];

@@ -48,3 +48,14 @@ export function json(body: unknown, status = 200): Response {
     headers: { ...privateHeaders, 'Content-Type': 'application/json' },
   });
 }
+
+/** A file to be kept; it is never shown in place. */
+export function download(content: string, name: string, type: string): Response {
+  return new Response(content, {
+    headers: {
+      ...privateHeaders,
+      'Content-Type': `${type}; charset=utf-8`,
+      'Content-Disposition': `attachment; filename="${name}"`,
+    },
+  });
+}

@@ -1,15 +1,16 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
 import { notFound } from 'next/navigation';
-import { ActionForm } from '@/components/ui/action-form';
+import { PasswordGate } from '@/app/_components/password-gate';
 import { Page } from '@/components/ui/page';
 import { PageHeading } from '@/components/ui/page-heading';
 import { Section } from '@/components/ui/panel';
 import { requireViewer } from '@/lib/auth/viewer';
-import { findPerson } from '@/lib/data/people';
+import { findPerson } from '@/lib/data/people-list';
 import { standingOf } from '../_components/standing';
-import { makeLink } from '../actions';
 import { AccountSwitch } from './_components/account-switch';
+import { AdministratorSwitch } from './_components/administrator-switch';
+import { PasswordLink } from './_components/password-link';
 
 export const metadata: Metadata = { title: 'Person' };
 
@@ -41,20 +42,20 @@ export default async function PersonPage({ params }: PersonPageProps) {
           <p className="text-pencil">In no class. People are put into one on the class’s page.</p>
         ) : null}
       </Section>
-      {person.disabled ? null : (
-        <Section title={person.hasPassword ? 'Forgotten password' : 'First password'}>
-          <p className="mb-4 max-w-measure text-pencil">
-            A link that sets a new password, to hand over yourself. It is shown once.
-          </p>
-          <ActionForm
-            action={makeLink.bind(null, id)}
-            fields={[]}
-            submit="Make a new link"
-            variant="secondary"
-          />
-        </Section>
-      )}
-      <AccountSwitch person={person} own={person.personId === viewer.personId} />
+      <Section title="What happened">
+        <Link
+          href={`/audit?person=${encodeURIComponent(person.email ?? person.name)}`}
+          prefetch={false}
+          className="link link-target"
+        >
+          Their lines in the audit log
+        </Link>
+      </Section>
+      <PasswordGate viewer={viewer} name="person" purpose="change somebody’s account">
+        {person.disabled ? null : <PasswordLink person={person} />}
+        <AdministratorSwitch person={person} />
+        <AccountSwitch person={person} own={person.personId === viewer.personId} />
+      </PasswordGate>
     </Page>
   );
 }

@@ -1,7 +1,7 @@
 import Link from 'next/link';
 import { sayWhen } from '@/components/progress/say-due';
 import { Cell, ColumnName, HeadRow, Row, RowName, Table } from '@/components/ui/table';
-import type { PersonListed } from '@/lib/data/people';
+import type { PersonListed } from '@/lib/data/people-list';
 import { standingOf } from './standing';
 
 interface PeopleTableProps {

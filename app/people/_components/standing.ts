@@ -1,4 +1,4 @@
-import type { PersonListed } from '@/lib/data/people';
+import type { PersonListed } from '@/lib/data/people-list';
 
 /** How somebody's account stands, in words. */
 export function standingOf(

@@ -5,6 +5,7 @@ import { requireViewer } from '@/lib/auth/viewer';
 import { findClassPeople } from '@/lib/data/class-people';
 import { can } from '@/lib/policy/can';
 import { ClassFrame } from '../_components/class-frame';
+import { InvitePeople } from '../_components/invite-people';
 import { requireClass, type ClassPageProps } from '../_components/class-of-page';
 import { AddMember } from './_components/add-member';
 import { JoiningWord } from './_components/joining-word';
@@ -26,6 +27,11 @@ export default async function PeoplePage(props: ClassPageProps) {
           <Section title="Who is in the class">
             <Members found={found} members={inside} />
           </Section>
+          {found.archived ? null : (
+            <Section title="Invite people">
+              <InvitePeople viewer={viewer} classId={found.classId} timeZone={found.timeZone} />
+            </Section>
+          )}
           <Left found={found} people={people.filter(({ leftAt }) => leftAt !== null)} />
         </div>
         {found.archived ? null : (

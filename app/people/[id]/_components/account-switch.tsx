@@ -1,6 +1,6 @@
 import { ActionForm } from '@/components/ui/action-form';
 import { Section } from '@/components/ui/panel';
-import type { PersonListed } from '@/lib/data/people';
+import type { PersonListed } from '@/lib/data/people-list';
 import { disable, enable } from '../../actions';
 
 interface AccountSwitchProps {

@@ -1,6 +1,6 @@
 import { ActionForm } from '@/components/ui/action-form';
 import type { Member } from '@/lib/data/class-people';
-import { listPeople } from '@/lib/data/people';
+import { listPeople } from '@/lib/data/people-list';
 import type { Viewer } from '@/lib/policy/viewer';
 import { putIn } from '../actions';
 
