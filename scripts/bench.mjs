@@ -1,58 +1,68 @@
 import { installPackages, requireNode, run } from './machine/node.mjs';
 import { sql } from './machine/postgres.mjs';
 import { complain, say } from './machine/say.mjs';
+import { makeTrial } from './machine/trial.mjs';
 
 /**
  * `npm run bench [kinematics|http|page]`: speed, as ratios measured in one run; nothing here is a
  * test. Requests are compared with a bare route handler of the same build, the solver with an
  * independent one, script with the framework's own.
  */
-const learners = { learner: 'agnes@harbour.example', instructor: 'marit@harbour.example' };
-
 async function kinematics() {
   say('\n== The kinematics library');
   run(process.execPath, ['--import', 'tsx', 'scripts/bench/kinematics.ts']);
 }
 
 async function onSite(measure) {
-  const { startBenchSite } = await import('./bench/site.mjs');
-  const site = await startBenchSite();
+  const trial = await makeTrial('bench');
   try {
-    await measure(site);
+    await trial.startSite();
+    await measure(trial);
   } finally {
-    await site.stop();
+    await trial.close();
   }
 }
 
-async function http(site) {
-  const { benchHttp } = await import('./bench/http.mjs');
-  const password = /password "([^"]+)"/.exec(site.told)?.[1];
-  const classId = sql(
-    site.server,
-    `select m.class_id from memberships m join people p on p.id = m.person_id
-     where p.email = :'email' and m.role = 'instructor' order by m.joined_at limit 1;`,
-    { database: 'hornbeam', variables: { email: learners.instructor } },
+/** Sixteen learners of the demo's classes, and the class of its first instructor. */
+function demoPeople(trial) {
+  const ask = (text) => sql(trial.server(), text, { database: 'hornbeam' }).trim().split('\n');
+  const learners = ask(
+    `select distinct p.email from people p join memberships m on m.person_id = p.id
+     where m.role = 'learner' and m.left_at is null and p.disabled_at is null
+       and p.password_hash is not null order by 1 limit 16;`,
   );
-  const rows = await benchHttp({
-    address: site.address,
-    demo: { ...learners, password, classId, exercise: 'lantern-wheel' },
+  const [[instructor, classId]] = ask(
+    `select p.email, m.class_id from memberships m join people p on p.id = m.person_id
+     where m.role = 'instructor' and m.left_at is null order by m.joined_at, 1 limit 1;`,
+  ).map((line) => line.split('|'));
+  return { people: { learners, instructor }, classId };
+}
+
+async function http(trial) {
+  const { benchHttp } = await import('./bench/http.mjs');
+  const { rows, learners, rounds } = await benchHttp({
+    address: trial.address,
+    password: trial.password,
+    ...demoPeople(trial),
   });
-  say('\n== Requests: 16 connections, three interleaved rounds, the median');
+  say(
+    `\n== Requests: 16 connections, ${learners} learners at ${rounds} rounds, the median of three`,
+  );
   for (const { kind, rate, ratio, p99, statuses } of rows) {
     const counted = Object.entries(statuses).map(([status, count]) => `${count} × ${status}`);
     say(
-      `${kind.padEnd(10)} ${rate.toFixed(0).padStart(6)}/s  ${ratio.toFixed(2)} of the floor  ` +
+      `${kind.padEnd(15)} ${rate.toFixed(0).padStart(6)}/s  ${ratio.toFixed(2)} of the floor  ` +
         `p99 ${p99.toFixed(1)} × the floor's  (${counted.join(', ')})`,
     );
   }
 }
 
-async function page(site) {
+async function page(trial) {
   const { benchFrames, benchWeight } = await import('./bench/page.mjs');
   const lesson = '/lessons/drawing-and-copying/trammel-and-oval';
   const { base, rows } = await benchWeight({
-    address: site.address,
-    distDir: '.next-test',
+    address: trial.address,
+    distDir: trial.distDir,
     pages: { 'a page without a bench': '/for-instructors', 'a lesson with its bench': lesson },
   });
   say(`\n== Client script, gzipped; the framework's own is ${(base / 1000).toFixed(0)} kB`);
@@ -69,7 +79,7 @@ async function page(site) {
   ]) {
     for (const slow of [1, 4]) {
       const { p50, p95, most } = await benchFrames({
-        address: site.address,
+        address: trial.address,
         url: `/lessons/${path}`,
         slow,
         start: async (tab) => {
@@ -94,9 +104,9 @@ async function main() {
   const takes = (name) => wanted.length === 0 || wanted.includes(name);
   if (takes('kinematics')) await kinematics();
   if (takes('http') || takes('page')) {
-    await onSite(async (site) => {
-      if (takes('http')) await http(site);
-      if (takes('page')) await page(site);
+    await onSite(async (trial) => {
+      if (takes('http')) await http(trial);
+      if (takes('page')) await page(trial);
     });
   }
 }

@@ -7,9 +7,10 @@ import { complain, say } from './machine/say.mjs';
 
 /**
  * The long checks: full counts of seeds and inputs, coverage, the whole tour in every width and theme,
- * mutants of the kinematics library. `npm run prove -- seeds` runs one part.
+ * rights without proxy.ts, power cuts, two instances, mutants of the kinematics library. `npm run prove -- seeds` runs one part.
  */
 const vitest = ['node_modules/vitest/vitest.mjs', 'run'];
+const entry = ['--conditions=react-server', '--import', 'tsx'];
 const parts = {
   seeds: {
     what: 'Ten thousand seeds an exercise',
@@ -46,6 +47,19 @@ const parts = {
     what: 'The worker killed between sending and marking, eight times',
     args: [...vitest, '--project', 'data', 'tests/data/worker-killed.test.ts'],
     env: { HORNBEAM_KILLS: '8' },
+  },
+  'without-proxy': {
+    what: 'The matrix of rights on a build without proxy.ts',
+    args: [...vitest, '--project', 'e2e', 'tests/e2e/matrix.test.ts'],
+    env: { HORNBEAM_WITHOUT_PROXY: '1' },
+  },
+  durability: {
+    what: 'Power cuts under a stream of attempts, and a control that must lose some',
+    args: [...entry, 'scripts/prove/durability.ts'],
+  },
+  instances: {
+    what: 'Two instances behind nginx',
+    args: [...entry, 'scripts/prove/instances.ts'],
   },
   mutants: { what: 'Mutants of the kinematics library', args: ['scripts/mutate.mjs'] },
 };

@@ -1,9 +1,10 @@
 import 'server-only';
 import type { CookieOption } from 'next-auth';
-import { decode, encode } from 'next-auth/jwt';
+import { encode } from 'next-auth/jwt';
 import { cookies } from 'next/headers';
 import { sessionLimits } from '@/lib/data/entry/sessions';
 import { siteEnvironment } from '@/lib/env';
+import { openToken } from './open-token';
 
 /** The cookie's name; over https the prefix binds it to this host and to a secure connection. */
 export function sessionCookieName(): string {
@@ -41,10 +42,5 @@ export interface SessionClaims {
 /** The session's secret out of the cookie, or null when the token is missing, forged or expired. */
 export async function readSessionSecret(cookie: string | undefined): Promise<string | null> {
   if (cookie === undefined || cookie === '') return null;
-  try {
-    const claims = await decode({ token: cookie, secret: siteEnvironment().secret });
-    return typeof claims?.sid === 'string' ? claims.sid : null;
-  } catch {
-    return null;
-  }
+  return openToken(cookie, siteEnvironment().secret);
 }

@@ -1,6 +1,6 @@
 import 'server-only';
 import type { Transaction } from 'sequelize';
-import { row } from '@/lib/db/query';
+import { preparedRow, type Prepared } from '@/lib/db/prepared';
 import type { AttemptReply } from '@/lib/schemas/round';
 import {
   lastRoundsOf,
@@ -28,11 +28,7 @@ export async function findBeforeAttempt(
   key: string,
   transaction?: Transaction,
 ): Promise<BeforeAttempt> {
-  const found = await row<BeforeRow>(
-    beforeSql,
-    [learnerId, roundId, key, JSON.stringify(skillsByExercise)],
-    transaction,
-  );
+  const found = await preparedRow<BeforeRow>(before, [learnerId, roundId, key], transaction);
   if (found === null) return { earlier: null, record: null, rounds: [] };
   const { earlier, rounds, roundId: own, ...record } = found;
   return {
@@ -48,17 +44,23 @@ interface BeforeRow extends Omit<RoundRecord, 'roundId'> {
   readonly rounds: readonly LastRoundRow[];
 }
 
-const beforeSql = `
+/** The skills of every exercise, as a constant of the plan: nothing of them is sent or read again. */
+const skillsConstant = `'${JSON.stringify(skillsByExercise).replaceAll("'", "''")}'::jsonb`;
+
+const before: Prepared = {
+  name: 'before-attempt',
+  text: `
   select ${roundColumns},
     (select json_build_object('bodyHash', k.body_hash, 'reply', k.answer)
       from request_keys k where k.learner_id = l.id and k.key = $3) as earlier,
     coalesce((
       select json_agg(last) from (${lastRoundsOf(
         'l.id',
-        "jsonb_array_elements_text(coalesce($4::jsonb -> r.exercise_id, '[]'))",
+        `jsonb_array_elements_text(coalesce(${skillsConstant} -> r.exercise_id, '[]'))`,
       )}) last), '[]') as rounds
   from learners l left join rounds r on r.id = $2 and r.learner_id = l.id
-  where l.id = $1`;
+  where l.id = $1`,
+};
 
 /** Everything that one attempt writes. */
 export interface AttemptRecord {
@@ -90,8 +92,8 @@ export async function insertAttempt(
   record: AttemptRecord,
   transaction?: Transaction,
 ): Promise<AttemptReply['counting'] | null> {
-  const kept = await row<{ counting: AttemptReply['counting'] }>(
-    insertAttemptSql,
+  const kept = await preparedRow<{ counting: AttemptReply['counting'] }>(
+    insertion,
     [
       record.attemptId,
       record.roundId,
@@ -116,7 +118,9 @@ export async function insertAttempt(
   return kept?.counting ?? null;
 }
 
-const insertAttemptSql = `
+const insertion: Prepared = {
+  name: 'insert-attempt',
+  text: `
   with open_round as (
     select id, learner_id, exercise_id from rounds
     where id = $2 and learner_id = $3 and exercise_id = $4 and closed_at is null
@@ -175,4 +179,5 @@ const insertAttemptSql = `
     from kept, told
     returning key
   )
-  select kept.id, told.counting from kept, told`;
+  select kept.id, told.counting from kept, told`,
+};

@@ -1,9 +1,10 @@
 import 'server-only';
 import { createHash, randomUUID } from 'node:crypto';
-import { ForeignKeyConstraintError, UniqueConstraintError, type Transaction } from 'sequelize';
+import type { Transaction } from 'sequelize';
 import { exercises } from '@/content/exercises/registry';
 import { now as presentTime } from '@/lib/clock';
 import { rows, transact } from '@/lib/db/query';
+import { isOvertaken } from '@/lib/db/trouble';
 import type { ExerciseDefinition } from '@/lib/marking/definition';
 import { isCurrent } from '@/lib/marking/draw';
 import { markResponse } from '@/lib/marking/mark';
@@ -69,10 +70,8 @@ async function unlessTaken<Result>(work: () => Promise<Result>): Promise<Result 
   try {
     return await work();
   } catch (error) {
-    // A foreign key fails where an exercise was taken out of an assignment at this very moment.
-    if (error instanceof UniqueConstraintError || error instanceof ForeignKeyConstraintError) {
-      return taken;
-    }
+    // A row is gone where an exercise was taken out of an assignment at this very moment.
+    if (isOvertaken(error)) return taken;
     throw error;
   }
 }

@@ -21,6 +21,12 @@ export function troubleOf(error: unknown): Trouble | null {
   return error.name.startsWith('SequelizeConnection') ? 'away' : null;
 }
 
+/** True when somebody else came first: a row was there already, or one that it points to is gone. */
+export function isOvertaken(error: unknown): boolean {
+  const code = codeOf(error);
+  return code === '23505' || code === '23503';
+}
+
 function codeOf(error: unknown): string | null {
   if (!(error instanceof Error)) return null;
   for (const one of [error, Reflect.get(error, 'original'), error.cause]) {

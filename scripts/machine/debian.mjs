@@ -17,7 +17,9 @@ export function installDebian(packages, purpose) {
   say(`Installing ${packages.join(', ')} from Debian's packages …`);
   apt(prefix, ['update', '-qq']);
   if (packages.includes('postgresql')) withholdMainCluster(prefix);
-  apt(prefix, ['install', '-y', '-qq', '--no-install-recommends', ...packages]);
+  withoutStarting(prefix, () => {
+    apt(prefix, ['install', '-y', '-qq', '--no-install-recommends', ...packages]);
+  });
 }
 
 function installCommand(packages, command) {
@@ -33,6 +35,25 @@ function asRoot() {
   if (process.getuid?.() === 0) return [];
   const sudo = spawnSync('sudo', ['-n', 'true'], { stdio: 'ignore' });
   return sudo.status === 0 ? ['sudo', '-n'] : null;
+}
+
+/**
+ * Debian starts a server's service when its package is installed, unless this policy says no: what
+ * we need is the program alone.
+ */
+function withoutStarting(prefix, install) {
+  const policy = '/usr/sbin/policy-rc.d';
+  if (existsSync(policy)) return install();
+  const asOwner = (script) => {
+    const [command, ...args] = [...prefix, 'sh', '-c', script];
+    spawnSync(command, args, { stdio: 'ignore' });
+  };
+  asOwner(`printf '#!/bin/sh\\nexit 101\\n' > ${policy} && chmod 755 ${policy}`);
+  try {
+    return install();
+  } finally {
+    asOwner(`rm -f ${policy}`);
+  }
 }
 
 function apt(prefix, args) {

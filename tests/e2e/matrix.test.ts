@@ -37,7 +37,8 @@ beforeAll(async () => {
   built = readBuilt(build.output);
   site = await openOwnSite(build.distDir, build.folder);
   planted = await plantWorkshop();
-});
+  // A build without proxy.ts is made from nothing.
+}, 1_200_000);
 afterAll(() => site.close());
 
 const pages = endpoints.filter((row): row is PageRow => row.kind === 'page');

@@ -1,6 +1,7 @@
 import 'server-only';
 import type { Transaction } from 'sequelize';
 import { row, rows, transact } from '@/lib/db/query';
+import { preparedRow, type Prepared } from '@/lib/db/prepared';
 import type { Membership, Viewer } from '@/lib/policy/viewer';
 import { models } from '@/models';
 import { recordAudit } from '../audit';
@@ -57,7 +58,7 @@ export async function createSession(
 
 /** Who holds this session, if it is in force; one query a request, and a touch once a minute. */
 export async function findViewer(proof: SessionProof, now: Date): Promise<Viewer | null> {
-  const found = await row<ViewerRow>(viewerSql, [hashSecret(proof.secret), now]);
+  const found = await preparedRow<ViewerRow>(viewerOfSession, [hashSecret(proof.secret), now]);
   if (found === null) return null;
   const { stale, ...viewer } = found;
   if (stale) {
@@ -118,7 +119,9 @@ export function inForce(at: string): string {
 }
 
 /** What somebody is now decides how long their sign-ins hold, whatever they were when they signed in. */
-const viewerSql = `
+const viewerOfSession: Prepared = {
+  name: 'viewer-of-session',
+  text: `
   select s.id as "sessionId", p.id as "personId", l.id as "learnerId", p.name,
     p.is_administrator as "isAdministrator", p.units, p.time_zone as "timeZone",
     p.reduced_motion as "reducedMotion",
@@ -132,7 +135,8 @@ const viewerSql = `
         as memberships,
       coalesce(bool_or(m.role = 'instructor'), false) or p.is_administrator as staff
     from memberships m where m.person_id = p.id and m.left_at is null) inside
-  where s.secret_hash = $1 and ${inForce('$2::timestamptz')}`;
+  where s.secret_hash = $1 and ${inForce('$2::timestamptz')}`,
+};
 
 /**
  * Opens a session for somebody who has just proven who they are; answers its secret. It is opened

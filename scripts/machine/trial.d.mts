@@ -1,0 +1,24 @@
+import type { Server } from './postgres.mjs';
+import type { RunningSite, startSite } from './site.mjs';
+
+export interface Trial {
+  readonly address: string;
+  readonly ownAddress: string;
+  readonly env: Record<string, string>;
+  readonly database: { readonly app: string; readonly owner: string; readonly superuser: string };
+  readonly distDir: string;
+  readonly password: string;
+  readonly server: () => Server;
+  readonly startSite: (
+    at?: string,
+    more?: Partial<Parameters<typeof startSite>[0]>,
+  ) => Promise<RunningSite>;
+  readonly killDatabase: () => Promise<void>;
+  readonly startDatabase: () => Promise<void>;
+  readonly close: () => Promise<void>;
+}
+
+export function makeTrial(
+  name: string,
+  options?: { settings?: Record<string, string>; address?: string; mailUrl?: string; demo?: boolean },
+): Promise<Trial>;
