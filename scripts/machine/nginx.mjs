@@ -15,7 +15,7 @@ export function requireNginx() {
 
 /**
  * Starts nginx on `port` of loopback, unprivileged and with a configuration of our own, in front of
- * several instances. A request whose instance is going away is given to another; that may be done
+ * several instances. Neither is ever given up: an instance that is away refuses at once. A request whose instance is going away is given to another; that may be done
  * with every request of ours, since a repeated one is known by its key.
  */
 export async function startProxy({ port, instances }) {
@@ -56,7 +56,7 @@ http {
   access_log off;
   ${temporary.map((kind) => `${kind}_temp_path ${folder}/${kind};`).join('\n  ')}
   upstream hornbeam {
-    ${instances.map((address) => `server ${new URL(address).host} max_fails=1 fail_timeout=1s;`).join('\n    ')}
+    ${instances.map((address) => `server ${new URL(address).host} max_fails=0;`).join('\n    ')}
   }
   server {
     listen 127.0.0.1:${port};
@@ -66,6 +66,7 @@ http {
       proxy_set_header Connection "";
       proxy_set_header Host $http_host;
       proxy_set_header X-Forwarded-For $remote_addr;
+      proxy_connect_timeout 1s;
       proxy_next_upstream error timeout http_502 http_503 non_idempotent;
       proxy_next_upstream_tries 2;
     }

@@ -4,4 +4,4 @@ export function signInByForm(
   password: string,
   options?: { device?: string },
 ): Promise<string>;
-export function signOutByForm(address: string, cookie: string): Promise<void>;
+export function signOutByForm(address: string, cookie: string, origin?: string): Promise<void>;

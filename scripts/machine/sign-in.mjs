@@ -28,8 +28,11 @@ export async function signInByForm(address, email, password, { device = 'a scrip
   return cookie();
 }
 
-/** Ends the session of this `Cookie` header, as the form does. */
-export async function signOutByForm(address, cookie) {
+/**
+ * Ends the session of this `Cookie` header, as the form does. `origin` is where people reach the site,
+ * when that is not where it is asked.
+ */
+export async function signOutByForm(address, cookie, origin = address) {
   const csrf = await fetch(`${address}/api/auth/csrf`, { headers: { cookie } });
   const { csrfToken } = await csrf.json();
   const fresh = csrf.headers.getSetCookie().map((line) => line.split(';')[0]);
@@ -38,10 +41,11 @@ export async function signOutByForm(address, cookie) {
     redirect: 'manual',
     headers: {
       'content-type': 'application/x-www-form-urlencoded',
-      origin: address,
+      origin,
       cookie: [cookie, ...fresh].filter(Boolean).join('; '),
     },
     body: new URLSearchParams({ csrfToken, json: 'true' }),
   });
   await done.arrayBuffer();
+  if (!done.ok) throw new Error(`Signing out at ${address} was refused: ${done.status}`);
 }

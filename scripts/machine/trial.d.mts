@@ -20,5 +20,10 @@ export interface Trial {
 
 export function makeTrial(
   name: string,
-  options?: { settings?: Record<string, string>; address?: string; mailUrl?: string; demo?: boolean },
+  options?: {
+    settings?: Record<string, string>;
+    address?: string;
+    mailUrl?: string;
+    demo?: boolean;
+  },
 ): Promise<Trial>;

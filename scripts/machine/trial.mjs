@@ -44,6 +44,14 @@ export async function makeTrial(name, { settings = {}, address, mailUrl, demo = 
   runEntry('scripts/migrate.ts', { env, quiet: true });
   const told = demo ? runEntry('scripts/seed.ts', { env, quiet: true }) : '';
   const sites = new Set();
+  const close = async () => {
+    await Promise.all([...sites].map((site) => site.stop()));
+    await stopServer(server);
+    rmSync(folder, { recursive: true, force: true });
+  };
+  for (const signal of ['SIGINT', 'SIGTERM']) {
+    process.once(signal, () => void close().finally(() => process.exit(1)));
+  }
   return {
     address: address ?? ownAddress,
     ownAddress,
@@ -69,10 +77,6 @@ export async function makeTrial(name, { settings = {}, address, mailUrl, demo = 
     startDatabase: async () => {
       server = await startDatabase();
     },
-    close: async () => {
-      await Promise.all([...sites].map((site) => site.stop()));
-      await stopServer(server);
-      rmSync(folder, { recursive: true, force: true });
-    },
+    close,
   };
 }
