@@ -140,6 +140,10 @@ describe.each(titled(actions))('%s', (_title, row) => {
     }
   });
 
+  it('does for a request of unknown origin what it does for nobody', async () => {
+    expect(outcomeOfAction(await call('administrator', {}))).toBe(row.outcome.anonymous);
+  });
+
   it('does nothing for a page of another site', async () => {
     for (const origin of ['https://elsewhere.example', 'null']) {
       const answer = await call('administrator', { origin });
