@@ -10,10 +10,11 @@ export async function startMailPage(folder, port) {
   const server = createServer((request, response) => {
     answer(folder, new URL(request.url ?? '/', 'http://127.0.0.1'))
       .catch((error) => page(500, 'This letter cannot be read', `<p>${escape(String(error))}`))
-      .then(({ status, body, policy }) => {
+      .then(({ status, body }) => {
         response.writeHead(status, {
           'content-type': 'text/html; charset=utf-8',
-          'content-security-policy': policy,
+          'content-security-policy':
+            "default-src 'none'; style-src 'unsafe-inline'; frame-ancestors 'none'",
           'referrer-policy': 'no-referrer',
           'cache-control': 'no-store',
         });
@@ -33,14 +34,13 @@ export async function startMailPage(folder, port) {
 
 async function answer(folder, url) {
   if (url.pathname === '/') return page(200, 'Mail caught here', await list(folder));
-  const [name = '', part] = url.pathname.slice(1).split('/').map(decodeURIComponent);
+  const name = decodeURIComponent(url.pathname.slice(1));
   // Only what the folder lists is read: no name leads out of it.
-  if (!names(folder).includes(name) || (part !== undefined && part !== 'html')) {
+  if (!names(folder).includes(name)) {
     return page(404, 'Not here', '<p><a href="/">All mail</a>');
   }
   const mail = await read(folder, name);
-  if (part === 'html') return bare(mail.html || '');
-  return page(200, mail.subject ?? '(no subject)', letter(name, mail));
+  return page(200, mail.subject ?? '(no subject)', letter(mail));
 }
 
 const names = (folder) =>
@@ -70,7 +70,8 @@ async function list(folder) {
 
 const whenOf = (mail) => mail.date?.toISOString().slice(0, 16).replace('T', ' ') ?? '';
 
-function letter(name, mail) {
+/** The HTML stands in a frame where it runs and fetches nothing, and its links open by themselves. */
+function letter(mail) {
   const facts = [
     ['To', mail.to?.text ?? ''],
     ['From', mail.from?.text ?? ''],
@@ -82,25 +83,14 @@ function letter(name, mail) {
     (address) => `<a href="${address}">${address}</a>`,
   );
   const html = mail.html
-    ? `<h2>As HTML</h2><iframe title="The letter as HTML" sandbox="allow-popups allow-popups-to-escape-sandbox" src="/${encodeURIComponent(name)}/html"></iframe>`
+    ? `<h2>As HTML</h2><iframe title="The letter as HTML" sandbox="allow-popups allow-popups-to-escape-sandbox" srcdoc="${escape(mail.html.replace(/<head>/i, '<head><base target="_blank">'))}"></iframe>`
     : '';
   return `<p><a href="/">All mail</a><table>${facts.join('')}</table><h2>As text</h2><pre>${text}</pre>${html}`;
-}
-
-/** The letter's own HTML for the frame: it runs and fetches nothing, and its links open by themselves. */
-function bare(html) {
-  return {
-    status: 200,
-    body: html.replace(/<head>/i, '<head><base target="_blank">'),
-    policy: "default-src 'none'; style-src 'unsafe-inline'; frame-ancestors 'self'",
-  };
 }
 
 function page(status, title, body) {
   return {
     status,
-    policy:
-      "default-src 'none'; style-src 'unsafe-inline'; frame-src 'self'; frame-ancestors 'none'",
     body: `<!doctype html><html lang="en"><head><meta charset="utf-8"><meta name="viewport" content="width=device-width">
 <title>${escape(title)}</title><style>
 :root{color-scheme:light dark;--paper:#fbfaf5;--ink:#20251f;--pencil:#59604f;--rule:#cfc6b4;--chalk:#1f5c8f;--board:#f1ece1}

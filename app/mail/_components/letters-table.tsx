@@ -12,15 +12,15 @@ interface LettersTableProps {
   readonly timeZone: string;
 }
 
-/** Letters, the latest first: to whom, of what kind, how they stand, and the way to send them again. */
+/** Letters, the latest first: to whom, how they stand, of what kind, and the way to send them again. */
 export function LettersTable({ letters, timeZone }: LettersTableProps) {
   return (
     <Table caption="Letters">
       <HeadRow>
         <ColumnName>To</ColumnName>
+        <ColumnName>State</ColumnName>
         <ColumnName>Kind</ColumnName>
         <ColumnName>Written</ColumnName>
-        <ColumnName>State</ColumnName>
         <ColumnName>
           <span className="sr-only">Send again</span>
         </ColumnName>
@@ -28,17 +28,17 @@ export function LettersTable({ letters, timeZone }: LettersTableProps) {
       <tbody>
         {letters.map((letter) => (
           <Row key={letter.letterId}>
-            <RowName className="min-w-52">
+            <RowName className="min-w-44">
               <Reader letter={letter} />
             </RowName>
+            <Cell className="min-w-44">
+              <Standing letter={letter} timeZone={timeZone} />
+            </Cell>
             <Cell className="whitespace-nowrap">
               {kindWords[letter.kind]}
               {letter.again ? <span className="block text-pencil">once more</span> : null}
             </Cell>
             <Cell className="whitespace-nowrap">{sayWhen(letter.createdAt, timeZone)}</Cell>
-            <Cell className="min-w-56">
-              <Standing letter={letter} timeZone={timeZone} />
-            </Cell>
             <Cell>
               {letter.state === 'sent' || letter.state === 'failed' ? (
                 <ActionForm

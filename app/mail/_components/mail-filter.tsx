@@ -35,7 +35,7 @@ export function MailFilter({ filter }: Readonly<{ filter: Filter }>) {
         autoComplete="off"
         type="search"
       />
-      <div className="flex items-center gap-4 lg:pt-8">
+      <div className="flex items-center gap-4 lg:pt-7">
         <Button type="submit" variant="secondary">
           Show
         </Button>

@@ -52,7 +52,7 @@ interface DueRow {
 /** Extensions that were given and taken back count as changes; the audit log forgets neither. */
 const dueSql = `
   with due as (
-    select a.*, g.name as class_name, coalesce(e.due_at, a.due_at) as due, false as teaches,
+    select a.*, g.name as class_name, greatest(a.due_at, e.due_at) as due, false as teaches,
       l.id as learner_id
     from ${concernedLearners}
     where p.id = $1 and ${isForLearner} and a.opens_at <= $2
