@@ -5,6 +5,8 @@ import type { Distance, Rigid } from '@/lib/kinematics/linkage/solver/linkage';
 export interface Body {
   readonly points: readonly number[];
   readonly shape: ReadonlyMap<number, Point>;
+  /** Two of them that lie apart: they carry the others. */
+  readonly pair: readonly [number, number];
   /** The driven direction, if an angle drives this body. */
   readonly driven?: DrivenWay;
 }

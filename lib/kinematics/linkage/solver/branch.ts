@@ -11,12 +11,10 @@ export function branchIn(plan: Plan, pose: ArrayLike<number>): Int8Array {
 function side(method: Method, pose: Float64Array): number {
   const scratch = new Float64Array(8);
   if (method.kind === 'aim') {
-    const { pivot, target, members } = method;
+    const { pivot, target, lead } = method;
     const [tx, ty] = way(pose, pivot, target);
-    const member = members.find(({ x, y }) => x !== 0 || y !== 0);
-    if (!member) return 1;
-    const [mx, my] = way(pose, pivot, member.p);
-    const normal = Math.atan2(my, mx) - Math.atan2(member.y, member.x);
+    const [mx, my] = way(pose, pivot, lead.p);
+    const normal = Math.atan2(my, mx) - Math.atan2(lead.y, lead.x);
     return tx * Math.sin(normal) - ty * Math.cos(normal);
   }
   if (method.kind !== 'meet' && method.kind !== 'shift') return 1;

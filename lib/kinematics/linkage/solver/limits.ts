@@ -72,13 +72,14 @@ function endOf(
   reach: number,
   passing: number,
 ): number | undefined {
-  let [before, beforeSlack] = [start, slack(start)];
-  let [now, nowSlack] = [before, beforeSlack];
+  // From one step back, so that a gap just ahead of the start shows as a dip.
+  let [before, beforeSlack] = [start - step, slack(start - step)];
+  let [now, nowSlack] = [start, slack(start)];
   for (let k = 1; k * Math.abs(step) <= reach + Math.abs(step) / 2; k += 1) {
     const next = start + k * step;
     const nextSlack = slack(next);
     if (nextSlack < passing) return lastClosing(slack, now, next);
-    if (nowSlack < beforeSlack && nowSlack < nextSlack) {
+    if (nowSlack < beforeSlack && nowSlack <= nextSlack) {
       const tight = tightest(slack, before, next);
       if (slack(tight) < passing) return lastClosing(slack, before, tight);
     }

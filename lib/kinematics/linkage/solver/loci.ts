@@ -16,9 +16,8 @@ export function layLocus(
   base: number,
 ): void {
   if (locus.kind === 'distance') {
-    const centre = locus.p === p ? locus.q : locus.p;
-    scratch[base] = at(pose, 2 * centre);
-    scratch[base + 1] = at(pose, 2 * centre + 1);
+    scratch[base] = at(pose, 2 * locus.q);
+    scratch[base + 1] = at(pose, 2 * locus.q + 1);
     scratch[base + 2] = locus.length;
     return;
   }

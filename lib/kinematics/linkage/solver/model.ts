@@ -22,7 +22,8 @@ const CALLER = 'planLinkage';
 
 /** Numbers for names, and every argument looked at: throws `RangeError` for nonsense. */
 export function modelOf(linkage: Linkage): Model {
-  const names = Object.keys(linkage.points);
+  const entries = Object.entries(linkage.points);
+  const names = entries.map(([name]) => name);
   const numbers = new Map(names.map((name, k) => [name, k]));
   const find = (name: string): number => {
     const found = numbers.get(name);
@@ -31,9 +32,9 @@ export function modelOf(linkage: Linkage): Model {
     return found;
   };
   const start = new Float64Array(2 * names.length);
-  names.forEach((name, k) => {
-    start[2 * k] = requireMeasure(CALLER, `${name}.x`, linkage.points[name]?.x ?? Number.NaN);
-    start[2 * k + 1] = requireMeasure(CALLER, `${name}.y`, linkage.points[name]?.y ?? Number.NaN);
+  entries.forEach(([name, { x, y }], k) => {
+    start[2 * k] = requireMeasure(CALLER, `${name}.x`, x);
+    start[2 * k + 1] = requireMeasure(CALLER, `${name}.y`, y);
   });
   const slides = (linkage.slides ?? []).map(({ point, along, through, offset = 0 }) => ({
     kind: 'slide' as const,
@@ -78,8 +79,8 @@ export function modelOf(linkage: Linkage): Model {
 }
 
 /** Every relation of a body, its first two points carrying the others. */
-export function relationsOf({ points, shape, driven }: Body): readonly Relation[] {
-  const [a, b] = apartPair(shape, points) ?? [0, 0];
+export function relationsOf({ points, shape, pair, driven }: Body): readonly Relation[] {
+  const [a, b] = pair;
   const rest = points.filter((p) => p !== a && p !== b);
   const turned: Relation[] = driven
     ? [{ kind: 'angle', a: driven.from, b: driven.to, shift: 0, drive: driven.drive }]
@@ -96,12 +97,13 @@ function bodiesOf(linkage: Linkage, find: (name: string) => number): readonly Bo
   return [...bars, ...plates].map((shape) => {
     const entries = Object.entries(shape);
     const named = new Map(entries.map(([name, at]) => [find(name), measured(name, at)]));
-    if (!apartPair(named, [...named.keys()])) {
+    const pair = apartPair(named, [...named.keys()]);
+    if (!pair) {
       throw new RangeError(
         `${CALLER}: body is ${entries.map(([name]) => name).join(', ')}; expected two points apart`,
       );
     }
-    return { points: [...named.keys()], shape: named };
+    return { points: [...named.keys()], shape: named, pair };
   });
 }
 

@@ -1,23 +1,9 @@
-import {
-  apartPair,
-  coincide,
-  distanceOf,
-  localOf,
-  rigidOf,
-} from '@/lib/kinematics/linkage/solver/body';
+import { itemAt } from '@/lib/numeric/item-at';
+import { coincide, distanceOf, localOf, rigidOf } from '@/lib/kinematics/linkage/solver/body';
 import { angleOf, lociOf, type Progress } from '@/lib/kinematics/linkage/solver/progress';
 
 /** A body about a known pivot, whose own groove must pass through a known point. */
-export function aim({
-  model,
-  placed,
-  joined,
-  done,
-  turned,
-  usedSlides,
-  steps,
-  checks,
-}: Progress): boolean {
+export function aim({ model, placed, joined, done, usedSlides, steps }: Progress): boolean {
   for (const body of model.bodies) {
     const pivot = body.points.find((p) => placed.has(p));
     const slide = model.slides.find(
@@ -34,7 +20,7 @@ export function aim({
       return { x: y * ux - x * uy, y: -(x * ux + y * uy) };
     };
     const points = body.points.filter((q) => q !== pivot);
-    const [, end = pivot] = apartPair(body.shape, [pivot, ...points]) ?? [];
+    const end = itemAt(body.pair, coincide(body.shape, pivot, body.pair[0]) ? 1 : 0);
     const rest = points.filter((q) => q !== end);
     const relations = [
       distanceOf(body.shape, pivot, end),
@@ -44,13 +30,11 @@ export function aim({
     const off = slide.offset + seen(slide.through).x;
     const members = points.map((q) => ({ p: q, ...seen(q) }));
     steps.push({
-      method: { kind: 'aim', pivot, target: slide.p, off, members },
+      method: { kind: 'aim', pivot, target: slide.p, off, members, lead: { p: end, ...seen(end) } },
       points,
       relations,
     });
     for (const q of points) placed.add(q);
-    if (body.driven && !turned.has(body))
-      checks.push(angleOf(body, body.driven, body.driven.from, body.driven.to));
     joined.add(body);
     done.add(body);
     usedSlides.add(slide);

@@ -76,7 +76,7 @@ function finish({
 }
 
 /** A body with two known points carries the rest; what was known twice becomes a check. */
-function carry({ model, placed, joined, done, turned, steps, checks }: Progress): boolean {
+function carry({ model, placed, joined, done, steps, checks }: Progress): boolean {
   for (const body of model.bodies) {
     const known = body.points.filter((p) => placed.has(p));
     const [a, b] = apartPair(body.shape, known) ?? [];
@@ -88,8 +88,6 @@ function carry({ model, placed, joined, done, turned, steps, checks }: Progress)
       else steps.push({ method: { kind: 'carry', rigid }, points: [p], relations: [rigid] });
       placed.add(p);
     }
-    if (body.driven && !turned.has(body))
-      checks.push(angleOf(body, body.driven, body.driven.from, body.driven.to));
     done.add(body);
     return true;
   }
@@ -153,25 +151,20 @@ function run({ model, placed, usedSlides, usedRuns, steps }: Progress): boolean 
   return false;
 }
 
-/** A point on two known loci. */
+/** A point on two known loci; `lociOf` gives circles before grooves. */
 function meet(progress: Progress): boolean {
   const { model, placed, steps } = progress;
   for (const p of model.names.keys()) {
     if (placed.has(p)) continue;
     const [first, second] = lociOf(progress, p);
     if (!first || !second) continue;
-    const ordered =
-      first.locus.kind === 'slide' && second.locus.kind === 'distance'
-        ? [second, first]
-        : [first, second];
-    const [one = first, two = second] = ordered;
     steps.push({
-      method: { kind: 'meet', p, first: one.locus, second: two.locus },
+      method: { kind: 'meet', p, first: first.locus, second: second.locus },
       points: [p],
-      relations: [one.locus, two.locus],
+      relations: [first.locus, second.locus],
     });
     placed.add(p);
-    for (const { mark } of [one, two]) mark();
+    for (const { mark } of [first, second]) mark();
     return true;
   }
   return false;

@@ -12,6 +12,13 @@ import type { Model } from '@/lib/kinematics/linkage/solver/model';
 /** What settles one point beside another: the circle of a bar, or a groove. */
 export type Locus = Distance | SlideRelation;
 
+/** A point of a body, in a frame of the body's own. */
+interface Member {
+  readonly p: number;
+  readonly x: number;
+  readonly y: number;
+}
+
 /** How the points of a step are found. Relations and points of the step are in `StepBase`. */
 export type Method =
   /** One point on two loci. */
@@ -35,7 +42,9 @@ export type Method =
       /** Distance of the target from the pivot, square to the groove. */
       readonly off: number;
       /** Points of the body from the pivot: `x` square to the groove, `y` against its direction. */
-      readonly members: readonly { readonly p: number; readonly x: number; readonly y: number }[];
+      readonly members: readonly Member[];
+      /** One of them that does not lie on the pivot. */
+      readonly lead: Member;
     }
   /** A body whose direction is driven, moved until each of two of its points is on a locus. */
   | {

@@ -35,10 +35,10 @@ export function rowsOf(
  * @example rankOf([[1, 0], [2, 0], [0, 3]]) // → 2
  */
 export function rankOf(rows: readonly (readonly number[])[]): number {
-  const width = rows[0]?.length ?? 0;
-  if (width === 0) return 0;
-  const values = singularValues(rows.flat(), rows.length, width);
-  const most = values[0] ?? 0;
+  const numbers = rows.flat();
+  if (numbers.length === 0) return 0;
+  const values = singularValues(numbers, rows.length, numbers.length / rows.length);
+  const most = Math.max(...values);
   return values.filter((value) => value > RANK_TOLERANCE * most).length;
 }
 

@@ -1,4 +1,4 @@
-import { at, givenAt, wholeAt } from '@/lib/numeric/at';
+import { at, givenAt, nth, wholeAt } from '@/lib/numeric/at';
 import type { Point } from '@/lib/geometry/point';
 import { branchIn } from '@/lib/kinematics/linkage/solver/branch';
 import { requireDrive } from '@/lib/kinematics/linkage/solver/drive';
@@ -97,15 +97,24 @@ export function solveLinkage(
   { branch = branchOf(plan), from = plan.model.start }: SolveOptions = {},
 ): LinkageOutcome {
   requireDrive('solveLinkage', plan, drive);
-  const pose = Float64Array.from(from);
+  return told(plan, Float64Array.from(from), drive, branch);
+}
+
+/** Settle `pose`, and tell what that came to. */
+function told(
+  plan: Plan,
+  pose: Float64Array,
+  drive: ArrayLike<number>,
+  branch: Int8Array,
+): LinkageOutcome {
   const report = new Int32Array(1);
   runSteps(plan, drive, { branch, expected: undefined }, pose, report);
   const slack = slackOf(plan);
   const points = named(plan, pose);
   if (slack >= 0) return { outcome: 'closes', points, slack };
-  const step = plan.steps[wholeAt(report, 0)];
-  const failing = (step?.points ?? []).map((p) => plan.model.names[p] ?? '');
-  return { outcome: 'does-not-close', by: -slack, at: failing, points };
+  const failing = plan.steps[wholeAt(report, 0)]?.points ?? [];
+  const names = failing.map((p) => nth(plan.model.names, p));
+  return { outcome: 'does-not-close', by: -slack, at: names, points };
 }
 
 /** How fast every point moves, or why nothing can be said. */
@@ -131,17 +140,13 @@ export function moveLinkage(
   drive: ArrayLike<number>,
   speeds: ArrayLike<number>,
   accelerations: ArrayLike<number>,
-  options: SolveOptions = {},
+  { branch = branchOf(plan), from = plan.model.start }: SolveOptions = {},
 ): MotionOutcome {
-  requireDrive('moveLinkage', plan, speeds);
-  requireDrive('moveLinkage', plan, accelerations);
-  const placed = solveLinkage(plan, drive, options);
+  for (const given of [drive, speeds, accelerations]) requireDrive('moveLinkage', plan, given);
+  const pose = Float64Array.from(from);
+  const placed = told(plan, pose, drive, branch);
   if (placed.outcome === 'does-not-close') return placed;
-  const pose = Float64Array.from(
-    plan.model.names.flatMap((name) => [placed.points[name]?.x ?? 0, placed.points[name]?.y ?? 0]),
-  );
-  const velocity = new Float64Array(pose.length);
-  const acceleration = new Float64Array(pose.length);
+  const [velocity, acceleration] = [startPose(plan), startPose(plan)];
   if (!rateLinkage(plan, { pose, drive, speeds, accelerations, velocity, acceleration })) {
     return { outcome: 'dead-centre', points: placed.points };
   }

@@ -87,7 +87,7 @@ function takeCarry({ rigid }: Extract<Method, { kind: 'carry' }>, pose: Float64A
 }
 
 function takeAim(
-  { pivot, target, off, members }: Extract<Method, { kind: 'aim' }>,
+  { pivot, target, off, members, lead }: Extract<Method, { kind: 'aim' }>,
   k: number,
   pose: Float64Array,
   { branch, expected }: Choice,
@@ -100,8 +100,7 @@ function takeAim(
   const away = Math.sqrt(dx * dx + dy * dy);
   const swing = away > 0 ? Math.acos(Math.min(Math.max(off / away, -1), 1)) : 0;
   const towards = Math.atan2(dy, dx);
-  const lead = members[0];
-  if (expected && lead) {
+  if (expected) {
     // The lead turned to the target, and on which side of that it is expected.
     const ahead = lead.x * Math.cos(towards) - lead.y * Math.sin(towards);
     const aside = lead.x * Math.sin(towards) + lead.y * Math.cos(towards);
