@@ -2,15 +2,18 @@
 
 import clsx from 'clsx';
 import { useSearchParams } from 'next/navigation';
+import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Loading } from '@/components/ui/loading';
 import { Notice } from '@/components/ui/notice';
 import { Empty } from '@/components/ui/panel';
 import { sentenceFor } from '@/lib/browser/problem';
 import { useClassProgress } from '@/lib/browser/use-class-progress';
-import type { ClassProgress as Progress } from '@/lib/schemas/class-progress';
+import type { ClassProgress as Progress, LessonColumn } from '@/lib/schemas/class-progress';
 import { ExercisesTable } from './exercises-table';
 import { LessonsTable } from './lessons-table';
+import { ProgressControls } from './progress-controls';
+import { firstChoice, viewProgress } from './progress-view';
 
 /** The lesson opened, kept in the address so that it can be handed on and gone back from. */
 function openLesson(lessonId: string | null): void {
@@ -46,24 +49,39 @@ function ProgressTables({ progress }: Readonly<{ progress: Progress }>) {
   if (progress.lessons.length === 0) {
     return (
       <Empty title="Nothing is set yet">
-        Set a lesson below, and everybody’s pegs for it appear here.
+        Set a lesson under Work, and everybody’s pegs for it appear here.
       </Empty>
     );
   }
   if (progress.learners.length === 0) {
     return (
       <Empty title="Nobody learns in this class yet">
-        Once the administrator has put somebody into it, their pegs appear here.
+        Once somebody is in it, their pegs appear here.
       </Empty>
     );
   }
+  return <ChosenProgress progress={progress} lesson={lesson} />;
+}
+
+/** The table of what is chosen, under what chooses it. */
+function ChosenProgress({
+  progress,
+  lesson,
+}: Readonly<{ progress: Progress; lesson: LessonColumn | undefined }>) {
+  const [choice, setChoice] = useState(firstChoice);
+  const view = viewProgress(progress, choice, lesson?.lessonId ?? null);
+  const shown = { ...progress, learners: [...view.learners] };
+  const csvHref = `/api/classes/${progress.classId}/progress/csv`;
   return (
     <>
       <LessonChoice progress={progress} opened={lesson?.lessonId ?? null} />
-      {lesson ? (
-        <ExercisesTable progress={progress} lesson={lesson} />
+      <ProgressControls choice={choice} onChoose={setChoice} view={view} csvHref={csvHref} />
+      {view.fitting === 0 ? (
+        <Empty title="Nobody is like that">Choose otherwise, and they are here again.</Empty>
+      ) : lesson ? (
+        <ExercisesTable progress={shown} lesson={lesson} />
       ) : (
-        <LessonsTable progress={progress} onOpen={openLesson} />
+        <LessonsTable progress={shown} onOpen={openLesson} />
       )}
     </>
   );

@@ -60,13 +60,14 @@ function ExerciseMark({ classId, cell, about }: ExerciseMarkProps) {
     <Link
       href={`/classes/${classId}/attempts/${cell.attemptId}`}
       prefetch={false}
-      aria-label={`${about}: ${markWord(cell.mark)}, ${tries}${cell.late ? ', late' : ''}`}
+      aria-label={`${about}: ${markWord(cell.mark)}, ${tries}${cell.late ? ', late' : ''}${cell.overridden ? ', marked otherwise by an instructor' : ''}`}
       className="link-target flex-col !items-start leading-tight hover:underline"
     >
       <MarkSign mark={cell.mark} />
       <span className="pl-5 text-[0.9375rem] text-pencil">
         {tries}
         {cell.late ? <span className="font-semibold text-madder"> · late</span> : null}
+        {cell.overridden ? <span className="text-plum"> · changed</span> : null}
       </span>
     </Link>
   );

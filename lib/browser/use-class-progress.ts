@@ -2,19 +2,28 @@
 
 import { useQuery } from '@tanstack/react-query';
 import type { ClassProgress } from '@/lib/schemas/class-progress';
-import { fetchJson } from './fetch-json';
+import { fetchIfChanged, type Kept } from './fetch-if-changed';
 import { queryKeys } from './query-keys';
 
 /** How often an open page looks for new answers, in milliseconds; a page in the background does not. */
-const LOOK_AGAIN = 20_000;
+const LOOK_AGAIN = 4_000;
 
-/** The progress of a class, looked at again while the page is open. */
+/**
+ * The progress of a class, looked at again every few seconds while the page is seen. As long as
+ * nothing has changed the server answers so, and sends nothing else.
+ */
 export function useClassProgress(classId: string, initial: ClassProgress | null = null) {
-  return useQuery({
-    queryKey: queryKeys.classProgress(classId),
-    queryFn: ({ signal }) =>
-      fetchJson<ClassProgress>(`/api/classes/${encodeURIComponent(classId)}/progress`, { signal }),
-    initialData: initial ?? undefined,
+  const queryKey = queryKeys.classProgress(classId);
+  return useQuery<Kept<ClassProgress>, Error, ClassProgress>({
+    queryKey,
+    queryFn: ({ signal, client }) =>
+      fetchIfChanged(
+        `/api/classes/${encodeURIComponent(classId)}/progress`,
+        client.getQueryData<Kept<ClassProgress>>(queryKey),
+        signal,
+      ),
+    select: ({ value }) => value,
+    initialData: initial === null ? undefined : { tag: null, value: initial },
     refetchInterval: LOOK_AGAIN,
   });
 }

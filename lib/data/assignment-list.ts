@@ -127,7 +127,10 @@ const listSql = `
         and not exists (
           select 1 from assignment_items i where i.assignment_id = a.id and not exists (
             select 1 from counted_attempts c join attempts t on t.id = c.attempt_id
-            where c.item_id = i.id and c.learner_id = l.id and t.verdict = 'right'))) as done
+            where c.item_id = i.id and c.learner_id = l.id and coalesce((
+              select v.verdict from overrides v
+              where v.attempt_id = t.id and v.class_id = g.id
+              order by v.created_at desc limit 1), t.verdict) = 'right'))) as done
   from class_groups g
   join assignments a on a.class_id = g.id
   join people setter on setter.id = a.set_by

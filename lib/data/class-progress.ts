@@ -8,6 +8,7 @@ import type { ClassProgress, Mark } from '@/lib/schemas/class-progress';
 import { isId, staffOfClass, staffValues } from './class-right';
 import { exerciseTitle, lessonName, lessonOfExercise } from './lesson-titles';
 import { skillName, skillsOfLesson } from './pegs';
+import { latestOverride, verdictRank } from './verdicts';
 
 /**
  * The progress of a class, for its instructors and the administrator; null for anybody else. One
@@ -84,10 +85,17 @@ function cellOf(
   found: MarkRow | undefined,
 ): ClassProgress['learners'][number]['lessons'][number]['exercises'][number] {
   if (found === undefined) {
-    return { exerciseId, mark: 'none', attempts: 0, attemptId: null, late: false };
+    return {
+      exerciseId,
+      mark: 'none',
+      attempts: 0,
+      attemptId: null,
+      late: false,
+      overridden: false,
+    };
   }
-  const [, , mark, attemptId, late, attempts] = found;
-  return { exerciseId, mark, attempts, attemptId, late };
+  const [, , mark, attemptId, late, attempts, overridden] = found;
+  return { exerciseId, mark, attempts, attemptId, late, overridden };
 }
 
 interface ItemRow {
@@ -128,8 +136,8 @@ const enrolled = `
 /** Learner, skill; closed rounds looked at, right unaided among them, on so many dates. */
 type PegRow = readonly [string, string, number, number, number];
 
-/** Learner, exercise; the best attempt's verdict and id, whether it was late, and how many. */
-type MarkRow = readonly [string, string, Mark, string, boolean, number];
+/** Learner, exercise; the verdict and id of the attempt that stands, late, how many, overridden. */
+type MarkRow = readonly [string, string, Mark, string, boolean, number, boolean];
 
 /** Both as JSON, which costs the server a tenth of as many rows. */
 interface StandingRow {
@@ -150,23 +158,31 @@ const pegSql = `
   group by e.id, wanted.skill`;
 
 /**
- * The best counted attempt of each learner and exercise: right before partly before wrong, then the
- * latest. An attempt that counts for two assignments is one attempt, late when it was for both.
+ * How each learner stands with each exercise: for every assignment the best or the latest of the
+ * attempts that count, as its rule says, and of these the best. The best is right before partly
+ * before wrong, then in time before late, then the latest. What was stored as late is late as long as
+ * it lies after the due moment that the learner has now: more time, given later, helps.
  */
 const markSql = `
-  select distinct on (t.learner_id, a.exercise_id)
-    json_build_array(t.learner_id, a.exercise_id, a.verdict, a.id, t.late,
-      count(*) over (partition by t.learner_id, a.exercise_id)) as mark
+  select distinct on (t.learner_id, t.exercise_id)
+    json_build_array(t.learner_id, t.exercise_id, t.verdict, t.attempt_id, t.late,
+      max(t.attempts) over (partition by t.learner_id, t.exercise_id), t.overridden) as mark
   from (
-    select c.learner_id, c.attempt_id, bool_and(c.late) as late
+    select distinct on (c.learner_id, c.item_id) c.learner_id, i.exercise_id, c.attempt_id, c.n,
+      coalesce(o.verdict, a.verdict) as verdict, o.verdict is not null as overridden,
+      c.late and a.created_at > greatest(s.due_at, x.due_at) as late,
+      count(*) over (partition by c.learner_id, c.item_id) as attempts
     from (${enrolled}) e
     join counted_attempts c on c.learner_id = e.id
     join assignment_items i on i.id = c.item_id
     join assignments s on s.id = i.assignment_id and s.class_id = $1 and s.withdrawn_at is null
-    group by c.learner_id, c.attempt_id) t
-  join attempts a on a.id = t.attempt_id
-  order by t.learner_id, a.exercise_id,
-    array_position(array['right', 'partly', 'wrong'], a.verdict), a.created_at desc`;
+    join attempts a on a.id = c.attempt_id
+    left join extensions x on x.assignment_id = s.id and x.learner_id = c.learner_id
+    ${latestOverride('a')}
+    order by c.learner_id, c.item_id, case when s.counting = 'latest' then -c.n end,
+      ${verdictRank('coalesce(o.verdict, a.verdict)')},
+      c.late and a.created_at > greatest(s.due_at, x.due_at), c.n desc) t
+  order by t.learner_id, t.exercise_id, ${verdictRank('t.verdict')}, t.late, t.n desc`;
 
 const standingSql = `
   select coalesce((select json_agg(peg) from (${pegSql}) p), '[]') as pegs,

@@ -9,6 +9,8 @@ import { isId, staffOfClass, staffValues } from './class-right';
 import { exerciseTitle, lessonName, lessonOfExercise, type LessonName } from './lesson-titles';
 import { lastRoundsSql, pegViews, skillRounds, skillsOfLesson, type LastRoundRow } from './pegs';
 import { viewAttempt, type KeptMarking } from './round-record';
+import { latestOverride } from './verdicts';
+import { commentsOf, overridesOf, type AttemptComment, type AttemptOverride } from './attempt-talk';
 
 /** A counted attempt in a list. */
 export interface CountedAttemptListed {
@@ -52,6 +54,10 @@ export interface AttemptInClass {
   readonly hintsTaken: number;
   readonly solutionSeen: boolean;
   readonly late: boolean;
+  /** What has been said about it, the first first. */
+  readonly comments: readonly AttemptComment[];
+  /** How it was marked otherwise in this class, the last of which holds. */
+  readonly overrides: readonly AttemptOverride[];
   /** When the learner answered by their own clock, if that was away from the network. */
   readonly answeredAt: string | null;
 }
@@ -153,13 +159,13 @@ const learnerSql = `
       where s.class_id = g.id and s.withdrawn_at is null), '[]') as set,
     coalesce((
       select json_agg(json_build_object('attemptId', a.id, 'exerciseId', a.exercise_id,
-        'verdict', a.verdict, 'createdAt', a.created_at, 'late', c.late) order by a.created_at desc)
+        'verdict', coalesce(o.verdict, a.verdict), 'createdAt', a.created_at, 'late', c.late) order by a.created_at desc)
       from (
         select c.attempt_id, bool_and(c.late) as late from counted_attempts c
         join assignment_items i on i.id = c.item_id
         join assignments s on s.id = i.assignment_id and s.class_id = g.id
-        where c.learner_id = l.id and s.withdrawn_at is null group by c.attempt_id) c
-      join attempts a on a.id = c.attempt_id), '[]') as attempts
+        where c.learner_id = l.id group by c.attempt_id) c
+      join attempts a on a.id = c.attempt_id ${latestOverride('a')}), '[]') as attempts
   from class_groups g
   join memberships m on m.class_id = g.id and m.role = 'learner' and m.left_at is null
   join people p on p.id = m.person_id
@@ -181,6 +187,7 @@ const attemptSql = `
     l.id as "learnerId", p.name, a.exercise_id as "exerciseId", r.shown, r.units, a.response,
     a.marking, a.credit, a.unaided, r.hints_taken as "hintsTaken",
     r.solution_seen_at is not null as "solutionSeen", c.late, a.answered_at as "answeredAt",
+    ${commentsOf} as comments, ${overridesOf} as overrides,
     a.created_at as "createdAt"
   from class_groups g
   join memberships m on m.class_id = g.id and m.role = 'learner' and m.left_at is null
@@ -192,5 +199,5 @@ const attemptSql = `
     select bool_and(c.late) as late from counted_attempts c
     join assignment_items i on i.id = c.item_id
     join assignments s on s.id = i.assignment_id and s.class_id = g.id
-    where c.attempt_id = a.id and s.withdrawn_at is null having count(*) > 0) c on true
+    where c.attempt_id = a.id having count(*) > 0) c on true
   where ${staffOfClass}`;

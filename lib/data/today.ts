@@ -13,6 +13,8 @@ export interface SetExercise {
   readonly title: string;
   readonly lesson: LessonName | null;
   readonly mark: 'none' | 'right' | 'partly' | 'wrong';
+  /** How many more attempts count; null for any number. */
+  readonly attemptsLeft: number | null;
 }
 
 /** Work that is set to the viewer. */
@@ -24,6 +26,9 @@ export interface SetWork {
   readonly dueAt: string;
   readonly timeZone: string;
   readonly overdue: boolean;
+  /** Whether the viewer has been given more time than the class. */
+  readonly extended: boolean;
+  readonly lateWork: 'marked' | 'closed';
   readonly exercises: readonly SetExercise[];
   readonly done: number;
 }
@@ -70,13 +75,14 @@ export async function findToday(viewer: Viewer, now: Date = presentTime()): Prom
 }
 
 function workOf({ items, dueAt, ...rest }: SetRow, now: Date): SetWork {
-  const exercises = items.map(({ exerciseId, lessonId, mark }) => {
+  const exercises = items.map(({ exerciseId, lessonId, mark, attemptsLeft }) => {
     const lesson = lessonId ?? lessonOfExercise(exerciseId);
     return {
       exerciseId,
       title: exerciseTitle(exerciseId),
       lesson: lesson === null ? null : lessonName(lesson),
       mark,
+      attemptsLeft,
     };
   });
   const done = exercises.filter(({ mark }) => mark === 'right').length;
@@ -108,10 +114,13 @@ interface SetRow {
   readonly note: string;
   readonly dueAt: Date;
   readonly timeZone: string;
+  readonly extended: boolean;
+  readonly lateWork: SetWork['lateWork'];
   readonly items: readonly {
     readonly exerciseId: string;
     readonly lessonId: string | null;
     readonly mark: SetExercise['mark'];
+    readonly attemptsLeft: number | null;
   }[];
 }
 
@@ -119,11 +128,21 @@ const setSql = `
   select * from (
     select a.id as "assignmentId", g.id as "classId", g.name as "className", a.note,
       greatest(a.due_at, e.due_at) as "dueAt", g.time_zone as "timeZone",
+      e.due_at > a.due_at is true as extended, a.late_work as "lateWork",
       (select json_agg(json_build_object('exerciseId', i.exercise_id, 'lessonId', i.lesson_id,
+          'attemptsLeft', greatest(0, a.attempts_allowed - (
+            select count(*) from counted_attempts c
+            where c.item_id = i.id and c.learner_id = $2)),
           'mark', coalesce((
-            select t.verdict from counted_attempts c join attempts t on t.id = c.attempt_id
+            select coalesce(v.verdict, t.verdict) as stands
+            from counted_attempts c join attempts t on t.id = c.attempt_id
+            left join lateral (
+              select o.verdict from overrides o where o.attempt_id = t.id and o.class_id = g.id
+              order by o.created_at desc limit 1) v on true
             where c.item_id = i.id and c.learner_id = $2
-            order by array_position(array['right', 'partly', 'wrong'], t.verdict) limit 1), 'none'))
+            order by case when a.counting = 'latest' then -c.n end,
+              array_position(array['right', 'partly', 'wrong'], coalesce(v.verdict, t.verdict))
+            limit 1), 'none'))
         order by i.position) from assignment_items i where i.assignment_id = a.id) as items
     from memberships m
     join class_groups g on g.id = m.class_id and g.archived_at is null

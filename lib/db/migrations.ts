@@ -16,6 +16,7 @@ import { createCalendarAddresses } from '@/migrations/20261201T1002-create-calen
 import { createInvitations } from '@/migrations/20261201T1100-create-invitations';
 import { widenOneTimeLinks } from '@/migrations/20261201T1101-widen-one-time-links';
 import { indexMembershipsByClass } from '@/migrations/20261201T1200-index-memberships-by-class';
+import { widenComments } from '@/migrations/20261201T1201-widen-comments';
 import type { Migration } from './migration';
 
 /** Every change, in order; a name, once released, never changes. */
@@ -38,4 +39,5 @@ export const migrations: readonly { readonly name: string; readonly migration: M
   { name: '20261201T1100-create-invitations', migration: createInvitations },
   { name: '20261201T1101-widen-one-time-links', migration: widenOneTimeLinks },
   { name: '20261201T1200-index-memberships-by-class', migration: indexMembershipsByClass },
+  { name: '20261201T1201-widen-comments', migration: widenComments },
 ];

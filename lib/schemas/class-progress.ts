@@ -30,9 +30,11 @@ const exerciseCellSchema = z.strictObject({
   mark: z.enum(marks),
   /** Counted attempts so far. */
   attempts: z.number(),
-  /** The best one: right before partly before wrong, then the latest. */
+  /** The one that stands: the best or the latest, as the assignment says. */
   attemptId: z.nullable(z.string()),
   late: z.boolean(),
+  /** Whether an instructor has marked it otherwise than it was marked. */
+  overridden: z.boolean(),
 });
 
 const lessonCellSchema = z.strictObject({

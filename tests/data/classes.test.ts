@@ -140,7 +140,7 @@ describe('the progress of a class', () => {
     expect(progress?.learners.map(({ name }) => name)).toEqual(['Abe Able', 'Ida Idle']);
     const [able, nobody] = progress?.learners ?? [];
     expect(able?.lessons[0]?.exercises).toEqual([
-      { exerciseId, mark: 'right', attempts: 2, attemptId: best, late: false },
+      { exerciseId, mark: 'right', attempts: 2, attemptId: best, late: false, overridden: false },
     ]);
     expect(able?.lessons[0]?.pegs.map(({ state }) => state)).toEqual([
       'started',

@@ -63,6 +63,7 @@ export const screens: readonly Screen[] = [
     by: ['nobody', 'learner', 'instructor'] as const,
   })),
   { name: 'today', path: '/today', by: ['learner'] },
+  { name: 'feedback', path: '/feedback', by: ['learner'] },
   { name: 'account', path: '/account', by: known },
   {
     name: 'calendar-address',
@@ -81,7 +82,7 @@ export const screens: readonly Screen[] = [
     by: ['administrator'],
     prepare: firstClass,
   },
-  ...['work', 'people', 'settings'].map((section) => ({
+  ...['work', 'sticking-points', 'people', 'settings'].map((section) => ({
     name: `class-${section}`,
     path: '/classes',
     by: ['instructor'] as const,

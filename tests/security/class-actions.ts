@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import { only, staffOfTheClass, type ActionOutcome, type ActionRow } from './endpoint';
+import { forSignedIn, only, staffOfTheClass, type ActionOutcome, type ActionRow } from './endpoint';
 import type { Planted } from './planted';
 
 const page =
@@ -142,5 +142,32 @@ export const classActions: readonly ActionRow[] = [
     bound: async ({ newClass }) => [await newClass({ archivedAt: new Date() })],
     form: () => ({}),
     outcome: byStaff,
+  },
+  {
+    kind: 'action',
+    file: 'app/classes/[id]/attempts/[attemptId]/actions.ts',
+    name: 'comment',
+    on: ({ classId, attemptId }) => `/classes/${classId}/attempts/${attemptId}`,
+    bound: ({ classId, attemptId }) => [classId, attemptId],
+    form: () => ({ body: 'Look at the second pin again.' }),
+    outcome: byStaff,
+  },
+  {
+    // Nothing is changed, since it stands so already: refused for everybody, and for others as missing.
+    kind: 'action',
+    file: 'app/classes/[id]/attempts/[attemptId]/actions.ts',
+    name: 'markOtherwise',
+    on: ({ classId, attemptId }) => `/classes/${classId}/attempts/${attemptId}`,
+    bound: ({ classId, attemptId }) => [classId, attemptId],
+    form: () => ({ verdict: 'wrong', reason: 'As it was marked.' }),
+    outcome: byAdministrator,
+  },
+  {
+    kind: 'action',
+    file: 'app/feedback/actions.ts',
+    name: 'haveRead',
+    on: () => '/feedback',
+    form: () => ({}),
+    outcome: forSignedIn<ActionOutcome>('done', 'sign in'),
   },
 ];

@@ -59,6 +59,14 @@ export const handlers: readonly HandlerRow[] = [
   },
   {
     kind: 'handler',
+    method: 'GET',
+    route: '/api/classes/[id]/progress/csv',
+    at: ({ classId }) => `/api/classes/${classId}/progress/csv`,
+    outcome: only(staffOfTheClass, 200, 404, 401),
+    foreign: true,
+  },
+  {
+    kind: 'handler',
     method: 'POST',
     route: '/api/exercises/[id]/round',
     at: () => '/api/exercises/oval-from-pins/round',

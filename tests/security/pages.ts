@@ -24,6 +24,7 @@ export const pages: readonly PageRow[] = [
   { kind: 'page', route: '/sign-out', outcome: forSignedIn('shown', 'sent on') },
   { kind: 'page', route: '/home', outcome: forSignedIn('sent on', 'sign in') },
   { kind: 'page', route: '/today', outcome: forSignedIn('shown', 'sign in') },
+  { kind: 'page', route: '/feedback', outcome: forSignedIn('shown', 'sign in') },
   { kind: 'page', route: '/account', outcome: forSignedIn('shown', 'sign in') },
   {
     kind: 'page',
@@ -45,14 +46,16 @@ export const pages: readonly PageRow[] = [
     at: () => '/classes/not-an-id',
     outcome: forSignedIn('missing', 'sign in'),
   },
-  ...(['work', 'work/new', 'people', 'settings'] as const).map((section): PageRow => ({
-    kind: 'page',
-    route: `/classes/[id]/${section}`,
-    at: ({ classId }) => `/classes/${classId}/${section}`,
-    outcome: only(staffOfTheClass, 'shown', 'missing', 'sign in'),
-    holds: ({ canaries }) =>
-      section === 'people' ? canaries.classmateName.text : canaries.className.text,
-  })),
+  ...(['work', 'work/new', 'sticking-points', 'people', 'settings'] as const).map(
+    (section): PageRow => ({
+      kind: 'page',
+      route: `/classes/[id]/${section}`,
+      at: ({ classId }) => `/classes/${classId}/${section}`,
+      outcome: only(staffOfTheClass, 'shown', 'missing', 'sign in'),
+      holds: ({ canaries }) =>
+        section === 'people' ? canaries.classmateName.text : canaries.className.text,
+    }),
+  ),
   {
     kind: 'page',
     route: '/classes/[id]/work/[assignmentId]',

@@ -51,10 +51,28 @@ function SetRow({ work }: Readonly<{ work: SetWork }>) {
         ) : (
           sayDeadline(work.dueAt, work.timeZone)
         )}
+        {rulesFor(work).map((rule) => (
+          <span key={rule} className="block text-[0.9375rem] text-pencil">
+            {rule}
+          </span>
+        ))}
       </Cell>
       <Cell>{left === 0 ? <Done /> : `${left} ${left === 1 ? 'exercise' : 'exercises'}`}</Cell>
     </Row>
   );
+}
+
+/** What is worth knowing before answering: more time, a limit, and what happens to late work. */
+function rulesFor(work: SetWork): string[] {
+  const left = work.exercises.flatMap(({ mark, attemptsLeft }) =>
+    mark === 'right' || attemptsLeft === null ? [] : attemptsLeft,
+  );
+  const least = Math.min(...left);
+  return [
+    ...(work.extended ? ['more time, for you'] : []),
+    ...(work.lateWork === 'closed' ? ['no late work'] : []),
+    ...(left.length > 0 ? [least === 1 ? 'one attempt left' : `${least} attempts left`] : []),
+  ];
 }
 
 function Done() {

@@ -38,6 +38,7 @@ const progress: Progress = {
               attempts: 3,
               attemptId: 'a1',
               late: true,
+              overridden: false,
             },
             {
               exerciseId: 'drill-the-bars',
@@ -45,6 +46,7 @@ const progress: Progress = {
               attempts: 0,
               attemptId: null,
               late: false,
+              overridden: false,
             },
           ],
         },
@@ -63,6 +65,7 @@ const progress: Progress = {
             attempts: 0,
             attemptId: null,
             late: false,
+            overridden: false,
           })),
         },
       ],

@@ -27,6 +27,7 @@ export function ClassFrame({ found, children }: ClassFrameProps) {
         links={[
           { href: base, label: 'Progress' },
           { href: `${base}/work`, label: 'Work' },
+          { href: `${base}/sticking-points`, label: 'Sticking points' },
           { href: `${base}/people`, label: 'People' },
           { href: `${base}/settings`, label: 'Settings' },
         ]}

@@ -9,6 +9,7 @@ import { Section } from '@/components/ui/panel';
 import { requireViewer } from '@/lib/auth/viewer';
 import { findAttemptInClass } from '@/lib/data/class-work';
 import { AttemptFacts } from './_components/attempt-facts';
+import { AttemptTalk } from './_components/attempt-talk';
 import { AttemptParts } from './_components/attempt-parts';
 
 export const metadata: Metadata = { title: 'An answer' };
@@ -52,12 +53,15 @@ export default async function AttemptPage({ params }: AttemptPageProps) {
             <AttemptParts attempt={found.attempt} />
           </Section>
         </div>
-        <Section title="How it was marked">
-          <p className="mb-3 text-lg">
-            <MarkSign mark={found.attempt.verdict} />
-          </p>
-          <AttemptFacts found={found} />
-        </Section>
+        <div className="min-w-0">
+          <Section title="How it was marked">
+            <p className="mb-3 text-lg">
+              <MarkSign mark={found.attempt.verdict} />
+            </p>
+            <AttemptFacts found={found} />
+          </Section>
+          <AttemptTalk found={found} />
+        </div>
       </div>
     </Page>
   );

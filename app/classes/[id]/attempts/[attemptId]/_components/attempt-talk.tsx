@@ -1,0 +1,67 @@
+import { MarkSign } from '@/components/progress/mark';
+import { sayWhen } from '@/components/progress/say-due';
+import { ActionForm } from '@/components/ui/action-form';
+import { Section } from '@/components/ui/panel';
+import type { AttemptInClass } from '@/lib/data/class-work';
+import { comment, markOtherwise } from '../actions';
+
+/** What has been said about an answer, and the forms to say something and to mark it otherwise. */
+export function AttemptTalk({ found }: Readonly<{ found: AttemptInClass }>) {
+  const { classId, timeZone, attempt, comments, overrides } = found;
+  return (
+    <>
+      <Section title="Said about it">
+        {comments.length > 0 ? (
+          <ul className="mb-5 divide-y divide-rule border-y border-rule">
+            {comments.map(({ authorName, body, at, readAt }) => (
+              <li key={at} className="py-3">
+                <p className="max-w-measure whitespace-pre-line">{body}</p>
+                <p className="text-[0.9375rem] text-pencil">
+                  {authorName}, {sayWhen(at, timeZone)} ·{' '}
+                  {readAt === null ? 'not read yet' : `read ${sayWhen(readAt, timeZone)}`}
+                </p>
+              </li>
+            ))}
+          </ul>
+        ) : null}
+        <ActionForm
+          action={comment.bind(null, classId, attempt.attemptId)}
+          submit="Say it"
+          variant="secondary"
+          fields={[{ name: 'body', label: 'To the learner', rows: 4 }]}
+        />
+      </Section>
+      <Section title="Mark it otherwise">
+        {overrides.map(({ authorName, verdict, reason, at }) => (
+          <div key={at} className="mb-4 rounded border border-l-[6px] border-plum px-4 py-3">
+            <p>
+              Stands as <MarkSign mark={verdict} /> since {sayWhen(at, timeZone)}, by {authorName}
+            </p>
+            <p className="max-w-measure whitespace-pre-line">{reason}</p>
+          </div>
+        ))}
+        <p className="mb-4 max-w-measure text-[0.9375rem] text-pencil">
+          What was marked is kept and both are shown. It counts in this class; pegs stay as the
+          round left them.
+        </p>
+        <ActionForm
+          action={markOtherwise.bind(null, classId, attempt.attemptId)}
+          submit="Let it stand so"
+          variant="quiet"
+          fields={[
+            {
+              name: 'verdict',
+              label: 'It stands as',
+              options: [
+                { value: 'right', label: 'right' },
+                { value: 'partly', label: 'partly right' },
+                { value: 'wrong', label: 'not right yet' },
+              ],
+            },
+            { name: 'reason', label: 'Because', hint: 'The learner reads it.', rows: 3 },
+          ]}
+        />
+      </Section>
+    </>
+  );
+}
