@@ -4,12 +4,17 @@ import { useId, useState } from 'react';
 import { GivensTable } from '@/components/exercise/givens-table';
 import { Button } from '@/components/ui/button';
 import type { RoundView } from '@/lib/schemas/round';
+import { compareStep, type Compared, type StepResult } from './own-step';
 
 /** A worked example with its numbers: what is asked, what is given, and each step with its result. */
 export interface WorkedExampleView {
   readonly question: string;
   readonly givens: readonly RoundView['givens'][number][];
-  readonly steps: readonly { readonly text: string; readonly value: string }[];
+  readonly steps: readonly {
+    readonly text: string;
+    readonly value: string;
+    readonly result?: StepResult;
+  }[];
   readonly check?: string;
 }
 
@@ -70,6 +75,7 @@ interface StepProps {
 function Step({ step, hidden, next, onShow }: StepProps) {
   const id = useId();
   const [own, setOwn] = useState('');
+  const compared = compareStep(own, step.result);
   return (
     <div className="min-w-0">
       <p className="max-w-measure">{step.text}</p>
@@ -77,9 +83,7 @@ function Step({ step, hidden, next, onShow }: StepProps) {
         {hidden ? null : (
           <p className="font-mono font-semibold">
             {step.value}
-            {own === '' ? null : (
-              <span className="pl-3 font-normal text-pencil">you wrote: {own}</span>
-            )}
+            {own === '' ? null : <Own own={own} compared={compared} />}
           </p>
         )}
       </div>
@@ -96,15 +100,42 @@ function Step({ step, hidden, next, onShow }: StepProps) {
               maxLength={60}
               value={own}
               onChange={(event) => setOwn(event.target.value)}
+              aria-describedby={compared.outcome === 'refused' ? `${id}-refused` : undefined}
               className="min-h-11 w-44 rounded border border-pencil bg-paper px-3 py-2 font-mono"
             />
           </div>
           <Button variant="quiet" onClick={onShow}>
-            Show this step
+            {own === '' ? 'Show this step' : 'Compare'}
           </Button>
+          {compared.outcome === 'refused' ? (
+            <p id={`${id}-refused`} className="basis-full text-[0.9375rem] text-pencil">
+              {compared.message}
+            </p>
+          ) : null}
         </div>
       ) : null}
       {hidden ? <span className="hidden font-mono print:inline">………………</span> : null}
     </div>
+  );
+}
+
+const verdicts: Readonly<Record<Compared['outcome'], string>> = {
+  none: '',
+  agrees: ' ✓ that agrees',
+  differs: ' ✕ that is not the same: look where the two part',
+  refused: ' which could not be read',
+};
+
+/** What the learner wrote, and whether it comes to the same. */
+function Own({ own, compared }: { readonly own: string; readonly compared: Compared }) {
+  const tone = { agrees: 'text-leaf', differs: 'text-madder' } as const;
+  const { outcome } = compared;
+  return (
+    <span className="block font-normal text-pencil">
+      you wrote: {own}
+      <span className={outcome === 'agrees' || outcome === 'differs' ? tone[outcome] : undefined}>
+        {verdicts[outcome]}
+      </span>
+    </span>
   );
 }

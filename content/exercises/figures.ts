@@ -1,4 +1,5 @@
 import 'server-only';
+import type { Field } from '@/lib/quantities/field';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { pantographFigures } from './drawing-and-copying/pantograph.figures';
 import { trammelFigures } from './drawing-and-copying/trammel-and-oval.figures';
@@ -8,6 +9,8 @@ import { trainFigures } from './toothed-wheels/train-of-toothed-wheels.figures';
 export interface WorkedStep {
   readonly text: string;
   readonly value: string;
+  /** What it comes to, where that is one quantity: a learner's own is compared with it. */
+  readonly result?: { readonly value: number; readonly field: Field };
 }
 
 /** A worked example with the numbers drawn for this reader; its last steps fade first. */

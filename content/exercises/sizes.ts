@@ -1,6 +1,7 @@
 import type { Given } from '@/lib/marking/definition';
 import type { Source } from '@/lib/marking/source';
 import { within, type Tolerance } from '@/lib/marking/tolerance';
+import { lengthField } from '@/lib/quantities/field';
 import { lengthUnit } from '@/lib/quantities/units';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { write, writeNumber, writeParts } from '@/lib/quantities/write';
@@ -29,6 +30,11 @@ export function said(value: number, units: UnitSystem, places?: number): string 
 
 /** A number as it is written without a unit. */
 export const plain = writeNumber;
+
+/** A step of a worked example that comes to a length. */
+export function lengthStep(text: string, value: number, units: UnitSystem) {
+  return { text, value: said(value, units), result: { value, field: lengthField(units) } };
+}
 
 /** A given length. */
 export function givenLength(

@@ -5,7 +5,7 @@ import { createSource } from '@/lib/marking/source';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { write } from '@/lib/quantities/write';
 import type { LessonFigures, WorkedExample } from '../figures';
-import { drawSize, givenLength, givenNumber, inUnits, plain, said } from '../sizes';
+import { drawSize, givenLength, givenNumber, inUnits, lengthStep, plain, said } from '../sizes';
 
 const degree = Math.PI / 180;
 const elbow = { least: 30 * degree, most: 150 * degree };
@@ -65,6 +65,7 @@ function holesAndReach(units: UnitSystem, seed: number): WorkedExample {
   if (holes.outcome !== 'holes') throw new RangeError(`holesAndReach: ${holes.outcome}`);
   const { stylus } = pantographReach(equalBars(bar, holes.firstHole), 'middle-to-end', elbow);
   const say = (value: number) => said(value, units);
+  const step = (text: string, value: number) => lengthStep(text, value, units);
   return {
     question: 'Where do the holes go for this scale, and how large may the drawing be?',
     givens: [
@@ -79,21 +80,18 @@ function holesAndReach(units: UnitSystem, seed: number): WorkedExample {
       givenLength('ε', 'the stylus may stray by', stray, units),
     ],
     steps: [
-      {
-        text: 'The hole on the first bar, from the fixed pin: L ÷ k.',
-        value: say(holes.firstHole),
-      },
-      { text: 'The same share on the second bar, from the elbow.', value: say(holes.secondHole) },
+      step('The hole on the first bar, from the fixed pin: L ÷ k.', holes.firstHole),
+      step('The same share on the second bar, from the elbow.', holes.secondHole),
       {
         text: 'The bar that carries the stylus is as long as that share; the other short bar is what is left of L.',
         value: `${say(holes.stylusBar)} and ${say(holes.otherBar)}`,
       },
-      { text: 'The copy is high: k × H.', value: say(k * high) },
-      {
-        text: 'The depth within reach at the stylus, straight out: 2L × (sin of half the widest − sin of half the narrowest) ÷ k.',
-        value: say(stylus.most - stylus.least),
-      },
-      { text: 'What a stray of the stylus becomes at the pen.', value: say(strayAtPen(k, stray)) },
+      step('The copy is high: k × H.', k * high),
+      step(
+        'The depth within reach at the stylus, straight out: 2L × (sin of half the widest − sin of half the narrowest) ÷ k.',
+        stylus.most - stylus.least,
+      ),
+      step('What a stray of the stylus becomes at the pen.', strayAtPen(k, stray)),
     ],
     check: `The drawing, ${say(high)} high, has to fit into that depth; and the two short bars together make ${plain(holes.stylusBar + holes.otherBar)} again.`,
   };

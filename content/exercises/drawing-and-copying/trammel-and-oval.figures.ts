@@ -10,7 +10,7 @@ import { createSource } from '@/lib/marking/source';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { write } from '@/lib/quantities/write';
 import type { LessonFigures, WorkedExample } from '../figures';
-import { drawSize, givenLength, inUnits, plain, said } from '../sizes';
+import { drawSize, givenLength, inUnits, lengthStep, plain, said } from '../sizes';
 
 const degree = Math.PI / 180;
 
@@ -105,7 +105,7 @@ function porthole(units: UnitSystem, seed: number): WorkedExample {
   const pins = trammelForOval(length, width);
   const apart = pinsApart(pins);
   const edge = ellipsePerimeterRamanujan2({ semiMajor: length / 2, semiMinor: width / 2 });
-  const say = (value: number) => said(value, units);
+  const step = (text: string, value: number) => lengthStep(text, value, units);
   return {
     question:
       'Which pins, grooves and bar does the museum’s porthole need, and how far is it round the edge?',
@@ -116,18 +116,18 @@ function porthole(units: UnitSystem, seed: number): WorkedExample {
       givenLength('e', 'wood beyond pen and pin', beyond, units),
     ],
     steps: [
-      { text: 'Half of the length: from the pencil to the far pin.', value: say(pins.uprightPin) },
-      { text: 'Half of the width: from the pencil to the near pin.', value: say(pins.levelPin) },
-      { text: 'The pins apart: the difference of the two.', value: say(apart) },
-      {
-        text: 'Each pin travels twice that; add one slider for the groove.',
-        value: say(grooveLength(pins, slider)),
-      },
-      {
-        text: 'The bar: from the far pin to the pencil, and wood beyond both.',
-        value: say(barLength(pins, beyond)),
-      },
-      { text: 'Round the edge, by the rule.', value: say(edge) },
+      step('Half of the length: from the pencil to the far pin.', pins.uprightPin),
+      step('Half of the width: from the pencil to the near pin.', pins.levelPin),
+      step('The pins apart: the difference of the two.', apart),
+      step(
+        'Each pin travels twice that; add one slider for the groove.',
+        grooveLength(pins, slider),
+      ),
+      step(
+        'The bar: from the far pin to the pencil, and wood beyond both.',
+        barLength(pins, beyond),
+      ),
+      step('Round the edge, by the rule.', edge),
     ],
     check: `Round the edge must be more than the round of the mean diameter, ${plain((Math.PI * (length + width)) / 2, 1)}, and less than the box around it, ${plain(2 * (length + width), 1)}.`,
   };

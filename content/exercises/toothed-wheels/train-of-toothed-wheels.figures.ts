@@ -2,6 +2,7 @@ import { centreDistance } from '@/lib/kinematics/gear/mesh';
 import { gearProportions } from '@/lib/kinematics/gear/proportions';
 import { arborTurns, compoundTrain, type DriverAndDriven } from '@/lib/kinematics/train/ratio';
 import { createSource } from '@/lib/marking/source';
+import { turningField } from '@/lib/quantities/field';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { write } from '@/lib/quantities/write';
 import type { LessonFigures, WorkedExample } from '../figures';
@@ -75,6 +76,7 @@ function twoPairs(units: UnitSystem, seed: number): WorkedExample {
       {
         text: `First mesh, n₁ × z₁ ÷ z₂: ${crank} × ${z1} ÷ ${z2}.`,
         value: write(middle, 'rpm'),
+        result: { value: middle, field: turningField },
       },
       {
         text: 'The middle arbor: both its wheels turn as one.',
@@ -83,6 +85,7 @@ function twoPairs(units: UnitSystem, seed: number): WorkedExample {
       {
         text: `Second mesh, times z₃ ÷ z₄: times ${z3} ÷ ${z4}.`,
         value: write(last, 'rpm'),
+        result: { value: last, field: turningField },
       },
       {
         text: 'Count the meshes; each turns the sense round.',

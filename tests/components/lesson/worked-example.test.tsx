@@ -8,7 +8,11 @@ const worked: WorkedExampleView = {
   givens: [{ symbol: 'ℓ', label: 'Length', value: '540', unit: 'mm' }],
   steps: [
     { text: 'Half of the length', value: '270 mm' },
-    { text: 'Half of the width', value: '210 mm' },
+    {
+      text: 'Half of the width',
+      value: '210 mm',
+      result: { value: 210, field: { dimension: 'length', unit: 'mm' } },
+    },
     { text: 'Pins apart', value: '60 mm' },
   ],
   check: 'Run the pencil to both ends.',
@@ -28,12 +32,25 @@ describe('WorkedExample', () => {
     expect(screen.getByText('270 mm')).toBeVisible();
     expect(screen.queryByText('210 mm')).toBeNull();
     await user.type(screen.getByRole('textbox', { name: 'Yours first' }), '200');
-    await user.click(screen.getByRole('button', { name: 'Show this step' }));
+    await user.click(screen.getByRole('button', { name: 'Compare' }));
     expect(screen.getByText('210 mm')).toBeVisible();
-    expect(screen.getByText('you wrote: 200')).toBeVisible();
+    expect(screen.getByText(/^you wrote: 200/)).toHaveTextContent('✕ that is not the same');
     expect(screen.queryByText('60 mm')).toBeNull();
     await user.click(screen.getByRole('button', { name: 'Show this step' }));
     expect(screen.getByText('60 mm')).toBeVisible();
     expect(screen.getByText('Run the pencil to both ends.')).toBeVisible();
+  });
+
+  it.each([
+    ['21 cm', '✓ that agrees'],
+    ['209,5 mm', '✓ that agrees'],
+    ['8 17/64 in', '✓ that agrees'],
+    ['8 1/4', 'which could not be read'],
+  ])('reads %s as an answer is read', async (own, said) => {
+    const user = userEvent.setup();
+    render(<WorkedExample worked={worked} hidden={2} />);
+    await user.type(screen.getByRole('textbox', { name: 'Yours first' }), own);
+    await user.click(screen.getByRole('button', { name: 'Compare' }));
+    expect(screen.getByText(/^you wrote:/)).toHaveTextContent(said);
   });
 });
