@@ -34,7 +34,7 @@ export function DriveRail({ store, id }: DriveRailProps) {
   return (
     <div
       ref={rail}
-      className="grid gap-x-4 gap-y-1 @2xl:grid-cols-[auto_1fr_auto] @2xl:items-center"
+      className="grid gap-x-4 gap-y-1 @4xl:grid-cols-[auto_1fr_auto] @4xl:items-center"
     >
       <div className="flex gap-2">
         <button type="button" className={railButton('main')} onClick={() => store.run(!running)}>
@@ -76,7 +76,7 @@ export function DriveRail({ store, id }: DriveRailProps) {
         field={control.field}
         onChange={moveTo}
       />
-      <label className="flex items-center gap-3 @2xl:col-span-2">
+      <label className="flex items-center gap-3 @4xl:col-span-2">
         <span className="shrink-0 text-base">Pace</span>
         <input
           type="range"

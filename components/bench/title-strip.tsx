@@ -35,7 +35,7 @@ export function TitleStrip({ store, id, title, scale, locked }: TitleStripProps)
       </p>
       <dl
         ref={list}
-        className="grid auto-cols-auto grid-cols-[repeat(auto-fit,minmax(8rem,1fr))] @4xl:flex"
+        className="grid auto-cols-auto grid-cols-[repeat(auto-fit,minmax(7.5rem,1fr))] @4xl:flex"
       >
         {readouts.map(({ key, label, value }) => (
           <Cell key={key} name={key} label={label} value={value} />

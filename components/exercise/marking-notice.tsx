@@ -19,14 +19,16 @@ export function MarkingNotice({ attempt }: { readonly attempt: AttemptView }) {
         {attempt.message}
       </p>
       <ul className="mt-2 space-y-2">
-        {attempt.parts.map((part) => (
+        {attempt.parts.map((part, index) => (
           <li key={part.key}>
             <span className={clsx('font-semibold', part.right ? 'text-leaf' : 'text-madder')}>
               <span aria-hidden="true">{part.right ? '✓ ' : '✕ '}</span>
               {part.label}
               <span className="sr-only">{part.right ? ' is right' : ' is not right yet'}</span>
             </span>
-            {part.echo === '' ? null : <span className="pl-2 font-mono">{part.echo}</span>}
+            {saidBefore(attempt, index) ? null : (
+              <span className="pl-2 font-mono">{part.echo}</span>
+            )}
             {part.message === undefined ? null : <span className="block">{part.message}</span>}
           </li>
         ))}
@@ -34,4 +36,10 @@ export function MarkingNotice({ attempt }: { readonly attempt: AttemptView }) {
       {attempt.nextStep === '' ? null : <p className="mt-2 text-pencil">{attempt.nextStep}</p>}
     </div>
   );
+}
+
+/** The criteria of one setting all answer to the same words: those are said once. */
+function saidBefore({ parts }: AttemptView, index: number): boolean {
+  const echo = parts[index]?.echo ?? '';
+  return echo === '' || echo === parts[index - 1]?.echo;
 }

@@ -1,4 +1,4 @@
-import type { BenchSpec } from './bench-spec';
+import type { BenchSpec, TrainSpec } from './bench-spec';
 import { modelOf } from './model-of';
 import { toSvg } from './to-svg';
 
@@ -16,12 +16,17 @@ export function thumbnail(spec: BenchSpec, drive?: number): string {
 
 /** The same for any place of the drive: worked out once, to be asked for many times a second. */
 export function thumbnailAt(spec: BenchSpec): (drive?: number) => string {
-  const model = modelOf(spec);
+  const model = modelOf(spec.bench === 'train' ? withoutRims(spec) : spec);
   const from = model.admit(spec.drive ?? model.drive.start);
-  const showing = { tracing: spec.bench !== 'train', dimensions: false };
+  const showing = { tracing: true, dimensions: false };
   return (drive) => {
     const to = model.admit(drive ?? from);
     const swept = { from: Math.min(from, to), to: Math.max(from, to) };
     return toSvg(model.scene({ drive: to, swept }, showing));
   };
+}
+
+/** A train whose picture keeps no room for its rims. */
+function withoutRims(spec: TrainSpec): TrainSpec {
+  return { ...spec, hide: [...(spec.hide ?? []), 'teeth'] };
 }

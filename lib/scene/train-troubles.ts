@@ -1,4 +1,4 @@
-import type { Point } from '@/lib/geometry/point';
+import { between, type Point } from '@/lib/geometry/point';
 import { ruleText } from './measure';
 import type { Shape } from './scene';
 import { hatch, label, line, outline } from './strokes';
@@ -28,7 +28,10 @@ function gap({ first, second, state }: SetPair, setup: TrainSetup): readonly Sha
       radius: pitchRadius,
     })),
     line('limit', from, to),
-    label(ruleText(state.gap, setup.spec.units), to, { role: 'madder', nudge: { x: 0, y: -14 } }),
+    label(ruleText(state.gap, setup.spec.units), between(from, to, 0.5), {
+      role: 'madder',
+      nudge: { x: 0, y: 13 },
+    }),
   ];
 }
 

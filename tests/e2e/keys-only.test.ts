@@ -2,7 +2,7 @@ import type { Browser, Locator, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { exercises } from '@/content/exercises/registry';
 import { shownOptions } from '@/lib/marking/mark-choice';
-import { lessonPath, openExercise } from '../support/answering';
+import { lessonPath, openExercise, setByNotches, wantedOfBench } from '../support/answering';
 import { launchBrowser, openVisitor, signIn, type Visitor } from '../support/browser';
 import { demo, password } from '../support/people';
 import { keyOf, openVariant } from '../support/records';
@@ -92,5 +92,45 @@ describe('an exercise answered by keys alone', () => {
     await page.keyboard.press('Enter');
     const { key } = keyOf(await openVariant(person, 'lantern-wheel'));
     await section.getByText(key.hints[0] ?? '-').waitFor();
+  });
+
+  it('a setting: brought there by arrow keys, checked by Enter on the button', async () => {
+    await page.goto(lessonPath('pantograph'), { waitUntil: 'networkidle' });
+    const id = 'copy-at-three-to-two';
+    const section = await begin(id);
+    await setByNotches(section, await wantedOfBench(person, id), async (label, way) => {
+      await section.getByRole('spinbutton', { name: label, exact: true }).focus();
+      await page.keyboard.press(way === 'more' ? 'ArrowUp' : 'ArrowDown');
+    });
+    await tabTo(section.getByRole('button', { name: /^Check/ }));
+    await page.keyboard.press('Enter');
+    await section.getByRole('button', { name: 'New numbers' }).waitFor();
+  });
+
+  it('a design: chosen by arrow keys and typed', async () => {
+    const section = await begin('sign-for-the-board');
+    const form = section.locator('form');
+    for (const select of await form.locator('select').all()) {
+      await tabTo(select);
+      await page.keyboard.press('ArrowDown');
+      expect(await select.inputValue()).not.toBe('');
+    }
+    for (const field of await form.locator('fieldset input[type="text"]').all()) {
+      await tabTo(field);
+      await page.keyboard.type('100');
+    }
+    await tabTo(section.getByRole('button', { name: /^Check/ }));
+    await page.keyboard.press('Enter');
+    await section.getByRole('status').filter({ hasText: /[✓✕]/ }).first().waitFor();
+  });
+
+  it('the worked solution: asked for, confirmed in the same place, and read', async () => {
+    const section = await begin('how-large-the-copy');
+    const { key } = keyOf(await openVariant(person, 'how-large-the-copy'));
+    await tabTo(section.getByRole('button', { name: 'Worked solution' }));
+    await page.keyboard.press('Enter');
+    await tabTo(section.getByRole('button', { name: /^Yes, show it/ }));
+    await page.keyboard.press('Enter');
+    await section.getByText(key.solution[0] ?? '-', { exact: true }).waitFor();
   });
 });

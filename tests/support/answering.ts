@@ -9,9 +9,6 @@ import type { BenchSpec } from '@/lib/scene/bench-spec';
 import { modelOf } from '@/lib/scene/model-of';
 import { openVariant } from './records';
 
-/** How the fields are filled: typed, by keys alone, or by clicks wherever a click can do it. */
-export type Manner = 'typing' | 'keys';
-
 export function lessonPath(lessonId: string): string {
   const lesson = lessons.find(({ id }) => id === lessonId);
   if (!lesson) throw new Error(`There is no lesson ${lessonId}.`);
@@ -106,5 +103,39 @@ async function fillDesign(section: Locator, part: DesignPart, variant: Variant):
     const control = section.getByLabel(field.label, { exact: true });
     if (field.kind === 'stock') await control.selectOption(String(value));
     else await control.fill(write(Number(value), field.field.unit, 4));
+  }
+}
+
+/** What a round's setting wants of each of the bench's number controls, as their fields show it. */
+export async function wantedOfBench(email: string, exerciseId: string) {
+  const variant = await openVariant(email, exerciseId);
+  const definition = exercises.get(exerciseId);
+  const part = definition?.parts.find(({ kind }) => kind === 'setting');
+  const spec = definition?.figure?.(variant) as BenchSpec | undefined;
+  if (part?.kind !== 'setting' || !spec) throw new Error(`${exerciseId} sets no bench.`);
+  const answer = part.answer(variant);
+  return modelOf(spec).controls.flatMap((control) => {
+    const value = answer[control.key];
+    if (control.kind !== 'number' || value === undefined) return [];
+    const { unit, dimension } = control.field;
+    const shown = dimension === 'length' ? convert(Number(value), 'mm', unit) : Number(value);
+    return [{ label: control.label, step: control.step, shown }];
+  });
+}
+
+/** Brings a bench to what is wanted notch by notch, with whatever presses once. */
+export async function setByNotches(
+  section: Locator,
+  wanted: Awaited<ReturnType<typeof wantedOfBench>>,
+  press: (label: string, way: 'more' | 'less') => Promise<void>,
+): Promise<void> {
+  for (const { label, step, shown } of wanted) {
+    const field = section.getByRole('spinbutton', { name: label, exact: true });
+    for (let presses = 0; ; presses += 1) {
+      const off = shown - Number(await field.getAttribute('aria-valuenow'));
+      if (Math.abs(off) < step / 2) break;
+      if (presses > 200) throw new Error(`${label} does not come to ${shown}.`);
+      await press(label, off > 0 ? 'more' : 'less');
+    }
   }
 }

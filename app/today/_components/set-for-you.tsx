@@ -34,7 +34,7 @@ function SetRow({ work }: Readonly<{ work: SetWork }>) {
   const left = work.exercises.length - work.done;
   return (
     <Row>
-      <RowName>
+      <RowName className="min-w-44">
         {placesOf(work).map(({ path, title }) => (
           <Link key={path} href={path} prefetch={false} className="link link-target mr-4">
             {title}
@@ -45,7 +45,7 @@ function SetRow({ work }: Readonly<{ work: SetWork }>) {
           {work.note ? `: ${work.note}` : ''}
         </span>
       </RowName>
-      <Cell className="whitespace-nowrap">
+      <Cell className="sm:whitespace-nowrap">
         {work.overdue && left > 0 ? (
           <strong className="text-madder">{sayDeadline(work.dueAt, work.timeZone)}, late</strong>
         ) : (

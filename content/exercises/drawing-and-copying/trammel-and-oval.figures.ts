@@ -133,13 +133,17 @@ function porthole(units: UnitSystem, seed: number): WorkedExample {
   };
 }
 
+/** Three draws in eight fit: so many misses in a row mean that the ranges are wrong. */
+const mostTries = 200;
+
 function drawPorthole(units: UnitSystem, seed: number) {
   const source = createSource(seed);
-  for (;;) {
+  for (let tries = 0; tries < mostTries; tries += 1) {
     const length = drawSize(source, units, { mm: [400, 700, 20], in: [16, 28, 1] });
     const width = drawSize(source, units, { mm: [240, 420, 20], in: [9, 17, 1] });
     const slider = source.pick(units === 'metric' ? [40, 50, 60] : [1.5, 2, 2.5]);
     const beyond = source.pick(units === 'metric' ? [25, 30] : [1, 1.25]);
     if (width >= 0.5 * length && width <= 0.8 * length) return { length, width, slider, beyond };
   }
+  throw new RangeError(`drawPorthole: no fitting oval in ${mostTries} draws of seed ${seed}`);
 }

@@ -63,7 +63,7 @@ afterEach(() => {
   vi.unstubAllGlobals();
 });
 
-describe('a setting exercise', () => {
+describe('a setting exercise', { timeout: 60_000 }, () => {
   it('sends what the learner has set, not how the bench was found, and keeps it through a reload', async () => {
     const asked = serve(() => reply(halfRight({ parts: [] }), round));
     const user = userEvent.setup();
