@@ -52,7 +52,7 @@ export function grashofCount(bars: FourBarLengths): GrashofCount {
 }
 
 function classOf(
-  { crank, coupler, rocker, frame }: FourBarLengths,
+  { crank, rocker, frame }: FourBarLengths,
   shortest: number,
   toSpare: number,
   ends: number,
@@ -63,8 +63,7 @@ function classOf(
   if (ends > middle) return 'triple-rocker';
   if (frame === shortest) return 'double-crank';
   if (crank === shortest) return 'crank-rocker';
-  if (rocker === shortest) return 'rocker-crank';
-  return coupler === shortest ? 'double-rocker' : 'crank-rocker';
+  return rocker === shortest ? 'rocker-crank' : 'double-rocker';
 }
 
 /** How far the crank can turn, measured from the frame line to either side; 0 to π. */
