@@ -16,6 +16,26 @@ export function Points({ classId, points }: PointsProps) {
       </Empty>
     );
   }
+  const rest = points.slice(first);
+  return (
+    <>
+      <PointList classId={classId} points={points.slice(0, first)} />
+      {rest.length > 0 ? (
+        <details className="mt-3">
+          <summary className="min-h-11 py-2 font-semibold">
+            {rest.length === 1 ? 'One more slip' : `${rest.length} more slips`}
+          </summary>
+          <PointList classId={classId} points={rest} />
+        </details>
+      ) : null}
+    </>
+  );
+}
+
+/** What one evening has room for. */
+const first = 3;
+
+function PointList({ classId, points }: PointsProps) {
   return (
     <ol className="divide-y divide-rule border-y border-rule">
       {points.map((point) => (
