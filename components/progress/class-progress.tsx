@@ -17,19 +17,24 @@ import { firstChoice, viewProgress } from './progress-view';
 
 /** The lesson opened, kept in the address so that it can be handed on and gone back from. */
 function openLesson(lessonId: string | null): void {
-  window.history.pushState(null, '', lessonId === null ? '?' : `?lesson=${lessonId}`);
+  const asked = new URLSearchParams(window.location.search);
+  if (lessonId === null) asked.delete('lesson');
+  else asked.set('lesson', lessonId);
+  window.history.pushState(null, '', `?${asked}`);
 }
 
 interface ClassProgressProps {
   readonly classId: string;
   /** How it stood when the page was made; without it the page asks first. */
   readonly initial?: Progress | null;
+  /** Hidden for the projector: numbers stand for names, and nothing leads to anybody. */
+  readonly names?: 'shown' | 'hidden';
 }
 
 /** A class's progress, kept up to date by the page: all lessons, or one opened to its exercises. */
-export function ClassProgress({ classId, initial = null }: ClassProgressProps) {
-  const { data, error, refetch } = useClassProgress(classId, initial);
-  if (data) return <ProgressTables progress={data} />;
+export function ClassProgress({ classId, initial = null, names = 'shown' }: ClassProgressProps) {
+  const { data, error, refetch } = useClassProgress(classId, names, initial);
+  if (data) return <ProgressTables progress={data} names={names} />;
   if (!error) return <Loading lines={6} />;
   return (
     <>
@@ -43,7 +48,12 @@ export function ClassProgress({ classId, initial = null }: ClassProgressProps) {
   );
 }
 
-function ProgressTables({ progress }: Readonly<{ progress: Progress }>) {
+interface ProgressTablesProps {
+  readonly progress: Progress;
+  readonly names: 'shown' | 'hidden';
+}
+
+function ProgressTables({ progress, names }: ProgressTablesProps) {
   const opened = useSearchParams().get('lesson');
   const lesson = progress.lessons.find((one) => one.lessonId === opened);
   if (progress.lessons.length === 0) {
@@ -60,28 +70,36 @@ function ProgressTables({ progress }: Readonly<{ progress: Progress }>) {
       </Empty>
     );
   }
-  return <ChosenProgress progress={progress} lesson={lesson} />;
+  return <ChosenProgress progress={progress} names={names} lesson={lesson} />;
 }
 
 /** The table of what is chosen, under what chooses it. */
 function ChosenProgress({
   progress,
+  names,
   lesson,
-}: Readonly<{ progress: Progress; lesson: LessonColumn | undefined }>) {
+}: ProgressTablesProps & { readonly lesson: LessonColumn | undefined }) {
   const [choice, setChoice] = useState(firstChoice);
-  const view = viewProgress(progress, choice, lesson?.lessonId ?? null);
+  const lessonId = lesson?.lessonId ?? null;
+  const view = viewProgress(progress, choice, lessonId);
   const shown = { ...progress, learners: [...view.learners] };
-  const csvHref = `/api/classes/${progress.classId}/progress/csv`;
   return (
     <>
-      <LessonChoice progress={progress} opened={lesson?.lessonId ?? null} />
-      <ProgressControls choice={choice} onChoose={setChoice} view={view} csvHref={csvHref} />
+      <LessonChoice progress={progress} opened={lessonId} />
+      <ProgressControls
+        classId={progress.classId}
+        names={names}
+        lessonId={lessonId}
+        choice={choice}
+        onChoose={setChoice}
+        view={view}
+      />
       {view.fitting === 0 ? (
         <Empty title="Nobody is like that">Choose otherwise, and they are here again.</Empty>
       ) : lesson ? (
-        <ExercisesTable progress={shown} lesson={lesson} />
+        <ExercisesTable progress={shown} names={names} lesson={lesson} />
       ) : (
-        <LessonsTable progress={shown} onOpen={openLesson} />
+        <LessonsTable progress={shown} names={names} onOpen={openLesson} />
       )}
     </>
   );

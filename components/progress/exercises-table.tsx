@@ -6,11 +6,12 @@ import { MarkSign, markWord } from './mark';
 
 interface ExercisesTableProps {
   readonly progress: ClassProgress;
+  readonly names: 'shown' | 'hidden';
   readonly lesson: LessonColumn;
 }
 
 /** Learners × exercises of one lesson: how each went, each leading to the attempt itself. */
-export function ExercisesTable({ progress, lesson }: ExercisesTableProps) {
+export function ExercisesTable({ progress, names, lesson }: ExercisesTableProps) {
   return (
     <Table caption={`Learners by exercise of ${lesson.title}`}>
       <HeadRow>
@@ -27,7 +28,11 @@ export function ExercisesTable({ progress, lesson }: ExercisesTableProps) {
           return (
             <Row key={learner.learnerId}>
               <RowName className="sticky left-0 bg-paper">
-                <LearnerLink classId={progress.classId} learner={learner} />
+                <LearnerLink
+                  classId={progress.classId}
+                  learner={learner}
+                  hidden={names === 'hidden'}
+                />
               </RowName>
               {lesson.exercises.map((exercise) => (
                 <Cell key={exercise.exerciseId}>
@@ -54,8 +59,19 @@ interface ExerciseMarkProps {
 }
 
 function ExerciseMark({ classId, cell, about }: ExerciseMarkProps) {
-  if (!cell?.attemptId) return <MarkSign mark="none" />;
+  if (!cell || cell.attempts === 0) return <MarkSign mark={cell?.mark ?? 'not set'} />;
   const tries = cell.attempts === 1 ? '1 try' : `${cell.attempts} tries`;
+  const said = (
+    <>
+      <MarkSign mark={cell.mark} />
+      <span className="block pl-5 text-[0.9375rem] text-pencil">
+        {tries}
+        {cell.late ? <span className="font-semibold text-madder"> · late</span> : null}
+        {cell.overridden ? <span className="text-plum"> · changed</span> : null}
+      </span>
+    </>
+  );
+  if (cell.attemptId === null) return said;
   return (
     <Link
       href={`/classes/${classId}/attempts/${cell.attemptId}`}
@@ -63,12 +79,7 @@ function ExerciseMark({ classId, cell, about }: ExerciseMarkProps) {
       aria-label={`${about}: ${markWord(cell.mark)}, ${tries}${cell.late ? ', late' : ''}${cell.overridden ? ', marked otherwise by an instructor' : ''}`}
       className="link-target flex-col !items-start leading-tight hover:underline"
     >
-      <MarkSign mark={cell.mark} />
-      <span className="pl-5 text-[0.9375rem] text-pencil">
-        {tries}
-        {cell.late ? <span className="font-semibold text-madder"> · late</span> : null}
-        {cell.overridden ? <span className="text-plum"> · changed</span> : null}
-      </span>
+      {said}
     </Link>
   );
 }

@@ -1,17 +1,24 @@
+import clsx from 'clsx';
 import { Cell, ColumnName, HeadRow, Row, RowName, Table } from '@/components/ui/table';
-import type { ClassProgress, LearnerProgress, LessonColumn } from '@/lib/schemas/class-progress';
+import type {
+  ClassProgress,
+  ExerciseCell,
+  LearnerProgress,
+  LessonColumn,
+} from '@/lib/schemas/class-progress';
 import { LearnerLink } from './learner-link';
 import { PegRail } from './peg-rail';
 import { sayDue } from './say-due';
 
 interface LessonsTableProps {
   readonly progress: ClassProgress;
+  readonly names: 'shown' | 'hidden';
   /** Opens one lesson to its exercises. */
   readonly onOpen: (lessonId: string) => void;
 }
 
 /** Learners × lessons: the lesson's peg rail in each cell, and how much of what was set is left. */
-export function LessonsTable({ progress, onOpen }: LessonsTableProps) {
+export function LessonsTable({ progress, names, onOpen }: LessonsTableProps) {
   return (
     <Table caption="Learners by lesson">
       <HeadRow>
@@ -36,7 +43,11 @@ export function LessonsTable({ progress, onOpen }: LessonsTableProps) {
         {progress.learners.map((learner) => (
           <Row key={learner.learnerId}>
             <RowName className="sticky left-0 bg-paper">
-              <LearnerLink classId={progress.classId} learner={learner} />
+              <LearnerLink
+                classId={progress.classId}
+                learner={learner}
+                hidden={names === 'hidden'}
+              />
             </RowName>
             {progress.lessons.map((lesson) => (
               <Cell key={lesson.lessonId}>
@@ -56,20 +67,23 @@ function LessonCell({
 }: Readonly<{ learner: LearnerProgress; lesson: LessonColumn }>) {
   const cell = learner.lessons.find((one) => one.lessonId === lesson.lessonId);
   if (!cell) return null;
-  const begun = cell.exercises.some((exercise) => exercise.attempts > 0);
-  const left = cell.exercises.filter((exercise) => exercise.mark !== 'right').length;
   return (
     <span className="flex flex-wrap items-center gap-x-3">
       <PegRail pegs={cell.pegs} />
-      {begun ? (
-        <span className="text-[0.9375rem] whitespace-nowrap text-pencil">
-          {left === 0 ? 'all right' : `${left} of ${cell.exercises.length} left`}
-        </span>
-      ) : (
-        <span className="text-[0.9375rem] font-semibold whitespace-nowrap text-madder">
-          not begun
-        </span>
-      )}
+      <WhatIsLeft exercises={cell.exercises.filter(({ mark }) => mark !== 'not set')} />
     </span>
   );
+}
+
+/** How much is left of what is set to a learner. */
+function WhatIsLeft({ exercises }: Readonly<{ exercises: readonly ExerciseCell[] }>) {
+  const said = (words: string, look = 'text-pencil') => (
+    <span className={clsx('text-[0.9375rem] whitespace-nowrap', look)}>{words}</span>
+  );
+  if (exercises.length === 0) return said('not set');
+  if (exercises.every(({ attempts }) => attempts === 0)) {
+    return said('not begun', 'font-semibold text-madder');
+  }
+  const left = exercises.filter(({ mark }) => mark !== 'right').length;
+  return said(left === 0 ? 'all right' : `${left} of ${exercises.length} left`);
 }

@@ -3,6 +3,7 @@ import type { Mark } from '@/lib/schemas/class-progress';
 
 const looks: Readonly<Record<Mark, { sign: string; word: string; colour: string }>> = {
   none: { sign: '–', word: 'not begun', colour: 'text-pencil' },
+  'not set': { sign: '·', word: 'not set', colour: 'text-pencil' },
   right: { sign: '✓', word: 'right', colour: 'text-leaf font-semibold' },
   partly: { sign: '◐', word: 'partly', colour: 'text-brass font-semibold' },
   wrong: { sign: '✕', word: 'not yet', colour: 'text-madder font-semibold' },

@@ -1,7 +1,8 @@
 'use client';
 
-import { useId } from 'react';
-import { Button } from '@/components/ui/button';
+import clsx from 'clsx';
+import { useId, useState } from 'react';
+import { Button, buttonClass } from '@/components/ui/button';
 import { SelectField, TextField } from '@/components/ui/field';
 import type { ProgressChoice, ProgressView } from './progress-view';
 
@@ -9,8 +10,10 @@ interface ProgressControlsProps {
   readonly choice: ProgressChoice;
   readonly onChoose: (choice: ProgressChoice) => void;
   readonly view: ProgressView;
-  /** Where the same is to be had as a file. */
-  readonly csvHref: string;
+  readonly classId: string;
+  /** Hidden for the projector: then nothing of the page tells who is who. */
+  readonly names: 'shown' | 'hidden';
+  readonly lessonId: string | null;
 }
 
 const states = {
@@ -28,8 +31,10 @@ const orders = {
 } as const;
 
 /** Whom the table shows, in which order; without names for the projector; as a file; on paper. */
-export function ProgressControls({ choice, onChoose, view, csvHref }: ProgressControlsProps) {
+export function ProgressControls(props: ProgressControlsProps) {
+  const { choice, onChoose, view, names } = props;
   const id = useId();
+  const [open, setOpen] = useState(false);
   const choose = (changes: Partial<ProgressChoice>) => onChoose({ ...choice, page: 0, ...changes });
   const oneOf = <Name extends 'state' | 'order'>(
     name: Name,
@@ -52,34 +57,35 @@ export function ProgressControls({ choice, onChoose, view, csvHref }: ProgressCo
   );
   return (
     <div className="print:hidden">
-      <div className="grid gap-x-5 sm:grid-cols-3">
-        <TextField
-          id={`${id}-name`}
-          name="learner"
-          label="Learner"
-          type="search"
-          autoComplete="off"
-          value={choice.name}
-          disabled={choice.hideNames}
-          onChange={(event) => choose({ name: event.target.value })}
-        />
+      <Button
+        variant="quiet"
+        className="mb-3 sm:hidden"
+        aria-expanded={open}
+        aria-controls={`${id}-filters`}
+        onClick={() => setOpen(!open)}
+      >
+        {open ? 'Less to choose' : `Choose: ${states[choice.state]}, ${orders[choice.order]}`}
+      </Button>
+      <div
+        id={`${id}-filters`}
+        className={clsx('gap-x-5 sm:grid sm:grid-cols-3', open ? 'grid' : 'hidden')}
+      >
+        {names === 'shown' ? (
+          <TextField
+            id={`${id}-name`}
+            name="learner"
+            label="Learner"
+            type="search"
+            autoComplete="off"
+            value={choice.name}
+            onChange={(event) => choose({ name: event.target.value })}
+          />
+        ) : null}
         {oneOf('state', 'Show', states)}
         {oneOf('order', 'Order', orders)}
       </div>
       <div className="mb-4 flex flex-wrap items-center gap-3">
-        <Button
-          variant="quiet"
-          aria-pressed={choice.hideNames}
-          onClick={() => choose({ hideNames: !choice.hideNames, name: '' })}
-        >
-          {choice.hideNames ? 'Show names' : 'Hide names for the projector'}
-        </Button>
-        <Button variant="quiet" onClick={() => window.print()}>
-          Print
-        </Button>
-        <a href={csvHref} download className="link link-target">
-          Take it away as CSV
-        </a>
+        <WaysOut {...props} />
         <Pages choice={choice} onChoose={onChoose} view={view} />
       </div>
       <p role="status" className="sr-only">
@@ -89,7 +95,34 @@ export function ProgressControls({ choice, onChoose, view, csvHref }: ProgressCo
   );
 }
 
-function Pages({ choice, onChoose, view }: Omit<ProgressControlsProps, 'csvHref'>) {
+/** Plain links, so that nothing with names is left in a page that hides them. */
+function WaysOut({ classId, names, lessonId }: ProgressControlsProps) {
+  const wanted = new URLSearchParams({
+    ...(lessonId === null ? {} : { lesson: lessonId }),
+    ...(names === 'shown' ? { names: 'hidden' } : {}),
+  });
+  return (
+    <>
+      <a href={`/classes/${classId}?${wanted}`} className={buttonClass('quiet')}>
+        {names === 'hidden' ? 'Show names' : 'Hide names for the projector'}
+      </a>
+      <Button variant="quiet" onClick={() => window.print()}>
+        Print
+      </Button>
+      {names === 'shown' ? (
+        <a href={`/api/classes/${classId}/progress/csv`} download className="link link-target">
+          Take it away as CSV
+        </a>
+      ) : null}
+    </>
+  );
+}
+
+function Pages({
+  choice,
+  onChoose,
+  view,
+}: Pick<ProgressControlsProps, 'choice' | 'onChoose' | 'view'>) {
   if (view.pages === 1) return null;
   const turn = (page: number) => onChoose({ ...choice, page });
   return (

@@ -8,8 +8,6 @@ export interface ProgressChoice {
   readonly order: 'name' | 'least done' | 'most done';
   /** Counted from 0. */
   readonly page: number;
-  /** For the projector: numbers instead of names, in an order that tells nothing. */
-  readonly hideNames: boolean;
 }
 
 /** How it is looked at before anything is chosen. */
@@ -18,7 +16,6 @@ export const firstChoice: ProgressChoice = {
   state: 'all',
   order: 'name',
   page: 0,
-  hideNames: false,
 };
 
 /** Learners on one page of the table. */
@@ -44,7 +41,8 @@ export function viewProgress(
 ): ProgressView {
   const wanted = choice.name.trim().toLocaleLowerCase();
   const fitting = progress.learners
-    .filter(({ name }) => choice.hideNames || name.toLocaleLowerCase().includes(wanted))
+
+    .filter(({ name }) => name.toLocaleLowerCase().includes(wanted))
     .filter((learner) => fits(learner, choice.state, lessonId));
   const pages = Math.max(1, Math.ceil(fitting.length / learnersAPage));
   const page = Math.min(choice.page, pages - 1);
@@ -55,10 +53,12 @@ export function viewProgress(
   return { learners: shown, fitting: fitting.length, pages, page };
 }
 
+/** What is set to a learner. */
 function cellsOf({ lessons }: LearnerProgress, lessonId: string | null) {
   return lessons
     .filter((lesson) => lessonId === null || lesson.lessonId === lessonId)
-    .flatMap(({ exercises }) => exercises);
+    .flatMap(({ exercises }) => exercises)
+    .filter(({ mark }) => mark !== 'not set');
 }
 
 function fits(
@@ -71,29 +71,24 @@ function fits(
     case 'all':
       return true;
     case 'not begun':
-      return cells.every(({ mark }) => mark === 'none');
+      return cells.length > 0 && cells.every(({ mark }) => mark === 'none');
     case 'something left':
       return cells.some(({ mark }) => mark !== 'right');
     case 'late':
       return cells.some(({ late }) => late);
     case 'done':
-      return cells.every(({ mark }) => mark === 'right');
+      return cells.length > 0 && cells.every(({ mark }) => mark === 'right');
   }
 }
 
 function inOrder(
   learners: readonly LearnerProgress[],
-  { order, hideNames }: ProgressChoice,
+  { order }: ProgressChoice,
   lessonId: string | null,
 ): readonly LearnerProgress[] {
-  const numbered = hideNames
-    ? [...learners]
-        .sort((one, other) => (one.learnerId < other.learnerId ? -1 : 1))
-        .map((learner, place) => ({ ...learner, name: `Learner ${place + 1}` }))
-    : [...learners];
-  if (order === 'name') return numbered;
+  if (order === 'name') return learners;
   const done = (learner: LearnerProgress) =>
     cellsOf(learner, lessonId).filter(({ mark }) => mark === 'right').length;
   const sign = order === 'least done' ? 1 : -1;
-  return numbered.sort((one, other) => sign * (done(one) - done(other)));
+  return [...learners].sort((one, other) => sign * (done(one) - done(other)));
 }

@@ -8,6 +8,7 @@ export const queryKeys = {
   round: (personId: string | null, exerciseId: string, units: UnitSystem) =>
     ['round', personId, exerciseId, units] as const,
   progress: (personId: string | null) => ['progress', personId] as const,
-  classProgress: (classId: string) => ['class-progress', classId] as const,
+  classProgress: (classId: string, names: 'shown' | 'hidden') =>
+    ['class-progress', classId, names] as const,
   waiting: () => ['waiting-answers'] as const,
 };

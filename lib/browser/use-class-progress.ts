@@ -12,13 +12,18 @@ const LOOK_AGAIN = 4_000;
  * The progress of a class, looked at again every few seconds while the page is seen. As long as
  * nothing has changed the server answers so, and sends nothing else.
  */
-export function useClassProgress(classId: string, initial: ClassProgress | null = null) {
-  const queryKey = queryKeys.classProgress(classId);
+export function useClassProgress(
+  classId: string,
+  names: 'shown' | 'hidden',
+  initial: ClassProgress | null = null,
+) {
+  const queryKey = queryKeys.classProgress(classId, names);
+  const path = `/api/classes/${encodeURIComponent(classId)}/progress`;
   return useQuery<Kept<ClassProgress>, Error, ClassProgress>({
     queryKey,
     queryFn: ({ signal, client }) =>
       fetchIfChanged(
-        `/api/classes/${encodeURIComponent(classId)}/progress`,
+        names === 'hidden' ? `${path}?names=hidden` : path,
         client.getQueryData<Kept<ClassProgress>>(queryKey),
         signal,
       ),

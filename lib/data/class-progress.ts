@@ -8,7 +8,7 @@ import type { ClassProgress, Mark } from '@/lib/schemas/class-progress';
 import { isId, staffOfClass, staffValues } from './class-right';
 import { exerciseTitle, lessonName, lessonOfExercise } from './lesson-titles';
 import { skillName, skillsOfLesson } from './pegs';
-import { latestOverride, verdictRank } from './verdicts';
+import { latestOverride, ownExtension, standsLate, verdictRank } from './verdicts';
 
 /**
  * The progress of a class, for its instructors and the administrator; null for anybody else. One
@@ -28,6 +28,7 @@ export async function findClassProgress(
   const skillIds = columns.flatMap(({ lessonId }) => skillsOfLesson(lessonId));
   const standing = await row<StandingRow>(standingSql, [...values, skillIds]);
   const pegState = new Map(standing?.pegs.map((one) => [one[0] + one[1], stateOf(one, now)]));
+  const isSetTo = whoIsSet(found);
   const markOf = new Map(standing?.marks.map((one) => [one[0] + one[1], one]));
   return {
     classId,
@@ -45,11 +46,31 @@ export async function findClassProgress(
           state: pegState.get(learnerId + skill) ?? 'open',
         })),
         exercises: exercises.map(({ exerciseId }) =>
-          cellOf(exerciseId, markOf.get(learnerId + exerciseId)),
+          markOf.has(learnerId + exerciseId) || isSetTo(learnerId, exerciseId)
+            ? cellOf(exerciseId, markOf.get(learnerId + exerciseId))
+            : { ...cellOf(exerciseId, undefined), mark: 'not set' },
         ),
       })),
     })),
   };
+}
+
+/** Whether something that asks for an exercise is set to a learner, be it to the whole class. */
+function whoIsSet({ items, chosen }: ClassRow) {
+  const forEverybody = new Set(
+    items.flatMap(({ chosenOnly, exerciseId }) => (chosenOnly ? [] : exerciseId)),
+  );
+  const learnersOf = new Map<string, Set<string>>();
+  for (const [assignmentId, learnerId] of chosen) {
+    learnersOf.set(assignmentId, (learnersOf.get(assignmentId) ?? new Set()).add(learnerId));
+  }
+  return (learnerId: string, exerciseId: string) =>
+    forEverybody.has(exerciseId) ||
+    items.some(
+      (item) =>
+        item.exerciseId === exerciseId &&
+        learnersOf.get(item.assignmentId)?.has(learnerId) === true,
+    );
 }
 
 function columnsOf(items: readonly ItemRow[]): ClassProgress['lessons'] {
@@ -102,12 +123,17 @@ interface ItemRow {
   readonly exerciseId: string;
   readonly lessonId: string | null;
   readonly dueAt: string;
+  readonly assignmentId: string;
+  /** Whether it is for some of the class only. */
+  readonly chosenOnly: boolean;
 }
 
 interface ClassRow {
   readonly name: string;
   readonly timeZone: string;
   readonly items: readonly ItemRow[];
+  /** Assignment and learner, for what is not for everybody. */
+  readonly chosen: readonly (readonly [string, string])[];
   readonly learners: readonly { readonly learnerId: string; readonly name: string }[];
 }
 
@@ -115,10 +141,15 @@ const classSql = `
   select g.name, g.time_zone as "timeZone",
     coalesce((
       select json_agg(json_build_object(
-        'exerciseId', i.exercise_id, 'lessonId', i.lesson_id, 'dueAt', a.due_at)
+        'exerciseId', i.exercise_id, 'lessonId', i.lesson_id, 'dueAt', a.due_at,
+        'assignmentId', a.id, 'chosenOnly', a.for_chosen_learners)
         order by a.due_at, i.position)
       from assignments a join assignment_items i on i.assignment_id = a.id
       where a.class_id = g.id and a.withdrawn_at is null), '[]') as items,
+    coalesce((
+      select json_agg(json_build_array(a.id, x.learner_id))
+      from assignments a join assignment_learners x on x.assignment_id = a.id
+      where a.class_id = g.id and a.withdrawn_at is null and a.for_chosen_learners), '[]') as chosen,
     coalesce((
       select json_agg(json_build_object('learnerId', l.id, 'name', p.name) order by p.name, l.id)
       from memberships m join people p on p.id = m.person_id join learners l on l.person_id = p.id
@@ -160,8 +191,7 @@ const pegSql = `
 /**
  * How each learner stands with each exercise: for every assignment the best or the latest of the
  * attempts that count, as its rule says, and of these the best. The best is right before partly
- * before wrong, then in time before late, then the latest. What was stored as late is late as long as
- * it lies after the due moment that the learner has now: more time, given later, helps.
+ * before wrong, then in time before late, then the latest.
  */
 const markSql = `
   select distinct on (t.learner_id, t.exercise_id)
@@ -170,18 +200,18 @@ const markSql = `
   from (
     select distinct on (c.learner_id, c.item_id) c.learner_id, i.exercise_id, c.attempt_id, c.n,
       coalesce(o.verdict, a.verdict) as verdict, o.verdict is not null as overridden,
-      c.late and a.created_at > greatest(s.due_at, x.due_at) as late,
+      ${standsLate} as late,
       count(*) over (partition by c.learner_id, c.item_id) as attempts
     from (${enrolled}) e
     join counted_attempts c on c.learner_id = e.id
     join assignment_items i on i.id = c.item_id
     join assignments s on s.id = i.assignment_id and s.class_id = $1 and s.withdrawn_at is null
     join attempts a on a.id = c.attempt_id
-    left join extensions x on x.assignment_id = s.id and x.learner_id = c.learner_id
+    ${ownExtension}
     ${latestOverride('a')}
     order by c.learner_id, c.item_id, case when s.counting = 'latest' then -c.n end,
       ${verdictRank('coalesce(o.verdict, a.verdict)')},
-      c.late and a.created_at > greatest(s.due_at, x.due_at), c.n desc) t
+      ${standsLate}, c.n desc) t
   order by t.learner_id, t.exercise_id, ${verdictRank('t.verdict')}, t.late, t.n desc`;
 
 const standingSql = `

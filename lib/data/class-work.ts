@@ -9,7 +9,7 @@ import { isId, staffOfClass, staffValues } from './class-right';
 import { exerciseTitle, lessonName, lessonOfExercise, type LessonName } from './lesson-titles';
 import { lastRoundsSql, pegViews, skillRounds, skillsOfLesson, type LastRoundRow } from './pegs';
 import { viewAttempt, type KeptMarking } from './round-record';
-import { latestOverride } from './verdicts';
+import { latestOverride, ownExtension, standsLate } from './verdicts';
 import { commentsOf, overridesOf, type AttemptComment, type AttemptOverride } from './attempt-talk';
 
 /** A counted attempt in a list. */
@@ -19,6 +19,9 @@ export interface CountedAttemptListed {
   readonly title: string;
   readonly verdict: 'right' | 'partly' | 'wrong';
   readonly createdAt: string;
+  /** When it was answered by the device's clock, if that was away from the network. */
+  readonly answeredAt: string | null;
+  /** Late, reckoned with the time that the learner has now. */
   readonly late: boolean;
 }
 
@@ -27,6 +30,7 @@ export interface LearnerInClass {
   readonly classId: string;
   readonly className: string;
   readonly timeZone: string;
+  readonly archived: boolean;
   readonly learnerId: string;
   readonly name: string;
   readonly lessons: readonly (LessonName & { readonly pegs: readonly PegView[] })[];
@@ -39,6 +43,8 @@ export interface AttemptInClass {
   readonly classId: string;
   readonly className: string;
   readonly timeZone: string;
+  /** In a class that is put away nothing is said or changed any more. */
+  readonly archived: boolean;
   readonly learnerId: string;
   readonly name: string;
   readonly exerciseId: string;
@@ -92,6 +98,7 @@ export async function findLearnerInClass(
       ...one,
       title: exerciseTitle(one.exerciseId),
       createdAt: new Date(one.createdAt).toISOString(),
+      answeredAt: one.answeredAt === null ? null : new Date(one.answeredAt).toISOString(),
     })),
   };
 }
@@ -151,7 +158,7 @@ interface LearnerRow extends Omit<LearnerInClass, 'lessons' | 'attempts'> {
 
 const learnerSql = `
   select g.id as "classId", g.name as "className", g.time_zone as "timeZone",
-    l.id as "learnerId", p.name, p.time_zone as "personTimeZone",
+    g.archived_at is not null as archived, l.id as "learnerId", p.name, p.time_zone as "personTimeZone",
     coalesce((
       select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
         order by s.due_at, i.position)
@@ -159,13 +166,16 @@ const learnerSql = `
       where s.class_id = g.id and s.withdrawn_at is null), '[]') as set,
     coalesce((
       select json_agg(json_build_object('attemptId', a.id, 'exerciseId', a.exercise_id,
-        'verdict', coalesce(o.verdict, a.verdict), 'createdAt', a.created_at, 'late', c.late) order by a.created_at desc)
+        'verdict', coalesce(o.verdict, a.verdict), 'createdAt', a.created_at,
+        'answeredAt', a.answered_at, 'late', counted.late) order by a.created_at desc)
       from (
-        select c.attempt_id, bool_and(c.late) as late from counted_attempts c
+        select c.attempt_id, bool_and(${standsLate}) as late from counted_attempts c
+        join attempts a on a.id = c.attempt_id
         join assignment_items i on i.id = c.item_id
         join assignments s on s.id = i.assignment_id and s.class_id = g.id
-        where c.learner_id = l.id group by c.attempt_id) c
-      join attempts a on a.id = c.attempt_id ${latestOverride('a')}), '[]') as attempts
+        ${ownExtension}
+        where c.learner_id = l.id group by c.attempt_id) counted
+      join attempts a on a.id = counted.attempt_id ${latestOverride('a')}), '[]') as attempts
   from class_groups g
   join memberships m on m.class_id = g.id and m.role = 'learner' and m.left_at is null
   join people p on p.id = m.person_id
@@ -184,9 +194,9 @@ interface AttemptRow extends Omit<
 
 const attemptSql = `
   select g.id as "classId", g.name as "className", g.time_zone as "timeZone",
-    l.id as "learnerId", p.name, a.exercise_id as "exerciseId", r.shown, r.units, a.response,
+    g.archived_at is not null as archived, l.id as "learnerId", p.name, a.exercise_id as "exerciseId", r.shown, r.units, a.response,
     a.marking, a.credit, a.unaided, r.hints_taken as "hintsTaken",
-    r.solution_seen_at is not null as "solutionSeen", c.late, a.answered_at as "answeredAt",
+    r.solution_seen_at is not null as "solutionSeen", counted.late, a.answered_at as "answeredAt",
     ${commentsOf} as comments, ${overridesOf} as overrides,
     a.created_at as "createdAt"
   from class_groups g
@@ -196,8 +206,9 @@ const attemptSql = `
   join attempts a on a.learner_id = l.id and a.id = $4
   join rounds r on r.id = a.round_id
   join lateral (
-    select bool_and(c.late) as late from counted_attempts c
+    select bool_and(${standsLate}) as late from counted_attempts c
     join assignment_items i on i.id = c.item_id
     join assignments s on s.id = i.assignment_id and s.class_id = g.id
-    where c.attempt_id = a.id having count(*) > 0) c on true
+    ${ownExtension}
+    where c.attempt_id = a.id having count(*) > 0) counted on true
   where ${staffOfClass}`;

@@ -12,6 +12,17 @@ export function latestOverride(attempt: string): string {
     order by v.created_at desc limit 1) o on true`;
 }
 
+/** The time given to the learner of `c` (counted_attempts) for the assignment `s`, as `x`. */
+export const ownExtension =
+  'left join extensions x on x.assignment_id = s.id and x.learner_id = c.learner_id';
+
+/**
+ * Whether the attempt `a` stands as late. What was stored as late is late as long as it lies after
+ * the due moment that the learner has now: more time, given later, helps, and a due moment that is
+ * moved back makes nothing late. Needs `ownExtension`.
+ */
+export const standsLate = '(c.late and a.created_at > greatest(s.due_at, x.due_at))';
+
 /** The place of a verdict among the others: right before partly before wrong. */
 export const verdictRank = (verdict: string) =>
   `array_position(array['right', 'partly', 'wrong'], ${verdict})`;

@@ -6,8 +6,11 @@
 import * as z from 'zod/mini';
 import { pegStates } from './round';
 
-/** How far somebody is with an exercise; `none` before the first counted attempt. */
-export const marks = ['none', 'right', 'partly', 'wrong'] as const;
+/**
+ * How far somebody is with an exercise; `none` before the first counted attempt, `not set` when what
+ * asks for it is for others of the class.
+ */
+export const marks = ['none', 'not set', 'right', 'partly', 'wrong'] as const;
 
 const pegSchema = z.strictObject({
   skill: z.string(),
@@ -30,7 +33,7 @@ const exerciseCellSchema = z.strictObject({
   mark: z.enum(marks),
   /** Counted attempts so far. */
   attempts: z.number(),
-  /** The one that stands: the best or the latest, as the assignment says. */
+  /** The one that stands: the best or the latest, as the assignment says; null without names. */
   attemptId: z.nullable(z.string()),
   late: z.boolean(),
   /** Whether an instructor has marked it otherwise than it was marked. */

@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { mean, sampleCorrelation } from 'simple-statistics';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { createAssignment } from '@/lib/data/assignments';
 import { updateAssignment } from '@/lib/data/assignment-change';
 import { createAttempt } from '@/lib/data/attempts';
 import { exportClassProgress } from '@/lib/data/class-csv';
@@ -15,10 +16,12 @@ import {
   overrideMarking,
   readFeedback,
 } from '@/lib/data/feedback';
+import { hideNames } from '@/lib/data/hidden-names';
 import { listPegs } from '@/lib/data/progress';
 import { findStickingPoints } from '@/lib/data/sticking-points';
 import { findToday } from '@/lib/data/today';
 import type { Viewer } from '@/lib/policy/viewer';
+import { classProgressSchema } from '@/lib/schemas/class-progress';
 import { models } from '@/models';
 import {
   countRows,
@@ -192,18 +195,82 @@ describe('what stands in the progress of a class', () => {
     const item = await models().AssignmentItem.findByPk(itemId, { rejectOnEmpty: true });
     await attempt(room.learner, 'slipped', exerciseId, now);
     expect(await cellOf(room)).toMatchObject({ late: true });
+    const seen = async () => {
+      const listed = await findLearnerInClass(room.teacher, room.classId, room.learner.learnerId);
+      const [first] = listed?.attempts ?? [];
+      const opened = await findAttemptInClass(room.teacher, room.classId, first?.attemptId ?? '');
+      return [first?.late, opened?.late];
+    };
+    expect(await seen()).toEqual([true, true]);
     await giveExtension(room.teacher, room.classId, item.assignmentId, {
       learnerId: room.learner.learnerId,
       dueOn: new Date(now.getTime() + day).toISOString().slice(0, 10),
       dueTime: '',
     });
     expect(await cellOf(room)).toMatchObject({ late: false });
+    expect(await seen()).toEqual([false, false]);
     const other = await makeRoom();
     await setExercise(other.classId, other.teacher, exerciseId);
     await attempt(other.learner, 'slipped', exerciseId, now);
     const moved = { dueAt: new Date(now.getTime() - 60_000) };
     await models().Assignment.update(moved, { where: { classId: other.classId } });
     expect(await cellOf(other)).toMatchObject({ late: false });
+  });
+
+  it('is not set to those for whom it is not, and says so', async () => {
+    const room = await makeRoom();
+    const other = await makeViewer('Zed Zero', [[room.classId, 'learner']]);
+    const wanted = { lessons: [], exercises: [exerciseId], dueOn: '2099-01-01' };
+    await createAssignment(room.teacher, room.classId, {
+      ...wanted,
+      learners: [room.learner.learnerId],
+    });
+    const marks = async () =>
+      (await findClassProgress(room.teacher, room.classId))?.learners.map(
+        ({ lessons }) => lessons[0]?.exercises[0]?.mark,
+      );
+    expect(await marks()).toEqual(['none', 'not set']);
+    await attempt(other, 'right');
+    expect(await marks()).toEqual(['none', 'not set']);
+    await createAssignment(room.teacher, room.classId, wanted);
+    expect(await marks()).toEqual(['none', 'none']);
+  });
+
+  it('tells without names nothing of who is who', async () => {
+    const room = await makeRoom();
+    const other = await makeViewer('Zed Zero', [[room.classId, 'learner']]);
+    await setExercise(room.classId, room.teacher, exerciseId);
+    const counted = await attempt(room.learner, 'slipped');
+    const progress = await findClassProgress(room.teacher, room.classId);
+    const hidden = progress === null ? null : hideNames(progress);
+    expect(classProgressSchema.parse(hidden)).toEqual(hidden);
+    expect(hidden?.learners.map(({ name }) => name)).toEqual(['Learner 1', 'Learner 2']);
+    const marks = hidden?.learners.map(({ lessons }) => lessons[0]?.exercises[0]?.mark);
+    expect(marks?.sort()).toEqual(['none', 'wrong']);
+    const told = JSON.stringify(hidden);
+    for (const one of [room.learner, other]) {
+      for (const secret of [one.name, one.learnerId, one.personId, counted]) {
+        expect(told).not.toContain(secret);
+      }
+    }
+  });
+
+  it('keeps both times of an answer that waited, and offers nothing to say in a class put away', async () => {
+    const room = await makeRoom();
+    await setExercise(room.classId, room.teacher, exerciseId);
+    const answeredAt = new Date(Date.now() - 3_600_000).toISOString();
+    const { roundId } = await mustOpen(room.learner, exerciseId);
+    const request = { ...(await requestFor(roundId, 'right')), answeredAt };
+    await createAttempt(room.learner, request, randomUUID());
+    const look = () => findLearnerInClass(room.teacher, room.classId, room.learner.learnerId);
+    const found = await look();
+    expect(found).toMatchObject({ archived: false, attempts: [{ answeredAt }] });
+    const archivedAt = new Date();
+    await models().ClassGroup.update({ archivedAt }, { where: { id: room.classId } });
+    expect(await look()).toMatchObject({ archived: true });
+    const [first] = found?.attempts ?? [];
+    const opened = await findAttemptInClass(room.teacher, room.classId, first?.attemptId ?? '');
+    expect(opened).toMatchObject({ archived: true, answeredAt });
   });
 
   it('has a version that changes with an answer, an override, a rule and a name, and for its staff only', async () => {

@@ -60,6 +60,13 @@ export const handlers: readonly HandlerRow[] = [
   {
     kind: 'handler',
     method: 'GET',
+    route: '/api/classes/[id]/progress',
+    at: ({ classId }) => `/api/classes/${classId}/progress?names=hidden`,
+    outcome: only(staffOfTheClass, 200, 404, 401),
+  },
+  {
+    kind: 'handler',
+    method: 'GET',
     route: '/api/classes/[id]/progress/csv',
     at: ({ classId }) => `/api/classes/${classId}/progress/csv`,
     outcome: only(staffOfTheClass, 200, 404, 401),

@@ -43,6 +43,13 @@ export const pages: readonly PageRow[] = [
   {
     kind: 'page',
     route: '/classes/[id]',
+    at: ({ classId }) => `/classes/${classId}?names=hidden`,
+    outcome: only(staffOfTheClass, 'shown', 'missing', 'sign in'),
+    holds: ({ canaries }) => canaries.className.text,
+  },
+  {
+    kind: 'page',
+    route: '/classes/[id]',
     at: () => '/classes/not-an-id',
     outcome: forSignedIn('missing', 'sign in'),
   },

@@ -89,10 +89,11 @@ export const operations: readonly Operation[] = [
   {
     method: 'get',
     path: '/api/classes/{id}/progress',
-    summary: 'The progress of a class, for its instructors and the administrator.',
+    summary:
+      'The progress of a class, for its instructors and the administrator; with ?names=hidden nothing of it tells who is who.',
     signedIn: true,
     success: ok(classProgressSchema),
-    problems: [404],
+    problems: [404, 422],
   },
   {
     method: 'get',

@@ -64,15 +64,24 @@ function SetRow({ work }: Readonly<{ work: SetWork }>) {
 
 /** What is worth knowing before answering: more time, a limit, and what happens to late work. */
 function rulesFor(work: SetWork): string[] {
-  const left = work.exercises.flatMap(({ mark, attemptsLeft }) =>
-    mark === 'right' || attemptsLeft === null ? [] : attemptsLeft,
-  );
-  const least = Math.min(...left);
   return [
     ...(work.extended ? ['more time, for you'] : []),
     ...(work.lateWork === 'closed' ? ['no late work'] : []),
-    ...(left.length > 0 ? [least === 1 ? 'one attempt left' : `${least} attempts left`] : []),
+    ...attemptsLeft(work),
   ];
+}
+
+/** How many attempts still count: once for all exercises where it is the same, else one by one. */
+function attemptsLeft({ exercises }: SetWork): string[] {
+  const open = exercises.flatMap(({ title, mark, attemptsLeft: left }) =>
+    mark === 'right' || left === null ? [] : [{ title, left }],
+  );
+  const say = (left: number) =>
+    left === 0 ? 'no attempt left' : left === 1 ? 'one attempt left' : `${left} attempts left`;
+  if (new Set(open.map(({ left }) => left)).size > 1) {
+    return open.map(({ title, left }) => `${title}: ${say(left)}`);
+  }
+  return open.slice(0, 1).map(({ left }) => `${say(left)}${open.length > 1 ? ' for each' : ''}`);
 }
 
 function Done() {

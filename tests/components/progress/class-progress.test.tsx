@@ -73,10 +73,10 @@ const progress: Progress = {
   ],
 };
 
-function show(): void {
+function show(names: 'shown' | 'hidden' = 'shown'): void {
   render(
     <QueryProvider>
-      <ClassProgress classId="c1" />
+      <ClassProgress classId="c1" names={names} />
     </QueryProvider>,
   );
 }
@@ -132,6 +132,44 @@ describe('the progress of a class', () => {
     });
     expect(link).toHaveAttribute('href', '/classes/c1/attempts/a1');
     expect(within(await rowOf(/Lorcan Daly/)).getAllByText('not begun')).toHaveLength(2);
+  });
+
+  it('leads to nobody on the projector, and asks for itself without names', async () => {
+    search.current = 'names=hidden&lesson=pantograph';
+    const numbered = progress.learners.map(({ lessons }, place) => ({
+      learnerId: String(place + 1),
+      name: `Learner ${place + 1}`,
+      lessons: lessons.map((lesson) => ({
+        ...lesson,
+        exercises: lesson.exercises.map((cell) => ({ ...cell, attemptId: null })),
+      })),
+    }));
+    answerWith(200, { ...progress, learners: numbered });
+    show('hidden');
+    const first = within(await rowOf(/Learner 1/));
+    expect(first.getByText(/3 tries/)).toBeVisible();
+    expect(screen.getAllByRole('link').map((link) => link.getAttribute('href'))).toEqual([
+      '/classes/c1?lesson=pantograph',
+    ]);
+    expect(screen.queryByRole('searchbox')).toBeNull();
+    const [[asked]] = vi.mocked(fetch).mock.calls as [[string]];
+    expect(asked).toBe('/api/classes/c1/progress?names=hidden');
+  });
+
+  it('says of work for others that it is not set', async () => {
+    const others = progress.learners.map((learner) => ({
+      ...learner,
+      lessons: learner.lessons.map((lesson) => ({
+        ...lesson,
+        exercises: lesson.exercises.map((cell) =>
+          learner.learnerId === 'l2' ? { ...cell, mark: 'not set' as const } : cell,
+        ),
+      })),
+    }));
+    answerWith(200, { ...progress, learners: others });
+    show();
+    expect(within(await rowOf(/Lorcan Daly/)).getByText('not set')).toBeVisible();
+    expect(within(await rowOf(/Lorcan Daly/)).queryByText('not begun')).toBeNull();
   });
 
   it('says what to do when nothing is set and when nobody is in it', async () => {

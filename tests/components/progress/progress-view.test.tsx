@@ -43,12 +43,18 @@ describe('looking at the progress of a class', () => {
     expect(names({ order: 'most done' })).toEqual(['Agnes', 'Bram', 'Catrin']);
   });
 
-  it('hides names behind numbers, in an order that tells nothing', () => {
-    const view = viewProgress({ learners }, { ...firstChoice, hideNames: true }, null);
-    expect(view.learners.map(({ name }) => name)).toEqual(['Learner 1', 'Learner 2', 'Learner 3']);
-    expect(view.learners.map(({ learnerId }) => learnerId)).toEqual(
-      learners.map(({ learnerId }) => learnerId).sort(),
-    );
+  it('leaves out what is not set to somebody: it is neither left nor done', () => {
+    const some = [
+      learner('Dario Benini', ['right', 'not set']),
+      learner('Elif Aydin', ['not set']),
+    ];
+    const shown = (state: 'done' | 'something left' | 'not begun') =>
+      viewProgress({ learners: some }, { ...firstChoice, state }, null).learners.map(
+        ({ name }) => name,
+      );
+    expect(shown('done')).toEqual(['Dario Benini']);
+    expect(shown('something left')).toEqual([]);
+    expect(shown('not begun')).toEqual([]);
   });
 
   it('turns pages, and stays on the last when fewer are left', () => {

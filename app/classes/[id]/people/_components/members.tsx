@@ -28,7 +28,7 @@ export function Members({ found, members }: MembersProps) {
       <HeadRow>
         <ColumnName>Name</ColumnName>
         <ColumnName>As</ColumnName>
-        <ColumnName>Since</ColumnName>
+        <ColumnName className="max-sm:hidden">Since</ColumnName>
         {archived ? null : (
           <ColumnName>
             <span className="sr-only">Take out</span>
@@ -46,7 +46,9 @@ export function Members({ found, members }: MembersProps) {
               )}
             </RowName>
             <Cell>{member.role}</Cell>
-            <Cell className="whitespace-nowrap">{sayDay(member.joinedAt, timeZone)}</Cell>
+            <Cell className="whitespace-nowrap max-sm:hidden">
+              {sayDay(member.joinedAt, timeZone)}
+            </Cell>
             {archived ? null : (
               <Cell className="text-right">
                 <TakeOut action={takeOut.bind(null, classId, member.personId)} name={member.name} />

@@ -7,7 +7,8 @@ import { comment, markOtherwise } from '../actions';
 
 /** What has been said about an answer, and the forms to say something and to mark it otherwise. */
 export function AttemptTalk({ found }: Readonly<{ found: AttemptInClass }>) {
-  const { classId, timeZone, attempt, comments, overrides } = found;
+  const { classId, timeZone, archived, attempt, comments, overrides } = found;
+  if (archived && comments.length + overrides.length === 0) return null;
   return (
     <>
       <Section title="Said about it">
@@ -24,12 +25,14 @@ export function AttemptTalk({ found }: Readonly<{ found: AttemptInClass }>) {
             ))}
           </ul>
         ) : null}
-        <ActionForm
-          action={comment.bind(null, classId, attempt.attemptId)}
-          submit="Say it"
-          variant="secondary"
-          fields={[{ name: 'body', label: 'To the learner', rows: 4 }]}
-        />
+        {archived ? null : (
+          <ActionForm
+            action={comment.bind(null, classId, attempt.attemptId)}
+            submit="Say it"
+            variant="secondary"
+            fields={[{ name: 'body', label: 'To the learner', rows: 4 }]}
+          />
+        )}
       </Section>
       <Section title="Mark it otherwise">
         {overrides.map(({ authorName, verdict, reason, at }) => (
@@ -40,28 +43,36 @@ export function AttemptTalk({ found }: Readonly<{ found: AttemptInClass }>) {
             <p className="max-w-measure whitespace-pre-line">{reason}</p>
           </div>
         ))}
-        <p className="mb-4 max-w-measure text-[0.9375rem] text-pencil">
-          What was marked is kept and both are shown. It counts in this class; pegs stay as the
-          round left them.
-        </p>
-        <ActionForm
-          action={markOtherwise.bind(null, classId, attempt.attemptId)}
-          submit="Let it stand so"
-          variant="quiet"
-          fields={[
-            {
-              name: 'verdict',
-              label: 'It stands as',
-              options: [
-                { value: 'right', label: 'right' },
-                { value: 'partly', label: 'partly right' },
-                { value: 'wrong', label: 'not right yet' },
-              ],
-            },
-            { name: 'reason', label: 'Because', hint: 'The learner reads it.', rows: 3 },
-          ]}
-        />
+        {archived ? null : <Override classId={classId} attemptId={attempt.attemptId} />}
       </Section>
+    </>
+  );
+}
+
+function Override({ classId, attemptId }: Readonly<{ classId: string; attemptId: string }>) {
+  return (
+    <>
+      <p className="mb-4 max-w-measure text-[0.9375rem] text-pencil">
+        What was marked is kept and both are shown. It counts in this class; pegs stay as the round
+        left them.
+      </p>
+      <ActionForm
+        action={markOtherwise.bind(null, classId, attemptId)}
+        submit="Let it stand so"
+        variant="quiet"
+        fields={[
+          {
+            name: 'verdict',
+            label: 'It stands as',
+            options: [
+              { value: 'right', label: 'right' },
+              { value: 'partly', label: 'partly right' },
+              { value: 'wrong', label: 'not right yet' },
+            ],
+          },
+          { name: 'reason', label: 'Because', hint: 'The learner reads it.', rows: 3 },
+        ]}
+      />
     </>
   );
 }

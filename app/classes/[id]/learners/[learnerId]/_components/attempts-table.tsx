@@ -36,9 +36,14 @@ export function AttemptsTable({ learner }: Readonly<{ learner: LearnerInClass }>
             <Cell>
               <MarkSign mark={attempt.verdict} />
             </Cell>
-            <Cell className="whitespace-nowrap">
+            <Cell className="sm:whitespace-nowrap">
               {sayWhen(attempt.createdAt, learner.timeZone)}
               {attempt.late ? <strong className="text-madder">, late</strong> : null}
+              {attempt.answeredAt === null ? null : (
+                <span className="block text-[0.9375rem] text-pencil">
+                  answered on the device {sayWhen(attempt.answeredAt, learner.timeZone)}
+                </span>
+              )}
             </Cell>
           </Row>
         ))}
