@@ -35,6 +35,7 @@ export function BenchCanvas({ store, width, height, zoom, onPan, onReady }: Benc
   const [themes, setThemes] = useState(0);
   const view = viewOf(frame, width, height, zoom);
   const handles = model.handles(store.moment().drive);
+  const inHand = useChosen(store, (moment) => moment.inHand) !== null;
 
   useEffect(() => onThemeChange(() => setThemes((count) => count + 1)), []);
   useEffect(() => {
@@ -78,11 +79,15 @@ export function BenchCanvas({ store, width, height, zoom, onPan, onReady }: Benc
         const stage = event.target.getStage();
         if (event.target === stage && zoom.factor > 1) takeHold.ofGround(stage, event.evt, onPan);
       }}
+      onPointerUp={(event) => {
+        const stage = event.target.getStage();
+        if (stage) takeHold.putDown(stage, event.evt, store, view);
+      }}
     >
       <Layer listening={false}>
         <Shape ref={drawing} />
       </Layer>
-      <Layer ref={holds}>
+      <Layer ref={holds} listening={!inHand}>
         {handles.map((handle) => (
           <Circle
             key={handle.id}

@@ -1,5 +1,5 @@
 import { modelOf } from '@/lib/scene/model-of';
-import type { BenchModel, DriveState, Showing } from '@/lib/scene/bench-model';
+import type { BenchModel, DriveState, Showing, TrayPart } from '@/lib/scene/bench-model';
 import type { BenchSpec } from '@/lib/scene/bench-spec';
 import type { Bounds } from '@/lib/scene/scene';
 import { frameFor } from './view';
@@ -13,6 +13,8 @@ export interface BenchMoment extends DriveState {
   readonly running: boolean;
   readonly pace: number;
   readonly canUndo: boolean;
+  /** The part taken from the tray, until it is put somewhere or laid back. */
+  readonly inHand: TrayPart | null;
   /** Counts upwards with every change that is worth saying aloud once it has settled. */
   readonly change: number;
 }
@@ -32,6 +34,10 @@ export interface BenchStore {
   readonly stepBy: (steps: number) => void;
   /** Changes the setting; while `held` by a hand the frame stays as it is. */
   readonly setting: (spec: BenchSpec, change: string, held?: boolean) => void;
+  /** Takes a part from the tray into the hand, or lays it back. */
+  readonly take: (part: TrayPart | null) => void;
+  /** Puts the part in hand where the setting of this key is. */
+  readonly putAt: (key: string) => void;
   /** Frames the mechanism anew. */
   readonly fit: () => void;
   readonly run: (running: boolean) => void;
@@ -110,6 +116,16 @@ export function createBenchStore(start: BenchSpec): BenchStore {
       remember(change);
       replace(spec, now.drive, held);
     },
+    take: (inHand) => publish({ ...now, inHand }),
+    putAt: (key) => {
+      const { inHand, model } = now;
+      if (!inHand) return;
+      lastChange = null;
+      remember(`put ${key}`);
+      now = { ...now, inHand: null };
+      replace(model.set(key, inHand.value), now.drive);
+      lastChange = null;
+    },
     fit: () => publish({ ...now, frame: now.model.bounds }),
     run: (running) => {
       if (running) remember('run');
@@ -156,6 +172,7 @@ function startOf(spec: BenchSpec): BenchMoment {
     running: false,
     pace: model.drive.pace.usual,
     canUndo: false,
+    inHand: null,
     change: 0,
   };
 }

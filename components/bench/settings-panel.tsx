@@ -1,9 +1,15 @@
 'use client';
 
 import { useId } from 'react';
-import type { ChoiceControl, NumberControl, SettingControl } from '@/lib/scene/bench-model';
+import type {
+  ChoiceControl,
+  NumberControl,
+  SettingControl,
+  TrayControl,
+} from '@/lib/scene/bench-model';
 import type { BenchStore } from './bench-store';
 import { NumberEntry } from './number-entry';
+import { PartsTray } from './parts-tray';
 import { railButton } from './rail-button';
 import { useChosen } from './use-bench';
 
@@ -26,15 +32,19 @@ export function SettingsPanel({ store }: SettingsPanelProps) {
         Set the mechanism
       </summary>
       <div className="grid items-start gap-x-6 gap-y-3 pb-3 @xl:grid-cols-2 @4xl:grid-cols-3">
-        {model.controls.map((control) => (
-          <Setting key={control.key} control={control} onSet={set} />
-        ))}
+        {model.controls.map((control) =>
+          control.kind === 'tray' ? (
+            <PartsTray key="tray" store={store} control={control} />
+          ) : (
+            <Setting key={control.key} control={control} onSet={set} />
+          ),
+        )}
       </div>
     </details>
   );
 }
 
-interface SettingProps<C extends SettingControl = SettingControl> {
+interface SettingProps<C = Exclude<SettingControl, TrayControl>> {
   readonly control: C;
   readonly onSet: (key: string, value: number | string) => void;
 }

@@ -4,7 +4,7 @@ import type { BenchStore } from './bench-store';
 import { worldAt, type View } from './view';
 
 /** What a pointer does on the canvas: it takes hold, pulls, and lets go. */
-export const takeHold = { ofHandle, ofGround, hover };
+export const takeHold = { ofHandle, ofGround, hover, putDown };
 
 /**
  * Pulls a handle until the pointer lets go. The driver follows the hand step by step, so that it
@@ -56,6 +56,13 @@ function ofGround(
     },
     end: () => undefined,
   });
+}
+
+/** Puts the part in hand on whatever it is let go over. */
+function putDown(stage: Konva.Stage, event: PointerEvent, store: BenchStore, view: View): void {
+  const { inHand, model } = store.moment();
+  const key = inHand ? model.placeAt(worldAt(view, pixelOf(stage, event))) : null;
+  if (key !== null) store.putAt(key);
 }
 
 function hover(stage: Konva.Stage | null, over: boolean): void {

@@ -92,7 +92,25 @@ export interface ActionControl {
   readonly label: string;
 }
 
-export type SettingControl = NumberControl | ChoiceControl | ActionControl;
+/** Parts that lie at hand, each to be put where one of that kind is: by pressing or by dragging. */
+export interface TrayControl {
+  readonly kind: 'tray';
+  readonly key: string;
+  readonly label: string;
+  readonly parts: readonly TrayPart[];
+  /** Where a part may be put; `key` is the setting that takes its value. */
+  readonly places: readonly { readonly key: string; readonly label: string }[];
+}
+
+export interface TrayPart {
+  readonly value: number;
+  /** What stands on it: `24`. */
+  readonly label: string;
+  /** What it is: `wheel of 24 teeth`. */
+  readonly name: string;
+}
+
+export type SettingControl = NumberControl | ChoiceControl | ActionControl | TrayControl;
 
 /** A place on the drawing that the hand may take hold of. */
 export interface Handle {
@@ -160,6 +178,8 @@ export interface BenchModel {
   /** What pulling a handle from one place to another does, `drive` being where it was taken hold. */
   readonly drag: (handle: string, from: Point, to: Point, drive: number) => Dragged;
   readonly controls: readonly SettingControl[];
+  /** The setting that a part from the tray changes when it is put down here, or null on bare board. */
+  readonly placeAt: (at: Point) => string | null;
   /** The bench with one setting changed; `value` in what is shown. */
   readonly set: (key: string, value: number | string) => BenchSpec;
   /** What an exercise asks for: mm, counts and words by the key of each control. */

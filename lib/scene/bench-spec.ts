@@ -117,6 +117,8 @@ export interface PantographSpec extends BenchSettings {
   readonly holeStep: number;
   readonly setUp: PantographSetUp;
   readonly drawing: DrawingToFollow;
+  /** How far the fixed pin has been moved on the board, mm; not at all when left out. */
+  readonly pinMoved?: Point;
   /** The angle at the elbow within which it works, radians. */
   readonly elbow: readonly [number, number];
   /** How much the short bars differ from closing the parallelogram, mm; nothing when left out. */

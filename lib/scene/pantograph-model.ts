@@ -1,9 +1,10 @@
 import { radians } from '@/lib/geometry/angle';
-import { dot, direction, polar, subtract, type Point } from '@/lib/geometry/point';
+import { add, dot, direction, ORIGIN, polar, subtract, type Point } from '@/lib/geometry/point';
 import { lengthField } from '@/lib/quantities/field';
 import type { BenchModel, Dragged, DriveControl, Handle, SettingControl } from './bench-model';
 import type { DrawingName, PantographSetUp, PantographSpec } from './bench-spec';
 import { lengthFromShown, lengthUnit, shownLength, toStep } from './measure';
+import { boundsOnBoard, pinControls, pullPin, sceneOnBoard, setPin } from './pantograph-pin';
 import { drawPantograph, pantographScene } from './pantograph-scene';
 import { setUpPantograph, type PantographSetup } from './pantograph-setup';
 import {
@@ -40,21 +41,27 @@ export function pantographModel(spec: PantographSpec): BenchModel {
   const drawing = drawPantograph(setup);
   return {
     spec,
-    bounds: drawing.bounds,
+    bounds: boundsOnBoard(spec, drawing.bounds),
     drive: stylusControl(setup),
     admit: (drive) => drive,
-    scene: (state, showing) => pantographScene(drawing, state, showing),
+    scene: (state, showing) => sceneOnBoard(spec, pantographScene(drawing, state, showing)),
     readouts: (drive) => pantographReadouts(setup, drive),
     describe: (drive) => describePantograph(setup, drive),
     limits: (drive) => pantographLimits(setup, drive),
     tables: () => pantographTables(setup),
     plot: pantographPlot(setup),
-    handles: (drive) => pantographHandles(setup, drive),
-    drag: (handle, from, to, drive) => dragPantograph(setup, handle, from, to, drive),
-    controls: pantographControls(spec).filter(
-      ({ key }) => spec.controls === undefined || spec.controls.includes(key),
-    ),
-    set: (key, value) => setPantograph(spec, key, value),
+    handles: (drive) =>
+      pantographHandles(setup, drive).map((handle) => ({
+        ...handle,
+        at: add(handle.at, spec.pinMoved ?? ORIGIN),
+      })),
+    drag: (handle, from, to, drive) => {
+      const seen = (at: Point) => subtract(at, spec.pinMoved ?? ORIGIN);
+      return dragPantograph(setup, handle, seen(from), seen(to), drive);
+    },
+    controls: pantographControls(setup).filter(({ key }) => isSettable(spec, key)),
+    placeAt: () => null,
+    set: (key, value) => setPantograph(setup, key, value),
     values: { firstHole: spec.firstHole, secondHole: spec.secondHole },
   };
 }
@@ -92,7 +99,12 @@ function holes(spec: PantographSpec, length: number): LengthRange {
   };
 }
 
-function pantographControls(spec: PantographSpec): readonly SettingControl[] {
+function isSettable({ controls }: PantographSpec, key: string): boolean {
+  return controls === undefined || controls.includes(key);
+}
+
+function pantographControls(setup: PantographSetup): readonly SettingControl[] {
+  const { spec } = setup;
   const { units, first, second, firstHole, secondHole } = spec;
   const short = spec.shortBars ?? { stylus: 0, other: 0 };
   return [
@@ -113,6 +125,7 @@ function pantographControls(spec: PantographSpec): readonly SettingControl[] {
     choice('setUp', 'Set up', spec.setUp, setUps),
     choice('drawing', 'Drawing to follow', spec.drawing.name, drawings),
     lengthControl('height', 'Drawing, high', spec.drawing.height, heights, units),
+    ...pinControls(setup),
     lengthControl('first', 'First long bar', first, bars, units),
     lengthControl('second', 'Second long bar', second, bars, units),
     lengthControl('stylusBar', 'Stylus bar too long by', short.stylus, misfit, units),
@@ -137,7 +150,12 @@ function choice(
   };
 }
 
-function setPantograph(spec: PantographSpec, key: string, value: number | string): PantographSpec {
+function setPantograph(
+  setup: PantographSetup,
+  key: string,
+  value: number | string,
+): PantographSpec {
+  const { spec } = setup;
   const { units } = spec;
   const number = Number(value);
   const short = spec.shortBars ?? { stylus: 0, other: 0 };
@@ -155,6 +173,9 @@ function setPantograph(spec: PantographSpec, key: string, value: number | string
       return { ...spec, shortBars: { ...short, other: lengthSet(number, misfit, units) } };
     case 'height':
       return { ...spec, drawing: { ...spec.drawing, height: lengthSet(number, heights, units) } };
+    case 'east':
+    case 'north':
+      return setPin(setup, key, number);
     case 'elbowLeast':
       return { ...spec, elbow: [angleSet(number, elbowLeast), spec.elbow[1]] };
     case 'elbowMost':
@@ -197,10 +218,9 @@ function pantographHandles(setup: PantographSetup, drive: number): readonly Hand
   const pins: Handle[] = [
     { id: 'firstHole', at: points.B, reach: 12, moves: 'setting' },
     { id: 'secondHole', at: points.D, reach: 12, moves: 'setting' },
+    { id: 'fixedPin', at: ORIGIN, reach: 14, moves: 'setting' },
   ];
-  const settable = pins.filter(
-    ({ id }) => spec.controls === undefined || spec.controls.includes(id),
-  );
+  const settable = pins.filter(({ id }) => isSettable(spec, id === 'fixedPin' ? 'east' : id));
   return [...settable, { id: 'stylus', at: stylus, reach: 14, moves: 'drive' }];
 }
 
@@ -217,6 +237,7 @@ function dragPantograph(
     const off = gone - drive;
     return { kind: 'drive', drive: gone - Math.round(off / way.length) * way.length };
   }
+  if (handle === 'fixedPin') return { kind: 'spec', spec: pullPin(setup, from, to) };
   const { O, C, P } = setup.pose(drive).points;
   const along = direction(handle === 'firstHole' ? subtract(C, O) : subtract(P, C));
   const moved = dot(subtract(to, from), polar(1, along));

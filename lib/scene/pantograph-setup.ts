@@ -38,6 +38,8 @@ export interface PantographSetup {
   readonly roles: PantographRoles;
   readonly copy: CopyOutcome;
   readonly way: Way;
+  /** The drawing's middle as seen from the fixed pin, mm. */
+  readonly middle: Point;
   readonly reach: { readonly stylus: Reach; readonly pen: Reach };
   readonly pose: (drive: number) => PantographPose;
   /** Poses at equal steps along the drawing, the last back at the first. */
@@ -71,7 +73,8 @@ export function setUpPantograph(spec: PantographSpec): PantographSetup {
   const { name, height, at } = spec.drawing;
   const wide = boundsOf(wayOf(name, height, ORIGIN).points).right;
   const usual = { x: ahead * (outermost * reach.stylus.most - wide), y: 0 };
-  const way = wayOf(name, height, at ?? usual);
+  const middle = at ?? usual;
+  const way = wayOf(name, height, middle);
   const pose = posing(spec, roles, way);
   const samples = Array.from({ length: sampleCount + 1 }, (_, i) =>
     pose((i * way.length) / sampleCount),
@@ -88,6 +91,7 @@ export function setUpPantograph(spec: PantographSpec): PantographSetup {
     roles,
     copy: pantographCopy(spec, roles),
     way,
+    middle,
     reach,
     pose,
     samples,

@@ -2,7 +2,15 @@ import { norm } from '@/lib/geometry/point';
 import { strayAtPen } from '@/lib/kinematics/linkage/pantograph-making';
 import { copyStretch, type PantographCorner } from '@/lib/kinematics/linkage/pantograph';
 import type { BenchTable, Plot, Readout } from './bench-model';
-import { angleText, lengthText, lengthUnit, ruleText, shortNumber, shownLength } from './measure';
+import {
+  angleText,
+  compassText,
+  lengthText,
+  lengthUnit,
+  ruleText,
+  shortNumber,
+  shownLength,
+} from './measure';
 import { inLine } from './pantograph-scene';
 import {
   elbowWorks,
@@ -68,7 +76,7 @@ function sizeText(box: Bounds, units: PantographSetup['spec']['units']): string 
 
 /** The state of a pantograph in words. */
 export function describePantograph(setup: PantographSetup, drive: number): string {
-  const { spec, roles, copy, drawingBox, copyBox, beyond } = setup;
+  const { spec, roles, copy, middle, drawingBox, copyBox, beyond } = setup;
   const pose = setup.pose(drive);
   const hidden = new Set(spec.hide ?? []);
   const rule = (mm: number) => ruleText(mm, spec.units);
@@ -88,7 +96,11 @@ export function describePantograph(setup: PantographSetup, drive: number): strin
   }
   parts.push(`Elbow at ${angleText(pose.elbow, 0)}.`);
   const lies = beyond > 1e-6 ? `${lengthText(beyond, spec.units)} beyond` : 'inside';
-  parts.push(`The drawing, ${sizeText(drawingBox, spec.units)}, lies ${lies} the reach.`);
+  const from = compassText(middle, spec.units);
+  const place = from === 'the middle' ? 'on the fixed pin' : `${from} of the fixed pin`;
+  parts.push(
+    `The drawing, ${sizeText(drawingBox, spec.units)}, lies ${lies} the reach, its middle ${place}.`,
+  );
   if (showsCopy && copyBox) parts.push(`The copy is ${sizeText(copyBox, spec.units)}.`);
   return parts.join(' ');
 }

@@ -5,6 +5,7 @@ import type { FreeTrainSpec, TrainSpec } from './bench-spec';
 import { handsOn, setUpTrain, standard, takes, type TrainSetup } from './train-setup';
 import { drawTrain, leverEnd, trainScene } from './train-scene';
 import { putArbor, setTrain, trainControls, trainValues } from './train-settings';
+import { wheelUnder } from './train-tray';
 import { describeTrain, trainLimits, trainPlot, trainReadouts, trainTables } from './train-words';
 
 const turn = 2 * Math.PI;
@@ -30,6 +31,7 @@ export function trainModel(spec: TrainSpec): BenchModel {
     controls: trainControls(spec).filter(
       ({ key }) => spec.controls === undefined || spec.controls.includes(key.split(':')[0] ?? ''),
     ),
+    placeAt: (at) => wheelUnder(setup, at),
     set: (key, value) => setTrain(spec, key, value),
     values: trainValues(spec),
   };

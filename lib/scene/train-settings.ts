@@ -4,6 +4,7 @@ import { lengthField, plainField, countField, type Field } from '@/lib/quantitie
 import type { ChoiceControl, NumberControl, SettingControl } from './bench-model';
 import { degrees, radians } from '@/lib/geometry/angle';
 import { handsOn, standard, takes } from './train-setup';
+import { wheelName, wheelTray } from './train-tray';
 
 /** Inch learners choose a diametral pitch, teeth for each inch of pitch diameter. */
 const pitches = [3, 4, 5, 6, 8, 10, 12];
@@ -17,6 +18,7 @@ export function trainControls(spec: TrainSpec): readonly SettingControl[] {
   if (spec.layout === 'between-posts') return postsControls(spec);
   const { arbors } = spec;
   return [
+    wheelTray(arbors),
     ...arbors.flatMap((arbor, index) => arborControls(arbors, arbor, index)),
     toothSize(spec),
     ...(arbors.length < mostArbors
@@ -42,10 +44,9 @@ function arborControls(
   index: number,
 ): readonly SettingControl[] {
   const name = `Arbor ${index + 1}`;
-  const teeth = arbor.wheels.map(({ teeth: value }, wheel) => {
-    const which = arbor.wheels.length === 1 ? '' : wheel === 0 ? ', takes' : ', hands on';
-    return count(`teeth:${index}:${wheel}`, `${name}${which}`, value, 6, 96, 'teeth');
-  });
+  const teeth = arbor.wheels.map(({ teeth: value }, wheel) =>
+    count(`teeth:${index}:${wheel}`, wheelName(arbor, index, wheel), value, 6, 96, 'teeth'),
+  );
   const wheels: ChoiceControl = {
     kind: 'choice',
     key: `wheels:${index}`,

@@ -49,6 +49,7 @@ export function trammelModel(spec: TrammelSpec): BenchModel {
     handles: (drive) => trammelHandles(setup, drive),
     drag: (handle, from, to, drive) => dragTrammel(setup, handle, from, to, drive),
     controls: trammelControls(spec).filter(({ key }) => isSettable(spec, key)),
+    placeAt: () => null,
     set: (key, value) => setTrammel(spec, key, value),
     values: { farPin: spec.farPin, nearPin: spec.nearPin, farRunsIn: spec.farRunsIn },
   };

@@ -1,6 +1,8 @@
 import { pantographCopy } from '@/lib/kinematics/linkage/pantograph';
 import { pantographHoles, strayAtPen } from '@/lib/kinematics/linkage/pantograph-making';
 import { pantographReach } from '@/lib/kinematics/linkage/pantograph-reach';
+import type { PantographSetUp } from '@/lib/scene/bench-spec';
+import { rolesOf } from '@/lib/scene/pantograph-setup';
 import { createSource } from '@/lib/marking/source';
 import type { UnitSystem } from '@/lib/quantities/unit-system';
 import { write } from '@/lib/quantities/write';
@@ -15,6 +17,7 @@ export function pantographFigures(units: UnitSystem, seed: number): LessonFigure
   const bar = inUnits(units, 400, 16);
   const hole = inUnits(units, 100, 4);
   const drilled = inUnits(units, 0.5, 1 / 64);
+  const knock = inUnits(units, 1, 1 / 32);
   const pair = inUnits(units, 0.2, 0.008);
   const { pen } = pantographReach(equalBars(bar, bar / 2), 'middle-to-end', elbow);
   const texts = {
@@ -23,6 +26,12 @@ export function pantographFigures(units: UnitSystem, seed: number): LessonFigure
     'reach-opened': write(elbow.most / degree, '°'),
     'reach-near': said(pen.least, units, inUnits(units, 0, 1)),
     'reach-far': said(pen.most, units, inUnits(units, 0, 1)),
+    'role-end': copyScale(units, 'middle-to-end'),
+    'role-exchanged': copyScale(units, 'end-to-middle'),
+    'role-middle': copyScale(units, 'across-the-middle'),
+    'role-middle-back': copyScale(units, 'across-the-middle-from-the-end'),
+    knock: said(knock, units),
+    'knock-pen': said((scaleOf(3 * hole, hole) - 1) * knock, units),
     'drill-hole': said(hole, units),
     'drill-error': said(drilled, units),
     'drill-true': plain(scaleOf(3 * hole, hole)),
@@ -43,6 +52,14 @@ function equalBars(bar: number, hole: number) {
 function scaleOf(bar: number, hole: number): number {
   const copy = pantographCopy(equalBars(bar, hole), 'middle-to-end');
   return copy.outcome === 'true' ? copy.scale : NaN;
+}
+
+/** The scale of the lesson's bench with its pins left alone, as copy to drawing: `3 : 1`. */
+function copyScale(units: UnitSystem, setUp: PantographSetUp): string {
+  const hole = inUnits(units, 100, 4);
+  const copy = pantographCopy(equalBars(3 * hole, hole), rolesOf(setUp));
+  const scale = copy.outcome === 'true' ? Math.abs(copy.scale) : NaN;
+  return scale >= 1 ? `${plain(scale)} : 1` : `1 : ${plain(1 / scale)}`;
 }
 
 const scales = ['3/2', '2', '5/2', '3'] as const;

@@ -162,7 +162,7 @@ export const joinTheArbors = defineExercise<Drawn>({
   hints: ({ givens: g, units }) => [
     'Settle the ratio first, then the sense, and only then the reach.',
     'z = i · z₁. One idler: with the crank; none or two: against it. A = m · (z₁ + z) ÷ 2 + (idlers) · m · (their teeth).',
-    `z = ${ratioSaid(g.ratio)} × ${g.first}; left over for the idlers: ${said(fromMillimetres(g.distance, units), units, 3)} − (${g.first} + z) ÷ 2 modules.`,
+    `z = ${ratioSaid(g.ratio)} × ${g.first}; left over for the idlers: ${said(fromMillimetres(g.distance, units), units, 3)} − ${units === 'metric' ? `${g.toothSize} mm × (${g.first} + z) ÷ 2` : `(${g.first} + z) ÷ (2 × ${g.toothSize}) in`}.`,
   ],
   solution(variant) {
     const { givens: g, units } = variant;

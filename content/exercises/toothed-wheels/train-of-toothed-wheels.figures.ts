@@ -15,6 +15,12 @@ const split: readonly DriverAndDriven[] = [
   [12, 16],
 ];
 
+/** Two pairs that may follow each other either way round. */
+const swapped: readonly [DriverAndDriven, DriverAndDriven] = [
+  [12, 36],
+  [10, 40],
+];
+
 /** The numbers of the lesson on toothed wheels. */
 export function trainFigures(units: UnitSystem, seed: number): LessonFigures {
   const [small, large] = units === 'metric' ? [4, 6] : [6, 4];
@@ -22,11 +28,20 @@ export function trainFigures(units: UnitSystem, seed: number): LessonFigures {
     values: {
       'pair-second': { text: `${split[1]?.[0] ?? ''} teeth` },
       'pair-ratio': { text: `${plain(1 / compoundTrain(split).value)} turns` },
+      'swap-one': { text: pairText(swapped[0]) },
+      'swap-two': { text: pairText(swapped[1]) },
+      'swap-ratio': { text: `${plain(1 / compoundTrain(swapped).value)} turns` },
+      'swap-before': { text: plain(1 / Math.abs(compoundTrain([swapped[0]]).value)) },
+      'swap-after': { text: plain(1 / Math.abs(compoundTrain([swapped[1]]).value)) },
       'tooth-thin': { text: said(thickness(small, units), units, places(units)) },
       'tooth-thick': { text: said(thickness(large, units), units, places(units)) },
     },
     worked: twoPairs(units, seed),
   };
+}
+
+function pairText([driver, driven]: DriverAndDriven): string {
+  return `${driver} driving ${driven} teeth`;
 }
 
 function places(units: UnitSystem): number {

@@ -109,6 +109,23 @@ describe('a bench', { timeout: 60_000 }, () => {
     expect(screen.queryByRole('spinbutton', { name: /Far pin/ })).toBeNull();
   });
 
+  it('puts a wheel from the tray on an arbor by two presses, and takes it off again', async () => {
+    const user = userEvent.setup();
+    render(<Bench spec={row} title="Row of three" />);
+    const middle = screen.getByRole('spinbutton', { name: 'Arbor 2' });
+    await user.click(screen.getByRole('button', { name: 'wheel of 24 teeth' }));
+    expect(screen.getByRole('button', { name: 'wheel of 24 teeth' })).toBePressed();
+    expect(screen.getByRole('status')).toHaveTextContent('In your hand: wheel of 24 teeth.');
+    await user.keyboard('{Escape}');
+    expect(screen.queryByRole('button', { name: 'Arbor 2' })).toBeNull();
+    await user.click(screen.getByRole('button', { name: 'wheel of 24 teeth' }));
+    await user.click(screen.getByRole('button', { name: 'Arbor 2' }));
+    expect(middle).toHaveValue('24');
+    expect(screen.getByRole('status')).toHaveTextContent('Pull one on to the drawing');
+    await user.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(middle).toHaveValue('48');
+  });
+
   it('says its limits with their amounts', async () => {
     const user = userEvent.setup();
     render(<Bench spec={{ ...trammel, groove: 200 }} title="Trammel" />);
@@ -222,5 +239,34 @@ describe('the canvas', { timeout: 60_000 }, () => {
       container.dispatchEvent(pointer('pointerup', arbor.x - dy, arbor.y + dx));
     });
     expect(strip('Crank, turns')).toBe('0.25 right');
+  });
+
+  it('takes a wheel that is pulled from the tray and let go over an arbor', async () => {
+    stubCanvas({ width: 640, height: 400 });
+    render(<Bench spec={row} title="Row" />);
+    const { default: Konva } = await import('konva/lib/Core');
+    await waitFor(() => expect(document.querySelector('[data-live=true]')).not.toBeNull(), loading);
+    const stage = Konva.stages.at(-1);
+    const arbor = stage?.findOne((node: { id: () => string }) => node.id() === 'wheel:1:0');
+    const sheet = stage?.content;
+    if (!arbor || !sheet) throw new Error('an arbor on a stage');
+    const wheel = screen.getByRole('button', { name: 'wheel of 60 teeth' });
+    const pull = (over: Element, type: string, at: { x: number; y: number }) =>
+      fireEvent(
+        over,
+        new PointerEvent(type, { clientX: at.x, clientY: at.y, bubbles: true, pointerId: 1 }),
+      );
+    const bare = { x: 3, y: 3 };
+    pull(wheel, 'pointerdown', { x: 10, y: 500 });
+    pull(wheel, 'pointermove', { x: 12, y: 502 });
+    expect(wheel).not.toBePressed();
+    pull(sheet, 'pointermove', bare);
+    expect(wheel).toBePressed();
+    pull(sheet, 'pointerup', bare);
+    expect(screen.getByRole('spinbutton', { name: 'Arbor 2' })).toHaveValue('48');
+    expect(wheel).toBePressed();
+    pull(sheet, 'pointerup', arbor.position());
+    expect(screen.getByRole('spinbutton', { name: 'Arbor 2' })).toHaveValue('60');
+    expect(wheel).not.toBePressed();
   });
 });

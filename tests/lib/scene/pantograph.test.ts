@@ -141,4 +141,57 @@ describe('a drawing to follow', () => {
       }
     },
   );
+
+  it('moves its fixed pin over the board while the drawing stays where it lies', () => {
+    const { middle } = setUpPantograph(spec);
+    const start = modelOf({ ...spec, drawing: { ...spec.drawing, at: { x: 200, y: 0 } } });
+    const pulled = start.drag('fixedPin', { x: 1, y: 1 }, { x: -49, y: 21 }, 0);
+    if (pulled.kind !== 'spec' || pulled.spec.bench !== 'pantograph') throw new Error('a spec');
+    expect(pulled.spec.drawing.at).toEqual({ x: 250, y: -20 });
+    expect(pulled.spec.pinMoved).toEqual({ x: -50, y: 20 });
+    const after = modelOf(pulled.spec);
+    const pin = (model: typeof after) => model.handles(0).find(({ id }) => id === 'fixedPin')?.at;
+    const stylus = (model: typeof after) => model.handles(0).find(({ id }) => id === 'stylus')?.at;
+    expect(pin(start)).toEqual({ x: 0, y: 0 });
+    expect(pin(after)).toEqual({ x: -50, y: 20 });
+    expect(stylus(after)?.x).toBeCloseTo(stylus(start)?.x ?? NaN, 9);
+    expect(stylus(after)?.y).toBeCloseTo(stylus(start)?.y ?? NaN, 9);
+    expect(after.describe(0)).toContain('its middle 250.0 mm east, 20.0 mm south of the fixed pin');
+    // The whole scene stands on the board by one body, and the pen is led on from there.
+    const [body, ...rest] = after.scene(
+      { drive: 0, swept: { from: 0, to: 0 } },
+      { tracing: true, dimensions: true },
+    ).shapes;
+    expect(rest).toEqual([]);
+    expect(body).toMatchObject({ kind: 'body', pose: { x: -50, y: 20, angle: 0 } });
+    const at = stylus(after) ?? middle;
+    expect(after.drag('stylus', at, at, 3)).toEqual({ kind: 'drive', drive: expect.closeTo(0, 3) });
+  });
+
+  it('sets the fixed pin by figures, and by them clears sheets that overlap', () => {
+    const near = {
+      ...spec,
+      drawing: { name: 'square', height: 100, at: { x: 120, y: 0 } },
+    } as const;
+    const [limit = ''] = modelOf(near).limits(0).slice(-1);
+    // 170 and 70 mm are the far and the near edge: (170 − 3 × 70) ÷ 2 would be clear already.
+    expect(limit).not.toContain('overlap');
+    const over = {
+      ...spec,
+      drawing: { name: 'square', height: 100, at: { x: 90, y: 0 } },
+    } as const;
+    // (140 − 3 × 40) ÷ 2 = 10 mm farther off, and it is clear.
+    expect(modelOf(over).limits(0).at(-1)).toBe(
+      'Drawing and copy overlap: move the fixed pin 10.0 mm farther off.',
+    );
+    const moved = modelOf(over).set('east', 100);
+    expect(moved).toMatchObject({ drawing: { at: { x: 100, y: 0 } }, pinMoved: { x: -10, y: 0 } });
+    expect(modelOf(moved).limits(0).join(' ')).not.toContain('overlap');
+    expect(modelOf(moved).controls.find(({ key }) => key === 'north')).toMatchObject({ value: 0 });
+    expect(
+      modelOf({ ...over, controls: ['firstHole'] })
+        .handles(0)
+        .map(({ id }) => id),
+    ).toEqual(['firstHole', 'stylus']);
+  });
 });

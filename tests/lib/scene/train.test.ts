@@ -204,4 +204,32 @@ describe('a train of toothed wheels', () => {
     const frames = [0, 1, 2.7].map((drive) => sceneAt(compound, drive).bounds);
     expect(new Set(frames.map((frame) => JSON.stringify(frame))).size).toBe(1);
   });
+
+  it('has a tray of wheels with a place for each wheel there is', () => {
+    const [tray] = modelOf(compound).controls;
+    if (tray?.kind !== 'tray') throw new Error('a tray comes first');
+    expect(tray.parts.map(({ value }) => value)).toEqual([
+      8, 10, 12, 14, 16, 20, 24, 30, 36, 40, 48, 60, 72, 96,
+    ]);
+    expect(tray.places).toEqual([
+      { key: 'teeth:0:0', label: 'Arbor 1' },
+      { key: 'teeth:1:0', label: 'Arbor 2, takes' },
+      { key: 'teeth:1:1', label: 'Arbor 2, hands on' },
+      { key: 'teeth:2:0', label: 'Arbor 3' },
+    ]);
+    const changed = modelOf(compound).set('teeth:1:1', 20);
+    // 12 into 36, and now 20 into 28: the last arbor moves out to 2 × (20 + 28) beyond the middle.
+    expect(changed).toMatchObject({ arbors: [{ x: 0 }, { x: 96 }, { x: 192 }] });
+  });
+
+  it('knows which wheel lies under a wheel that is put down, the smaller of a pair in front', () => {
+    const { placeAt } = modelOf(compound);
+    expect(placeAt({ x: 2, y: 1 })).toBe('teeth:0:0');
+    expect(placeAt({ x: 96, y: 10 })).toBe('teeth:1:1');
+    expect(placeAt({ x: 96, y: 60 })).toBe('teeth:1:0');
+    expect(placeAt({ x: 180, y: 40 })).toBe('teeth:2:0');
+    expect(placeAt({ x: 96, y: 120 })).toBeNull();
+    expect(modelOf({ ...compound, controls: [] }).placeAt({ x: 0, y: 0 })).toBeNull();
+    expect(modelOf({ ...compound, controls: [] }).controls).toEqual([]);
+  });
 });
