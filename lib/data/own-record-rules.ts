@@ -115,11 +115,14 @@ export const ownRecordRules: readonly OwnRecordRule[] = [
   },
   {
     part: 'comments',
-    keys: ['comments.author_id'],
-    sql: `select a.exercise_id as exercise, c.body, c.created_at as "writtenAt",
-        c.read_at as "readAt", c.author_id = $1 as "byYou"
-      from comments c join attempts a on a.id = c.attempt_id
-      where (c.author_id = $1 or a.learner_id = $2) and ${both} order by c.created_at`,
+    keys: ['comments.author_id', 'comments.learner_id'],
+    sql: `select a.exercise_id as exercise, g.name as "class", c.body,
+        c.created_at as "writtenAt", c.read_at as "readAt", c.author_id = $1 as "byYou"
+      from comments c
+      join class_groups g on g.id = c.class_id
+      left join attempts a on a.id = c.attempt_id
+      where (c.author_id = $1 or c.learner_id = $2 or a.learner_id = $2) and ${both}
+      order by c.created_at`,
   },
   {
     part: 'overrides',
