@@ -30,6 +30,7 @@ const parts = {
       'unit',
       '--coverage',
       '--coverage.include=lib/kinematics/**',
+      '--coverage.exclude=tests/**',
       '--coverage.thresholds.lines=98',
       '--coverage.thresholds.branches=98',
       'tests/lib/kinematics',

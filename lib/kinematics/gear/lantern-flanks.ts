@@ -36,22 +36,9 @@ const pieces = 64;
  * @example lanternSpeed({ pitch: 25, wheelTeeth: 36, pins: 8, pinDiameter: 11 }, 'straight', Math.PI / 4) // → { outcome: 'drives', speed: 1.7226 }
  */
 export function lanternSpeed(spec: LanternSpec, flank: LanternFlank, turn: number): LanternSpeed {
-  const { wheelRadius, pinCircleRadius, centreDistance } = lanternSizes(spec);
   requireWithin('lanternSpeed', 'turn', turn, 0, (2 * Math.PI) / spec.pins);
-  if (flank === 'pin-path') return { outcome: 'drives', speed: 1 };
-  const x = centreDistance - pinCircleRadius * Math.cos(turn);
-  const y = pinCircleRadius * Math.sin(turn);
-  const away = Math.hypot(x, y);
-  // From the pin's centre to the foot of the wheel's axle on the normal, seen from the axle.
-  const foot =
-    flank === 'straight'
-      ? Math.asin(Math.min(1, spec.pinDiameter / 2 / away))
-      : Math.acos((wheelRadius / away) * Math.cos(involuteAngle));
-  const leaning = Math.atan2(y, x) - foot;
-  const fromWheel = away * Math.cos(foot);
-  const fromLantern = centreDistance * Math.cos(leaning) - fromWheel;
-  if (fromLantern <= 0) return { outcome: 'jams', by: -fromLantern };
-  return { outcome: 'drives', speed: (fromWheel / fromLantern) * (pinCircleRadius / wheelRadius) };
+  const { fromLantern, speed } = pushOf(spec, flank, turn);
+  return fromLantern > 0 ? { outcome: 'drives', speed } : { outcome: 'jams', by: -fromLantern };
 }
 
 /**
@@ -66,10 +53,7 @@ export function lanternSwing(spec: LanternSpec, flank: LanternFlank): LanternSwi
   const spacing = (2 * Math.PI) / spec.pins;
   const end = lanternSpeed(spec, flank, spacing);
   if (end.outcome === 'jams') return end;
-  const speed = (turn: number) => {
-    const told = lanternSpeed(spec, flank, Math.min(Math.max(turn, 0), spacing));
-    return told.outcome === 'drives' ? told.speed : end.speed;
-  };
+  const speed = (turn: number) => pushOf(spec, flank, turn).speed;
   const { least, most } = findExtremes(speed, 0, spacing, pieces);
   return { outcome: 'swings', least: least.value - 1, greatest: most.value - 1 };
 }
@@ -85,4 +69,22 @@ export function lanternSwing(spec: LanternSpec, flank: LanternFlank): LanternSwi
 export function plainFlankDig(spec: LanternSpec): number {
   lanternSizes(spec);
   return (spec.pinDiameter - (spec.play ?? 0)) / 2;
+}
+
+/** How far from the lantern's axle the flank pushes, and the speed over the mean that this gives. */
+function pushOf(spec: LanternSpec, flank: LanternFlank, turn: number) {
+  const { wheelRadius, pinCircleRadius, centreDistance } = lanternSizes(spec);
+  if (flank === 'pin-path') return { fromLantern: pinCircleRadius, speed: 1 };
+  const x = centreDistance - pinCircleRadius * Math.cos(turn);
+  const y = pinCircleRadius * Math.sin(turn);
+  const away = Math.hypot(x, y);
+  // The angle at the wheel's axle from the pin's centre to the foot of the push's line.
+  const foot =
+    flank === 'straight'
+      ? Math.asin(Math.min(1, spec.pinDiameter / 2 / away))
+      : Math.acos((wheelRadius / away) * Math.cos(involuteAngle));
+  const leaning = Math.atan2(y, x) - foot;
+  const fromWheel = away * Math.cos(foot);
+  const fromLantern = centreDistance * Math.cos(leaning) - fromWheel;
+  return { fromLantern, speed: (fromWheel / fromLantern) * (pinCircleRadius / wheelRadius) };
 }

@@ -43,20 +43,9 @@ export function orderDyads(model: Model): Ordering {
   return finish(progress);
 }
 
-function finish({
-  model,
-  placed,
-  done,
-  turned,
-  usedSlides,
-  usedRuns,
-  steps,
-  checks,
-}: Progress): Ordering {
+function finish({ model, placed, done, usedSlides, usedRuns, steps, checks }: Progress): Ordering {
   const left = [
-    ...model.bodies
-      .filter((body) => !done.has(body))
-      .flatMap((body) => relationsOf(turned.has(body) ? { ...body, driven: undefined } : body)),
+    ...model.bodies.filter((body) => !done.has(body)).flatMap((body) => relationsOf(body)),
     ...model.slides.filter((slide) => !usedSlides.has(slide)),
     ...[...model.runs]
       .filter(([slide]) => !usedRuns.has(slide))

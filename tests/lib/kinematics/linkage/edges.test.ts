@@ -98,6 +98,12 @@ describe('places where a formula has no answer, or two', () => {
     expect(fourBarThroughPairs(100, pairs)).toEqual({ outcome: 'undetermined' });
   });
 
+  it('three pairs that ever differ by one angle ask for a crank without end', () => {
+    const pair = (crank: number, rocker: number) => ({ crank, rocker });
+    const pairs = [pair(0.8, 1.2), pair(1.2, 1.6), pair(0.4, 0.8)] as const;
+    expect(fourBarThroughPairs(100, pairs)).toEqual({ outcome: 'impossible', by: 0 });
+  });
+
   it('a groove on an arm that leans so far that the pin stands behind it', () => {
     const short = invertedPosition({ crank: 10, frame: 50, arm: 60, grooveAngle: 0.2 }, 0);
     // √(40² − (60·sin 0.2)²) − 60·cos 0.2

@@ -259,6 +259,37 @@ describe('a body whose direction is driven, held at two points', () => {
   });
 });
 
+describe('a driver told from either end', () => {
+  it('turns a crank by the way back to its pivot', () => {
+    const bars = fourBarLinkage({ crank: 40, coupler: 120, rocker: 80, frame: 100 });
+    const back = planned({ ...bars, drivers: [{ kind: 'angle', from: 'A', to: 'O2' }] });
+    const there = placed(planned(bars), [0.7]);
+    const found = placed(back, [0.7 + Math.PI]);
+    expect(distance(pick(found, 'B'), pick(there, 'B'))).toBeLessThan(1e-12);
+  });
+
+  it('leads a bar that no dyad reaches', () => {
+    const plan = planned({ ...farSixBar([]), drivers: [{ kind: 'angle', from: 'P', to: 'C' }] });
+    expect(plan.steps.map(({ method }) => method.kind)).toEqual(['solve']);
+    const wanted = Math.atan2(-10, 85) + 0.02;
+    const { P, C } = placed(plan, [wanted]);
+    expect(Math.atan2((C?.y ?? 0) - (P?.y ?? 0), (C?.x ?? 0) - (P?.x ?? 0))).toBeCloseTo(wanted, 9);
+  });
+
+  it('swings a slotted lever whose bar begins at its free end', () => {
+    const lever = slottedLeverLinkage(40, 100, 200);
+    const turned: Linkage = {
+      ...lever,
+      bars: [
+        { ends: ['O2', 'A'], length: 40 },
+        { ends: ['E', 'O4'], length: 200 },
+      ],
+    };
+    const [one, other] = [placed(planned(lever), [0.4]), placed(planned(turned), [0.4])];
+    expect(distance(pick(one, 'E'), pick(other, 'E'))).toBeLessThan(1e-10);
+  });
+});
+
 describe('places where little is said', () => {
   it('a gap narrower than a step still ends the drive', () => {
     // |b − c| is a hair more than d − a: within half a thousandth of a radian of nought it is too long.
@@ -275,9 +306,17 @@ describe('places where little is said', () => {
   });
 
   it('a groove’s pin that stands on the pivot leaves the groove its last direction', () => {
-    const plan = planned(slottedLeverLinkage(100, 100, 220));
-    const { A, O4, E } = placed(plan, [-Math.PI / 2]);
-    expect(distance(A ?? nowhere, O4 ?? ORIGIN)).toBeLessThan(1e-12);
+    const plan = planned({
+      ...slottedLeverLinkage(100, 100, 220),
+      points: {
+        O2: ORIGIN,
+        A: { x: 0, y: 100 },
+        O4: { x: 100, y: 0 },
+        E: polar(220, (3 * Math.PI) / 4, { x: 100, y: 0 }),
+      },
+    });
+    const { A, O4, E } = placed(plan, [0]);
+    expect(A).toEqual(O4);
     expect(distance(E ?? nowhere, O4 ?? ORIGIN)).toBeCloseTo(220, 12);
   });
 
