@@ -11,8 +11,8 @@ import { closeDatabase } from '@/lib/db/connection';
 import type { Viewer } from '@/lib/policy/viewer';
 
 const email = 'marit@example.org';
-const first = 'six brass pins';
-const second = 'seven oak pegs';
+const first = 'six pins of old brass';
+const second = 'seven pegs of straight oak';
 const now = new Date('2026-12-01T18:00:00Z');
 let database: TestDatabase;
 

@@ -55,6 +55,9 @@ export const screens: readonly Screen[] = [
   },
   { name: 'forgotten', path: '/forgotten', by: ['nobody'] },
   { name: 'dead-link', path: '/set-password/not-a-link', by: ['nobody'] },
+  { name: 'join', path: '/join', by: ['nobody', 'learner'] },
+  { name: 'dead-invitation', path: '/invitation/not-a-link', by: ['nobody'] },
+  { name: 'dead-change-of-address', path: '/confirm-address/not-a-link', by: ['nobody'] },
   { name: 'not-found', path: '/nowhere', by: ['nobody', 'learner'] },
   { name: 'asked-to-sign-in', path: '/today', by: ['nobody'] },
   ...lessons.map((lesson) => ({
@@ -115,6 +118,22 @@ export const screens: readonly Screen[] = [
   { name: 'exercises', path: '/exercises', by: ['instructor'] },
   { name: 'key', path: '/exercises', by: ['instructor'], prepare: follow(/\/key$/) },
   { name: 'people', path: '/people', by: ['administrator'] },
+  { name: 'people-found', path: '/people?search=zz&standing=learner', by: ['administrator'] },
+  { name: 'new-person', path: '/people/new', by: ['administrator'] },
+  { name: 'invite-to-workshop', path: '/people/invitations', by: ['administrator'] },
+  {
+    name: 'list-looked-through',
+    path: '/people/invitations',
+    by: ['administrator'],
+    prepare: async (page) => {
+      await page
+        .getByLabel('E-mail, one or many')
+        .fill('Wenche Berg <wenche@new.example>\nola@new.example\nnot an address\nola@new.example');
+      await page.getByRole('button', { name: 'Invite', exact: true }).click();
+      await page.getByText('2 people can be invited').waitFor();
+    },
+  },
+  { name: 'audit-log', path: '/audit', by: ['administrator'] },
   { name: 'mail', path: '/mail', by: ['administrator'] },
   { name: 'mail-failed', path: '/mail?state=failed', by: ['administrator'] },
   {

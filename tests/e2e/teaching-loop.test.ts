@@ -26,14 +26,17 @@ describe('from an account to a marked answer that the instructor sees', () => {
     const administrator = await openVisitor(browser);
     const { page } = administrator;
     await signIn(page, demo.administrator, password);
-    await page.goto('/people', { waitUntil: 'networkidle' });
+    await page.goto('/people/new', { waitUntil: 'networkidle' });
     await page.getByLabel('Name', { exact: true }).fill('Wilma Brandt');
     await page.getByLabel('E-mail').fill(email);
     await page.getByRole('button', { name: 'Make the account' }).click();
     const link = await page.getByText(/\/set-password\//).innerText();
     await page.goto('/classes', { waitUntil: 'networkidle' });
     await page.getByRole('link', { name: demo.className }).first().click();
+    // The header leads to all people; the class's own page has to be there first.
+    await page.getByRole('heading', { level: 1, name: demo.className }).waitFor();
     await page.getByRole('link', { name: 'People', exact: true }).last().click();
+    await page.waitForURL(/\/classes\/[0-9a-f-]{36}\/people$/);
     await page.getByLabel('Who', { exact: true }).selectOption(email);
     await page.getByRole('button', { name: 'Put into the class' }).click();
     await page.getByText('Wilma Brandt').first().waitFor();

@@ -1,7 +1,7 @@
 import path from 'node:path';
 import { startMailCatcher } from '../../scripts/fakes/mail.mjs';
 import { buildIfChanged } from '../../scripts/machine/build.mjs';
-import { root, runEntry } from '../../scripts/machine/node.mjs';
+import { root, runEntry, startChild, stopChild } from '../../scripts/machine/node.mjs';
 import {
   freeAddress,
   siteEnvironment,
@@ -13,7 +13,7 @@ import { siteVariable, type SiteAddress } from './site';
 
 const distDir = '.next-test';
 
-/** Builds into a folder of the tests' own, loads the demo data and serves it on a free port. */
+/** Builds into a folder of the tests' own, loads the demo data and serves it with its worker. */
 let stopAll: (() => Promise<void>) | null = null;
 
 export async function setup(): Promise<void> {
@@ -29,8 +29,13 @@ export async function setup(): Promise<void> {
   buildIfChanged({ env, distDir });
   runEntry('scripts/seed.ts', { env, what: 'Loading the demo data', quiet: true });
   const running = startSite({ address, env });
+  const worker = startChild(
+    process.execPath,
+    ['--conditions=react-server', '--import', 'tsx', 'scripts/work.ts'],
+    { env, stdio: 'ignore' },
+  );
   stopAll = async () => {
-    await running.stop();
+    await Promise.all([running.stop(), stopChild(worker)]);
     await mail.stop();
     dropDatabase(cluster, name);
   };

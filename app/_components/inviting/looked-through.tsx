@@ -34,9 +34,9 @@ export function LookedThrough({ reading: { good, bad }, role }: LookedThroughPro
               {bad.map(({ line, text, wrong, expected }, at) => (
                 <Row key={at}>
                   <RowName>{line}</RowName>
-                  <Cell className="break-all">{text || '–'}</Cell>
-                  <Cell className="font-semibold text-madder">{wrong}</Cell>
-                  <Cell>{expected}</Cell>
+                  <Cell className="min-w-44 break-words">{text || '–'}</Cell>
+                  <Cell className="min-w-32 font-semibold text-madder">{wrong}</Cell>
+                  <Cell className="min-w-44">{expected}</Cell>
                 </Row>
               ))}
             </tbody>

@@ -50,7 +50,7 @@ export const operations: readonly Operation[] = [
     idempotent: true,
     request: attemptRequestSchema,
     success: { status: 201, schema: attemptReplySchema },
-    problems: [404, 409],
+    problems: [404, 409, 429],
   },
   {
     method: 'post',

@@ -1,4 +1,5 @@
 import * as z from 'zod/mini';
+import { takeAttempt } from '@/lib/data/attempt-allowance';
 import { createAttempt, type AttemptOutcome } from '@/lib/data/attempts';
 import { attemptRequestSchema } from '@/lib/schemas/round';
 import { handleWrite } from '../_http/handle';
@@ -14,6 +15,12 @@ export async function POST(request: Request): Promise<Response> {
   return handleWrite(request, attemptRequestSchema, async (viewer, body) => {
     const key = z.safeParse(keySchema, request.headers.get('idempotency-key'));
     if (!key.success) return problem(400, 'Send an Idempotency-Key, which is a UUID.');
+    const allowed = await takeAttempt(viewer);
+    if (!allowed.allowed) {
+      return problem(429, 'That was too fast. Wait, and send it again under the same key.', {
+        headers: { 'Retry-After': String(allowed.retryAfter) },
+      });
+    }
     return answer(await createAttempt(viewer, body, key.data.toLowerCase()));
   });
 }

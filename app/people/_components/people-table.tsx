@@ -32,7 +32,7 @@ export function PeopleTable({ people, timeZone }: PeopleTableProps) {
               </Link>
               <span className="block text-[0.9375rem] text-pencil">{person.email}</span>
             </RowName>
-            <Cell>
+            <Cell className="min-w-52">
               {person.classes
                 .map(({ name, role }) => (role === 'instructor' ? `${name} (teaches)` : name))
                 .join(', ') || '–'}

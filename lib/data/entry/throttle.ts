@@ -14,6 +14,8 @@ const limits = {
   'join by address': { points: 60, duration: 60 * 60 },
   'joining word by person': { points: 20, duration: 60 * 60 },
   'invitations by person': { points: 1000, duration: 24 * 60 * 60 },
+  // Many times what a hand can send, or a device that was away for a week: only a flood meets it.
+  'attempts by person': { points: 15_000, duration: 10 * 60 },
   'new address by person': { points: 5, duration: 60 * 60 },
 } as const;
 
