@@ -1,6 +1,12 @@
 import { requireMeasure, requireSize } from '@/lib/numeric/moderate';
 import type { Point } from '@/lib/geometry/point';
-import { apartPair, distanceOf, rigidOf, type Body } from '@/lib/kinematics/linkage/solver/body';
+import {
+  apartPair,
+  coincide,
+  distanceOf,
+  rigidOf,
+  type Body,
+} from '@/lib/kinematics/linkage/solver/body';
 import type { Linkage, Relation, SlideRelation } from '@/lib/kinematics/linkage/solver/linkage';
 
 /** A linkage with names turned into numbers, checked. */
@@ -52,9 +58,10 @@ export function modelOf(linkage: Linkage): Model {
     return driven ? { ...body, driven } : body;
   });
   for (const angle of drivers.angles) {
-    if (!bodies.some(({ shape }) => shape.has(angle.from) && shape.has(angle.to))) {
+    const held = bodies.filter(({ shape }) => shape.has(angle.from) && shape.has(angle.to));
+    if (held.length === 0 || held.some(({ shape }) => coincide(shape, angle.from, angle.to))) {
       throw new RangeError(
-        `${CALLER}: driver turns ${names[angle.from]} to ${names[angle.to]}; expected two points of one bar or plate`,
+        `${CALLER}: driver turns ${names[angle.from]} to ${names[angle.to]}; expected two points of one bar or plate, apart`,
       );
     }
   }

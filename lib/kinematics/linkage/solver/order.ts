@@ -105,7 +105,7 @@ function turn({ model, placed, joined, done, turned, steps }: Progress): boolean
     const pivot = body.points.find((p) => placed.has(p));
     if (done.has(body) || !body.driven || pivot === undefined) continue;
     const { from, to } = body.driven;
-    const p = pivot === from ? to : from;
+    const p = coincide(body.shape, pivot, from) ? to : from;
     const distance = distanceOf(body.shape, pivot, p);
     const angle = angleOf(body, body.driven, pivot, p);
     steps.push({

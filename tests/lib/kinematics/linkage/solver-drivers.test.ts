@@ -156,7 +156,7 @@ describe('drivers that are too many', () => {
   it('are refused on points of different bars', () => {
     expect(() =>
       planLinkage({ ...fiveBar, drivers: [{ kind: 'angle', from: 'A', to: 'C' }] }),
-    ).toThrow('driver turns A to C; expected two points of one bar or plate');
+    ).toThrow('driver turns A to C; expected two points of one bar or plate, apart');
     expect(() => planLinkage({ ...fiveBar, drivers: [{ kind: 'slide', point: 'C' }] })).toThrow(
       'driver slides C; expected a point with a groove',
     );
@@ -260,6 +260,27 @@ describe('a body whose direction is driven, held at two points', () => {
 });
 
 describe('a driver told from either end', () => {
+  const plate = (places: Readonly<Record<'A' | 'B' | 'C', Point>>): Linkage => ({
+    points: places,
+    fixed: ['A'],
+    plates: [{ shape: places }],
+    drivers: [{ kind: 'angle', from: 'B', to: 'C' }],
+  });
+
+  it('is refused where both ends lie in one place: they have no direction', () => {
+    const place = { x: 30, y: 0 };
+    expect(() => planLinkage(plate({ A: ORIGIN, B: place, C: place }))).toThrow(
+      'driver turns B to C; expected two points of one bar or plate, apart',
+    );
+  });
+
+  it('turns a plate about a pivot on which an end of the driven way lies', () => {
+    const plan = planned(plate({ A: ORIGIN, B: ORIGIN, C: { x: 30, y: 0 } }));
+    const { B, C } = placed(plan, [1]);
+    expect(distance(B ?? nowhere, ORIGIN)).toBe(0);
+    expect(distance(C ?? nowhere, polar(30, 1))).toBeLessThan(1e-12);
+  });
+
   it('turns a crank by the way back to its pivot', () => {
     const bars = fourBarLinkage({ crank: 40, coupler: 120, rocker: 80, frame: 100 });
     const back = planned({ ...bars, drivers: [{ kind: 'angle', from: 'A', to: 'O2' }] });
