@@ -26,6 +26,11 @@ export function BenchWords({ store, id, printing }: BenchWordsProps) {
             {limit}
           </p>
         ))}
+        {model.remarks.map((remark) => (
+          <p key={remark} className="mb-1 font-semibold">
+            {remark}
+          </p>
+        ))}
         <p className="text-base">{model.describe(drive)}</p>
       </div>
       <Numbers store={store} settled={settled} printing={printing} />

@@ -79,7 +79,7 @@ function BenchFrame({ spec, title, locked = false, lockedNotice, onSettingChange
         </div>
       ) : (
         <>
-          <div className="grid gap-2 border-t border-ink bg-board px-4 py-3 print:hidden">
+          <div className="grid grid-cols-[minmax(0,1fr)] gap-2 border-t border-ink bg-board px-4 py-3 print:hidden">
             <DriveRail store={store} id={id} />
             <ViewRail
               {...{ store, zoom, onPan }}

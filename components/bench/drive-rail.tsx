@@ -34,9 +34,9 @@ export function DriveRail({ store, id }: DriveRailProps) {
   return (
     <div
       ref={rail}
-      className="grid gap-x-4 gap-y-1 @4xl:grid-cols-[auto_1fr_auto] @4xl:items-center"
+      className="grid grid-cols-[minmax(0,1fr)] gap-x-4 gap-y-1 @4xl:grid-cols-[auto_1fr_auto] @4xl:items-center"
     >
-      <div className="flex gap-2">
+      <div className="flex flex-wrap gap-2">
         <button type="button" className={railButton('main')} onClick={() => store.run(!running)}>
           {running ? 'Pause' : control.verb}
         </button>
@@ -51,7 +51,7 @@ export function DriveRail({ store, id }: DriveRailProps) {
         <span className="shrink-0 text-base font-semibold">{control.label}</span>
         <input
           type="range"
-          className="bench-range"
+          className="bench-range min-w-0"
           min={control.least}
           max={control.most}
           step={control.notch}
@@ -80,7 +80,7 @@ export function DriveRail({ store, id }: DriveRailProps) {
         <span className="shrink-0 text-base">Pace</span>
         <input
           type="range"
-          className="bench-range max-w-60"
+          className="bench-range max-w-60 min-w-0"
           min={paces.least}
           max={paces.most}
           step={paces.step}

@@ -65,7 +65,7 @@ export function NumberEntry(props: NumberEntryProps) {
         aria-label={label}
         inputMode="text"
         autoComplete="off"
-        className="min-h-11 w-24 rounded border border-pencil bg-paper px-2 text-center font-mono text-base aria-invalid:border-2 aria-invalid:border-madder"
+        className="min-h-11 w-20 rounded border border-pencil bg-paper px-2 text-center font-mono text-base aria-invalid:border-2 aria-invalid:border-madder @xs:w-24"
         aria-valuenow={value}
         aria-valuemin={least}
         aria-valuemax={most}

@@ -171,6 +171,8 @@ export interface BenchModel {
   readonly describe: (drive: number) => string;
   /** What does not work, each in a sentence with its amount. */
   readonly limits: (drive: number) => readonly string[];
+  /** What has become of the figure where it is a special one, and nothing is wrong with it. */
+  readonly remarks: readonly string[];
   /** The numbers, `pace` being the one that is set. */
   readonly tables: (drive: number, pace: number) => readonly BenchTable[];
   readonly plot: Plot | null;

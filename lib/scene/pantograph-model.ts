@@ -48,6 +48,7 @@ export function pantographModel(spec: PantographSpec): BenchModel {
     readouts: (drive) => pantographReadouts(setup, drive),
     describe: (drive) => describePantograph(setup, drive),
     limits: (drive) => pantographLimits(setup, drive),
+    remarks: [],
     tables: () => pantographTables(setup),
     plot: pantographPlot(setup),
     handles: (drive) =>

@@ -61,7 +61,7 @@ export function label(
 /**
  * A dimension between two points: extension lines, a line with an arrow at each end, the figure over
  * its middle. `offset` mm is how far it stands off, to the left of the way from `from` to `to`; the
- * extension lines begin at the share `clear` of it.
+ * extension lines begin at the share `clear` of it. Nothing is drawn where there is no distance.
  */
 export function dimension(
   from: Point,
@@ -70,6 +70,7 @@ export function dimension(
   text: string,
   clear = 0.12,
 ): Shape[] {
+  if (Math.hypot(to.x - from.x, to.y - from.y) < 1e-9) return [];
   const angle = Math.atan2(to.y - from.y, to.x - from.x);
   const out = { x: -Math.sin(angle) * offset, y: Math.cos(angle) * offset };
   const past = 1 + 4 / Math.max(Math.abs(offset), 8);

@@ -24,6 +24,7 @@ export function trainModel(spec: TrainSpec): BenchModel {
     readouts: (drive) => trainReadouts(setup, drive),
     describe: (drive) => describeTrain(setup, drive),
     limits: () => trainLimits(setup),
+    remarks: [],
     tables: (drive, pace) => trainTables(setup, drive, pace),
     plot: trainPlot(setup),
     handles: (drive) => trainHandles(setup, drive),

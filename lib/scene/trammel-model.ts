@@ -19,6 +19,7 @@ import {
   trammelLimits,
   trammelPlot,
   trammelReadouts,
+  trammelRemarks,
   trammelTables,
 } from './trammel-words';
 
@@ -44,6 +45,7 @@ export function trammelModel(spec: TrammelSpec): BenchModel {
     readouts: (drive) => trammelReadouts(setup, drive),
     describe: (drive) => describeTrammel(setup, drive),
     limits: () => trammelLimits(setup),
+    remarks: trammelRemarks(setup),
     tables: () => trammelTables(setup),
     plot: trammelPlot(setup),
     handles: (drive) => trammelHandles(setup, drive),

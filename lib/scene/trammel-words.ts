@@ -78,6 +78,7 @@ export function describeTrammel(setup: TrammelSetup, drive: number): string {
 }
 
 function lying({ oval, spec }: TrammelSetup): string {
+  if (oval.semiMajor < 1e-9) return 'shut to a point';
   if (oval.round === 'line') return 'shut to a line';
   if (oval.semiMajor - oval.semiMinor < 1e-9 * oval.semiMajor) return 'a circle';
   const from = degrees(oval.majorAxis);
@@ -89,11 +90,9 @@ function fitOf({ trammel, spec }: TrammelSetup) {
   return grooveFits(trammel, spec.slider, spec.groove);
 }
 
-/** What does not work in a trammel, and what has become of its oval, in sentences with amounts. */
+/** What does not work in a trammel, in sentences with amounts. */
 export function trammelLimits(setup: TrammelSetup): readonly string[] {
-  const { spec, apart, trammel, oval, strike } = setup;
-  const { farPin, nearPin, units } = spec;
-  const size = (mm: number) => ruleText(mm, units);
+  const { units } = setup.spec;
   const limits: string[] = [];
   const fit = fitOf(setup);
   if (fit.outcome === 'too-short') {
@@ -101,23 +100,33 @@ export function trammelLimits(setup: TrammelSetup): readonly string[] {
       `${lengthText(fit.by, units)} more groove needed: each pin travels ${lengthText(2 * setup.travel, units)}.`,
     );
   }
-  if (strike) {
+  if (setup.strike) {
     limits.push('The sliders meet off the crossing; shorten them or round their ends.');
   }
-  if (apart < 1e-9 && !hiddenOf(setup).size) {
-    limits.push(`One pin: a circle of ${size(Math.abs(farPin))}.`);
-  } else if (oval.round === 'line' && !hiddenOf(setup).size) {
-    limits.push(
-      `The oval has shut to a line: the pen runs along the groove, ${size(2 * oval.semiMajor)} from end to end.`,
-    );
-  } else if (farPin * nearPin < 0 && !hiddenOf(setup).size) {
-    limits.push(
-      Math.abs(farPin + nearPin) < 1e-9
-        ? "Half-way: a circle of half the pins' distance, drawn against the bar's turn."
-        : `Same oval as with both pins on one side, but the pins are now ${size(apart)} apart and need grooves of ${size(grooveLength(trammel, spec.slider))}.`,
-    );
-  }
   return limits;
+}
+
+/** What has become of the oval where it is no ordinary one: a circle, a line, drawn the other way. */
+export function trammelRemarks(setup: TrammelSetup): readonly string[] {
+  const { spec, apart, trammel, oval } = setup;
+  const { farPin, nearPin, units } = spec;
+  if (hiddenOf(setup).size) return [];
+  const across = ruleText(2 * oval.semiMajor, units);
+  if (oval.semiMajor < 1e-9) return ['Both pins under the pen: it stays on the crossing.'];
+  if (apart < 1e-9) return [`One pin: a circle, ${across} across.`];
+  if (oval.round === 'line') {
+    return [
+      `The oval has shut to a line: the pen runs along the groove, ${across} from end to end.`,
+    ];
+  }
+  if (farPin * nearPin >= 0) return [];
+  if (Math.abs(farPin + nearPin) < 1e-9) {
+    return ['Half-way: a circle of half the pins’ distance, drawn against the bar’s turn.'];
+  }
+  const needed = ruleText(grooveLength(trammel, spec.slider), units);
+  return [
+    `Same oval as with both pins on one side, but the pins are now ${ruleText(apart, units)} apart and need grooves of ${needed}.`,
+  ];
 }
 
 /** The sizes behind the drawing, and the angles behind the plot. */

@@ -122,3 +122,90 @@ describe.each(lessons.map(({ id }) => id))('the bench of %s', (lessonId) => {
     await still.close();
   });
 });
+
+/** What only one bench has: its tray, its fixed pin. */
+describe('parts that are put and pins that are moved', () => {
+  let browser: Browser;
+  let visitor: Visitor;
+  let page: Page;
+
+  beforeAll(async () => {
+    browser = await launchBrowser();
+    visitor = await openVisitor(browser, { height: 1600, reducedMotion: true });
+    page = visitor.page;
+  });
+  afterAll(async () => {
+    await visitor.close();
+    await browser.close();
+  });
+
+  const open = async (lessonId: string) => {
+    await page.goto(lessonPath(lessonId), { waitUntil: 'networkidle' });
+    await page.getByRole('button', { name: 'Just show me' }).click();
+    const bench = page.locator('#try section').first();
+    await bench.locator('[data-live=true]').waitFor();
+    await bench.evaluate((node) => node.scrollIntoView());
+    return bench;
+  };
+  const pull = async (from: Place, to: Place) => {
+    await page.mouse.move(from.x, from.y);
+    await page.mouse.down();
+    await page.mouse.move((from.x + to.x) / 2, (from.y + to.y) / 2, { steps: 4 });
+    await page.mouse.move(to.x, to.y, { steps: 4 });
+    await page.mouse.up();
+  };
+
+  it('a wheel comes from the tray on to an arbor by a pull, by presses and by keys', async () => {
+    const bench = await open('train-of-toothed-wheels');
+    const middle = bench.getByRole('spinbutton', { name: 'Arbor 2', exact: true });
+    const wheel = (teeth: number) => bench.getByRole('button', { name: `wheel of ${teeth} teeth` });
+    const drawing = bench.getByRole('img').first();
+    const overMiddle = await placeIn(drawing, 0.5, 0.35);
+    await pull(await placeIn(wheel(24), 0.5, 0.5), overMiddle);
+    await expect.poll(() => middle.inputValue()).toBe('24');
+    await wheel(60).click();
+    await page.mouse.click(overMiddle.x, overMiddle.y);
+    await expect.poll(() => middle.inputValue()).toBe('60');
+    await wheel(36).focus();
+    await page.keyboard.press('Enter');
+    await bench.getByRole('button', { name: 'Arbor 2', exact: true }).focus();
+    await page.keyboard.press('Enter');
+    await expect.poll(() => middle.inputValue()).toBe('36');
+    // One wheel alone between two: the lantern does not notice.
+    expect(await bench.getByText(/One turn of it for 1 turn of the crank/).count()).toBe(1);
+  });
+
+  it('the fixed pin is pulled over the board, and set by its figures', async () => {
+    const bench = await open('pantograph');
+    const east = bench.getByRole('spinbutton', { name: 'Drawing, east of the fixed pin' });
+    const before = Number(await east.getAttribute('aria-valuenow'));
+    const pin = await bench.evaluate((node) => {
+      const label = [...node.querySelectorAll('text')].find(
+        ({ textContent }) => textContent === 'fixed',
+      );
+      const box = label?.getBoundingClientRect();
+      // The word stands 30 px under the pin.
+      return box ? { x: box.x + box.width / 2, y: box.y + box.height / 2 - 30 } : null;
+    });
+    if (!pin) throw new Error('The drawing names no fixed pin.');
+    await pull(pin, { x: pin.x - 40, y: pin.y });
+    await expect
+      .poll(async () => Number(await east.getAttribute('aria-valuenow')))
+      .toBeGreaterThan(before);
+    await east.fill('150');
+    await east.press('Enter');
+    await expect.poll(() => east.inputValue()).toBe('150');
+    await expect.poll(() => bench.getByText(/its middle 150\.0 mm east/).count()).toBe(1);
+  });
+});
+
+interface Place {
+  readonly x: number;
+  readonly y: number;
+}
+
+async function placeIn(locator: Locator, across: number, down: number): Promise<Place> {
+  const box = await locator.boundingBox();
+  if (!box) throw new Error('It is not to be seen.');
+  return { x: box.x + across * box.width, y: box.y + down * box.height };
+}

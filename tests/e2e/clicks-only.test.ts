@@ -55,6 +55,33 @@ describe('an exercise answered by clicks alone', () => {
     await section.getByRole('button', { name: 'New numbers' }).waitFor();
   });
 
+  // Figures need letters of some kind: who has no keyboard has one on the screen, and it types into
+  // the field that was pressed last.
+  it('numbers: each field is pressed, its figure goes there, and the button sends them', async () => {
+    const id = 'reach-and-tremor';
+    const section = await openExercise(page, id);
+    const { key } = keyOf(await openVariant(person, id));
+    for (const part of key.parts) {
+      const field = section.getByLabel(part.label, { exact: true });
+      await field.click();
+      expect(await field.evaluate((node) => node === document.activeElement)).toBe(true);
+      expect((await field.boundingBox())?.height).toBeGreaterThanOrEqual(44);
+      await page.keyboard.insertText(part.answer);
+    }
+    await check(section);
+    await section.getByRole('button', { name: 'New numbers' }).waitFor();
+  });
+
+  it('a guess, signed out: an option and the button, and the bench turns', async () => {
+    const guest = await openVisitor(browser, { reducedMotion: true, touch: true, width: 390 });
+    await guest.page.goto(lessonPath('pantograph'), { waitUntil: 'networkidle' });
+    const guess = guest.page.locator('#guess');
+    await guess.locator('label').filter({ hasText: 'upright' }).first().click();
+    await guess.getByRole('button', { name: 'That is my guess' }).click();
+    await guest.page.locator('#try').getByRole('slider').first().waitFor();
+    await guest.close();
+  });
+
   it('a hint, pressed twice in a hurry, is one hint', async () => {
     const id = 'reach-and-tremor';
     const section = await openExercise(page, id);

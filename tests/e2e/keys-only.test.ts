@@ -66,6 +66,20 @@ describe('an exercise answered by keys alone', () => {
     await section.getByRole('button', { name: 'New numbers' }).waitFor();
   });
 
+  it('a guess, signed out: picked by Space, committed by Enter, and the bench turns', async () => {
+    const guest = await openVisitor(browser, { reducedMotion: true });
+    await guest.page.goto(lessonPath('trammel-and-oval'), { waitUntil: 'networkidle' });
+    const guess = guest.page.locator('#guess');
+    await guess.getByRole('radio').first().focus();
+    await guest.page.keyboard.press('Space');
+    await guest.page.keyboard.press('Tab');
+    const button = guess.getByRole('button', { name: 'That is my guess' });
+    expect(await button.evaluate((node) => node === document.activeElement)).toBe(true);
+    await guest.page.keyboard.press('Enter');
+    await guest.page.locator('#try').getByRole('slider').first().waitFor();
+    await guest.close();
+  });
+
   it('a choice: picked by Space, checked by Enter on the button', async () => {
     await page.goto(lessonPath('train-of-toothed-wheels'), { waitUntil: 'networkidle' });
     const id = 'which-train-for-the-lantern';

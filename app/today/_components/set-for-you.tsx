@@ -19,7 +19,7 @@ export function SetForYou({ set }: Readonly<{ set: readonly SetWork[] }>) {
       <HeadRow>
         <ColumnName>What</ColumnName>
         <ColumnName>Due</ColumnName>
-        <ColumnName>Left</ColumnName>
+        <ColumnName className="max-sm:hidden">Left</ColumnName>
       </HeadRow>
       <tbody>
         {set.map((work) => (
@@ -32,9 +32,10 @@ export function SetForYou({ set }: Readonly<{ set: readonly SetWork[] }>) {
 
 function SetRow({ work }: Readonly<{ work: SetWork }>) {
   const left = work.exercises.length - work.done;
+  const stillLeft = left === 0 ? <Done /> : `${left} ${left === 1 ? 'exercise' : 'exercises'}`;
   return (
     <Row>
-      <RowName className="min-w-44">
+      <RowName className="sm:min-w-44">
         {placesOf(work).map(({ path, title }) => (
           <Link key={path} href={path} prefetch={false} className="link link-target mr-4">
             {title}
@@ -56,8 +57,12 @@ function SetRow({ work }: Readonly<{ work: SetWork }>) {
             {rule}
           </span>
         ))}
+        <span className="block sm:hidden">
+          {stillLeft}
+          {left === 0 ? '' : ' left'}
+        </span>
       </Cell>
-      <Cell>{left === 0 ? <Done /> : `${left} ${left === 1 ? 'exercise' : 'exercises'}`}</Cell>
+      <Cell className="max-sm:hidden">{stillLeft}</Cell>
     </Row>
   );
 }

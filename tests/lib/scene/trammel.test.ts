@@ -72,23 +72,53 @@ describe('an elliptic trammel', () => {
     expect(admitted(setUpTrammel(spec), 0.123)).toBe(0.123);
   });
 
-  it('says what becomes of the oval at its limits', () => {
-    const limits = (more: Partial<TrammelSpec>) =>
-      modelOf({ ...spec, groove: 900, ...more }).limits(0);
-    expect(limits({ nearPin: 300 })).toEqual(['One pin: a circle of 300 mm.']);
-    expect(limits({ nearPin: 0 })).toEqual([
+  it('says what has become of the oval where it is no ordinary one, and calls it no fault', () => {
+    const model = (more: Partial<TrammelSpec>) => modelOf({ ...spec, groove: 1100, ...more });
+    const remarks = (more: Partial<TrammelSpec>) => {
+      expect(model(more).limits(0)).toEqual([]);
+      return model(more).remarks;
+    };
+    expect(remarks({ nearPin: 300 })).toEqual(['One pin: a circle, 600 mm across.']);
+    expect(remarks({ nearPin: 0 })).toEqual([
       'The oval has shut to a line: the pen runs along the groove, 600 mm from end to end.',
     ]);
-    expect(limits({ farPin: 150, nearPin: -150 })).toEqual([
-      "Half-way: a circle of half the pins' distance, drawn against the bar's turn.",
+    expect(remarks({ farPin: 0 })).toEqual([
+      'The oval has shut to a line: the pen runs along the groove, 360 mm from end to end.',
     ]);
-    expect(limits({ nearPin: -180 }).join(' ')).toContain(
+    expect(remarks({ farPin: 0, nearPin: 0 })).toEqual([
+      'Both pins under the pen: it stays on the crossing.',
+    ]);
+    expect(model({ farPin: 0, nearPin: 0 }).describe(0)).toContain('shut to a point');
+    expect(remarks({ farPin: 150, nearPin: -150 })).toEqual([
+      'Half-way: a circle of half the pins’ distance, drawn against the bar’s turn.',
+    ]);
+    expect(remarks({ nearPin: -180 }).join(' ')).toContain(
       'now 480 mm apart and need grooves of 1005 mm',
     );
-    expect(limits({ nearPin: 280 })).toEqual([
+    expect(remarks({})).toEqual([]);
+    expect(remarks({ nearPin: 300, hide: ['length'] })).toEqual([]);
+    expect(model({ nearPin: 280 }).limits(0)).toEqual([
       'The sliders meet off the crossing; shorten them or round their ends.',
     ]);
-    expect(limits({})).toEqual([]);
+  });
+
+  it.each([
+    [300, 300],
+    [300, 0],
+    [0, 180],
+    [0, 0],
+    [150, -150],
+  ])('draws pins at %i and %i by figures that are numbers, and no size of nothing', (far, near) => {
+    const model = modelOf({ ...spec, groove: 1100, farPin: far, nearPin: near });
+    const scene = model.scene({ drive: 0.7, swept: { from: 0, to: 0.7 } }, showing);
+    expect(JSON.stringify([scene, model.tables(0.7, 1), model.plot])).not.toContain('null,');
+    expect(JSON.stringify([scene.bounds, model.readouts(0.7)])).not.toMatch(/NaN|null/);
+    const figures = scene.shapes.flatMap((shape) => (shape.kind === 'label' ? [shape.text] : []));
+    expect(figures).not.toContain('0 mm');
+    expect(figures).not.toContain('0.0 mm');
+    const [pen] = marksOf(scene, 'pen');
+    expect(pen?.x).toBeCloseTo(far * Math.cos(0.7), 9);
+    expect(pen?.y).toBeCloseTo(near * Math.sin(0.7), 9);
   });
 
   it('follows a pen that is led, from either side', () => {
