@@ -9,19 +9,19 @@ import { requireViewer } from '@/lib/auth/viewer';
 import { listFeedback, type Feedback } from '@/lib/data/feedback';
 import { haveRead } from './actions';
 
-export const metadata: Metadata = { title: 'Said about your answers' };
+export const metadata: Metadata = { title: 'Said about your work' };
 
 export default async function FeedbackPage() {
   const viewer = await requireViewer();
   const told = await listFeedback(viewer);
   return (
     <Page width="narrow">
-      <PageHeading>Said about your answers</PageHeading>
+      <PageHeading>Said about your work</PageHeading>
       {told.some(({ unread }) => unread) ? (
         <ActionForm action={haveRead} fields={[]} submit="I have read it" variant="secondary" />
       ) : null}
       {told.length === 0 ? (
-        <Empty title="Nothing yet">What your instructors say about your answers stands here.</Empty>
+        <Empty title="Nothing yet">What your instructors say about your work stands here.</Empty>
       ) : (
         <ul className="mt-6 divide-y divide-rule border-y border-rule">
           {told.map((one) => (
@@ -42,14 +42,16 @@ function Told({ one, timeZone }: Readonly<{ one: Feedback; timeZone: string }>) 
       <p className="text-[0.9375rem] text-pencil">
         {one.authorName}, {one.className}, {sayWhen(one.at, timeZone)}
       </p>
-      <p className="my-1">
-        Marked <MarkSign mark={one.marked} />
-        {one.verdict ? (
-          <>
-            , and stands as <MarkSign mark={one.verdict} />
-          </>
-        ) : null}
-      </p>
+      {one.marked ? (
+        <p className="my-1">
+          Marked <MarkSign mark={one.marked} />
+          {one.verdict ? (
+            <>
+              , and stands as <MarkSign mark={one.verdict} />
+            </>
+          ) : null}
+        </p>
+      ) : null}
       <p className="max-w-measure whitespace-pre-line">{one.body}</p>
     </li>
   );

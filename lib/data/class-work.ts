@@ -4,13 +4,26 @@ import { row, rows, transact } from '@/lib/db/query';
 import type { Given } from '@/lib/marking/definition';
 import type { Viewer } from '@/lib/policy/viewer';
 import type { AttemptView, PegView } from '@/lib/schemas/round';
+import type { Item } from './assignment-items';
 import { recordAudit } from './audit';
 import { isId, staffOfClass, staffValues } from './class-right';
-import { exerciseTitle, lessonName, lessonOfExercise, type LessonName } from './lesson-titles';
+import {
+  exerciseTitle,
+  lessonName,
+  lessonOfExercise,
+  workTitles,
+  type LessonName,
+} from './lesson-titles';
 import { lastRoundsSql, pegViews, skillRounds, skillsOfLesson, type LastRoundRow } from './pegs';
 import { viewAttempt, type KeptMarking } from './round-record';
 import { latestOverride, ownExtension, standsLate } from './verdicts';
-import { commentsOf, overridesOf, type AttemptComment, type AttemptOverride } from './attempt-talk';
+import {
+  commentsOf,
+  commentsOnWork,
+  overridesOf,
+  type AttemptComment,
+  type AttemptOverride,
+} from './attempt-talk';
 
 /** A counted attempt in a list. */
 export interface CountedAttemptListed {
@@ -25,6 +38,14 @@ export interface CountedAttemptListed {
   readonly late: boolean;
 }
 
+/** Work that is set to a learner. */
+export interface LearnersWork {
+  readonly assignmentId: string;
+  readonly titles: readonly string[];
+  readonly dueAt: string;
+  readonly comments: readonly AttemptComment[];
+}
+
 /** A learner's work in one class. */
 export interface LearnerInClass {
   readonly classId: string;
@@ -34,6 +55,8 @@ export interface LearnerInClass {
   readonly learnerId: string;
   readonly name: string;
   readonly lessons: readonly (LessonName & { readonly pegs: readonly PegView[] })[];
+  /** What is set to them, the next due first, with what was said about it as a whole. */
+  readonly work: readonly LearnersWork[];
   /** The attempts that count for the class, the latest first. */
   readonly attempts: readonly CountedAttemptListed[];
 }
@@ -82,7 +105,8 @@ export async function findLearnerInClass(
   const found = await row<LearnerRow>(learnerSql, [...staffValues(viewer, classId), learnerId]);
   if (found === null) return null;
   await noteLook(viewer, classId, 'learner', learnerId);
-  const { personTimeZone, set, attempts, ...rest } = found;
+  const { personTimeZone, work, attempts, ...rest } = found;
+  const set = work.flatMap(({ items }) => items);
   const lessonIds = [
     ...new Set(set.flatMap((item) => item.lessonId ?? lessonOfExercise(item.exerciseId) ?? [])),
   ];
@@ -93,6 +117,11 @@ export async function findLearnerInClass(
     lessons: lessonIds.map((lessonId) => ({
       ...lessonName(lessonId),
       pegs: pegViews(skillsOfLesson(lessonId), rounds, personTimeZone, now),
+    })),
+    work: work.map(({ items, dueAt, ...one }) => ({
+      ...one,
+      dueAt: new Date(dueAt).toISOString(),
+      titles: workTitles(items),
     })),
     attempts: attempts.map((one) => ({
       ...one,
@@ -150,9 +179,9 @@ async function noteLook(
   );
 }
 
-interface LearnerRow extends Omit<LearnerInClass, 'lessons' | 'attempts'> {
+interface LearnerRow extends Omit<LearnerInClass, 'lessons' | 'work' | 'attempts'> {
   readonly personTimeZone: string;
-  readonly set: readonly { readonly lessonId: string | null; readonly exerciseId: string }[];
+  readonly work: readonly (Omit<LearnersWork, 'titles'> & { readonly items: readonly Item[] })[];
   readonly attempts: readonly Omit<CountedAttemptListed, 'title'>[];
 }
 
@@ -160,10 +189,17 @@ const learnerSql = `
   select g.id as "classId", g.name as "className", g.time_zone as "timeZone",
     g.archived_at is not null as archived, l.id as "learnerId", p.name, p.time_zone as "personTimeZone",
     coalesce((
-      select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
-        order by s.due_at, i.position)
-      from assignments s join assignment_items i on i.assignment_id = s.id
-      where s.class_id = g.id and s.withdrawn_at is null), '[]') as set,
+      select json_agg(json_build_object('assignmentId', s.id,
+        'dueAt', greatest(s.due_at, x.due_at), 'comments', ${commentsOnWork},
+        'items', (
+          select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
+            order by i.position) from assignment_items i where i.assignment_id = s.id))
+        order by s.due_at)
+      from assignments s
+      left join extensions x on x.assignment_id = s.id and x.learner_id = l.id
+      where s.class_id = g.id and s.withdrawn_at is null and (not s.for_chosen_learners or exists (
+        select 1 from assignment_learners chosen
+        where chosen.assignment_id = s.id and chosen.learner_id = l.id))), '[]') as work,
     coalesce((
       select json_agg(json_build_object('attemptId', a.id, 'exerciseId', a.exercise_id,
         'verdict', coalesce(o.verdict, a.verdict), 'createdAt', a.created_at,

@@ -3,22 +3,23 @@ import type { Transaction } from 'sequelize';
 import { now as presentTime } from '@/lib/clock';
 import { row, rows, transact } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
+import type { Item } from './assignment-items';
 import { recordAudit } from './audit';
 import { isId, staffOfOpenClass, staffValues } from './class-right';
-import { exerciseTitle } from './lesson-titles';
+import { exerciseTitle, workTitles } from './lesson-titles';
 import { queueLetter } from './letters';
 import { latestOverride } from './verdicts';
 
-/** What is said to a learner about an attempt of theirs. */
+/** What is said to a learner about an attempt of theirs, or about what they did for work as a whole. */
 export interface Feedback {
   readonly kind: 'comment' | 'override';
   readonly id: string;
   readonly className: string;
   readonly authorName: string;
+  /** Of the exercise, or of the work. */
   readonly title: string;
-  readonly exerciseId: string;
-  /** How it was marked, and how it stands after an override. */
-  readonly marked: 'right' | 'partly' | 'wrong';
+  /** How the attempt was marked, and how it stands after an override; null for work as a whole. */
+  readonly marked: 'right' | 'partly' | 'wrong' | null;
   readonly verdict: 'right' | 'partly' | 'wrong' | null;
   readonly body: string;
   readonly at: string;
@@ -52,7 +53,8 @@ export async function addComment(
     );
     await note(viewer, classId, attemptId, 'comment written', {}, transaction);
     if (found.unread === 0 && made !== null) {
-      await tell(viewer, found, body, made.id, transaction);
+      const subject = exerciseTitle(found.exerciseId);
+      await tellOfComment(viewer, { ...found, subject }, { id: made.id, body }, transaction);
     }
     return true;
   });
@@ -95,13 +97,11 @@ export async function overrideMarking(
 
 /** What the viewer has been told about their own work, the latest first. */
 export async function listFeedback(viewer: Viewer): Promise<Feedback[]> {
-  const found = await rows<Omit<Feedback, 'at' | 'title'> & { at: Date }>(feedbackSql, [
-    viewer.learnerId,
-  ]);
-  return found.map((one) => ({
+  const found = await rows<FeedbackRow>(feedbackSql, [viewer.learnerId]);
+  return found.map(({ exerciseId, items, at, ...one }) => ({
     ...one,
-    at: one.at.toISOString(),
-    title: exerciseTitle(one.exerciseId),
+    at: at.toISOString(),
+    title: exerciseId === null ? workTitles(items ?? []).join(', ') : exerciseTitle(exerciseId),
   }));
 }
 
@@ -122,13 +122,19 @@ export async function readFeedback(viewer: Viewer, now: Date = presentTime()): P
   );
 }
 
-async function tell(
+/** Writes to the learner that something is said, whatever it is about. */
+export async function tellOfComment(
   viewer: Viewer,
-  { email, personId, className, exerciseId }: AboutRow,
-  body: string,
-  commentId: string,
+  to: {
+    readonly personId: string;
+    readonly email: string | null;
+    readonly className: string;
+    readonly subject: string;
+  },
+  { id, body }: { readonly id: string; readonly body: string },
   transaction: Transaction,
 ): Promise<void> {
+  const { email, personId, className, subject } = to;
   if (email === null) return;
   await queueLetter(transaction, {
     to: email,
@@ -137,11 +143,11 @@ async function tell(
       kind: 'comment',
       className,
       authorName: viewer.name,
-      subject: exerciseTitle(exerciseId),
+      subject,
       body,
       path: '/feedback',
     },
-    once: `comment:${commentId}`,
+    once: `comment:${id}`,
   });
 }
 
@@ -194,18 +200,28 @@ const aboutSql = `
     where c.attempt_id = a.id)
   for no key update of l`;
 
+interface FeedbackRow extends Omit<Feedback, 'at' | 'title'> {
+  readonly at: Date;
+  readonly exerciseId: string | null;
+  readonly items: readonly Item[] | null;
+}
+
 const feedbackSql = `
   select told.kind, told.id, g.name as "className", author.name as "authorName",
-    a.exercise_id as "exerciseId", a.verdict as marked, told.verdict, told.body, told.at, told.unread
+    a.exercise_id as "exerciseId", a.verdict as marked, told.verdict, told.body, told.at, told.unread,
+    (select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
+      order by i.position) from assignment_items i
+      where i.assignment_id = told.assignment_id) as items
   from (
-    select 'comment' as kind, c.id, c.class_id, c.author_id, c.attempt_id, null as verdict, c.body,
+    select 'comment' as kind, c.id, c.class_id, c.author_id, c.attempt_id, c.assignment_id,
+      null as verdict, c.body,
       c.created_at as at, c.read_at is null as unread
-    from comments c where c.learner_id = $1 and c.attempt_id is not null
+    from comments c where c.learner_id = $1
     union all
-    select 'override', v.id, v.class_id, v.author_id, v.attempt_id, v.verdict, v.reason,
+    select 'override', v.id, v.class_id, v.author_id, v.attempt_id, null, v.verdict, v.reason,
       v.created_at, false
     from attempts mine join overrides v on v.attempt_id = mine.id where mine.learner_id = $1) told
   join class_groups g on g.id = told.class_id
   join people author on author.id = told.author_id
-  join attempts a on a.id = told.attempt_id
+  left join attempts a on a.id = told.attempt_id
   order by told.at desc limit 200`;

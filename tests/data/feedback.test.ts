@@ -17,9 +17,11 @@ import {
   readFeedback,
 } from '@/lib/data/feedback';
 import { hideNames } from '@/lib/data/hidden-names';
+import { exerciseTitle } from '@/lib/data/lesson-titles';
 import { listPegs } from '@/lib/data/progress';
 import { findStickingPoints } from '@/lib/data/sticking-points';
 import { findToday } from '@/lib/data/today';
+import { addWorkComment } from '@/lib/data/work-comments';
 import type { Viewer } from '@/lib/policy/viewer';
 import { classProgressSchema } from '@/lib/schemas/class-progress';
 import { models } from '@/models';
@@ -121,6 +123,55 @@ describe('comments', () => {
     expect(opened?.comments.map(({ readAt }) => readAt !== null)).toEqual([true, true]);
     await addComment(room.teacher, room.classId, counted, 'And another.');
     expect(await letters()).toBe(2);
+  });
+});
+
+describe('a comment on work as a whole', () => {
+  it('is made by the staff of the class on work set to a learner of it, and reaches that learner', async () => {
+    const room = await makeRoom();
+    const other = await makeViewer('Zed Zero', [[room.classId, 'learner']]);
+    const set = await createAssignment(room.teacher, room.classId, {
+      lessons: [],
+      exercises: [exerciseId],
+      dueOn: '2099-01-01',
+      learners: [room.learner.learnerId],
+    });
+    const assignmentId = set.outcome === 'set' ? set.assignmentId : '';
+    const about = { learnerId: room.learner.learnerId, assignmentId };
+    const say = (viewer: Viewer, changes: Partial<typeof about> = {}, classId = room.classId) =>
+      addWorkComment(viewer, classId, { ...about, ...changes }, 'Good joints.');
+    for (const viewer of [...others(workshop), room.learner, workshop.instructor]) {
+      expect(await say(viewer)).toBe(false);
+    }
+    expect(await say(room.teacher, { learnerId: other.learnerId })).toBe(false);
+    expect(await say(room.teacher, { assignmentId: randomUUID() })).toBe(false);
+    expect(await say(room.teacher, { assignmentId: '..' })).toBe(false);
+    expect(await say(workshop.instructor, {}, workshop.harbour)).toBe(false);
+    expect(await say(room.teacher)).toBe(true);
+    expect(await say(workshop.administrator)).toBe(true);
+    const letters = "kind = 'comment' and person_id = $1";
+    expect(await countRows('letters', letters, [room.learner.personId])).toBe(1);
+    expect(await countUnread(room.learner)).toBe(2);
+    expect(await listFeedback(other)).toEqual([]);
+    const told = await listFeedback(room.learner);
+    expect(told).toHaveLength(2);
+    expect(told[1]).toMatchObject({
+      kind: 'comment',
+      title: exerciseTitle(exerciseId),
+      authorName: 'Tess Teacher',
+      marked: null,
+      body: 'Good joints.',
+      unread: true,
+    });
+    await readFeedback(room.learner);
+    const seen = await findLearnerInClass(room.teacher, room.classId, about.learnerId);
+    expect(seen?.work).toHaveLength(1);
+    expect(seen?.work[0]).toMatchObject({ assignmentId, titles: [exerciseTitle(exerciseId)] });
+    expect(seen?.work[0]?.comments.map(({ readAt }) => readAt !== null)).toEqual([true, true]);
+    const theirs = await findLearnerInClass(room.teacher, room.classId, other.learnerId);
+    expect(theirs?.work).toEqual([]);
+    await models().ClassGroup.update({ archivedAt: new Date() }, { where: { id: room.classId } });
+    expect(await say(room.teacher)).toBe(false);
   });
 });
 

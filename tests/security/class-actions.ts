@@ -153,6 +153,15 @@ export const classActions: readonly ActionRow[] = [
     outcome: byStaff,
   },
   {
+    kind: 'action',
+    file: 'app/classes/[id]/learners/[learnerId]/actions.ts',
+    name: 'commentOnWork',
+    on: ({ classId, learnerId }) => `/classes/${classId}/learners/${learnerId}`,
+    bound: ({ classId, learnerId, assignmentId }) => [classId, learnerId, assignmentId],
+    form: () => ({ body: 'Good joints; bring the strip.' }),
+    outcome: byStaff,
+  },
+  {
     // Nothing is changed, since it stands so already: refused for everybody, and for others as missing.
     kind: 'action',
     file: 'app/classes/[id]/attempts/[attemptId]/actions.ts',

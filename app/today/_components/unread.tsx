@@ -1,7 +1,7 @@
 import Link from 'next/link';
 import { Notice } from '@/components/ui/notice';
 
-/** Says that an instructor has said something about the learner's answers, until it has been read. */
+/** Says that an instructor has said something about the learner's work, until it has been read. */
 export function Unread({ unread }: Readonly<{ unread: number }>) {
   if (unread === 0) return null;
   return (
@@ -9,8 +9,8 @@ export function Unread({ unread }: Readonly<{ unread: number }>) {
       tone="again"
       title={
         unread === 1
-          ? 'Your instructor has said something about an answer of yours.'
-          : `Your instructors have said ${unread} things about your answers.`
+          ? 'Your instructor has said something about your work.'
+          : `Your instructors have said ${unread} things about your work.`
       }
     >
       <Link href="/feedback" prefetch={false} className="link link-target">

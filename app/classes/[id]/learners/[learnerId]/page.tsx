@@ -8,6 +8,7 @@ import { Empty, Section } from '@/components/ui/panel';
 import { requireViewer } from '@/lib/auth/viewer';
 import { findLearnerInClass } from '@/lib/data/class-work';
 import { AttemptsTable } from './_components/attempts-table';
+import { WorkTalk } from './_components/work-talk';
 
 export const metadata: Metadata = { title: 'Learner' };
 
@@ -44,9 +45,16 @@ export default async function LearnerPage({ params }: LearnerPageProps) {
             </div>
           ))}
         </Section>
-        <Section title="Answers for this class">
-          <AttemptsTable learner={learner} />
-        </Section>
+        <div className="min-w-0">
+          {learner.work.length === 0 ? null : (
+            <Section title="Set to them">
+              <WorkTalk learner={learner} />
+            </Section>
+          )}
+          <Section title="Answers for this class">
+            <AttemptsTable learner={learner} />
+          </Section>
+        </div>
       </div>
     </Page>
   );

@@ -3,6 +3,7 @@ import { sayWhen } from '@/components/progress/say-due';
 import { ActionForm } from '@/components/ui/action-form';
 import { Section } from '@/components/ui/panel';
 import type { AttemptInClass } from '@/lib/data/class-work';
+import { Said } from '../../../_components/said';
 import { comment, markOtherwise } from '../actions';
 
 /** What has been said about an answer, and the forms to say something and to mark it otherwise. */
@@ -12,19 +13,7 @@ export function AttemptTalk({ found }: Readonly<{ found: AttemptInClass }>) {
   return (
     <>
       <Section title="Said about it">
-        {comments.length > 0 ? (
-          <ul className="mb-5 divide-y divide-rule border-y border-rule">
-            {comments.map(({ authorName, body, at, readAt }) => (
-              <li key={at} className="py-3">
-                <p className="max-w-measure whitespace-pre-line">{body}</p>
-                <p className="text-[0.9375rem] text-pencil">
-                  {authorName}, {sayWhen(at, timeZone)} ·{' '}
-                  {readAt === null ? 'not read yet' : `read ${sayWhen(readAt, timeZone)}`}
-                </p>
-              </li>
-            ))}
-          </ul>
-        ) : null}
+        <Said comments={comments} timeZone={timeZone} />
         {archived ? null : (
           <ActionForm
             action={comment.bind(null, classId, attempt.attemptId)}
