@@ -1,7 +1,15 @@
 /**
  * ISO 286-1 and -2:2010: ranges of nominal size in millimetres, "over" the one before and "up to and
  * including", and in the same order the standard tolerances and fundamental deviations in
- * micrometres. Figures from memory; the checks recompute tolerances by the standard's own formulae.
+ * micrometres.
+ *
+ * Figures from memory, each checked against the standard's own formula within its rounding, over the
+ * geometric mean D of a range. Tolerances: i = 0.45·∛D + D/1000, IT5 = 7i, IT6 = 10i, IT7 = 16i …
+ * Below: a 265 + 1.3·D or 3.5·D; b 140 + 0.85·D or 1.8·D; c 52·D^0.2 to 10 mm and 95 + 0.8·D over 18
+ * (95 between them is from memory alone); d 16·D^0.44; e 11·D^0.41; f 5.5·D^0.41; g 2.5·D^0.34.
+ * Above: k 0.6·∛D; m IT7 − IT6; n 5·D^0.34; p IT7 and up to 5 more; s IT8 and a little, or
+ * IT7 + 0.4·D; r the geometric mean of p and s. What stands here is the standard's rounded value: the
+ * formulae do not give it to the last micrometre.
  */
 
 /** The main ranges: tolerances and most letters go by these. */

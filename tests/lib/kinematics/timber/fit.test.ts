@@ -1,6 +1,14 @@
 import { describe, expect, it } from 'vitest';
 import { isoFit, limitDeviations } from '@/lib/kinematics/timber/fit';
-import { above, below, mainRanges, tolerances } from '@/lib/kinematics/timber/fit.data';
+import {
+  above,
+  aboveFine,
+  below,
+  belowFine,
+  fineRanges,
+  mainRanges,
+  tolerances,
+} from '@/lib/kinematics/timber/fit.data';
 import { expectNear, outcome } from '@/tests/support/numbers';
 
 const limits = (nominal: number, designation: string) => {
@@ -68,6 +76,7 @@ describe('the limits of holes and shafts', () => {
 describe('the tables', () => {
   const bounds = [1, ...mainRanges];
   const means = mainRanges.map((to, i) => Math.sqrt((bounds[i] ?? 1) * to));
+  const fineMeans = fineRanges.map((to, i) => Math.sqrt(([1, ...fineRanges][i] ?? 1) * to));
 
   it('of tolerances follow the standard’s unit i = 0.45·∛D + D/1000 within its rounding', () => {
     const multiples: Record<number, number> = {
@@ -104,13 +113,63 @@ describe('the tables', () => {
     }
   });
 
+  it('of tolerances 4 and 5 follow i too, 5 at 7i, 4 one step of a geometric row finer', () => {
+    means.forEach((mean, i) => {
+      if (i === 0) return;
+      const unit = 0.45 * Math.cbrt(mean) + mean / 1000;
+      expect(Math.abs((tolerances[5]?.[i] ?? 0) - 7 * unit)).toBeLessThan(1.1);
+      // IT2 to IT4 stand in geometric order between IT1 = 0.8 + 0.020·D and IT5.
+      const finest = 0.8 + 0.02 * mean;
+      expect(
+        Math.abs((tolerances[4]?.[i] ?? 0) - finest * ((7 * unit) / finest) ** 0.75),
+      ).toBeLessThan(2);
+    });
+  });
+
+  it('of a to c follow the standard’s lines and powers of D, in steps of 5 and 10', () => {
+    const laws: Record<string, (d: number) => number> = {
+      a: (d) => (d <= 120 ? 265 + 1.3 * d : 3.5 * d),
+      b: (d) => (d <= 160 ? 140 + 0.85 * d : 1.8 * d),
+      // From 10 to 18 the table as remembered, 95, lies over both of its laws: it is not checked.
+      c: (d) => (d <= 10 ? 52 * d ** 0.2 : d < 18 ? 95 : 95 + 0.8 * d),
+    };
+    for (const [letter, law] of Object.entries(laws)) {
+      belowFine[letter]?.forEach((deviation, i) => {
+        if (i > 0)
+          expect(Math.abs(deviation - law(fineMeans[i] ?? 1)) / deviation).toBeLessThan(0.06);
+      });
+    }
+  });
+
+  it('of k to s follow the standard’s laws within their roundings', () => {
+    means.forEach((mean, i) => {
+      if (i === 0) return;
+      const [it6 = 0, it7 = 0] = [tolerances[6]?.[i], tolerances[7]?.[i]];
+      expect(Math.abs((above.k?.[i] ?? 0) - 0.6 * Math.cbrt(mean))).toBeLessThan(1);
+      // 2.8·∛D, as near as IT7 − IT6 stands to it.
+      expect(Math.abs((above.m?.[i] ?? 0) - (it7 - it6))).toBeLessThanOrEqual(3);
+      expect(Math.abs((above.n?.[i] ?? 0) - 5 * mean ** 0.34)).toBeLessThan(2);
+      // IT7 and 0 to 5 more.
+      expect((above.p?.[i] ?? 0) - it7).toBeGreaterThanOrEqual(0);
+      expect((above.p?.[i] ?? 0) - it7).toBeLessThanOrEqual(5);
+    });
+    fineMeans.forEach((mean, i) => {
+      if (i === 0) return;
+      const row = mainRanges.findIndex((to) => (fineRanges[i] ?? 0) <= to);
+      const [it7 = 0, it8 = 0] = [tolerances[7]?.[row], tolerances[8]?.[row]];
+      const [p = 0, r = 0, s = 0] = [above.p?.[row], aboveFine.r?.[i], aboveFine.s?.[i]];
+      // s: IT8 and 1 to 4 more up to 50, then IT7 + 0.4·D; r is the geometric mean of p and s.
+      expect(Math.abs(s - (mean <= 50 ? it8 + 2 : it7 + 0.4 * mean))).toBeLessThan(3);
+      expect(Math.abs(r - Math.sqrt(p * s))).toBeLessThan(2);
+    });
+  });
+
   it('grow with the size and are as long as the ranges', () => {
-    for (const row of [
-      ...Object.values(tolerances),
-      ...Object.values(below),
-      ...Object.values(above),
-    ]) {
-      expect(row).toHaveLength(mainRanges.length);
+    const main = [tolerances, below, above].flatMap((table) => Object.values(table));
+    const fine = [belowFine, aboveFine].flatMap((table) => Object.values(table));
+    for (const row of main) expect(row).toHaveLength(mainRanges.length);
+    for (const row of fine) expect(row).toHaveLength(fineRanges.length);
+    for (const row of [...main, ...fine]) {
       row.slice(1).forEach((value, i) => expect(value).toBeGreaterThanOrEqual(row[i] ?? 0));
     }
   });
