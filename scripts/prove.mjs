@@ -7,7 +7,7 @@ import { complain, say } from './machine/say.mjs';
 
 /**
  * The long checks: full counts of seeds and inputs, coverage, the whole tour in every width and theme,
- * rights without proxy.ts, power cuts, two instances, mutants of the kinematics library. `npm run prove -- seeds` runs one part.
+ * rights without proxy.ts, power cuts, two instances, many learners, mutants of the kinematics library. `npm run prove -- seeds` runs one part.
  */
 const vitest = ['node_modules/vitest/vitest.mjs', 'run'];
 const entry = ['--conditions=react-server', '--import', 'tsx'];
@@ -61,6 +61,10 @@ const parts = {
   instances: {
     what: 'Two instances behind nginx',
     args: [...entry, 'scripts/prove/instances.ts'],
+  },
+  scale: {
+    what: 'Ten thousand learners and two hundred exercises',
+    args: [...entry, 'scripts/prove/scale.ts'],
   },
   mutants: { what: 'Mutants of the kinematics library', args: ['scripts/mutate.mjs'] },
 };
