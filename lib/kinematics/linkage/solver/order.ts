@@ -2,6 +2,7 @@ import { apartPair, coincide, distanceOf, rigidOf } from '@/lib/kinematics/linka
 import type { Relation, Rigid } from '@/lib/kinematics/linkage/solver/linkage';
 import { relationsOf, type Model } from '@/lib/kinematics/linkage/solver/model';
 import { aim, shift } from '@/lib/kinematics/linkage/solver/order-bodies';
+import type { Locus } from '@/lib/kinematics/linkage/solver/plan';
 import {
   angleOf,
   lociOf,
@@ -145,7 +146,9 @@ function meet(progress: Progress): boolean {
   const { model, placed, steps } = progress;
   for (const p of model.names.keys()) {
     if (placed.has(p)) continue;
-    const [first, second] = lociOf(progress, p);
+    const loci = lociOf(progress, p);
+    const first = loci[0];
+    const second = loci.find(({ locus }) => first && differ(first.locus, locus));
     if (!first || !second) continue;
     steps.push({
       method: { kind: 'meet', p, first: first.locus, second: second.locus },
@@ -157,4 +160,10 @@ function meet(progress: Progress): boolean {
     return true;
   }
   return false;
+}
+
+/** Whether two loci of one point are not one circle, or one groove, told twice. */
+function differ(first: Locus, second: Locus): boolean {
+  if (first.kind === 'distance' && second.kind === 'distance') return first.q !== second.q;
+  return first !== second;
 }

@@ -312,6 +312,59 @@ describe('a driver told from either end', () => {
 });
 
 describe('places where little is said', () => {
+  it('the slack is what is left of the tightest dyad', () => {
+    const plan = planned(crankSliderLinkage({ crank: 40, rod: 120, offset: 10 }));
+    const near = solveLinkage(plan, [0]);
+    expect(near.outcome === 'closes' && near.slack).toBeCloseTo(120 - 10, 12);
+    const short = planned(crankSliderLinkage({ crank: 40, rod: 30 }));
+    const off = solveLinkage(short, [Math.PI / 2]);
+    expect(off.outcome === 'does-not-close' && off.by).toBeCloseTo(10, 12);
+    const bars = planned(fourBarLinkage({ crank: 40, coupler: 120, rocker: 80, frame: 100 }));
+    const now = solveLinkage(bars, [0]);
+    expect(now.outcome === 'closes' && now.slack).toBeCloseTo(60 - 40, 12);
+  });
+
+  it('a led point counts along x and y, also where a spare bar makes the rank be asked', () => {
+    const points = { A: ORIGIN, B: { x: 30, y: 40 }, C: { x: 90, y: 40 } };
+    const bar = { ends: ['A', 'B'] as const, length: 50 };
+    const led: Linkage = {
+      points,
+      fixed: ['A'],
+      bars: [bar, bar, { ends: ['B', 'C'], length: 60 }],
+      drivers: [{ kind: 'lead', point: 'C' }],
+    };
+    expect(placed(planned(led), [90, 40]).B?.x).toBeCloseTo(30, 10);
+    expect(planLinkage({ ...led, drivers: [{ kind: 'lead', point: 'A' }] })).toEqual({
+      outcome: 'drivers-misplaced',
+      undriven: 2,
+    });
+  });
+
+  it('parallel grooves fail by their distance, crossing ones meet', () => {
+    const crossing = (at: Point, way: Point): Linkage => ({
+      points: {
+        G: ORIGIN,
+        H: { x: 10, y: 0 },
+        I: at,
+        J: { x: at.x + way.x, y: at.y + way.y },
+        S: { x: 3, y: 1 },
+        O: { x: 0, y: 40 },
+        A: { x: 0, y: 50 },
+      },
+      fixed: ['G', 'H', 'I', 'J', 'O'],
+      bars: [{ ends: ['O', 'A'], length: 10 }],
+      slides: [
+        { point: 'S', along: ['G', 'H'] },
+        { point: 'S', along: ['I', 'J'] },
+      ],
+      drivers: [{ kind: 'angle', from: 'O', to: 'A' }],
+    });
+    expect(placed(planned(crossing({ x: 5, y: 5 }, { x: 3, y: 6 })), [0]).S).toEqual({
+      x: 2.5,
+      y: 0,
+    });
+  });
+
   it('a gap narrower than a step still ends the drive', () => {
     // |b − c| is a hair more than d − a: within half a thousandth of a radian of nought it is too long.
     const bars = { crank: 40, coupler: 120, rocker: 60 - 1e-5, frame: 100 };
