@@ -195,6 +195,23 @@ describe('a ring', () => {
     }
   });
 
+  it('has every tooth’s root on the root circle, five places and no more', () => {
+    const ring = { module: 3, teeth: 40, pressureAngle: alpha };
+    const { rootDiameter } = ringProportions(ring);
+    const outline = ringOutline(ring);
+    const [half, pitch] = [rootDiameter / 2, (2 * Math.PI) / 40];
+    const onRoot = outline.filter(({ x, y }) => Math.abs(Math.hypot(x, y) - half) < 1e-9);
+    expect(onRoot.length).toBe(5 * 40);
+    // The first five, round the tooth on +x: alike on both sides, the last in the middle of the space.
+    const [before = 0, left = 0, right = 0, after = 0, middle = 0] = onRoot.map(({ x, y }) =>
+      Math.atan2(y, x),
+    );
+    expect(middle).toBeCloseTo(pitch / 2, 12);
+    expect(before).toBeCloseTo(-after, 12);
+    expect(left).toBeCloseTo(-right, 12);
+    expect(after).toBeCloseTo((right + middle) / 2, 12);
+  });
+
   it('is refused when it has no tooth, or its pinion is as large as itself', () => {
     const ring = { module: 1, teeth: 60, pressureAngle: alpha };
     expect(() => ringPassage(ring, 60)).toThrow('ring teeth over pinion teeth is 0');

@@ -10,11 +10,14 @@ import { cognates, type Cognate } from '@/lib/kinematics/linkage/cognates';
 import { fourBarPosition } from '@/lib/kinematics/linkage/four-bar';
 import { grashofCount } from '@/lib/kinematics/linkage/four-bar-class';
 import { fourBarThroughPairs } from '@/lib/kinematics/linkage/freudenstein';
+import { hartLinkage } from '@/lib/kinematics/linkage/hart';
 import { invertedPosition } from '@/lib/kinematics/linkage/inverted-crank-slider';
+import { tongsPose } from '@/lib/kinematics/linkage/lazy-tongs';
 import { pantographLinkage } from '@/lib/kinematics/linkage/pantograph-linkage';
 import { pantographHoles } from '@/lib/kinematics/linkage/pantograph-making';
 import { leadPantograph } from '@/lib/kinematics/linkage/pantograph-reach';
 import { bestLineOfPath, straightness } from '@/lib/kinematics/linkage/straightness';
+import { kneePress } from '@/lib/kinematics/linkage/toggle';
 import { barTrammel } from '@/lib/kinematics/linkage/trammel-making';
 import { wattPoint } from '@/lib/kinematics/linkage/watt';
 import { outcome } from '@/tests/support/numbers';
@@ -127,6 +130,25 @@ describe('places where a formula has no answer, or two', () => {
     expect(told.C.x).toBeCloseTo(mirrored.x, 9);
     expect(told.C.y).toBeCloseTo(-mirrored.y, 9);
     expect(outcome(pantographHoles(300, 240, 0.5, 'end-to-middle'), 'holes').firstHole).toBe(150);
+  });
+
+  it('tongs are told almost to the quarter turn, and a knee by pins only with friction', () => {
+    const tongs = { stages: 3, bar: 160 };
+    expect(tongsPose(tongs, Math.PI / 2 - 1e-6).rate).toBeCloseTo(3e6, 0);
+    expect(() => tongsPose(tongs, Math.PI / 2)).toThrow('angle is 1.57');
+    const links = { first: 100, second: 100, knee: 10 };
+    expect(kneePress(links, { friction: 0.3 })).toEqual(kneePress(links));
+    expect(kneePress(links, { pin: 8 })).toEqual(kneePress(links));
+    expect(kneePress({ ...links, knee: 100.5 })).toMatchObject({ outcome: 'links-too-short' });
+  });
+
+  it('Hart’s bars fit the pose that he starts in', () => {
+    const { points } = hartLinkage({ long: 150, short: 80, share: 0.5 }, 30);
+    const apart = (a: string, b: string) => distance(points[a] ?? ORIGIN, points[b] ?? ORIGIN);
+    expect(apart('A', 'B')).toBeCloseTo(150, 9);
+    expect(apart('C', 'D')).toBeCloseTo(150, 9);
+    expect(apart('A', 'D')).toBeCloseTo(80, 9);
+    expect(apart('B', 'C')).toBeCloseTo(80, 9);
   });
 
   it('a path that does not close has no straightness and no best line', () => {
