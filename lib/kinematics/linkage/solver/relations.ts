@@ -134,11 +134,9 @@ function writeAngle(
   if (order === 2) {
     const vx = at(velocity, 2 * b) - at(velocity, 2 * a);
     const vy = at(velocity, 2 * b + 1) - at(velocity, 2 * a + 1);
+    // Square to the driven direction nothing is left over, so that its turning adds nothing there.
     right[row] =
-      at(right, row) +
-      2 * speed * (vx * ux + vy * uy) +
-      givenAt(motion.accelerations, drive) * along +
-      speed * speed * off;
+      at(right, row) + 2 * speed * (vx * ux + vy * uy) + givenAt(motion.accelerations, drive) * along;
   }
   return row + 1;
 }
