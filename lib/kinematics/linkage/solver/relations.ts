@@ -136,7 +136,9 @@ function writeAngle(
     const vy = at(velocity, 2 * b + 1) - at(velocity, 2 * a + 1);
     // Square to the driven direction nothing is left over, so that its turning adds nothing there.
     right[row] =
-      at(right, row) + 2 * speed * (vx * ux + vy * uy) + givenAt(motion.accelerations, drive) * along;
+      at(right, row) +
+      2 * speed * (vx * ux + vy * uy) +
+      givenAt(motion.accelerations, drive) * along;
   }
   return row + 1;
 }
