@@ -17,18 +17,20 @@ export interface TrainRatio {
   readonly sense: 'with' | 'against';
 }
 
+/** No whole count of teeth fits: the next one down leaves a gap, the next one up is too large. */
+export interface NoWholeWheel {
+  readonly outcome: 'no-whole-wheel';
+  readonly exact: number;
+  readonly below: number;
+  readonly gap: number;
+  readonly above: number;
+  readonly excess: number;
+}
+
 /** Which single wheel joins two others over a given distance. */
 export type Idler =
   | { readonly outcome: 'fits'; readonly teeth: number; readonly fromFirst: number }
-  /** No whole wheel fills the place; `below` leaves a gap, `above` is too large by `excess`. */
-  | {
-      readonly outcome: 'no-whole-wheel';
-      readonly exact: number;
-      readonly below: number;
-      readonly gap: number;
-      readonly above: number;
-      readonly excess: number;
-    }
+  | NoWholeWheel
   /** The end wheels meet or overlap already, by `overlap`. */
   | { readonly outcome: 'no-room'; readonly overlap: number };
 

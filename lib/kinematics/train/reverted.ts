@@ -1,4 +1,5 @@
 import { rungWithin } from '@/lib/kinematics/train/continued-fraction';
+import type { NoWholeWheel } from '@/lib/kinematics/train/ratio';
 import { fraction, greatestCommonDivisor, multiply } from '@/lib/numeric/fraction';
 import type { Fraction } from '@/lib/numeric/fraction';
 import { requireSize } from '@/lib/numeric/moderate';
@@ -24,14 +25,7 @@ export type ClosingWheel =
       readonly reduction: Fraction;
     }
   /** No whole wheel closes; the nearest counts miss the centres by these lengths. */
-  | {
-      readonly outcome: 'no-whole-wheel';
-      readonly exact: number;
-      readonly below: number;
-      readonly gap: number;
-      readonly above: number;
-      readonly excess: number;
-    }
+  | NoWholeWheel
   /** The third wheel alone is too large, by `overlap`. */
   | { readonly outcome: 'no-room'; readonly overlap: number };
 
