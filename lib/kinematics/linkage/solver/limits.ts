@@ -2,7 +2,7 @@ import { at } from '@/lib/numeric/at';
 import { TURN } from '@/lib/geometry/angle';
 import { runSteps, slackOf } from '@/lib/kinematics/linkage/solver/place';
 import type { Plan } from '@/lib/kinematics/linkage/solver/plan';
-import { driveOf } from '@/lib/kinematics/linkage/solver/drive';
+import { driveOf, requireDrive } from '@/lib/kinematics/linkage/solver/drive';
 import { branchOf } from '@/lib/kinematics/linkage/solver/solver';
 
 /** How far one number of a drive can go from where it stands. */
@@ -31,12 +31,18 @@ const PASSING = 1e-10;
  * Steps are one degree, or a four-hundredth of the size; between them the slack of the tightest
  * dyad is followed to its least, so a narrow gap is not stepped over. An end is good to rounding
  * where the plan needs no Newton step. Outcomes: `free`, `limits`, `does-not-close` at the start.
+ * Throws as `placeLinkage`, and for a place that the drive does not have.
+ * @example driveLimits(planLinkage(crankSliderLinkage({ crank: 40, rod: 30 })).plan, [0]) // → { outcome: 'limits', least: -0.848062, most: 0.848062 }
  */
 export function driveLimits(
   plan: Plan,
   drive: ArrayLike<number> = startDrive(plan),
   { moved = 0, branch = branchOf(plan) }: LimitsOptions = {},
 ): LimitsOutcome {
+  requireDrive('driveLimits', plan, drive);
+  if (!(moved in drive)) {
+    throw new RangeError(`driveLimits: moved is ${moved}; expected a place in the drive`);
+  }
   const numbers = Float64Array.from(drive);
   const start = at(numbers, moved);
   const pose = plan.model.start.slice();

@@ -1,5 +1,6 @@
 import { at, givenAt, nth, wholeAt } from '@/lib/numeric/at';
 import type { Point } from '@/lib/geometry/point';
+import type { Motion } from '@/lib/kinematics/linkage/solver/block';
 import { branchIn } from '@/lib/kinematics/linkage/solver/branch';
 import { requireDrive } from '@/lib/kinematics/linkage/solver/drive';
 import { pivotOf, runRates, runSteps, slackOf } from '@/lib/kinematics/linkage/solver/place';
@@ -90,6 +91,7 @@ export function carryOnLinkage(
  *
  * The drive has a number for each driver, in order; a led point has two. Outcomes: `closes` with
  * the least slack of any dyad, `does-not-close` with the length. Throws as `placeLinkage`.
+ * @example solveLinkage(planLinkage(crankSliderLinkage({ crank: 30, rod: 50 })).plan, [Math.PI / 2]) // → { outcome: 'closes', points: { C: { x: 40, y: 0 } }, slack: 20 }
  */
 export function solveLinkage(
   plan: Plan,
@@ -134,6 +136,7 @@ export type MotionOutcome =
  *
  * Outcomes: `moves`; `dead-centre`, where the drive cannot say how the linkage moves on;
  * `does-not-close`. Throws as `placeLinkage`.
+ * @example moveLinkage(planLinkage(crankSliderLinkage({ crank: 30, rod: 50 })).plan, [Math.PI / 2], [2], [0]).velocities.C // → { x: -60, y: 0 }
  */
 export function moveLinkage(
   plan: Plan,
@@ -158,15 +161,8 @@ export function moveLinkage(
   };
 }
 
-/** A pose with its drive, and room for the rates. */
-export interface RatedPose {
-  readonly pose: Float64Array;
-  readonly drive: ArrayLike<number>;
-  readonly speeds: ArrayLike<number>;
-  readonly accelerations: ArrayLike<number>;
-  readonly velocity: Float64Array;
-  readonly acceleration: Float64Array;
-}
+/** A pose with its drive and the drive's rates, and room for the rates of the points. */
+export type RatedPose = Motion;
 
 /**
  * Write velocity and acceleration of every point of a placed pose into the caller's arrays, without

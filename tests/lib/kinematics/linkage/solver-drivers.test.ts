@@ -312,6 +312,13 @@ describe('a driver told from either end', () => {
 });
 
 describe('places where little is said', () => {
+  it('limits are refused for a drive that is none, and a place it does not have', () => {
+    const plan = planned(crankSliderLinkage({ crank: 40, rod: 30 }));
+    expect(() => driveLimits(plan, [Number.NaN])).toThrow('driveLimits: drive is NaN');
+    expect(() => driveLimits(plan, [0, 1])).toThrow('drive has 2 numbers; expected 1');
+    expect(() => driveLimits(plan, [0], { moved: 1 })).toThrow('driveLimits: moved is 1');
+  });
+
   it('the slack is what is left of the tightest dyad', () => {
     const plan = planned(crankSliderLinkage({ crank: 40, rod: 120, offset: 10 }));
     const near = solveLinkage(plan, [0]);
