@@ -7,6 +7,11 @@ export interface Item {
   readonly exerciseId: string;
 }
 
+/** The items of the assignment of this id (SQL of ours), in their order; null when it has none. */
+export const itemsSql = (id: string) => `(
+  select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
+    order by i.position) from assignment_items i where i.assignment_id = ${id})`;
+
 /** What is set: lessons, each as all of its exercises, and single exercises beside them. */
 export interface Chosen {
   readonly lessons: readonly string[];

@@ -1,6 +1,7 @@
 import 'server-only';
 import type { Transaction } from 'sequelize';
 import { row, rows } from '@/lib/db/query';
+import { itemsSql, type Item } from './assignment-items';
 import { workTitles } from './lesson-titles';
 import { queueLetters } from './letters';
 
@@ -43,14 +44,13 @@ interface AssignmentRow {
   readonly setBy: string;
   readonly note: string;
   readonly opensAt: Date;
-  readonly items: readonly { readonly lessonId: string | null; readonly exerciseId: string }[];
+  readonly items: readonly Item[];
 }
 
 const assignmentSql = `
   select g.name as "className", g.time_zone as "timeZone", p.name as "setBy", a.note,
     a.opens_at as "opensAt",
-    (select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
-      order by i.position) from assignment_items i where i.assignment_id = a.id) as items
+    ${itemsSql('a.id')} as items
   from assignments a
   join class_groups g on g.id = a.class_id and g.archived_at is null
   join people p on p.id = a.set_by

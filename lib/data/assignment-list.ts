@@ -1,7 +1,7 @@
 import 'server-only';
 import { row, rows } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
-import { chosenOf, type Chosen, type Item } from './assignment-items';
+import { chosenOf, itemsSql, type Chosen, type Item } from './assignment-items';
 import { isId, staffOfClass, staffValues } from './class-right';
 import { workTitles } from './lesson-titles';
 
@@ -108,8 +108,7 @@ const rules = `
   a.id as "assignmentId", a.opens_at as "opensAt", a.due_at as "dueAt", a.note, a.counting,
   a.attempts_allowed as "attemptsAllowed", a.late_work as "lateWork", setter.name as "setBy",
   a.withdrawn_at is not null as withdrawn,
-  (select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
-    order by i.position) from assignment_items i where i.assignment_id = a.id) as items`;
+  ${itemsSql('a.id')} as items`;
 
 /** The learners of the class now for whom an assignment is. */
 const concerned = `

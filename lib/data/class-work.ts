@@ -4,7 +4,7 @@ import { row, rows, transact } from '@/lib/db/query';
 import type { Given } from '@/lib/marking/definition';
 import type { Viewer } from '@/lib/policy/viewer';
 import type { AttemptView, PegView } from '@/lib/schemas/round';
-import type { Item } from './assignment-items';
+import { itemsSql, type Item } from './assignment-items';
 import { recordAudit } from './audit';
 import { isId, staffOfClass, staffValues } from './class-right';
 import {
@@ -191,9 +191,7 @@ const learnerSql = `
     coalesce((
       select json_agg(json_build_object('assignmentId', s.id,
         'dueAt', greatest(s.due_at, x.due_at), 'comments', ${commentsOnWork},
-        'items', (
-          select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
-            order by i.position) from assignment_items i where i.assignment_id = s.id))
+        'items', ${itemsSql('s.id')})
         order by s.due_at)
       from assignments s
       left join extensions x on x.assignment_id = s.id and x.learner_id = l.id

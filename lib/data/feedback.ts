@@ -3,7 +3,7 @@ import type { Transaction } from 'sequelize';
 import { now as presentTime } from '@/lib/clock';
 import { row, rows, transact } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
-import type { Item } from './assignment-items';
+import { itemsSql, type Item } from './assignment-items';
 import { recordAudit } from './audit';
 import { isId, staffOfOpenClass, staffValues } from './class-right';
 import { exerciseTitle, workTitles } from './lesson-titles';
@@ -209,9 +209,7 @@ interface FeedbackRow extends Omit<Feedback, 'at' | 'title'> {
 const feedbackSql = `
   select told.kind, told.id, g.name as "className", author.name as "authorName",
     a.exercise_id as "exerciseId", a.verdict as marked, told.verdict, told.body, told.at, told.unread,
-    (select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
-      order by i.position) from assignment_items i
-      where i.assignment_id = told.assignment_id) as items
+    ${itemsSql('told.assignment_id')} as items
   from (
     select 'comment' as kind, c.id, c.class_id, c.author_id, c.attempt_id, c.assignment_id,
       null as verdict, c.body,

@@ -1,6 +1,7 @@
 import 'server-only';
 import { exercises, lessons } from '@/content/exercises/registry';
 import { lessonPath, listLessons } from '@/content/lessons/front-matter';
+import type { Item } from './assignment-items';
 
 /** A lesson as it is named in lists. */
 export interface LessonName {
@@ -30,9 +31,7 @@ export function lessonOfExercise(exerciseId: string): string | null {
 }
 
 /** What is set, as it is read: each lesson once, and the exercises that were set by themselves. */
-export function workTitles(
-  items: readonly { readonly lessonId: string | null; readonly exerciseId: string }[],
-): string[] {
+export function workTitles(items: readonly Item[]): string[] {
   const titles = items.map(({ lessonId, exerciseId }) =>
     lessonId === null ? exerciseTitle(exerciseId) : lessonName(lessonId).title,
   );

@@ -2,6 +2,7 @@ import 'server-only';
 import type { DueEvent } from '@/lib/calendar/write-calendar';
 import { row, rows } from '@/lib/db/query';
 import { siteEnvironment } from '@/lib/env';
+import { itemsSql, type Item } from '../assignment-items';
 import { workTitles } from '../lesson-titles';
 import type { FeedProof } from './proof';
 import { hashSecret } from './secret';
@@ -46,7 +47,7 @@ interface DueRow {
   readonly cancelled: boolean;
   readonly note: string;
   readonly teaches: boolean;
-  readonly items: readonly { readonly lessonId: string | null; readonly exerciseId: string }[];
+  readonly items: readonly Item[];
 }
 
 /** Extensions that were given and taken back count as changes; the audit log forgets neither. */
@@ -66,9 +67,7 @@ const dueSql = `
     d.due as "dueAt", d.version + x.changes as sequence,
     date_trunc('second', greatest(d.updated_at, x.changed_at)) as "changedAt",
     d.withdrawn_at is not null as cancelled, d.note, d.teaches,
-    coalesce((
-      select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
-        order by i.position) from assignment_items i where i.assignment_id = d.id), '[]') as items
+    coalesce(${itemsSql('d.id')}, '[]') as items
   from due d
   cross join lateral (
     select count(*)::int as changes, max(t.at) as changed_at from audit_entries t

@@ -2,6 +2,7 @@ import 'server-only';
 import type { Transaction } from 'sequelize';
 import { row, rows, transact } from '@/lib/db/query';
 import type { LetterOf } from '@/lib/mail/letter';
+import { itemsSql, type Item } from '../assignment-items';
 import { exerciseTitle, workTitles } from '../lesson-titles';
 import { queueLetters } from '../letters';
 import type { JobProof } from './proof';
@@ -113,7 +114,7 @@ interface WeekRow {
     readonly times: number;
   }[];
   readonly due: readonly {
-    readonly items: readonly { readonly lessonId: string | null; readonly exerciseId: string }[];
+    readonly items: readonly Item[];
     readonly dueAt: string;
   }[];
 }
@@ -149,9 +150,7 @@ const weekSql = `
     where part ? 'slip' and part ? 'message' group by 1, 2
     order by times desc, 1, 2 limit 5),
   due as (
-    select a.due_at as "dueAt", (
-      select json_agg(json_build_object('lessonId', i.lesson_id, 'exerciseId', i.exercise_id)
-        order by i.position) from assignment_items i where i.assignment_id = a.id) as items
+    select a.due_at as "dueAt", ${itemsSql('a.id')} as items
     from assignments a
     where a.class_id = $1 and a.withdrawn_at is null
       and a.due_at >= $3 and a.due_at < $3::timestamptz + interval '14 days'
