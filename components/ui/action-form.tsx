@@ -2,8 +2,8 @@
 
 import { useActionState, useEffect, useRef, type ReactNode } from 'react';
 import { SelectField, TextAreaField, TextField } from './field';
+import { FormOutcome } from './form-outcome';
 import { idle, type FormState } from './form-state';
-import { Notice } from './notice';
 import { OneTimeLink } from './one-time-link';
 import { SubmitButton } from './submit-button';
 import { useFormDraft } from './use-form-draft';
@@ -82,15 +82,9 @@ export function ActionForm(props: ActionFormProps) {
   }, [state]);
   return (
     <form ref={form} action={send} onSubmit={keepDraft} noValidate className="max-w-md">
-      {state.outcome === 'refused' && state.message ? (
-        <Notice tone="wrong" title={state.message} role="alert" />
-      ) : null}
-      <div role="status">
-        {state.outcome === 'done' && state.message ? (
-          <Notice tone="right" title={state.message} />
-        ) : null}
+      <FormOutcome state={state}>
         {state.link ? <OneTimeLink link={state.link} says={state.linkSays} /> : null}
-      </div>
+      </FormOutcome>
       {fields.map((field) => (
         <Field key={field.name} field={field} state={state} prefix={prefix} />
       ))}

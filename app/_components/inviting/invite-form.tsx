@@ -2,7 +2,7 @@
 
 import { useActionState, useRef } from 'react';
 import { SelectField, TextAreaField, TextField } from '@/components/ui/field';
-import { Notice } from '@/components/ui/notice';
+import { FormOutcome } from '@/components/ui/form-outcome';
 import { SubmitButton } from '@/components/ui/submit-button';
 import { useFormDraft } from '@/components/ui/use-form-draft';
 import { inviteAll, lookThrough, type InviteState } from './actions';
@@ -24,14 +24,7 @@ export function InviteForm({ classId, mayInviteInstructors }: InviteFormProps) {
   const role = values?.role ?? 'learner';
   return (
     <form ref={form} action={send} onSubmit={keepDraft} noValidate>
-      {state.outcome === 'refused' && state.message ? (
-        <Notice tone="wrong" title={state.message} role="alert" />
-      ) : null}
-      <div role="status">
-        {state.outcome === 'done' && state.message ? (
-          <Notice tone="right" title={state.message} />
-        ) : null}
-      </div>
+      <FormOutcome state={state} />
       {reading ? (
         <LookedThrough reading={reading} role={role} />
       ) : (
