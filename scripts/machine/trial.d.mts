@@ -1,11 +1,24 @@
 import type { Server } from './postgres.mjs';
 import type { RunningSite, startSite } from './site.mjs';
 
+export interface TrialDatabase {
+  readonly database: { readonly app: string; readonly owner: string; readonly superuser: string };
+  readonly server: () => Server;
+  readonly kill: () => Promise<void>;
+  readonly start: () => Promise<void>;
+  readonly close: () => Promise<void>;
+}
+
+export function makeTrialDatabase(
+  name: string,
+  settings?: Record<string, string>,
+): Promise<TrialDatabase>;
+
 export interface Trial {
   readonly address: string;
   readonly ownAddress: string;
   readonly env: Record<string, string>;
-  readonly database: { readonly app: string; readonly owner: string; readonly superuser: string };
+  readonly database: TrialDatabase['database'];
   readonly distDir: string;
   readonly password: string;
   readonly server: () => Server;

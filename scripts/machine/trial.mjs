@@ -17,27 +17,48 @@ import { freeAddress, siteEnvironment, startSite, untilReady } from './site.mjs'
 
 const distDir = '.next-test';
 
+/** An empty database with its roles, on a cluster of its own in a folder that `close` takes away. */
+export async function makeTrialDatabase(name, settings = {}) {
+  const bin = requireServer();
+  const folder = clusterFolder(path.join(root, '.hornbeam-test', `${name}-${process.pid}`));
+  const password = randomUUID();
+  const port = await freePort();
+  makeCluster(bin, folder, password);
+  const start = () =>
+    startServer(bin, folder, { port, password, settings: { max_connections: '200', ...settings } });
+  let server = await start();
+  makeRoles(server, { ownerPassword: password, appPassword: password });
+  makeDatabase(server, 'hornbeam');
+  return {
+    database: {
+      app: databaseUrl(server, 'hornbeam_app', password, 'hornbeam'),
+      owner: databaseUrl(server, 'hornbeam_owner', password, 'hornbeam'),
+      superuser: databaseUrl(server, 'postgres', password, 'hornbeam'),
+    },
+    server: () => server,
+    /** As a machine that loses its power would, apart from its disk. */
+    kill: async () => {
+      server.child.kill('SIGKILL');
+      await server.ended;
+    },
+    start: async () => {
+      server = await start();
+    },
+    close: async () => {
+      await stopServer(server);
+      rmSync(folder, { recursive: true, force: true });
+    },
+  };
+}
+
 /**
  * A production build, with the demo data if wanted, on a cluster of its own that writes to the disk as a real one
  * does: for measuring, and for pulling its plug. `address` is where people reach it, by default that
  * of the first web server.
  */
 export async function makeTrial(name, { settings = {}, address, mailUrl, demo = true } = {}) {
-  const bin = requireServer();
-  const folder = clusterFolder(path.join(root, '.hornbeam-test', `${name}-${process.pid}`));
-  const password = randomUUID();
-  const port = await freePort();
-  makeCluster(bin, folder, password);
-  const startDatabase = () =>
-    startServer(bin, folder, { port, password, settings: { max_connections: '200', ...settings } });
-  let server = await startDatabase();
-  makeRoles(server, { ownerPassword: password, appPassword: password });
-  makeDatabase(server, 'hornbeam');
-  const database = {
-    app: databaseUrl(server, 'hornbeam_app', password, 'hornbeam'),
-    owner: databaseUrl(server, 'hornbeam_owner', password, 'hornbeam'),
-    superuser: databaseUrl(server, 'postgres', password, 'hornbeam'),
-  };
+  const cluster = await makeTrialDatabase(name, settings);
+  const { database } = cluster;
   const ownAddress = await freeAddress();
   const env = siteEnvironment({ database, address: address ?? ownAddress, distDir, mailUrl });
   buildIfChanged({ env, distDir });
@@ -46,8 +67,7 @@ export async function makeTrial(name, { settings = {}, address, mailUrl, demo = 
   const sites = new Set();
   const close = async () => {
     await Promise.all([...sites].map((site) => site.stop()));
-    await stopServer(server);
-    rmSync(folder, { recursive: true, force: true });
+    await cluster.close();
   };
   for (const signal of ['SIGINT', 'SIGTERM']) {
     process.once(signal, () => void close().finally(() => process.exit(1)));
@@ -60,7 +80,7 @@ export async function makeTrial(name, { settings = {}, address, mailUrl, demo = 
     distDir,
     /** Of every person of the demo data. */
     password: /password "([^"]+)"/.exec(told)?.[1],
-    server: () => server,
+    server: cluster.server,
     /** Starts one more web server and waits until it answers. */
     startSite: async (at = ownAddress, more = {}) => {
       const site = startSite({ address: at, env, ...more });
@@ -69,14 +89,8 @@ export async function makeTrial(name, { settings = {}, address, mailUrl, demo = 
       await untilReady(site);
       return site;
     },
-    /** As a machine that loses its power would, apart from its disk. */
-    killDatabase: async () => {
-      server.child.kill('SIGKILL');
-      await server.ended;
-    },
-    startDatabase: async () => {
-      server = await startDatabase();
-    },
+    killDatabase: cluster.kill,
+    startDatabase: cluster.start,
     close,
   };
 }

@@ -1,22 +1,11 @@
-import { rmSync } from 'node:fs';
-import path from 'node:path';
 import pg from 'pg';
 import { database, closeDatabase } from '@/lib/db/connection';
 import { rows } from '@/lib/db/query';
 import type { Viewer } from '@/lib/policy/viewer';
-import { freePort, root, runEntry } from '../machine/node.mjs';
-import {
-  clusterFolder,
-  databaseUrl,
-  makeCluster,
-  makeDatabase,
-  makeRoles,
-  requireServer,
-  startServer,
-  stopServer,
-} from '../machine/postgres.mjs';
+import { runEntry } from '../machine/node.mjs';
 import { say } from '../machine/say.mjs';
 import { siteEnvironment } from '../machine/site.mjs';
+import { makeTrialDatabase } from '../machine/trial.mjs';
 import {
   bigClass,
   exerciseCount,
@@ -32,15 +21,12 @@ import {
  */
 const most = 50;
 const turns = 20;
-const password = 'only for this proof';
-const bin = requireServer();
-const folder = clusterFolder(path.join(root, '.hornbeam-test', `scale-${process.pid}`));
-makeCluster(bin, folder, password);
-const server = await startServer(bin, folder, {
-  port: await freePort(),
-  password,
-  // Nothing of it is kept: it may be made without waiting for the disk.
-  settings: { shared_buffers: '1GB', max_wal_size: '8GB', fsync: 'off', autovacuum: 'off' },
+// Nothing of it is kept: it may be made without waiting for the disk.
+const trial = await makeTrialDatabase('scale', {
+  shared_buffers: '1GB',
+  max_wal_size: '8GB',
+  fsync: 'off',
+  autovacuum: 'off',
 });
 const failures: string[] = [];
 
@@ -152,17 +138,12 @@ async function measure(): Promise<void> {
 }
 
 try {
-  makeRoles(server, { ownerPassword: password, appPassword: password });
-  makeDatabase(server, 'hornbeam');
-  const urls = {
-    app: databaseUrl(server, 'hornbeam_app', password, 'hornbeam'),
-    owner: databaseUrl(server, 'hornbeam_owner', password, 'hornbeam'),
-  };
+  const { database: urls } = trial;
   const env = siteEnvironment({ database: urls, address: 'http://127.0.0.1:1', distDir: '.next' });
   runEntry('scripts/migrate.ts', { env, quiet: true });
   Object.assign(process.env, env);
   const begun = Date.now();
-  const client = new pg.Client(databaseUrl(server, 'postgres', password, 'hornbeam'));
+  const client = new pg.Client(urls.superuser);
   await client.connect();
   await makeManyLearners(client);
   await client.end();
@@ -172,7 +153,6 @@ try {
   await measure();
 } finally {
   await closeDatabase();
-  await stopServer(server);
-  rmSync(folder, { recursive: true, force: true });
+  await trial.close();
 }
 if (failures.length > 0) throw new Error(`Not proved: ${failures.join('; ')}`);
